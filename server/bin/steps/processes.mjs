@@ -1,0 +1,50 @@
+import { spawn } from 'node:child_process';
+import { readFileSync } from 'node:fs';
+
+/** A step that cannot go on, in words meant for the person at the terminal. */
+export class StepFailed extends Error {}
+
+/**
+ * Runs a program to its end and gives back what it wrote.
+ *
+ * @param options - `input` goes to its standard input; `detach` gives it no pipes at all,
+ *   for programs that leave a daemon behind which would hold them open.
+ */
+export function run(command, args, options = {}) {
+  const { input, detach = false, onStart, ...spawnOptions } = options;
+  return new Promise((resolve) => {
+    const stdio = detach ? 'ignore' : [input === undefined ? 'ignore' : 'pipe', 'pipe', 'pipe'];
+    const child = spawn(command, args, { ...spawnOptions, stdio });
+    onStart?.(child);
+    let stdout = '';
+    let stderr = '';
+    child.stdout?.setEncoding('utf8').on('data', (text) => (stdout += text));
+    child.stderr?.setEncoding('utf8').on('data', (text) => (stderr += text));
+    child.on('error', (error) => resolve({ code: 127, stdout, stderr: error.message }));
+    child.on('close', (code, signal) => resolve({ code: code ?? 1, signal, stdout, stderr }));
+    if (input !== undefined) child.stdin.on('error', () => {}).end(input);
+  });
+}
+
+/** Runs a program and fails with its own words when it does. */
+export async function runOrFail(command, args, options = {}) {
+  const result = await run(command, args, options);
+  if (result.code === 0) return result;
+  const said = `${result.stdout}\n${result.stderr}`.trim();
+  const name = [command.split('/').at(-1), ...args.slice(0, 2)].join(' ');
+  throw new StepFailed(`${name} failed (exit ${result.code}).${said ? `\n${said}` : ''}`);
+}
+
+/** Whether a process of this number lives and its command line names the given text. */
+export function isRunning(pid, commandLineText) {
+  if (!Number.isInteger(pid) || pid <= 0) return false;
+  try {
+    return readFileSync(`/proc/${pid}/cmdline`, 'utf8')
+      .replaceAll('\0', ' ')
+      .includes(commandLineText);
+  } catch {
+    return false;
+  }
+}
+
+export const pause = (milliseconds) => new Promise((resolve) => setTimeout(resolve, milliseconds));
