@@ -1,0 +1,26 @@
+import { Module, type DynamicModule } from '@nestjs/common';
+import { ClockModule } from './clock/clock.ts';
+import { ConfigModule } from './config/config.module.ts';
+import type { Config } from './config/config.schema.ts';
+import { DatabaseModule } from './database/database.module.ts';
+import { HealthModule } from './health/health.module.ts';
+import { JobsModule } from './jobs/jobs.module.ts';
+import { SessionsModule } from './sessions/sessions.module.ts';
+
+/** The list of features, nothing else. */
+@Module({})
+export class AppModule {
+  static with(config: Config): DynamicModule {
+    return {
+      module: AppModule,
+      imports: [
+        ConfigModule.with(config),
+        ClockModule,
+        DatabaseModule,
+        JobsModule,
+        SessionsModule,
+        HealthModule,
+      ],
+    };
+  }
+}

@@ -1,0 +1,13 @@
+/** Every problem code with its status and title. Grouped by feature, in alphabetical order. */
+export const catalogue: Record<string, { status: number; title: string }> = {
+  // common
+  'cross-site-request': { status: 403, title: 'Request from another site' },
+  'invalid-request': { status: 422, title: 'The request is not in order' },
+  'not-allowed': { status: 403, title: 'Not allowed' },
+  'not-found': { status: 404, title: 'Not found' },
+  'not-signed-in': { status: 401, title: 'Not signed in' },
+  'payload-too-large': { status: 413, title: 'Too large' },
+  'too-many-attempts': { status: 429, title: 'Too many tries' },
+  'second-factor-needed': { status: 403, title: 'Second factor needed' },
+  unavailable: { status: 503, title: 'Not available just now' },
+};

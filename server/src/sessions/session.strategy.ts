@@ -1,0 +1,31 @@
+import { Inject, Injectable } from '@nestjs/common';
+import { PassportStrategy } from '@nestjs/passport';
+import type { FastifyRequest } from 'fastify';
+import { Strategy } from 'passport-jwt';
+import type { SignedInAccount } from '../accounts/account.ts';
+import { CONFIG } from '../config/config.module.ts';
+import type { Config } from '../config/config.schema.ts';
+import type { SessionToken } from './session.ts';
+import { sessionCookie, SessionsService } from './sessions.service.ts';
+
+export const TOKEN_AUDIENCE = 'ferrule-session';
+
+@Injectable()
+export class SessionStrategy extends PassportStrategy(Strategy, 'session') {
+  constructor(
+    @Inject(CONFIG) config: Config,
+    private readonly sessions: SessionsService,
+  ) {
+    const { name } = sessionCookie(config);
+    super({
+      jwtFromRequest: (request: unknown) => (request as FastifyRequest).cookies[name] ?? null,
+      secretOrKey: config.SESSION_SECRET,
+      algorithms: ['HS256'],
+      audience: TOKEN_AUDIENCE,
+    });
+  }
+
+  async validate(token: SessionToken): Promise<SignedInAccount | false> {
+    return (await this.sessions.resolve(token)) ?? false;
+  }
+}

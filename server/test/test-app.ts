@@ -1,0 +1,82 @@
+import { Test } from '@nestjs/testing';
+import type { NestFastifyApplication } from '@nestjs/platform-fastify';
+import { mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { AppModule } from '../src/app.module.ts';
+import { createAdapter, setUpApp } from '../src/app.setup.ts';
+import { Clock } from '../src/clock/clock.ts';
+import { readConfig } from '../src/config/config.schema.ts';
+import { JobsService } from '../src/jobs/jobs.service.ts';
+import { createTestDatabase, type TestDatabase } from './test-database.ts';
+
+/** A clock that stands where it is put. */
+export class SetClock extends Clock {
+  private at = new Date('2026-12-01T10:00:00Z');
+
+  override now(): Date {
+    return new Date(this.at);
+  }
+
+  set(instant: string | Date): void {
+    this.at = new Date(instant);
+  }
+
+  advance(minutes: number): void {
+    this.at = new Date(this.at.getTime() + minutes * 60_000);
+  }
+}
+
+export interface TestApp {
+  readonly app: NestFastifyApplication;
+  readonly clock: SetClock;
+  readonly database: TestDatabase;
+  /** Runs every waiting job, and those they enqueue. */
+  runJobs(): Promise<number>;
+  close(): Promise<void>;
+}
+
+export const PUBLIC_URL = 'http://127.0.0.1:4780';
+
+function testConfig(webUrl: string, keysFolder: string) {
+  return readConfig({
+    NODE_ENV: 'test',
+    DEMONSTRATION: '1',
+    PUBLIC_URL,
+    DATABASE_URL: webUrl,
+    DATABASE_POOL: '6',
+    SESSION_SECRET: 'a1'.repeat(32),
+    DRAW_SECRET: 'b2'.repeat(32),
+    SECOND_FACTOR_KEY: 'c3'.repeat(32),
+    SMTP_URL: 'smtp://127.0.0.1:1',
+    MAIL_FROM: 'Harrow Quay <office@harrow-quay.example>',
+    KEYS_FOLDER: keysFolder,
+  });
+}
+
+/** The whole server on a database of its own; only the clock is replaced. */
+export async function createTestApp(): Promise<TestApp> {
+  const database = await createTestDatabase();
+  const keysFolder = mkdtempSync(join(tmpdir(), 'ferrule-keys-'));
+  const clock = new SetClock();
+  const config = testConfig(database.webUrl, keysFolder);
+  const testing = await Test.createTestingModule({ imports: [AppModule.with(config)] })
+    .overrideProvider(Clock)
+    .useValue(clock)
+    .compile();
+  const app = testing.createNestApplication<NestFastifyApplication>(createAdapter(config));
+  await setUpApp(app, config);
+  await app.init();
+  await app.getHttpAdapter().getInstance().ready();
+  return {
+    app,
+    clock,
+    database,
+    runJobs: () => app.get(JobsService).runWaiting(),
+    close: async () => {
+      await app.close();
+      await database.drop();
+      rmSync(keysFolder, { recursive: true, force: true });
+    },
+  };
+}
