@@ -25,6 +25,7 @@ export interface Caller {
 function caller(app: NestFastifyApplication, sessionId: string | null, cookie: string): Caller {
   return {
     sessionId,
+    // eslint-disable-next-line max-params -- reads like a request line
     call: async (method, path, body, headers = {}) => {
       const response = await app.inject({
         method,

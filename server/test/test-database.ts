@@ -18,7 +18,7 @@ function given(name: string): string {
   return value;
 }
 
-export function onDatabase(url: string, database: string): string {
+function onDatabase(url: string, database: string): string {
   const address = new URL(url);
   address.pathname = `/${database}`;
   return address.href;

@@ -47,8 +47,20 @@ function statusOf(error: unknown): number {
     : 500;
 }
 
+/** What Nest or Fastify refused before any of our own code saw it. */
+function frameworkProblem(error: unknown, instance: string): Problem {
+  const status = statusOf(error);
+  const code = byStatus[status];
+  const detail = error instanceof Error ? error.message : 'Not understood.';
+  if (code === undefined && status >= 500) return internalProblem(instance);
+  if (code === 'not-found') return toProblem(new NotFound(), instance);
+  if (code === 'too-many-attempts') return toProblem(new TooManyAttempts(60), instance);
+  if (code !== undefined && code !== 'invalid-request') return problemOf(code, instance, detail);
+  return toProblem(new InvalidRequest([{ pointer: '#', detail }]), instance);
+}
+
 /** Turns anything thrown into the problem document a person or program can act on. */
-export function toProblem(error: unknown, instance: string): Problem {
+function toProblem(error: unknown, instance: string): Problem {
   if (error instanceof DomainError) {
     return { ...problemOf(error.code, instance, error.message), ...error.extensions };
   }
@@ -59,19 +71,7 @@ export function toProblem(error: unknown, instance: string): Problem {
       'The records cannot be reached. Try again in a moment.',
     );
   }
-  const status = statusOf(error);
-  const code = byStatus[status];
-  if (status >= 500 && code === undefined) return internalProblem(instance);
-  if (code === 'not-found') return toProblem(new NotFound(), instance);
-  if (code === 'too-many-attempts') return toProblem(new TooManyAttempts(60), instance);
-  const detail = error instanceof Error ? error.message : undefined;
-  if (code === 'invalid-request' || code === undefined) {
-    return toProblem(
-      new InvalidRequest([{ pointer: '#', detail: detail ?? 'Not understood.' }]),
-      instance,
-    );
-  }
-  return problemOf(code, instance, detail);
+  return frameworkProblem(error, instance);
 }
 
 export function sendProblem(error: unknown, request: FastifyRequest, reply: FastifyReply): void {

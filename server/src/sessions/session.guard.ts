@@ -26,7 +26,7 @@ export class SessionGuard extends AuthGuard('session') {
   }
 
   override handleRequest<T>(error: unknown, account: T): T {
-    if (error) throw error;
+    if (error instanceof Error) throw error;
     return account;
   }
 
