@@ -78,7 +78,7 @@ describe("the server's role", () => {
   ])('cannot change or remove rows of %s', async (table) => {
     await expect(web.query(`DELETE FROM ${table}`)).rejects.toThrow(refused);
     const { rows } = await owner.query<{ column_name: string }>(
-      'SELECT column_name FROM information_schema.columns WHERE table_name = $1 AND is_identity = 'NO' LIMIT 1',
+      "SELECT column_name FROM information_schema.columns WHERE table_name = $1 AND is_identity = 'NO'",
       [table],
     );
     const column = rows[0]?.column_name ?? '';
