@@ -1,4 +1,5 @@
 import { Module, type DynamicModule } from '@nestjs/common';
+import { CertificatesModule } from './certificates/certificates.module.ts';
 import { ClockModule } from './clock/clock.ts';
 import { ConfigModule } from './config/config.module.ts';
 import type { Config } from './config/config.schema.ts';
@@ -18,6 +19,7 @@ export class AppModule {
         ClockModule,
         DatabaseModule,
         JobsModule,
+        CertificatesModule,
         SessionsModule,
         HealthModule,
       ],
