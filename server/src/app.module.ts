@@ -1,12 +1,19 @@
 import { Module, type DynamicModule } from '@nestjs/common';
 import { CertificatesModule } from './certificates/certificates.module.ts';
+import { ClassViewModule } from './classes/class-view.module.ts';
+import { ClassesModule } from './classes/classes.module.ts';
 import { ClockModule } from './clock/clock.ts';
 import { ConfigModule } from './config/config.module.ts';
 import type { Config } from './config/config.schema.ts';
+import { CoursesModule } from './courses/courses.module.ts';
 import { DatabaseModule } from './database/database.module.ts';
 import { HealthModule } from './health/health.module.ts';
 import { JobsModule } from './jobs/jobs.module.ts';
+import { LessonsModule } from './lessons/lessons.module.ts';
+import { PracticeModule } from './practice/practice.module.ts';
 import { SessionsModule } from './sessions/sessions.module.ts';
+import { SittingsModule } from './sittings/sittings.module.ts';
+import { WorksheetsModule } from './worksheets/worksheets.module.ts';
 
 /** The list of features, nothing else. */
 @Module({})
@@ -21,6 +28,13 @@ export class AppModule {
         JobsModule,
         CertificatesModule,
         SessionsModule,
+        SittingsModule,
+        ClassesModule,
+        ClassViewModule,
+        CoursesModule,
+        LessonsModule,
+        PracticeModule,
+        WorksheetsModule,
         HealthModule,
       ],
     };

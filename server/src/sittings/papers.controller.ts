@@ -1,0 +1,61 @@
+import { Body, Controller, Get, Param, Post, Query } from '@nestjs/common';
+import type { SignedInAccount } from '../accounts/account.ts';
+import { Allow } from '../http/allow.decorator.ts';
+import { CurrentAccount } from '../http/current-account.decorator.ts';
+import { Responds } from '../http/responds.decorator.ts';
+import {
+  lookSchema,
+  openedItemsSchema,
+  paperSlugSchema,
+  paperViewSchema,
+  resultsPageSchema,
+  resultsQuerySchema,
+  sittingIdSchema,
+  type Look,
+  type OpenedItems,
+  type PaperView,
+  type ResultsPage,
+  type ResultsQuery,
+} from './papers.schemas.ts';
+import { ResultsService } from './results.service.ts';
+import { StandingService } from './standing.service.ts';
+
+/** What a paper asks for, and what came of it. */
+@Controller('api')
+export class PapersController {
+  constructor(
+    private readonly standings: StandingService,
+    private readonly results: ResultsService,
+  ) {}
+
+  @Get('papers/:slug')
+  @Allow('signed-in')
+  @Responds(200, paperViewSchema)
+  paper(
+    @CurrentAccount() account: SignedInAccount,
+    @Param('slug', { schema: paperSlugSchema }) slug: string,
+  ): Promise<PaperView> {
+    return this.standings.paper(account.id, slug);
+  }
+
+  @Get('papers/:slug/results')
+  @Allow('certification-manager')
+  @Responds(200, resultsPageSchema)
+  list(
+    @Param('slug', { schema: paperSlugSchema }) slug: string,
+    @Query({ schema: resultsQuerySchema }) query: ResultsQuery,
+  ): Promise<ResultsPage> {
+    return this.results.list(slug, query.cursor ?? null);
+  }
+
+  @Post('sittings/:id/looks')
+  @Allow('certification-manager')
+  @Responds(200, openedItemsSchema)
+  look(
+    @CurrentAccount() account: SignedInAccount,
+    @Param('id', { schema: sittingIdSchema }) id: string,
+    @Body({ schema: lookSchema }) input: Look,
+  ): Promise<OpenedItems> {
+    return this.results.openItems(account.id, id, input.reason);
+  }
+}
