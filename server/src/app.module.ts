@@ -2,6 +2,8 @@ import { Module, type DynamicModule } from '@nestjs/common';
 import { CertificatesModule } from './certificates/certificates.module.ts';
 import { ClassViewModule } from './classes/class-view.module.ts';
 import { ClassesModule } from './classes/classes.module.ts';
+import { AccountsModule } from './accounts/accounts.module.ts';
+import { AuditModule } from './audit/audit.module.ts';
 import { ClockModule } from './clock/clock.ts';
 import { ConfigModule } from './config/config.module.ts';
 import type { Config } from './config/config.schema.ts';
@@ -11,6 +13,9 @@ import { HealthModule } from './health/health.module.ts';
 import { JobsModule } from './jobs/jobs.module.ts';
 import { LessonsModule } from './lessons/lessons.module.ts';
 import { PracticeModule } from './practice/practice.module.ts';
+import { MailModule } from './mail/mail.module.ts';
+import { PeopleModule } from './people/people.module.ts';
+import { SecondFactorsModule } from './second-factors/second-factors.module.ts';
 import { SessionsModule } from './sessions/sessions.module.ts';
 import { SittingsModule } from './sittings/sittings.module.ts';
 import { WorksheetsModule } from './worksheets/worksheets.module.ts';
@@ -27,7 +32,12 @@ export class AppModule {
         DatabaseModule,
         JobsModule,
         CertificatesModule,
+        AuditModule,
+        MailModule,
         SessionsModule,
+        AccountsModule,
+        SecondFactorsModule,
+        PeopleModule,
         SittingsModule,
         ClassesModule,
         ClassViewModule,

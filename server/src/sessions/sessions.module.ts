@@ -7,6 +7,9 @@ import { CONFIG } from '../config/config.module.ts';
 import type { Config } from '../config/config.schema.ts';
 import { SessionModel } from './models/session.model.ts';
 import { SessionGuard } from './session.guard.ts';
+import { SessionCookies } from './session-cookies.ts';
+import { SessionsController } from './sessions.controller.ts';
+import { SignInService } from './sign-in.service.ts';
 import { SessionStrategy, TOKEN_AUDIENCE } from './session.strategy.ts';
 import { SessionsRepository } from './sessions.repository.ts';
 import { SessionsService } from './sessions.service.ts';
@@ -23,7 +26,10 @@ import { SessionsService } from './sessions.service.ts';
     }),
     SequelizeModule.forFeature([SessionModel]),
   ],
+  controllers: [SessionsController],
   providers: [
+    SessionCookies,
+    SignInService,
     SessionsService,
     SessionsRepository,
     SessionStrategy,

@@ -6,6 +6,7 @@ import { Clock } from '../clock/clock.ts';
 import { CONFIG } from '../config/config.module.ts';
 import type { Config } from '../config/config.schema.ts';
 import { ABSOLUTE_MS, IDLE_MS, TOUCH_MS, type SessionToken } from './session.ts';
+import type { OwnSessions, SessionView } from './sessions.schemas.ts';
 import { SessionsRepository } from './sessions.repository.ts';
 
 const hash = (key: string) => createHash('sha256').update(key).digest();
@@ -50,6 +51,19 @@ export class SessionsService {
       await this.repository.touch(token.sid, now);
     }
     return found.account;
+  }
+
+  async view(_account: SignedInAccount): Promise<SessionView> {
+    throw new Error('not ready');
+  }
+  async listOwn(_account: SignedInAccount): Promise<OwnSessions> {
+    throw new Error('not ready');
+  }
+  async endOthers(_account: SignedInAccount): Promise<void> {
+    throw new Error('not ready');
+  }
+  async endOwn(_account: SignedInAccount, _id: string): Promise<void> {
+    throw new Error('not ready');
   }
 
   /** Name and attributes of the session cookie under this public address. */

@@ -4,6 +4,406 @@
  */
 
 export interface paths {
+    "/api/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Sessions_signIn"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Sessions_current"];
+        put?: never;
+        post?: never;
+        delete: operations["Sessions_signOut"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session/second-factor": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Sessions_giveCode"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session/confirmation": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Sessions_confirmPassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/me/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Sessions_list"];
+        put?: never;
+        post?: never;
+        delete: operations["Sessions_endOthers"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/me/sessions/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["Sessions_endOne"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/administrator-claims": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["AdministratorClaims_claim"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/me/email-changes": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["EmailChanges_ask"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/email-changes/confirmations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["EmailChanges_confirm"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/email-changes/undo": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["EmailChanges_undo"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/me/password": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put: operations["Passwords_change"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/password-resets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Passwords_askForReset"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/password-resets/confirmations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Passwords_reset"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/accounts": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["SignUp_signUp"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/password-checks": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["SignUp_check"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/email-confirmations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["SignUp_confirm"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/email-confirmations/again": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["SignUp_confirmAgain"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/me/second-factor": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["SecondFactors_enrol"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/me/second-factor/confirmation": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["SecondFactors_confirm"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["People_find"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["People_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people/{id}/roles/{role}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put: operations["People_giveRole"];
+        post?: never;
+        delete: operations["People_takeRole"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people/{id}/suspension": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put: operations["People_suspend"];
+        post?: never;
+        delete: operations["People_reinstate"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people/{id}/password-reset": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["People_startReset"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people/{id}/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["People_endSessions"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/papers/{slug}": {
         parameters: {
             query?: never;
@@ -164,6 +564,246 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/classes": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Classes_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/class-memberships": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Classes_join"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/classes/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["ClassView_view"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/front": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Courses_front"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/course": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Courses_course"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/lessons/{number}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Lessons_read"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/lessons/{number}/progress": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Lessons_progress"];
+        put: operations["Lessons_readTo"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/lessons/{number}/done": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put: operations["Lessons_markDone"];
+        post?: never;
+        delete: operations["Lessons_undoDone"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/practice": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Practice_start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/practice/{id}/answers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Practice_answer"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/worksheets/{number}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Worksheets_summary"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/worksheets/{number}/attempts": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Worksheets_start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/worksheet-attempts/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Worksheets_open"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/worksheet-attempts/{id}/items/{key}/answers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put: operations["Worksheets_save"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/worksheet-attempts/{id}/hand-in": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Worksheets_handIn"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
@@ -176,6 +816,898 @@ export interface components {
 }
 export type $defs = Record<string, never>;
 export interface operations {
+    Sessions_signIn: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    email: string;
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        account: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        };
+                        /** @enum {string} */
+                        secondFactor: "none" | "needed" | "to-enrol" | "done";
+                        /** Format: date-time */
+                        idleEndsAt: string;
+                        /** Format: date-time */
+                        endsAt: string;
+                        /** Format: date-time */
+                        authenticatedAt: string;
+                        demonstration: boolean;
+                    };
+                };
+            };
+        };
+    };
+    Sessions_current: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        account: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        };
+                        /** @enum {string} */
+                        secondFactor: "none" | "needed" | "to-enrol" | "done";
+                        /** Format: date-time */
+                        idleEndsAt: string;
+                        /** Format: date-time */
+                        endsAt: string;
+                        /** Format: date-time */
+                        authenticatedAt: string;
+                        demonstration: boolean;
+                    };
+                };
+            };
+        };
+    };
+    Sessions_signOut: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+        };
+    };
+    Sessions_giveCode: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    code: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        account: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        };
+                        /** @enum {string} */
+                        secondFactor: "none" | "needed" | "to-enrol" | "done";
+                        /** Format: date-time */
+                        idleEndsAt: string;
+                        /** Format: date-time */
+                        endsAt: string;
+                        /** Format: date-time */
+                        authenticatedAt: string;
+                        demonstration: boolean;
+                    };
+                };
+            };
+        };
+    };
+    Sessions_confirmPassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        account: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        };
+                        /** @enum {string} */
+                        secondFactor: "none" | "needed" | "to-enrol" | "done";
+                        /** Format: date-time */
+                        idleEndsAt: string;
+                        /** Format: date-time */
+                        endsAt: string;
+                        /** Format: date-time */
+                        authenticatedAt: string;
+                        demonstration: boolean;
+                    };
+                };
+            };
+        };
+    };
+    Sessions_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        sessions: {
+                            /** Format: uuid */
+                            id: string;
+                            current: boolean;
+                            /** Format: date-time */
+                            startedAt: string;
+                            /** Format: date-time */
+                            lastSeenAt: string;
+                            device: string;
+                            address: string;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    Sessions_endOthers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+        };
+    };
+    Sessions_endOne: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+        };
+    };
+    AdministratorClaims_claim: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    givenName: string;
+                    familyName: string;
+                    email: string;
+                    password: string;
+                    token: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": Record<string, never>;
+                };
+            };
+        };
+    };
+    EmailChanges_ask: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    email: string;
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": Record<string, never>;
+                };
+            };
+        };
+    };
+    EmailChanges_confirm: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    token: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        email: string;
+                    };
+                };
+            };
+        };
+    };
+    EmailChanges_undo: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    token: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        email: string;
+                    };
+                };
+            };
+        };
+    };
+    Passwords_change: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    currentPassword: string;
+                    newPassword: string;
+                    endOtherSessions: boolean;
+                };
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+        };
+    };
+    Passwords_askForReset: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    email: string;
+                };
+            };
+        };
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": Record<string, never>;
+                };
+            };
+        };
+    };
+    Passwords_reset: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    token: string;
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+        };
+    };
+    SignUp_signUp: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    givenName: string;
+                    familyName: string;
+                    email: string;
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": Record<string, never>;
+                };
+            };
+        };
+    };
+    SignUp_check: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        lengthShort: number;
+                        common: boolean;
+                        reason: string | null;
+                    };
+                };
+            };
+        };
+    };
+    SignUp_confirm: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    token: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        email: string;
+                    };
+                };
+            };
+        };
+    };
+    SignUp_confirmAgain: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    email: string;
+                };
+            };
+        };
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": Record<string, never>;
+                };
+            };
+        };
+    };
+    SecondFactors_enrol: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        secret: string;
+                        otpauthUri: string;
+                        qrSvg: string;
+                    };
+                };
+            };
+        };
+    };
+    SecondFactors_confirm: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    code: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        recoveryCodes: string[];
+                    };
+                };
+            };
+        };
+    };
+    People_find: {
+        parameters: {
+            query?: {
+                find?: string;
+                cursor?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        people: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                            emailConfirmed: boolean;
+                            suspended: {
+                                /** Format: date-time */
+                                at: string;
+                                reason: string;
+                            } | null;
+                            /** Format: date-time */
+                            joinedAt: string;
+                            /** Format: date-time */
+                            lastSeenAt: string | null;
+                            secondFactor: boolean;
+                            sessions: number;
+                        }[];
+                        nextCursor: string | null;
+                    };
+                };
+            };
+        };
+    };
+    People_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        person: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                            emailConfirmed: boolean;
+                            suspended: {
+                                /** Format: date-time */
+                                at: string;
+                                reason: string;
+                            } | null;
+                            /** Format: date-time */
+                            joinedAt: string;
+                            /** Format: date-time */
+                            lastSeenAt: string | null;
+                            secondFactor: boolean;
+                            sessions: number;
+                        };
+                        lately: {
+                            /** Format: date-time */
+                            at: string;
+                            what: string;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    People_giveRole: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+                role: "trainee" | "trainer" | "certification-manager" | "administrator";
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        givenName: string;
+                        familyName: string;
+                        email: string;
+                        roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        emailConfirmed: boolean;
+                        suspended: {
+                            /** Format: date-time */
+                            at: string;
+                            reason: string;
+                        } | null;
+                        /** Format: date-time */
+                        joinedAt: string;
+                        /** Format: date-time */
+                        lastSeenAt: string | null;
+                        secondFactor: boolean;
+                        sessions: number;
+                    };
+                };
+            };
+        };
+    };
+    People_takeRole: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+                role: "trainee" | "trainer" | "certification-manager" | "administrator";
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        givenName: string;
+                        familyName: string;
+                        email: string;
+                        roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        emailConfirmed: boolean;
+                        suspended: {
+                            /** Format: date-time */
+                            at: string;
+                            reason: string;
+                        } | null;
+                        /** Format: date-time */
+                        joinedAt: string;
+                        /** Format: date-time */
+                        lastSeenAt: string | null;
+                        secondFactor: boolean;
+                        sessions: number;
+                    };
+                };
+            };
+        };
+    };
+    People_suspend: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    reason: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        givenName: string;
+                        familyName: string;
+                        email: string;
+                        roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        emailConfirmed: boolean;
+                        suspended: {
+                            /** Format: date-time */
+                            at: string;
+                            reason: string;
+                        } | null;
+                        /** Format: date-time */
+                        joinedAt: string;
+                        /** Format: date-time */
+                        lastSeenAt: string | null;
+                        secondFactor: boolean;
+                        sessions: number;
+                    };
+                };
+            };
+        };
+    };
+    People_reinstate: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        givenName: string;
+                        familyName: string;
+                        email: string;
+                        roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        emailConfirmed: boolean;
+                        suspended: {
+                            /** Format: date-time */
+                            at: string;
+                            reason: string;
+                        } | null;
+                        /** Format: date-time */
+                        joinedAt: string;
+                        /** Format: date-time */
+                        lastSeenAt: string | null;
+                        secondFactor: boolean;
+                        sessions: number;
+                    };
+                };
+            };
+        };
+    };
+    People_startReset: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": Record<string, never>;
+                };
+            };
+        };
+    };
+    People_endSessions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+        };
+    };
     Papers_paper: {
         parameters: {
             query?: never;
@@ -1034,6 +2566,1246 @@ export interface operations {
                             number: string;
                             ready: boolean;
                         } | null;
+                    };
+                };
+            };
+        };
+    };
+    Classes_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        classes: {
+                            id: string;
+                            name: string;
+                            school: string;
+                            course: string;
+                            startsOn: string;
+                            endsOn: string;
+                            joinCode: string | null;
+                            members: number;
+                            trainer: boolean;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    Classes_join: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    joinCode: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        class: {
+                            id: string;
+                            name: string;
+                        };
+                    };
+                };
+            };
+        };
+    };
+    ClassView_view: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        id: string;
+                        name: string;
+                        school: string;
+                        course: {
+                            number: string;
+                            title: string;
+                        };
+                        startsOn: string;
+                        endsOn: string;
+                        joinCode: string;
+                        trainers: string[];
+                        units: {
+                            number: number;
+                            title: string;
+                            sheets: number;
+                            worksheet: string | null;
+                        }[];
+                        members: {
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            joinedOn: string;
+                            lastSeenOn: string | null;
+                            daysThere: number;
+                            at: string;
+                            units: {
+                                number: number;
+                                sheetsDone: number;
+                                sheetsBegun: number;
+                                /** @enum {string} */
+                                lamp: "lit" | "not-passed" | "not-sat" | "none";
+                                percent: number | null;
+                            }[];
+                            /** @enum {string} */
+                            paper: "not-sat" | "sitting" | "passed" | "not-passed";
+                            attempts: {
+                                id: string;
+                                worksheet: string;
+                                attempt: number;
+                                handedInOn: string;
+                                marks: number;
+                                outOf: number;
+                            }[];
+                        }[];
+                        slips: {
+                            question: string;
+                            part: string;
+                            says: string;
+                            count: number;
+                            of: number;
+                        }[];
+                        tooFew: boolean;
+                    };
+                };
+            };
+        };
+    };
+    Courses_front: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        demonstration: boolean;
+                        school: {
+                            name: string;
+                            address: string;
+                        };
+                        course: {
+                            number: string;
+                            title: string;
+                            sheets: number;
+                            units: number;
+                            questions: number;
+                            minutesToRead: number;
+                        } | null;
+                        people: {
+                            role: string;
+                            name: string;
+                            email: string;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    Courses_course: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        number: string;
+                        slug: string;
+                        title: string;
+                        revision: string;
+                        issued: string;
+                        owner: string;
+                        trainer: string | null;
+                        class: {
+                            id: string;
+                            name: string;
+                        } | null;
+                        enrolledOn: string | null;
+                        intro: string;
+                        carryOn: {
+                            sheet: string;
+                            title: string;
+                            paragraph: number;
+                            of: number;
+                            minutesLeft: number;
+                        } | null;
+                        units: {
+                            number: number;
+                            title: string;
+                            issued: boolean;
+                            sheets: {
+                                number: string;
+                                slug: string;
+                                title: string;
+                                /** @enum {string} */
+                                state: "not-begun" | "begun" | "done";
+                                revised: {
+                                    from: string;
+                                    to: string;
+                                } | null;
+                                paragraph: number | null;
+                                doneOn: string | null;
+                            }[];
+                            worksheet: {
+                                number: string;
+                                title: string;
+                                questions: number;
+                                passPercent: number;
+                                best: {
+                                    marks: number;
+                                    outOf: number;
+                                    percent: number;
+                                    on: string;
+                                } | null;
+                                lit: boolean;
+                                attempts: number;
+                                openAttemptId: string | null;
+                            } | null;
+                        }[];
+                        paper: {
+                            slug: string;
+                            number: string;
+                            title: string;
+                            /** @enum {string} */
+                            state: "open" | "waiting" | "sitting" | "passed";
+                            mayStartAt: string | null;
+                            sittingId: string | null;
+                            certificateId: string | null;
+                        } | null;
+                    };
+                };
+            };
+        };
+    };
+    Lessons_read: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                number: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        number: string;
+                        slug: string;
+                        title: string;
+                        revision: string;
+                        issued: string;
+                        language: string;
+                        unit: {
+                            number: number;
+                            title: string;
+                        };
+                        author: string;
+                        checkedBy: string;
+                        minutes: number;
+                        lead: string;
+                        can: string[];
+                        body: string;
+                        paragraphs: number;
+                        words: {
+                            term: string;
+                            meaning: string;
+                        }[];
+                        sources: string[];
+                        recall: {
+                            ask: string;
+                            answer: string;
+                        }[];
+                        formulas: {
+                            [key: string]: {
+                                /** @enum {string} */
+                                type: "root";
+                                children: unknown[];
+                            };
+                        };
+                        figures: {
+                            [key: string]: {
+                                tree: {
+                                    /** @enum {string} */
+                                    type: "root";
+                                    children: unknown[];
+                                };
+                                narrow: {
+                                    /** @enum {string} */
+                                    type: "root";
+                                    children: unknown[];
+                                } | null;
+                                short: string;
+                                long: string;
+                            };
+                        };
+                        worked: {
+                            [key: string]: {
+                                title: string;
+                                lead: string;
+                                given: {
+                                    symbol: string | null;
+                                    label: string;
+                                    value: string;
+                                    unit: string;
+                                }[];
+                                diagram: {
+                                    /** @enum {string} */
+                                    kind: "two-wire-run";
+                                    labels: {
+                                        source: string;
+                                        fuse: string;
+                                        load: string;
+                                        loadNote: string;
+                                        cable: string;
+                                        length: string;
+                                    };
+                                    /** @enum {string} */
+                                    load: "lamp" | "motor" | "resistor";
+                                } | null;
+                                curve: {
+                                    hours: number[];
+                                    volts: number[];
+                                    amps: number[];
+                                    intervals: {
+                                        label: string;
+                                        fromH: number;
+                                        toH: number;
+                                    }[];
+                                } | null;
+                                parts: {
+                                    id: string;
+                                    prompt: string;
+                                    lines: {
+                                        /** @enum {string} */
+                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
+                                        text: string;
+                                        differs?: boolean;
+                                    }[][];
+                                }[];
+                            };
+                        };
+                        tries: string[];
+                        previous: {
+                            number: string;
+                            title: string;
+                        } | null;
+                        next: {
+                            number: string;
+                            title: string;
+                        } | null;
+                    };
+                };
+            };
+        };
+    };
+    Lessons_progress: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                number: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @enum {string} */
+                        state: "not-begun" | "begun" | "done";
+                        paragraph: number;
+                        revisionRead: string | null;
+                        current: string;
+                    };
+                };
+            };
+        };
+    };
+    Lessons_readTo: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                number: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    paragraph: number;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @enum {string} */
+                        state: "not-begun" | "begun" | "done";
+                        paragraph: number;
+                        revisionRead: string | null;
+                        current: string;
+                    };
+                };
+            };
+        };
+    };
+    Lessons_markDone: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                number: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    revision: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @enum {string} */
+                        state: "not-begun" | "begun" | "done";
+                        paragraph: number;
+                        revisionRead: string | null;
+                        current: string;
+                    };
+                };
+            };
+        };
+    };
+    Lessons_undoDone: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                number: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @enum {string} */
+                        state: "not-begun" | "begun" | "done";
+                        paragraph: number;
+                        revisionRead: string | null;
+                        current: string;
+                    };
+                };
+            };
+        };
+    };
+    Practice_start: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    question: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        id: string;
+                        question: {
+                            title: string;
+                            lead: string;
+                            body: string;
+                            subject: string;
+                            /** @enum {string} */
+                            profile: "metric" | "awg";
+                            marks: number;
+                            aids: string[];
+                            given: {
+                                symbol: string | null;
+                                label: string;
+                                value: string;
+                                unit: string;
+                            }[];
+                            diagram: {
+                                /** @enum {string} */
+                                kind: "two-wire-run";
+                                labels: {
+                                    source: string;
+                                    fuse: string;
+                                    load: string;
+                                    loadNote: string;
+                                    cable: string;
+                                    length: string;
+                                };
+                                /** @enum {string} */
+                                load: "lamp" | "motor" | "resistor";
+                            } | null;
+                            curve: {
+                                hours: number[];
+                                volts: number[];
+                                amps: number[];
+                                intervals: {
+                                    label: string;
+                                    fromH: number;
+                                    toH: number;
+                                }[];
+                            } | null;
+                            cautions: {
+                                /** @enum {string} */
+                                level: "danger" | "warning" | "caution" | "notice" | "mandatory";
+                                title: string;
+                                text: string;
+                            }[];
+                            parts: {
+                                id: string;
+                                /** @enum {string} */
+                                kind: "quantity" | "choice";
+                                prompt: string;
+                                marks: number;
+                                symbol: string | null;
+                                units: string[];
+                                rounding: string | null;
+                                options: {
+                                    id: string;
+                                    text: string;
+                                }[];
+                                /** @enum {string} */
+                                layout: "rows" | "sizes";
+                            }[];
+                        };
+                    };
+                };
+            };
+        };
+    };
+    Practice_answer: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    answers: {
+                        [key: string]: {
+                            text: string;
+                            unit: string | null;
+                            option: string | null;
+                            working: string;
+                        };
+                    };
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        marked: {
+                            markerVersion: number;
+                            marks: number;
+                            outOf: number;
+                            summary: string;
+                            parts: {
+                                id: string;
+                                prompt: string;
+                                /** @enum {string} */
+                                verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
+                                marks: number;
+                                outOf: number;
+                                yours: {
+                                    /** @enum {string} */
+                                    kind: "symbol" | "number" | "unit" | "operator" | "text";
+                                    text: string;
+                                    differs?: boolean;
+                                }[][];
+                                worked: {
+                                    /** @enum {string} */
+                                    kind: "symbol" | "number" | "unit" | "operator" | "text";
+                                    text: string;
+                                    differs?: boolean;
+                                }[][];
+                                remarks: {
+                                    /** @enum {string} */
+                                    sign: "gained" | "lost" | "note";
+                                    heading: string | null;
+                                    text: string;
+                                }[];
+                            }[];
+                            trace: {
+                                part: string;
+                                rule: string;
+                                detail: string;
+                            }[];
+                        };
+                    };
+                };
+            };
+        };
+    };
+    Worksheets_summary: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                number: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        number: string;
+                        title: string;
+                        unit: {
+                            number: number;
+                            title: string;
+                        };
+                        questions: number;
+                        passPercent: number;
+                        attempts: {
+                            id: string;
+                            attempt: number;
+                            startedAt: string;
+                            handedInAt: string | null;
+                            marks: number | null;
+                            outOf: number;
+                            percent: number | null;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    Worksheets_start: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                number: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        id: string;
+                        number: string;
+                        title: string;
+                        unit: {
+                            number: number;
+                            title: string;
+                        };
+                        variant: string;
+                        attempt: number;
+                        trainee: {
+                            givenName: string;
+                            familyName: string;
+                        };
+                        mine: boolean;
+                        startedAt: string;
+                        handedInAt: string | null;
+                        passPercent: number;
+                        setBy: string;
+                        items: {
+                            key: string;
+                            question: {
+                                title: string;
+                                lead: string;
+                                body: string;
+                                subject: string;
+                                /** @enum {string} */
+                                profile: "metric" | "awg";
+                                marks: number;
+                                aids: string[];
+                                given: {
+                                    symbol: string | null;
+                                    label: string;
+                                    value: string;
+                                    unit: string;
+                                }[];
+                                diagram: {
+                                    /** @enum {string} */
+                                    kind: "two-wire-run";
+                                    labels: {
+                                        source: string;
+                                        fuse: string;
+                                        load: string;
+                                        loadNote: string;
+                                        cable: string;
+                                        length: string;
+                                    };
+                                    /** @enum {string} */
+                                    load: "lamp" | "motor" | "resistor";
+                                } | null;
+                                curve: {
+                                    hours: number[];
+                                    volts: number[];
+                                    amps: number[];
+                                    intervals: {
+                                        label: string;
+                                        fromH: number;
+                                        toH: number;
+                                    }[];
+                                } | null;
+                                cautions: {
+                                    /** @enum {string} */
+                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
+                                    title: string;
+                                    text: string;
+                                }[];
+                                parts: {
+                                    id: string;
+                                    /** @enum {string} */
+                                    kind: "quantity" | "choice";
+                                    prompt: string;
+                                    marks: number;
+                                    symbol: string | null;
+                                    units: string[];
+                                    rounding: string | null;
+                                    options: {
+                                        id: string;
+                                        text: string;
+                                    }[];
+                                    /** @enum {string} */
+                                    layout: "rows" | "sizes";
+                                }[];
+                            };
+                            answers: {
+                                [key: string]: {
+                                    text: string;
+                                    unit: string | null;
+                                    option: string | null;
+                                    working: string;
+                                };
+                            };
+                            marked: {
+                                markerVersion: number;
+                                marks: number;
+                                outOf: number;
+                                summary: string;
+                                parts: {
+                                    id: string;
+                                    prompt: string;
+                                    /** @enum {string} */
+                                    verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
+                                    marks: number;
+                                    outOf: number;
+                                    yours: {
+                                        /** @enum {string} */
+                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
+                                        text: string;
+                                        differs?: boolean;
+                                    }[][];
+                                    worked: {
+                                        /** @enum {string} */
+                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
+                                        text: string;
+                                        differs?: boolean;
+                                    }[][];
+                                    remarks: {
+                                        /** @enum {string} */
+                                        sign: "gained" | "lost" | "note";
+                                        heading: string | null;
+                                        text: string;
+                                    }[];
+                                }[];
+                                trace: {
+                                    part: string;
+                                    rule: string;
+                                    detail: string;
+                                }[];
+                            } | null;
+                            readAgain: {
+                                sheet: string;
+                                title: string;
+                            } | null;
+                        }[];
+                        marks: number | null;
+                        outOf: number;
+                        percent: number | null;
+                        passed: boolean | null;
+                        savedAt: string | null;
+                    };
+                };
+            };
+        };
+    };
+    Worksheets_open: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        id: string;
+                        number: string;
+                        title: string;
+                        unit: {
+                            number: number;
+                            title: string;
+                        };
+                        variant: string;
+                        attempt: number;
+                        trainee: {
+                            givenName: string;
+                            familyName: string;
+                        };
+                        mine: boolean;
+                        startedAt: string;
+                        handedInAt: string | null;
+                        passPercent: number;
+                        setBy: string;
+                        items: {
+                            key: string;
+                            question: {
+                                title: string;
+                                lead: string;
+                                body: string;
+                                subject: string;
+                                /** @enum {string} */
+                                profile: "metric" | "awg";
+                                marks: number;
+                                aids: string[];
+                                given: {
+                                    symbol: string | null;
+                                    label: string;
+                                    value: string;
+                                    unit: string;
+                                }[];
+                                diagram: {
+                                    /** @enum {string} */
+                                    kind: "two-wire-run";
+                                    labels: {
+                                        source: string;
+                                        fuse: string;
+                                        load: string;
+                                        loadNote: string;
+                                        cable: string;
+                                        length: string;
+                                    };
+                                    /** @enum {string} */
+                                    load: "lamp" | "motor" | "resistor";
+                                } | null;
+                                curve: {
+                                    hours: number[];
+                                    volts: number[];
+                                    amps: number[];
+                                    intervals: {
+                                        label: string;
+                                        fromH: number;
+                                        toH: number;
+                                    }[];
+                                } | null;
+                                cautions: {
+                                    /** @enum {string} */
+                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
+                                    title: string;
+                                    text: string;
+                                }[];
+                                parts: {
+                                    id: string;
+                                    /** @enum {string} */
+                                    kind: "quantity" | "choice";
+                                    prompt: string;
+                                    marks: number;
+                                    symbol: string | null;
+                                    units: string[];
+                                    rounding: string | null;
+                                    options: {
+                                        id: string;
+                                        text: string;
+                                    }[];
+                                    /** @enum {string} */
+                                    layout: "rows" | "sizes";
+                                }[];
+                            };
+                            answers: {
+                                [key: string]: {
+                                    text: string;
+                                    unit: string | null;
+                                    option: string | null;
+                                    working: string;
+                                };
+                            };
+                            marked: {
+                                markerVersion: number;
+                                marks: number;
+                                outOf: number;
+                                summary: string;
+                                parts: {
+                                    id: string;
+                                    prompt: string;
+                                    /** @enum {string} */
+                                    verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
+                                    marks: number;
+                                    outOf: number;
+                                    yours: {
+                                        /** @enum {string} */
+                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
+                                        text: string;
+                                        differs?: boolean;
+                                    }[][];
+                                    worked: {
+                                        /** @enum {string} */
+                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
+                                        text: string;
+                                        differs?: boolean;
+                                    }[][];
+                                    remarks: {
+                                        /** @enum {string} */
+                                        sign: "gained" | "lost" | "note";
+                                        heading: string | null;
+                                        text: string;
+                                    }[];
+                                }[];
+                                trace: {
+                                    part: string;
+                                    rule: string;
+                                    detail: string;
+                                }[];
+                            } | null;
+                            readAgain: {
+                                sheet: string;
+                                title: string;
+                            } | null;
+                        }[];
+                        marks: number | null;
+                        outOf: number;
+                        percent: number | null;
+                        passed: boolean | null;
+                        savedAt: string | null;
+                    };
+                };
+            };
+        };
+    };
+    Worksheets_save: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+                key: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    answers: {
+                        [key: string]: {
+                            text: string;
+                            unit: string | null;
+                            option: string | null;
+                            working: string;
+                        };
+                    };
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        savedAt: string;
+                        readings: {
+                            [key: string]: {
+                                /** @enum {string} */
+                                state: "blank";
+                            } | {
+                                /** @enum {string} */
+                                state: "understood";
+                                value: number | null;
+                                shown: string;
+                            } | {
+                                /** @enum {string} */
+                                state: "ambiguous";
+                                ask: string;
+                                readings: string[];
+                            } | {
+                                /** @enum {string} */
+                                state: "not-understood";
+                                ask: string;
+                            };
+                        };
+                    };
+                };
+            };
+        };
+    };
+    Worksheets_handIn: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": Record<string, never>;
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        id: string;
+                        number: string;
+                        title: string;
+                        unit: {
+                            number: number;
+                            title: string;
+                        };
+                        variant: string;
+                        attempt: number;
+                        trainee: {
+                            givenName: string;
+                            familyName: string;
+                        };
+                        mine: boolean;
+                        startedAt: string;
+                        handedInAt: string | null;
+                        passPercent: number;
+                        setBy: string;
+                        items: {
+                            key: string;
+                            question: {
+                                title: string;
+                                lead: string;
+                                body: string;
+                                subject: string;
+                                /** @enum {string} */
+                                profile: "metric" | "awg";
+                                marks: number;
+                                aids: string[];
+                                given: {
+                                    symbol: string | null;
+                                    label: string;
+                                    value: string;
+                                    unit: string;
+                                }[];
+                                diagram: {
+                                    /** @enum {string} */
+                                    kind: "two-wire-run";
+                                    labels: {
+                                        source: string;
+                                        fuse: string;
+                                        load: string;
+                                        loadNote: string;
+                                        cable: string;
+                                        length: string;
+                                    };
+                                    /** @enum {string} */
+                                    load: "lamp" | "motor" | "resistor";
+                                } | null;
+                                curve: {
+                                    hours: number[];
+                                    volts: number[];
+                                    amps: number[];
+                                    intervals: {
+                                        label: string;
+                                        fromH: number;
+                                        toH: number;
+                                    }[];
+                                } | null;
+                                cautions: {
+                                    /** @enum {string} */
+                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
+                                    title: string;
+                                    text: string;
+                                }[];
+                                parts: {
+                                    id: string;
+                                    /** @enum {string} */
+                                    kind: "quantity" | "choice";
+                                    prompt: string;
+                                    marks: number;
+                                    symbol: string | null;
+                                    units: string[];
+                                    rounding: string | null;
+                                    options: {
+                                        id: string;
+                                        text: string;
+                                    }[];
+                                    /** @enum {string} */
+                                    layout: "rows" | "sizes";
+                                }[];
+                            };
+                            answers: {
+                                [key: string]: {
+                                    text: string;
+                                    unit: string | null;
+                                    option: string | null;
+                                    working: string;
+                                };
+                            };
+                            marked: {
+                                markerVersion: number;
+                                marks: number;
+                                outOf: number;
+                                summary: string;
+                                parts: {
+                                    id: string;
+                                    prompt: string;
+                                    /** @enum {string} */
+                                    verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
+                                    marks: number;
+                                    outOf: number;
+                                    yours: {
+                                        /** @enum {string} */
+                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
+                                        text: string;
+                                        differs?: boolean;
+                                    }[][];
+                                    worked: {
+                                        /** @enum {string} */
+                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
+                                        text: string;
+                                        differs?: boolean;
+                                    }[][];
+                                    remarks: {
+                                        /** @enum {string} */
+                                        sign: "gained" | "lost" | "note";
+                                        heading: string | null;
+                                        text: string;
+                                    }[];
+                                }[];
+                                trace: {
+                                    part: string;
+                                    rule: string;
+                                    detail: string;
+                                }[];
+                            } | null;
+                            readAgain: {
+                                sheet: string;
+                                title: string;
+                            } | null;
+                        }[];
+                        marks: number | null;
+                        outOf: number;
+                        percent: number | null;
+                        passed: boolean | null;
+                        savedAt: string | null;
                     };
                 };
             };
