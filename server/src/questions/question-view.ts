@@ -10,13 +10,15 @@ import { z } from 'zod';
 const text = z.string();
 const texts = z.array(text);
 
-const lineSchema = z.array(
-  z.object({
-    kind: z.enum(['symbol', 'number', 'unit', 'operator', 'text']),
-    text,
-    differs: z.boolean().optional(),
-  }),
-);
+const lineSchema = z
+  .array(
+    z.object({
+      kind: z.enum(['symbol', 'number', 'unit', 'operator', 'text']),
+      text,
+      differs: z.boolean().optional(),
+    }),
+  )
+  .meta({ id: 'Line' });
 
 const givenSchema = z.object({
   symbol: text.nullable(),
@@ -58,35 +60,39 @@ const partSchema = z.object({
 });
 
 /** What a person may see before marking. Anything else is dropped on the way out. */
-export const questionViewSchema = z.object({
-  title: text,
-  lead: text,
-  body: text,
-  subject: text,
-  profile: z.enum(['metric', 'awg']),
-  marks: z.number(),
-  aids: texts,
-  given: z.array(givenSchema),
-  diagram: diagramSchema.nullable(),
-  curve: curveSchema.nullable(),
-  cautions: z.array(
-    z.object({
-      level: z.enum(['danger', 'warning', 'caution', 'notice', 'mandatory']),
-      title: text,
-      text,
-    }),
-  ),
-  parts: z.array(partSchema),
-}) satisfies z.ZodType<LibraryQuestionView>;
+export const questionViewSchema = z
+  .object({
+    title: text,
+    lead: text,
+    body: text,
+    subject: text,
+    profile: z.enum(['metric', 'awg']),
+    marks: z.number(),
+    aids: texts,
+    given: z.array(givenSchema),
+    diagram: diagramSchema.nullable(),
+    curve: curveSchema.nullable(),
+    cautions: z.array(
+      z.object({
+        level: z.enum(['danger', 'warning', 'caution', 'notice', 'mandatory']),
+        title: text,
+        text,
+      }),
+    ),
+    parts: z.array(partSchema),
+  })
+  .meta({ id: 'QuestionView' }) satisfies z.ZodType<LibraryQuestionView>;
 export type QuestionView = z.infer<typeof questionViewSchema>;
 
 /** One part's answer as it was typed; bounded, since it comes from outside. */
-export const rawAnswerSchema = z.strictObject({
-  text: z.string().max(200),
-  unit: z.string().max(20).nullable(),
-  option: z.string().max(80).nullable(),
-  working: z.string().max(2_000),
-});
+export const rawAnswerSchema = z
+  .strictObject({
+    text: z.string().max(200),
+    unit: z.string().max(20).nullable(),
+    option: z.string().max(80).nullable(),
+    working: z.string().max(2_000),
+  })
+  .meta({ id: 'RawAnswer' });
 
 const partIdSchema = z.string().regex(/^[a-z0-9-]{1,20}$/);
 
@@ -100,54 +106,60 @@ export const answersSchema = z
   }) satisfies z.ZodType<LibraryAnswers>;
 export type Answers = z.infer<typeof answersSchema>;
 
-export const readingSchema = z.discriminatedUnion('state', [
-  z.object({ state: z.literal('blank') }),
-  z.object({ state: z.literal('understood'), value: z.number().nullable(), shown: text }),
-  z.object({ state: z.literal('ambiguous'), ask: text, readings: texts }),
-  z.object({ state: z.literal('not-understood'), ask: text }),
-]) satisfies z.ZodType<LibraryReading>;
+export const readingSchema = z
+  .discriminatedUnion('state', [
+    z.object({ state: z.literal('blank') }),
+    z.object({ state: z.literal('understood'), value: z.number().nullable(), shown: text }),
+    z.object({ state: z.literal('ambiguous'), ask: text, readings: texts }),
+    z.object({ state: z.literal('not-understood'), ask: text }),
+  ])
+  .meta({ id: 'Reading' }) satisfies z.ZodType<LibraryReading>;
 export type Reading = z.infer<typeof readingSchema>;
 
 /** A marked question. The trace says which rule decided each part: it is shown. */
-export const markedQuestionSchema = z.object({
-  markerVersion: z.number(),
-  marks: z.number(),
-  outOf: z.number(),
-  summary: text,
-  parts: z.array(
-    z.object({
-      id: text,
-      prompt: text,
-      verdict: z.enum([
-        'right',
-        'carried-forward',
-        'slip',
-        'wrong-unit',
-        'power-of-ten',
-        'wrong',
-        'blank',
-        'not-understood',
-        'not-carried',
-      ]),
-      marks: z.number(),
-      outOf: z.number(),
-      yours: z.array(lineSchema),
-      worked: z.array(lineSchema),
-      remarks: z.array(
-        z.object({ sign: z.enum(['gained', 'lost', 'note']), heading: text.nullable(), text }),
-      ),
-    }),
-  ),
-  trace: z.array(z.object({ part: text, rule: text, detail: text })),
-}) satisfies z.ZodType<LibraryMarkedQuestion>;
+export const markedQuestionSchema = z
+  .object({
+    markerVersion: z.number(),
+    marks: z.number(),
+    outOf: z.number(),
+    summary: text,
+    parts: z.array(
+      z.object({
+        id: text,
+        prompt: text,
+        verdict: z.enum([
+          'right',
+          'carried-forward',
+          'slip',
+          'wrong-unit',
+          'power-of-ten',
+          'wrong',
+          'blank',
+          'not-understood',
+          'not-carried',
+        ]),
+        marks: z.number(),
+        outOf: z.number(),
+        yours: z.array(lineSchema),
+        worked: z.array(lineSchema),
+        remarks: z.array(
+          z.object({ sign: z.enum(['gained', 'lost', 'note']), heading: text.nullable(), text }),
+        ),
+      }),
+    ),
+    trace: z.array(z.object({ part: text, rule: text, detail: text })),
+  })
+  .meta({ id: 'MarkedQuestion' }) satisfies z.ZodType<LibraryMarkedQuestion>;
 export type MarkedQuestion = z.infer<typeof markedQuestionSchema>;
 
-export const workedAnswerSchema = z.object({
-  title: text,
-  lead: text,
-  given: z.array(givenSchema),
-  diagram: diagramSchema.nullable(),
-  curve: curveSchema.nullable(),
-  parts: z.array(z.object({ id: text, prompt: text, lines: z.array(lineSchema) })),
-}) satisfies z.ZodType<LibraryWorkedAnswer>;
+export const workedAnswerSchema = z
+  .object({
+    title: text,
+    lead: text,
+    given: z.array(givenSchema),
+    diagram: diagramSchema.nullable(),
+    curve: curveSchema.nullable(),
+    parts: z.array(z.object({ id: text, prompt: text, lines: z.array(lineSchema) })),
+  })
+  .meta({ id: 'WorkedAnswer' }) satisfies z.ZodType<LibraryWorkedAnswer>;
 export type WorkedAnswer = z.infer<typeof workedAnswerSchema>;

@@ -807,7 +807,166 @@ export interface paths {
 }
 export type webhooks = Record<string, never>;
 export interface components {
-    schemas: never;
+    schemas: {
+        QuestionView: {
+            title: string;
+            lead: string;
+            body: string;
+            subject: string;
+            /** @enum {string} */
+            profile: "metric" | "awg";
+            marks: number;
+            aids: string[];
+            given: {
+                symbol: string | null;
+                label: string;
+                value: string;
+                unit: string;
+            }[];
+            diagram: {
+                /** @enum {string} */
+                kind: "two-wire-run";
+                labels: {
+                    source: string;
+                    fuse: string;
+                    load: string;
+                    loadNote: string;
+                    cable: string;
+                    length: string;
+                };
+                /** @enum {string} */
+                load: "lamp" | "motor" | "resistor";
+            } | null;
+            curve: {
+                hours: number[];
+                volts: number[];
+                amps: number[];
+                intervals: {
+                    label: string;
+                    fromH: number;
+                    toH: number;
+                }[];
+            } | null;
+            cautions: {
+                /** @enum {string} */
+                level: "danger" | "warning" | "caution" | "notice" | "mandatory";
+                title: string;
+                text: string;
+            }[];
+            parts: {
+                id: string;
+                /** @enum {string} */
+                kind: "quantity" | "choice";
+                prompt: string;
+                marks: number;
+                symbol: string | null;
+                units: string[];
+                rounding: string | null;
+                options: {
+                    id: string;
+                    text: string;
+                }[];
+                /** @enum {string} */
+                layout: "rows" | "sizes";
+            }[];
+        };
+        RawAnswer: {
+            text: string;
+            unit: string | null;
+            option: string | null;
+            working: string;
+        };
+        MarkedQuestion: {
+            markerVersion: number;
+            marks: number;
+            outOf: number;
+            summary: string;
+            parts: {
+                id: string;
+                prompt: string;
+                /** @enum {string} */
+                verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
+                marks: number;
+                outOf: number;
+                yours: components["schemas"]["Line"][];
+                worked: components["schemas"]["Line"][];
+                remarks: {
+                    /** @enum {string} */
+                    sign: "gained" | "lost" | "note";
+                    heading: string | null;
+                    text: string;
+                }[];
+            }[];
+            trace: {
+                part: string;
+                rule: string;
+                detail: string;
+            }[];
+        };
+        Line: {
+            /** @enum {string} */
+            kind: "symbol" | "number" | "unit" | "operator" | "text";
+            text: string;
+            differs?: boolean;
+        }[];
+        Reading: {
+            /** @enum {string} */
+            state: "blank";
+        } | {
+            /** @enum {string} */
+            state: "understood";
+            value: number | null;
+            shown: string;
+        } | {
+            /** @enum {string} */
+            state: "ambiguous";
+            ask: string;
+            readings: string[];
+        } | {
+            /** @enum {string} */
+            state: "not-understood";
+            ask: string;
+        };
+        WorkedAnswer: {
+            title: string;
+            lead: string;
+            given: {
+                symbol: string | null;
+                label: string;
+                value: string;
+                unit: string;
+            }[];
+            diagram: {
+                /** @enum {string} */
+                kind: "two-wire-run";
+                labels: {
+                    source: string;
+                    fuse: string;
+                    load: string;
+                    loadNote: string;
+                    cable: string;
+                    length: string;
+                };
+                /** @enum {string} */
+                load: "lamp" | "motor" | "resistor";
+            } | null;
+            curve: {
+                hours: number[];
+                volts: number[];
+                amps: number[];
+                intervals: {
+                    label: string;
+                    fromH: number;
+                    toH: number;
+                }[];
+            } | null;
+            parts: {
+                id: string;
+                prompt: string;
+                lines: components["schemas"]["Line"][];
+            }[];
+        };
+    };
     responses: never;
     parameters: never;
     requestBodies: never;
@@ -1848,113 +2007,11 @@ export interface operations {
                         items: {
                             number: number;
                             subject: string;
-                            question: {
-                                title: string;
-                                lead: string;
-                                body: string;
-                                subject: string;
-                                /** @enum {string} */
-                                profile: "metric" | "awg";
-                                marks: number;
-                                aids: string[];
-                                given: {
-                                    symbol: string | null;
-                                    label: string;
-                                    value: string;
-                                    unit: string;
-                                }[];
-                                diagram: {
-                                    /** @enum {string} */
-                                    kind: "two-wire-run";
-                                    labels: {
-                                        source: string;
-                                        fuse: string;
-                                        load: string;
-                                        loadNote: string;
-                                        cable: string;
-                                        length: string;
-                                    };
-                                    /** @enum {string} */
-                                    load: "lamp" | "motor" | "resistor";
-                                } | null;
-                                curve: {
-                                    hours: number[];
-                                    volts: number[];
-                                    amps: number[];
-                                    intervals: {
-                                        label: string;
-                                        fromH: number;
-                                        toH: number;
-                                    }[];
-                                } | null;
-                                cautions: {
-                                    /** @enum {string} */
-                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
-                                    title: string;
-                                    text: string;
-                                }[];
-                                parts: {
-                                    id: string;
-                                    /** @enum {string} */
-                                    kind: "quantity" | "choice";
-                                    prompt: string;
-                                    marks: number;
-                                    symbol: string | null;
-                                    units: string[];
-                                    rounding: string | null;
-                                    options: {
-                                        id: string;
-                                        text: string;
-                                    }[];
-                                    /** @enum {string} */
-                                    layout: "rows" | "sizes";
-                                }[];
-                            };
+                            question: components["schemas"]["QuestionView"];
                             answers: {
-                                [key: string]: {
-                                    text: string;
-                                    unit: string | null;
-                                    option: string | null;
-                                    working: string;
-                                };
+                                [key: string]: components["schemas"]["RawAnswer"];
                             };
-                            marked: {
-                                markerVersion: number;
-                                marks: number;
-                                outOf: number;
-                                summary: string;
-                                parts: {
-                                    id: string;
-                                    prompt: string;
-                                    /** @enum {string} */
-                                    verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
-                                    marks: number;
-                                    outOf: number;
-                                    yours: {
-                                        /** @enum {string} */
-                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                        text: string;
-                                        differs?: boolean;
-                                    }[][];
-                                    worked: {
-                                        /** @enum {string} */
-                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                        text: string;
-                                        differs?: boolean;
-                                    }[][];
-                                    remarks: {
-                                        /** @enum {string} */
-                                        sign: "gained" | "lost" | "note";
-                                        heading: string | null;
-                                        text: string;
-                                    }[];
-                                }[];
-                                trace: {
-                                    part: string;
-                                    rule: string;
-                                    detail: string;
-                                }[];
-                            };
+                            marked: components["schemas"]["MarkedQuestion"];
                         }[];
                     };
                 };
@@ -2018,68 +2075,7 @@ export interface operations {
                             key: string;
                             number: number;
                             subject: string;
-                            question: {
-                                title: string;
-                                lead: string;
-                                body: string;
-                                subject: string;
-                                /** @enum {string} */
-                                profile: "metric" | "awg";
-                                marks: number;
-                                aids: string[];
-                                given: {
-                                    symbol: string | null;
-                                    label: string;
-                                    value: string;
-                                    unit: string;
-                                }[];
-                                diagram: {
-                                    /** @enum {string} */
-                                    kind: "two-wire-run";
-                                    labels: {
-                                        source: string;
-                                        fuse: string;
-                                        load: string;
-                                        loadNote: string;
-                                        cable: string;
-                                        length: string;
-                                    };
-                                    /** @enum {string} */
-                                    load: "lamp" | "motor" | "resistor";
-                                } | null;
-                                curve: {
-                                    hours: number[];
-                                    volts: number[];
-                                    amps: number[];
-                                    intervals: {
-                                        label: string;
-                                        fromH: number;
-                                        toH: number;
-                                    }[];
-                                } | null;
-                                cautions: {
-                                    /** @enum {string} */
-                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
-                                    title: string;
-                                    text: string;
-                                }[];
-                                parts: {
-                                    id: string;
-                                    /** @enum {string} */
-                                    kind: "quantity" | "choice";
-                                    prompt: string;
-                                    marks: number;
-                                    symbol: string | null;
-                                    units: string[];
-                                    rounding: string | null;
-                                    options: {
-                                        id: string;
-                                        text: string;
-                                    }[];
-                                    /** @enum {string} */
-                                    layout: "rows" | "sizes";
-                                }[];
-                            };
+                            question: components["schemas"]["QuestionView"];
                             answers: {
                                 [key: string]: {
                                     text: string;
@@ -2155,68 +2151,7 @@ export interface operations {
                             key: string;
                             number: number;
                             subject: string;
-                            question: {
-                                title: string;
-                                lead: string;
-                                body: string;
-                                subject: string;
-                                /** @enum {string} */
-                                profile: "metric" | "awg";
-                                marks: number;
-                                aids: string[];
-                                given: {
-                                    symbol: string | null;
-                                    label: string;
-                                    value: string;
-                                    unit: string;
-                                }[];
-                                diagram: {
-                                    /** @enum {string} */
-                                    kind: "two-wire-run";
-                                    labels: {
-                                        source: string;
-                                        fuse: string;
-                                        load: string;
-                                        loadNote: string;
-                                        cable: string;
-                                        length: string;
-                                    };
-                                    /** @enum {string} */
-                                    load: "lamp" | "motor" | "resistor";
-                                } | null;
-                                curve: {
-                                    hours: number[];
-                                    volts: number[];
-                                    amps: number[];
-                                    intervals: {
-                                        label: string;
-                                        fromH: number;
-                                        toH: number;
-                                    }[];
-                                } | null;
-                                cautions: {
-                                    /** @enum {string} */
-                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
-                                    title: string;
-                                    text: string;
-                                }[];
-                                parts: {
-                                    id: string;
-                                    /** @enum {string} */
-                                    kind: "quantity" | "choice";
-                                    prompt: string;
-                                    marks: number;
-                                    symbol: string | null;
-                                    units: string[];
-                                    rounding: string | null;
-                                    options: {
-                                        id: string;
-                                        text: string;
-                                    }[];
-                                    /** @enum {string} */
-                                    layout: "rows" | "sizes";
-                                }[];
-                            };
+                            question: components["schemas"]["QuestionView"];
                             answers: {
                                 [key: string]: {
                                     text: string;
@@ -2258,12 +2193,7 @@ export interface operations {
         requestBody: {
             content: {
                 "application/json": {
-                    answer: {
-                        text: string;
-                        unit: string | null;
-                        option: string | null;
-                        working: string;
-                    };
+                    answer: components["schemas"]["RawAnswer"];
                     sequence: number;
                     /** Format: uuid */
                     idempotencyKey: string;
@@ -2281,24 +2211,7 @@ export interface operations {
                         savedAt: string;
                         receipt: string;
                         sequence: number;
-                        reading: {
-                            /** @enum {string} */
-                            state: "blank";
-                        } | {
-                            /** @enum {string} */
-                            state: "understood";
-                            value: number | null;
-                            shown: string;
-                        } | {
-                            /** @enum {string} */
-                            state: "ambiguous";
-                            ask: string;
-                            readings: string[];
-                        } | {
-                            /** @enum {string} */
-                            state: "not-understood";
-                            ask: string;
-                        };
+                        reading: components["schemas"]["Reading"];
                         /** Format: date-time */
                         now: string;
                         /** Format: date-time */
@@ -2390,68 +2303,7 @@ export interface operations {
                             key: string;
                             number: number;
                             subject: string;
-                            question: {
-                                title: string;
-                                lead: string;
-                                body: string;
-                                subject: string;
-                                /** @enum {string} */
-                                profile: "metric" | "awg";
-                                marks: number;
-                                aids: string[];
-                                given: {
-                                    symbol: string | null;
-                                    label: string;
-                                    value: string;
-                                    unit: string;
-                                }[];
-                                diagram: {
-                                    /** @enum {string} */
-                                    kind: "two-wire-run";
-                                    labels: {
-                                        source: string;
-                                        fuse: string;
-                                        load: string;
-                                        loadNote: string;
-                                        cable: string;
-                                        length: string;
-                                    };
-                                    /** @enum {string} */
-                                    load: "lamp" | "motor" | "resistor";
-                                } | null;
-                                curve: {
-                                    hours: number[];
-                                    volts: number[];
-                                    amps: number[];
-                                    intervals: {
-                                        label: string;
-                                        fromH: number;
-                                        toH: number;
-                                    }[];
-                                } | null;
-                                cautions: {
-                                    /** @enum {string} */
-                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
-                                    title: string;
-                                    text: string;
-                                }[];
-                                parts: {
-                                    id: string;
-                                    /** @enum {string} */
-                                    kind: "quantity" | "choice";
-                                    prompt: string;
-                                    marks: number;
-                                    symbol: string | null;
-                                    units: string[];
-                                    rounding: string | null;
-                                    options: {
-                                        id: string;
-                                        text: string;
-                                    }[];
-                                    /** @enum {string} */
-                                    layout: "rows" | "sizes";
-                                }[];
-                            };
+                            question: components["schemas"]["QuestionView"];
                             answers: {
                                 [key: string]: {
                                     text: string;
@@ -2894,50 +2746,7 @@ export interface operations {
                             };
                         };
                         worked: {
-                            [key: string]: {
-                                title: string;
-                                lead: string;
-                                given: {
-                                    symbol: string | null;
-                                    label: string;
-                                    value: string;
-                                    unit: string;
-                                }[];
-                                diagram: {
-                                    /** @enum {string} */
-                                    kind: "two-wire-run";
-                                    labels: {
-                                        source: string;
-                                        fuse: string;
-                                        load: string;
-                                        loadNote: string;
-                                        cable: string;
-                                        length: string;
-                                    };
-                                    /** @enum {string} */
-                                    load: "lamp" | "motor" | "resistor";
-                                } | null;
-                                curve: {
-                                    hours: number[];
-                                    volts: number[];
-                                    amps: number[];
-                                    intervals: {
-                                        label: string;
-                                        fromH: number;
-                                        toH: number;
-                                    }[];
-                                } | null;
-                                parts: {
-                                    id: string;
-                                    prompt: string;
-                                    lines: {
-                                        /** @enum {string} */
-                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                        text: string;
-                                        differs?: boolean;
-                                    }[][];
-                                }[];
-                            };
+                            [key: string]: components["schemas"]["WorkedAnswer"];
                         };
                         tries: string[];
                         previous: {
@@ -3095,68 +2904,7 @@ export interface operations {
                 content: {
                     "application/json": {
                         id: string;
-                        question: {
-                            title: string;
-                            lead: string;
-                            body: string;
-                            subject: string;
-                            /** @enum {string} */
-                            profile: "metric" | "awg";
-                            marks: number;
-                            aids: string[];
-                            given: {
-                                symbol: string | null;
-                                label: string;
-                                value: string;
-                                unit: string;
-                            }[];
-                            diagram: {
-                                /** @enum {string} */
-                                kind: "two-wire-run";
-                                labels: {
-                                    source: string;
-                                    fuse: string;
-                                    load: string;
-                                    loadNote: string;
-                                    cable: string;
-                                    length: string;
-                                };
-                                /** @enum {string} */
-                                load: "lamp" | "motor" | "resistor";
-                            } | null;
-                            curve: {
-                                hours: number[];
-                                volts: number[];
-                                amps: number[];
-                                intervals: {
-                                    label: string;
-                                    fromH: number;
-                                    toH: number;
-                                }[];
-                            } | null;
-                            cautions: {
-                                /** @enum {string} */
-                                level: "danger" | "warning" | "caution" | "notice" | "mandatory";
-                                title: string;
-                                text: string;
-                            }[];
-                            parts: {
-                                id: string;
-                                /** @enum {string} */
-                                kind: "quantity" | "choice";
-                                prompt: string;
-                                marks: number;
-                                symbol: string | null;
-                                units: string[];
-                                rounding: string | null;
-                                options: {
-                                    id: string;
-                                    text: string;
-                                }[];
-                                /** @enum {string} */
-                                layout: "rows" | "sizes";
-                            }[];
-                        };
+                        question: components["schemas"]["QuestionView"];
                     };
                 };
             };
@@ -3175,12 +2923,7 @@ export interface operations {
             content: {
                 "application/json": {
                     answers: {
-                        [key: string]: {
-                            text: string;
-                            unit: string | null;
-                            option: string | null;
-                            working: string;
-                        };
+                        [key: string]: components["schemas"]["RawAnswer"];
                     };
                 };
             };
@@ -3192,43 +2935,7 @@ export interface operations {
                 };
                 content: {
                     "application/json": {
-                        marked: {
-                            markerVersion: number;
-                            marks: number;
-                            outOf: number;
-                            summary: string;
-                            parts: {
-                                id: string;
-                                prompt: string;
-                                /** @enum {string} */
-                                verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
-                                marks: number;
-                                outOf: number;
-                                yours: {
-                                    /** @enum {string} */
-                                    kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                    text: string;
-                                    differs?: boolean;
-                                }[][];
-                                worked: {
-                                    /** @enum {string} */
-                                    kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                    text: string;
-                                    differs?: boolean;
-                                }[][];
-                                remarks: {
-                                    /** @enum {string} */
-                                    sign: "gained" | "lost" | "note";
-                                    heading: string | null;
-                                    text: string;
-                                }[];
-                            }[];
-                            trace: {
-                                part: string;
-                                rule: string;
-                                detail: string;
-                            }[];
-                        };
+                        marked: components["schemas"]["MarkedQuestion"];
                     };
                 };
             };
@@ -3310,113 +3017,11 @@ export interface operations {
                         setBy: string;
                         items: {
                             key: string;
-                            question: {
-                                title: string;
-                                lead: string;
-                                body: string;
-                                subject: string;
-                                /** @enum {string} */
-                                profile: "metric" | "awg";
-                                marks: number;
-                                aids: string[];
-                                given: {
-                                    symbol: string | null;
-                                    label: string;
-                                    value: string;
-                                    unit: string;
-                                }[];
-                                diagram: {
-                                    /** @enum {string} */
-                                    kind: "two-wire-run";
-                                    labels: {
-                                        source: string;
-                                        fuse: string;
-                                        load: string;
-                                        loadNote: string;
-                                        cable: string;
-                                        length: string;
-                                    };
-                                    /** @enum {string} */
-                                    load: "lamp" | "motor" | "resistor";
-                                } | null;
-                                curve: {
-                                    hours: number[];
-                                    volts: number[];
-                                    amps: number[];
-                                    intervals: {
-                                        label: string;
-                                        fromH: number;
-                                        toH: number;
-                                    }[];
-                                } | null;
-                                cautions: {
-                                    /** @enum {string} */
-                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
-                                    title: string;
-                                    text: string;
-                                }[];
-                                parts: {
-                                    id: string;
-                                    /** @enum {string} */
-                                    kind: "quantity" | "choice";
-                                    prompt: string;
-                                    marks: number;
-                                    symbol: string | null;
-                                    units: string[];
-                                    rounding: string | null;
-                                    options: {
-                                        id: string;
-                                        text: string;
-                                    }[];
-                                    /** @enum {string} */
-                                    layout: "rows" | "sizes";
-                                }[];
-                            };
+                            question: components["schemas"]["QuestionView"];
                             answers: {
-                                [key: string]: {
-                                    text: string;
-                                    unit: string | null;
-                                    option: string | null;
-                                    working: string;
-                                };
+                                [key: string]: components["schemas"]["RawAnswer"];
                             };
-                            marked: {
-                                markerVersion: number;
-                                marks: number;
-                                outOf: number;
-                                summary: string;
-                                parts: {
-                                    id: string;
-                                    prompt: string;
-                                    /** @enum {string} */
-                                    verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
-                                    marks: number;
-                                    outOf: number;
-                                    yours: {
-                                        /** @enum {string} */
-                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                        text: string;
-                                        differs?: boolean;
-                                    }[][];
-                                    worked: {
-                                        /** @enum {string} */
-                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                        text: string;
-                                        differs?: boolean;
-                                    }[][];
-                                    remarks: {
-                                        /** @enum {string} */
-                                        sign: "gained" | "lost" | "note";
-                                        heading: string | null;
-                                        text: string;
-                                    }[];
-                                }[];
-                                trace: {
-                                    part: string;
-                                    rule: string;
-                                    detail: string;
-                                }[];
-                            } | null;
+                            marked: components["schemas"]["MarkedQuestion"] | null;
                             readAgain: {
                                 sheet: string;
                                 title: string;
@@ -3469,113 +3074,11 @@ export interface operations {
                         setBy: string;
                         items: {
                             key: string;
-                            question: {
-                                title: string;
-                                lead: string;
-                                body: string;
-                                subject: string;
-                                /** @enum {string} */
-                                profile: "metric" | "awg";
-                                marks: number;
-                                aids: string[];
-                                given: {
-                                    symbol: string | null;
-                                    label: string;
-                                    value: string;
-                                    unit: string;
-                                }[];
-                                diagram: {
-                                    /** @enum {string} */
-                                    kind: "two-wire-run";
-                                    labels: {
-                                        source: string;
-                                        fuse: string;
-                                        load: string;
-                                        loadNote: string;
-                                        cable: string;
-                                        length: string;
-                                    };
-                                    /** @enum {string} */
-                                    load: "lamp" | "motor" | "resistor";
-                                } | null;
-                                curve: {
-                                    hours: number[];
-                                    volts: number[];
-                                    amps: number[];
-                                    intervals: {
-                                        label: string;
-                                        fromH: number;
-                                        toH: number;
-                                    }[];
-                                } | null;
-                                cautions: {
-                                    /** @enum {string} */
-                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
-                                    title: string;
-                                    text: string;
-                                }[];
-                                parts: {
-                                    id: string;
-                                    /** @enum {string} */
-                                    kind: "quantity" | "choice";
-                                    prompt: string;
-                                    marks: number;
-                                    symbol: string | null;
-                                    units: string[];
-                                    rounding: string | null;
-                                    options: {
-                                        id: string;
-                                        text: string;
-                                    }[];
-                                    /** @enum {string} */
-                                    layout: "rows" | "sizes";
-                                }[];
-                            };
+                            question: components["schemas"]["QuestionView"];
                             answers: {
-                                [key: string]: {
-                                    text: string;
-                                    unit: string | null;
-                                    option: string | null;
-                                    working: string;
-                                };
+                                [key: string]: components["schemas"]["RawAnswer"];
                             };
-                            marked: {
-                                markerVersion: number;
-                                marks: number;
-                                outOf: number;
-                                summary: string;
-                                parts: {
-                                    id: string;
-                                    prompt: string;
-                                    /** @enum {string} */
-                                    verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
-                                    marks: number;
-                                    outOf: number;
-                                    yours: {
-                                        /** @enum {string} */
-                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                        text: string;
-                                        differs?: boolean;
-                                    }[][];
-                                    worked: {
-                                        /** @enum {string} */
-                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                        text: string;
-                                        differs?: boolean;
-                                    }[][];
-                                    remarks: {
-                                        /** @enum {string} */
-                                        sign: "gained" | "lost" | "note";
-                                        heading: string | null;
-                                        text: string;
-                                    }[];
-                                }[];
-                                trace: {
-                                    part: string;
-                                    rule: string;
-                                    detail: string;
-                                }[];
-                            } | null;
+                            marked: components["schemas"]["MarkedQuestion"] | null;
                             readAgain: {
                                 sheet: string;
                                 title: string;
@@ -3605,12 +3108,7 @@ export interface operations {
             content: {
                 "application/json": {
                     answers: {
-                        [key: string]: {
-                            text: string;
-                            unit: string | null;
-                            option: string | null;
-                            working: string;
-                        };
+                        [key: string]: components["schemas"]["RawAnswer"];
                     };
                 };
             };
@@ -3624,24 +3122,7 @@ export interface operations {
                     "application/json": {
                         savedAt: string;
                         readings: {
-                            [key: string]: {
-                                /** @enum {string} */
-                                state: "blank";
-                            } | {
-                                /** @enum {string} */
-                                state: "understood";
-                                value: number | null;
-                                shown: string;
-                            } | {
-                                /** @enum {string} */
-                                state: "ambiguous";
-                                ask: string;
-                                readings: string[];
-                            } | {
-                                /** @enum {string} */
-                                state: "not-understood";
-                                ask: string;
-                            };
+                            [key: string]: components["schemas"]["Reading"];
                         };
                     };
                 };
@@ -3689,113 +3170,11 @@ export interface operations {
                         setBy: string;
                         items: {
                             key: string;
-                            question: {
-                                title: string;
-                                lead: string;
-                                body: string;
-                                subject: string;
-                                /** @enum {string} */
-                                profile: "metric" | "awg";
-                                marks: number;
-                                aids: string[];
-                                given: {
-                                    symbol: string | null;
-                                    label: string;
-                                    value: string;
-                                    unit: string;
-                                }[];
-                                diagram: {
-                                    /** @enum {string} */
-                                    kind: "two-wire-run";
-                                    labels: {
-                                        source: string;
-                                        fuse: string;
-                                        load: string;
-                                        loadNote: string;
-                                        cable: string;
-                                        length: string;
-                                    };
-                                    /** @enum {string} */
-                                    load: "lamp" | "motor" | "resistor";
-                                } | null;
-                                curve: {
-                                    hours: number[];
-                                    volts: number[];
-                                    amps: number[];
-                                    intervals: {
-                                        label: string;
-                                        fromH: number;
-                                        toH: number;
-                                    }[];
-                                } | null;
-                                cautions: {
-                                    /** @enum {string} */
-                                    level: "danger" | "warning" | "caution" | "notice" | "mandatory";
-                                    title: string;
-                                    text: string;
-                                }[];
-                                parts: {
-                                    id: string;
-                                    /** @enum {string} */
-                                    kind: "quantity" | "choice";
-                                    prompt: string;
-                                    marks: number;
-                                    symbol: string | null;
-                                    units: string[];
-                                    rounding: string | null;
-                                    options: {
-                                        id: string;
-                                        text: string;
-                                    }[];
-                                    /** @enum {string} */
-                                    layout: "rows" | "sizes";
-                                }[];
-                            };
+                            question: components["schemas"]["QuestionView"];
                             answers: {
-                                [key: string]: {
-                                    text: string;
-                                    unit: string | null;
-                                    option: string | null;
-                                    working: string;
-                                };
+                                [key: string]: components["schemas"]["RawAnswer"];
                             };
-                            marked: {
-                                markerVersion: number;
-                                marks: number;
-                                outOf: number;
-                                summary: string;
-                                parts: {
-                                    id: string;
-                                    prompt: string;
-                                    /** @enum {string} */
-                                    verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
-                                    marks: number;
-                                    outOf: number;
-                                    yours: {
-                                        /** @enum {string} */
-                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                        text: string;
-                                        differs?: boolean;
-                                    }[][];
-                                    worked: {
-                                        /** @enum {string} */
-                                        kind: "symbol" | "number" | "unit" | "operator" | "text";
-                                        text: string;
-                                        differs?: boolean;
-                                    }[][];
-                                    remarks: {
-                                        /** @enum {string} */
-                                        sign: "gained" | "lost" | "note";
-                                        heading: string | null;
-                                        text: string;
-                                    }[];
-                                }[];
-                                trace: {
-                                    part: string;
-                                    rule: string;
-                                    detail: string;
-                                }[];
-                            } | null;
+                            marked: components["schemas"]["MarkedQuestion"] | null;
                             readAgain: {
                                 sheet: string;
                                 title: string;

@@ -1,0 +1,27 @@
+import { z } from 'zod';
+
+export const classListSchema = z.object({
+  classes: z.array(
+    z.object({
+      id: z.string(),
+      name: z.string(),
+      school: z.string(),
+      course: z.string(),
+      startsOn: z.string(),
+      endsOn: z.string(),
+      /** Told to the class's trainers only. */
+      joinCode: z.string().nullable(),
+      members: z.number(),
+      trainer: z.boolean(),
+    }),
+  ),
+});
+export type ClassList = z.infer<typeof classListSchema>;
+
+export const joinClassSchema = z.strictObject({ joinCode: z.string().trim().min(1).max(40) });
+export type JoinClass = z.infer<typeof joinClassSchema>;
+
+export const joinedClassSchema = z.object({
+  class: z.object({ id: z.string(), name: z.string() }),
+});
+export type JoinedClass = z.infer<typeof joinedClassSchema>;

@@ -1,0 +1,43 @@
+import { Body, Controller, Param, Post } from '@nestjs/common';
+import { z } from 'zod';
+import type { SignedInAccount } from '../accounts/account.ts';
+import { Allow } from '../http/allow.decorator.ts';
+import { CurrentAccount } from '../http/current-account.decorator.ts';
+import { Responds } from '../http/responds.decorator.ts';
+import {
+  answerPracticeSchema,
+  practiceMarkedSchema,
+  practiceViewSchema,
+  startPracticeSchema,
+  type AnswerPractice,
+  type PracticeMarked,
+  type PracticeView,
+  type StartPractice,
+} from './practice.schemas.ts';
+import { PracticeService } from './practice.service.ts';
+
+@Controller('api/practice')
+export class PracticeController {
+  constructor(private readonly practice: PracticeService) {}
+
+  @Post()
+  @Allow('signed-in')
+  @Responds(201, practiceViewSchema)
+  start(
+    @CurrentAccount() account: SignedInAccount,
+    @Body({ schema: startPracticeSchema }) input: StartPractice,
+  ): Promise<PracticeView> {
+    return this.practice.start(account.id, input.question);
+  }
+
+  @Post(':id/answers')
+  @Allow('signed-in')
+  @Responds(200, practiceMarkedSchema)
+  answer(
+    @CurrentAccount() account: SignedInAccount,
+    @Param('id', { schema: z.uuid() }) id: string,
+    @Body({ schema: answerPracticeSchema }) input: AnswerPractice,
+  ): Promise<PracticeMarked> {
+    return this.practice.answer(account.id, id, input.answers);
+  }
+}

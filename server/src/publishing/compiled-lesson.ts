@@ -1,0 +1,44 @@
+import type { WorkedAnswer } from '@ferrule/assessments';
+
+/** A hast root, plain JSON. */
+export interface Tree {
+  readonly type: 'root';
+  readonly children: unknown[];
+}
+
+export interface CompiledFigure {
+  readonly tree: Tree;
+  readonly narrow: Tree | null;
+  readonly short: string;
+  /** Markdown. */
+  readonly long: string;
+}
+
+/** A lesson sheet as published: all that is drawn from it, nothing left to look up. */
+export interface CompiledLesson {
+  readonly number: string;
+  readonly slug: string;
+  readonly title: string;
+  readonly revision: string;
+  readonly issued: string;
+  readonly language: string;
+  readonly unit: number;
+  readonly subject: string;
+  readonly level: string;
+  readonly author: string;
+  readonly checkedBy: string;
+  readonly minutes: number;
+  readonly lead: string;
+  readonly can: readonly string[];
+  readonly words: readonly { readonly term: string; readonly meaning: string }[];
+  readonly sources: readonly string[];
+  readonly cautions: readonly string[];
+  readonly recall: readonly { readonly ask: string; readonly answer: string }[];
+  /** Markdown. */
+  readonly body: string;
+  readonly paragraphs: number;
+  readonly formulas: Readonly<Record<string, Tree>>;
+  readonly figures: Readonly<Record<string, CompiledFigure>>;
+  readonly worked: Readonly<Record<string, WorkedAnswer>>;
+  readonly tries: readonly string[];
+}

@@ -1,0 +1,56 @@
+import { Injectable } from '@nestjs/common';
+import { InjectModel } from '@nestjs/sequelize';
+import { ContentRevisionModel } from './models/content-revision.model.ts';
+import type { ContentKind, Listing } from './content.ts';
+
+const LISTED = ['id', 'slug', 'revision', 'hash', 'pool', 'subject', 'lesson'];
+
+function toListing(row: ContentRevisionModel): Listing {
+  const { id, slug, revision, pool, subject, lesson } = row;
+  return Object.freeze({
+    id,
+    slug,
+    revision,
+    hash: row.hash.toString('hex'),
+    pool,
+    subject,
+    lesson,
+  });
+}
+
+@Injectable()
+export class PublishedContentRepository {
+  constructor(
+    @InjectModel(ContentRevisionModel) private readonly revisions: typeof ContentRevisionModel,
+  ) {}
+
+  async listCurrent(kind: ContentKind): Promise<Listing[]> {
+    const rows = await this.revisions.findAll({
+      attributes: LISTED,
+      where: { kind, state: 'current' },
+      order: [['slug', 'ASC']],
+    });
+    return rows.map(toListing);
+  }
+
+  async findCurrent(kind: ContentKind, slug: string): Promise<Listing | null> {
+    const row = await this.revisions.findOne({
+      attributes: LISTED,
+      where: { kind, slug, state: 'current' },
+    });
+    return row ? toListing(row) : null;
+  }
+
+  async findById(kind: ContentKind, id: string): Promise<Listing | null> {
+    const row = await this.revisions.findOne({ attributes: LISTED, where: { kind, id } });
+    return row ? toListing(row) : null;
+  }
+
+  async compiled(ids: readonly string[]): Promise<Map<string, unknown>> {
+    const rows = await this.revisions.findAll({
+      attributes: ['id', 'compiled'],
+      where: { id: [...ids] },
+    });
+    return new Map(rows.map((row) => [row.id, row.compiled]));
+  }
+}
