@@ -1,0 +1,43 @@
+const divisions = 15;
+const words = [
+  'None',
+  'One',
+  'Two',
+  'Three',
+  'Four',
+  'Five',
+  'Six',
+  'Seven',
+  'Eight',
+  'Nine',
+  'Ten',
+  'Eleven',
+  'Twelve',
+  'Thirteen',
+  'Fourteen',
+  'Fifteen',
+];
+
+/** "11 of 15. Four more to go." */
+export function sayLength(length: number): string {
+  if (length >= divisions) return `${length} characters: long enough.`;
+  return `${length} of ${divisions}. ${words[divisions - length] ?? ''} more to go.`;
+}
+
+/** A rule of fifteen divisions under a new passphrase. */
+export function PassRule({ length, id }: { length: number; id: string }) {
+  const isLong = length >= divisions;
+  const state = isLong ? 'long-enough' : '';
+  return (
+    <>
+      <div className={`pass-rule ${state}`} aria-hidden="true">
+        {Array.from({ length: divisions }, (_, index) => (
+          <i key={index} className={index < length ? 'filled' : undefined} />
+        ))}
+      </div>
+      <p id={id} className={`pass-rule-said ${state}`}>
+        {sayLength(length)}
+      </p>
+    </>
+  );
+}
