@@ -1,0 +1,39 @@
+import { type QueryClient } from '@tanstack/react-query';
+import { createBrowserRouter, type RouteObject, RouterContextProvider } from 'react-router-dom';
+import { queryClientContext } from './api/query-client.ts';
+import { Failure } from './routes/failure.tsx';
+import { Opening } from './routes/opening.tsx';
+import { Root } from './routes/root.tsx';
+import { Shell } from './routes/shell.tsx';
+
+/** Every page is lazy. Pages under the shell have the running head; bare pages draw their own. */
+const pages: RouteObject[] = [
+  { index: true, lazy: () => import('./routes/front.tsx') },
+  { path: 'sign-in', lazy: () => import('./routes/sign-in.tsx') },
+  { path: 'problems/:slug', lazy: () => import('./routes/problem.tsx') },
+  { path: '*', lazy: () => import('./routes/not-found.tsx') },
+];
+
+const barePages: RouteObject[] = [];
+
+export const routes: RouteObject[] = [
+  {
+    Component: Root,
+    ErrorBoundary: Failure,
+    HydrateFallback: Opening,
+    children: [
+      { Component: Shell, children: [{ ErrorBoundary: Failure, children: pages }] },
+      ...barePages,
+    ],
+  },
+];
+
+export function provideCache(queryClient: QueryClient): RouterContextProvider {
+  const context = new RouterContextProvider();
+  context.set(queryClientContext, queryClient);
+  return context;
+}
+
+export function createRouter(queryClient: QueryClient) {
+  return createBrowserRouter(routes, { getContext: () => provideCache(queryClient) });
+}

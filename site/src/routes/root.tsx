@@ -1,0 +1,54 @@
+import { Theme } from '@radix-ui/themes';
+import { useEffect, useRef } from 'react';
+import { Outlet, ScrollRestoration, useLocation, useNavigation } from 'react-router-dom';
+import { useAppearance } from '../ui/color-scheme.ts';
+import { Strip, useSignal } from '../ui/strip.tsx';
+
+/** What every page shares: theme, skip link, signal, and where the focus goes on arrival. */
+export function Root() {
+  const isBusy = useNavigation().state !== 'idle';
+  useFocusOnArrival();
+  return (
+    <Theme
+      appearance={useAppearance()}
+      accentColor="bronze"
+      grayColor="sand"
+      panelBackground="solid"
+      radius="small"
+      aria-busy={isBusy || undefined}
+    >
+      <a className="skip-link" href="#content">
+        To the sheet
+      </a>
+      <SignalStrip />
+      <Outlet />
+      <ScrollRestoration />
+    </Theme>
+  );
+}
+
+function SignalStrip() {
+  const hasSignal = useSignal();
+  if (hasSignal) return null;
+  return (
+    <Strip kind="lost" across>
+      <b>No signal.</b> What is on this page can still be read. Papers, certificate checks and
+      handing in wait for a signal.
+    </Strip>
+  );
+}
+
+/** A new page begins at its heading, for the keyboard and for a screen reader alike. */
+function useFocusOnArrival() {
+  const { pathname } = useLocation();
+  const isFirst = useRef(true);
+  useEffect(() => {
+    if (isFirst.current) {
+      isFirst.current = false;
+      return;
+    }
+    const heading = document.querySelector<HTMLElement>('main h1');
+    heading?.setAttribute('tabindex', '-1');
+    heading?.focus({ preventScroll: true });
+  }, [pathname]);
+}

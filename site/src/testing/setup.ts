@@ -1,0 +1,18 @@
+import '@testing-library/jest-dom/vitest';
+import { cleanup } from '@testing-library/react';
+import { afterAll, afterEach, beforeAll, vi } from 'vitest';
+import { apiServer } from './api-server.ts';
+
+// jsdom knows neither.
+vi.stubGlobal('matchMedia', (media: string) =>
+  Object.assign(new EventTarget(), { matches: false, media }),
+);
+vi.stubGlobal('scrollTo', () => {});
+
+beforeAll(() => apiServer.listen({ onUnhandledRequest: 'error' }));
+afterEach(() => {
+  cleanup();
+  apiServer.resetHandlers();
+  localStorage.clear();
+});
+afterAll(() => apiServer.close());
