@@ -1,0 +1,154 @@
+import {
+  type ChoicePart,
+  type Compiled,
+  type Drawn,
+  type DrawnPart,
+  FORMAT_VERSION,
+  type Given,
+  MARKER_VERSION,
+  openQuestion,
+  type QuantityPart,
+  type SizePart,
+} from './compiled.ts';
+import { drawCurve, readOff, runCurve } from './curve.ts';
+import { type Draws, drawsFrom } from './random.ts';
+import { isRightOption, slipValues } from './predictions.ts';
+import { holds, solve } from './solve.ts';
+import { sizeSi } from './sizes.ts';
+import { isTooNear, keyOf, rangeOf } from './tolerance.ts';
+import { type CompiledQuestion, type CurveView, type DrawnQuestion } from './types.ts';
+import { toSi } from './units.ts';
+
+/** A question that gives no draw; the message names the question and what is wrong. */
+export class DrawFailed extends Error {
+  constructor(slug: string, why: string) {
+    super(`Question ${slug} cannot be drawn: ${why}`);
+    this.name = 'DrawFailed';
+  }
+}
+
+const MOST_TRIES = 400;
+
+/**
+ * Draws a question: values, keys, tolerances, order of options. The same seed gives the same draw.
+ *
+ * @param seed - hex of a keyed hash, at least 32 digits.
+ * @throws {DrawFailed} when no draw meets the conditions, or one has no single answer.
+ */
+export function drawQuestion(stored: CompiledQuestion, seed: string): DrawnQuestion {
+  const question = openQuestion(stored);
+  const draws = drawsFrom(seed);
+  try {
+    const { values, curve } = drawValues(question, draws);
+    const parts = question.parts.map((part) => [
+      part.id,
+      drawPart(part, { question, values, draws }),
+    ]);
+    const drawn: Drawn = {
+      formatVersion: FORMAT_VERSION,
+      markerVersion: MARKER_VERSION,
+      slug: question.meta.slug,
+      revision: question.meta.revision,
+      values: Object.fromEntries(values),
+      parts: Object.fromEntries(parts) as Record<string, DrawnPart>,
+      curve,
+    };
+    return drawn;
+  } catch (error) {
+    if (error instanceof DrawFailed) throw error;
+    throw new DrawFailed(
+      question.meta.slug,
+      error instanceof Error ? error.message : String(error),
+    );
+  }
+}
+
+function drawValues(
+  question: Compiled,
+  draws: Draws,
+): { values: Map<string, number>; curve: CurveView | null } {
+  for (let tries = 0; tries < MOST_TRIES; tries += 1) {
+    const values = new Map(question.givens.map((given) => [given.name, drawGiven(given, draws)]));
+    const curve = question.curve ? drawReadings(question, values) : null;
+    if (question.require.every((condition) => holds(question, condition, values))) {
+      return { values: solve(question, values), curve };
+    }
+  }
+  throw new Error(`none of ${MOST_TRIES} draws meets its conditions; widen the given values.`);
+}
+
+/** Runs the charger and adds what is read off its curve to the values. */
+function drawReadings(question: Compiled, values: Map<string, number>): CurveView | null {
+  if (!question.curve) return null;
+  const log = runCurve(question.curve, values);
+  for (const step of question.steps) {
+    if (step.how.kind === 'read') values.set(step.name, readOff(log, step.how.read, values));
+  }
+  return drawCurve(question.curve, log);
+}
+
+function drawGiven({ source, unit }: Given, draws: Draws): number {
+  if (source.kind === 'value') return toSi(source.figure, unit);
+  if (source.kind === 'list') {
+    return toSi(source.figures[draws.below(source.figures.length)] ?? NaN, unit);
+  }
+  const count = Math.round((source.to - source.from) / source.step);
+  const figure = source.from + source.step * draws.below(count + 1);
+  // 8 + 0.1 × 13 is 9.3, not 9.300000000000001.
+  return toSi(Number(figure.toPrecision(12)), unit);
+}
+
+interface Table {
+  question: Compiled;
+  values: Map<string, number>;
+  draws: Draws;
+}
+
+function drawPart(part: Compiled['parts'][number], table: Table): DrawnPart {
+  if (part.kind === 'quantity') return drawQuantity(part, table);
+  return part.kind === 'size' ? drawSizes(part, table) : drawOptions(part, table);
+}
+
+function drawQuantity(part: QuantityPart, { question, values }: Table): DrawnPart {
+  const step = question.steps.find((one) => one.name === part.step);
+  const value = values.get(part.step);
+  if (!step || value === undefined) throw new Error(`part ${part.id} has no step ${part.step}.`);
+  const key = keyOf(part, step.unit, value);
+  const slips = slipValues(question, part.step, values).filter(
+    ({ value: slipped }) => !isTooNear(part, key, slipped),
+  );
+  return { kind: 'quantity', key, ...rangeOf(part, key), slips };
+}
+
+function drawSizes(part: SizePart, { question, values, draws }: Table): DrawnPart {
+  const ids = marks(part.sizes.length, draws);
+  const idOf = (si: number | undefined): string | undefined =>
+    ids.find((_, index) => Math.abs(sizeSi(part, index) / (si ?? NaN) - 1) < 1e-9);
+  const right = idOf(values.get(part.step));
+  if (right === undefined) {
+    const given = part.sizes.join(', ');
+    throw new Error(`part ${part.id} needs a size that is not among ${given}; widen them.`);
+  }
+  const slips = slipValues(question, part.step, values).flatMap(({ slip, value }) => {
+    const id = idOf(value);
+    return id === undefined || id === right ? [] : [{ slip, id }];
+  });
+  return { kind: 'options', options: ids.map((id, index) => ({ id, index })), right, slips };
+}
+
+function drawOptions(part: ChoicePart, { question, values, draws }: Table): DrawnPart {
+  const ids = marks(part.options.length, draws);
+  const options = draws.shuffled(ids.map((id, index) => ({ id, index })));
+  const right = options.filter(({ index }) => isRightOption(question, part, { index, values }));
+  const [only] = right;
+  if (!only || right.length > 1) {
+    throw new Error(`part ${part.id} has ${right.length} right options; exactly one must hold.`);
+  }
+  return { kind: 'options', options, right: only.id, slips: [] };
+}
+
+function marks(count: number, draws: Draws): string[] {
+  const found = new Set<string>();
+  while (found.size < count) found.add(draws.mark());
+  return [...found];
+}

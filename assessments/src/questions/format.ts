@@ -1,0 +1,29 @@
+/** Longest run of noughts after the point before a figure is written with a power of ten. */
+const SMALLEST_PLAIN = 1e-5;
+const LARGEST_PLAIN = 1e7;
+
+/** A figure to so many significant figures, noughts kept: 14 to three is "14.0". */
+export function toFigures(value: number, figures: number): string {
+  if (value === 0) return '0';
+  const size = Math.abs(value);
+  if (size < SMALLEST_PLAIN || size >= LARGEST_PLAIN) return withPower(value, figures);
+  // Rounding first: 9.996 to three figures is 10.0, one decimal less than its size says.
+  const rounded = Number(value.toPrecision(figures));
+  const magnitude = Math.floor(Math.log10(Math.abs(rounded)) + 1e-12);
+  return signed(rounded.toFixed(Math.max(0, figures - 1 - magnitude)));
+}
+
+/** A figure as short as it can be said at so many significant figures: "5.5", "4". */
+export function toShortFigures(value: number, figures: number): string {
+  const long = toFigures(value, figures);
+  return long.includes('.') && !long.includes('×') ? long.replace(/\.?0+$/, '') : long;
+}
+
+function withPower(value: number, figures: number): string {
+  const [mantissa = '', exponent = '0'] = value.toExponential(figures - 1).split('e');
+  return `${signed(mantissa)} × 10^${signed(String(Number(exponent)))}`;
+}
+
+function signed(text: string): string {
+  return text.replace('-', '\u2212');
+}

@@ -1,0 +1,156 @@
+import { type Compiled, type DrawnPart, type QuantityPart } from './compiled.ts';
+import { toShortFigures } from './format.ts';
+import { type TypedQuantity } from './read-answer.ts';
+import { slipValues } from './predictions.ts';
+import { isTooNear, isWithin, keyOf, rangeOf, slipRangeOf } from './tolerance.ts';
+import { type Verdict } from './types.ts';
+import { toSi, type Unit } from './units.ts';
+
+/** What the marker decided about one part, and by which rule. */
+export interface Finding {
+  verdict: Verdict;
+  marks: number;
+  rule: string;
+  detail: string;
+  /** Which slip was recognised. */
+  slip?: number;
+  /** The unit the figure fits, where the unit was wrong. */
+  fits?: Unit;
+  /** Power of ten the figure is out by. */
+  power?: number;
+}
+
+/** One quantity answer and everything it is judged by. */
+export interface QuantityCase {
+  question: Compiled;
+  part: QuantityPart;
+  drawn: Extract<DrawnPart, { kind: 'quantity' }>;
+  typed: TypedQuantity;
+  /** All values recomputed on the trainee's own earlier ones; null when there are none. */
+  own: Map<string, number> | null;
+  /** Whether one of those earlier answers was itself not right. */
+  ownIsOff: boolean;
+}
+
+type Rule = (it: QuantityCase) => Finding | null;
+
+/** The marker's order. The first rule that applies decides. */
+const RULES: readonly Rule[] = [right, carried, slipped, wrongUnit, powerOfTen];
+
+export function judgeQuantity(it: QuantityCase): Finding {
+  for (const rule of RULES) {
+    const finding = rule(it);
+    if (finding) return finding;
+  }
+  return { verdict: 'wrong', marks: 0, rule: 'wrong', detail: `${figures(it)} fits no rule` };
+}
+
+/** Half a part's marks, rounded down, for the right figures in a wrong unit or power of ten. */
+function half(part: QuantityPart): number {
+  return Math.floor(part.marks / 2);
+}
+
+function valueOf({ typed }: QuantityCase): number {
+  return typed.isOfKind ? toSi(typed.figure, typed.unit) : NaN;
+}
+
+function figures(it: QuantityCase): string {
+  return `${toShortFigures(it.typed.figure, 8)} ${it.typed.unit.symbol}`.trim();
+}
+
+function right(it: QuantityCase): Finding | null {
+  if (!isWithin(valueOf(it), it.drawn)) return null;
+  return {
+    verdict: 'right',
+    marks: it.part.marks,
+    rule: 'right',
+    detail: `${figures(it)} is within ${span(it.drawn)} (SI)`,
+  };
+}
+
+/** The key recomputed on the trainee's own earlier values, or null where there are none. */
+function ownKeyOf(it: QuantityCase): number | null {
+  const value = it.own?.get(it.part.step);
+  const step = it.question.steps.find((one) => one.name === it.part.step);
+  return value === undefined || !step ? null : keyOf(it.part, step.unit, value);
+}
+
+function carried(it: QuantityCase): Finding | null {
+  const ownKey = ownKeyOf(it);
+  if (ownKey === null || !isWithin(valueOf(it), rangeOf(it.part, ownKey))) return null;
+  const detail = `${figures(it)} is within ${span(rangeOf(it.part, ownKey))} (SI), on own earlier values`;
+  if (it.part.carry === 'never') {
+    return { verdict: 'not-carried', marks: 0, rule: 'not-carried', detail };
+  }
+  return it.ownIsOff
+    ? { verdict: 'carried-forward', marks: it.part.marks, rule: 'carried-forward', detail }
+    : { verdict: 'right', marks: it.part.marks, rule: 'right-on-own-rounding', detail };
+}
+
+/** A slip predicted on the true values, or on the trainee's own where they carry. */
+function slipped(it: QuantityCase): Finding | null {
+  const value = valueOf(it);
+  const mayCarry = it.own !== null && it.part.carry === 'own';
+  const onOwn = mayCarry && it.own ? slipValues(it.question, it.part.step, it.own) : [];
+  const ownKey = ownKeyOf(it);
+  const live = onOwn.filter((one) => ownKey !== null && !isTooNear(it.part, ownKey, one.value));
+  const found = [...it.drawn.slips, ...live].find((one) =>
+    isWithin(value, slipRangeOf(it.part, one.value)),
+  );
+  const made = found && it.question.slips[found.slip]?.makes.find((m) => m.step === it.part.step);
+  if (!found || !made) return null;
+  return {
+    verdict: 'slip',
+    marks: made.keep,
+    rule: 'slip',
+    slip: found.slip,
+    detail: `${figures(it)} is what slip ${found.slip + 1} gives (${toShortFigures(found.value, 6)} SI)`,
+  };
+}
+
+function keysOf(it: QuantityCase): number[] {
+  const ownKey = it.part.carry === 'own' ? ownKeyOf(it) : null;
+  return ownKey === null ? [it.drawn.key] : [it.drawn.key, ownKey];
+}
+
+function wrongUnit(it: QuantityCase): Finding | null {
+  const accepted = it.part.units.filter((unit) => unit.symbol !== it.typed.unit.symbol);
+  for (const key of keysOf(it)) {
+    const fits = accepted.find((unit) =>
+      isWithin(toSi(it.typed.figure, unit), rangeOf(it.part, key)),
+    );
+    if (!fits) continue;
+    return {
+      verdict: 'wrong-unit',
+      marks: half(it.part),
+      rule: 'wrong-unit',
+      fits,
+      detail: `${figures(it)} would be right in ${fits.symbol}`,
+    };
+  }
+  return null;
+}
+
+const MOST_POWER = 6;
+
+function powerOfTen(it: QuantityCase): Finding | null {
+  const value = valueOf(it);
+  if (!Number.isFinite(value) || it.typed.unit.offset !== 0) return null;
+  for (const key of keysOf(it)) {
+    for (let power = -MOST_POWER; power <= MOST_POWER; power += 1) {
+      if (power === 0 || !isWithin(value / 10 ** power, rangeOf(it.part, key))) continue;
+      return {
+        verdict: 'power-of-ten',
+        marks: half(it.part),
+        rule: 'power-of-ten',
+        power,
+        detail: `${figures(it)} is out by 10^${power}`,
+      };
+    }
+  }
+  return null;
+}
+
+function span({ low, high }: { low: number; high: number }): string {
+  return `${toShortFigures(low, 6)} to ${toShortFigures(high, 6)}`;
+}

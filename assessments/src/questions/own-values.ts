@@ -1,0 +1,53 @@
+import { type Compiled, type Drawn, type Option } from './compiled.ts';
+import { namesIn } from './expression.ts';
+import { leansOn, solve } from './solve.ts';
+
+/** A trainee's own answer to a step, and whether it was anything but right. */
+export type OwnValues = Map<string, { value: number; part: string; isOff: boolean }>;
+
+/** Everything recomputed on a trainee's own earlier values. */
+export interface OwnAccount {
+  values: Map<string, number>;
+  /** Parts whose answers were used and were not right. */
+  parts: string[];
+  isOff: boolean;
+}
+
+interface Wanted {
+  step?: string;
+  options?: readonly Option[];
+  own: OwnValues;
+}
+
+/**
+ * Works a step, or the conditions of options, on the trainee's own earlier values.
+ * Null when it leans on none of them, or they lead to no finite number.
+ */
+export function ownFor(question: Compiled, drawn: Drawn, wanted: Wanted): OwnAccount | null {
+  const used = usedOwn(question, wanted);
+  if (used.length === 0) return null;
+  const known = new Map<string, number>();
+  for (const given of question.givens) known.set(given.name, drawn.values[given.name] ?? NaN);
+  for (const step of question.steps) {
+    if (step.how.kind === 'read') known.set(step.name, drawn.values[step.name] ?? NaN);
+  }
+  for (const [name, { value }] of used) known.set(name, value);
+  const off = used.filter(([, { isOff }]) => isOff);
+  const account = { parts: off.map(([, { part }]) => part), isOff: off.length > 0 };
+  try {
+    return { values: solve(question, known), ...account };
+  } catch {
+    // Own values may lead outside every table; then there is nothing to carry.
+    return null;
+  }
+}
+
+function usedOwn(question: Compiled, { step, options, own }: Wanted): [string, OwnValue][] {
+  const conditions = (options ?? []).flatMap(({ right }) =>
+    typeof right === 'boolean' ? [] : [...namesIn(right)],
+  );
+  const needed = leansOn(question, step === undefined ? conditions : [step]);
+  return [...own].filter(([name]) => needed.has(name) && name !== step);
+}
+
+type OwnValue = { value: number; part: string; isOff: boolean };

@@ -1,0 +1,96 @@
+import {
+  type Compiled,
+  type Drawn,
+  type DrawnPart,
+  openDrawn,
+  openQuestion,
+  type Part,
+} from './compiled.ts';
+import { fillIn, shownFigure } from './placeholders.ts';
+import {
+  type CompiledQuestion,
+  type DiagramView,
+  type DrawnQuestion,
+  type GivenView,
+  type OptionView,
+  type PartView,
+  type QuestionView,
+} from './types.ts';
+
+/** What a person may see before marking: built field by field, so that nothing else slips in. */
+export function presentQuestion(stored: CompiledQuestion, drawing: DrawnQuestion): QuestionView {
+  const question = openQuestion(stored);
+  const drawn = openDrawn(question, drawing);
+  return {
+    title: question.meta.title,
+    lead: fillIn(question.lead, question.givens, drawn.values),
+    body: fillIn(question.body, question.givens, drawn.values),
+    subject: question.meta.subject,
+    profile: question.profile,
+    marks: question.meta.marks,
+    aids: question.aids,
+    given: presentGivens(question, drawn),
+    diagram: presentDiagram(question, drawn),
+    curve: drawn.curve,
+    cautions: question.cautions,
+    parts: question.parts.map((part) => presentPart(question, drawn, part)),
+  };
+}
+
+export function presentGivens(question: Compiled, drawn: Drawn): GivenView[] {
+  return question.givens
+    .filter((given) => given.isShown)
+    .map((given) => ({
+      symbol: given.symbol,
+      label: given.label,
+      value: shownFigure(given, drawn.values[given.name] ?? NaN),
+      unit: given.unit.symbol,
+    }));
+}
+
+export function presentDiagram(question: Compiled, drawn: Drawn): DiagramView | null {
+  if (!question.diagram) return null;
+  const { kind, labels, load } = question.diagram;
+  const fill = (text: string): string => fillIn(text, question.givens, drawn.values);
+  return {
+    kind,
+    load,
+    labels: {
+      source: fill(labels.source),
+      fuse: fill(labels.fuse),
+      load: fill(labels.load),
+      loadNote: fill(labels.loadNote),
+      cable: fill(labels.cable),
+      length: fill(labels.length),
+    },
+  };
+}
+
+export function presentPart(question: Compiled, drawn: Drawn, part: Part): PartView {
+  const step = 'step' in part ? question.steps.find((one) => one.name === part.step) : undefined;
+  return {
+    id: part.id,
+    kind: part.kind === 'quantity' ? 'quantity' : 'choice',
+    prompt: fillIn(part.prompt, question.givens, drawn.values),
+    marks: part.marks,
+    symbol: step?.symbol ?? null,
+    units: part.kind === 'quantity' ? part.units.map((unit) => unit.symbol) : [],
+    rounding: part.kind === 'quantity' ? (part.rounding?.text ?? null) : null,
+    options: presentOptions(question, drawn, part),
+    layout: part.kind === 'size' ? 'sizes' : 'rows',
+  };
+}
+
+function presentOptions(question: Compiled, drawn: Drawn, part: Part): OptionView[] {
+  const held: DrawnPart | undefined = drawn.parts[part.id];
+  if (held?.kind !== 'options') return [];
+  return held.options.map(({ id, index }) => ({
+    id,
+    text: fillIn(optionText(part, index), question.givens, drawn.values),
+  }));
+}
+
+export function optionText(part: Part, index: number): string {
+  if (part.kind === 'size') return `${part.sizes[index] ?? ''} ${part.unit.symbol}`;
+  return part.kind === 'choice' ? (part.options[index]?.text ?? '') : '';
+}

@@ -1,0 +1,65 @@
+import { readNumber } from './number-text.ts';
+import { type Dimension, sameDimension, type Unit, unitsSpelt } from './units.ts';
+
+/** What a person typed, before it is looked at as an answer. */
+export type QuantityReading =
+  | { state: 'blank' }
+  | { state: 'quantity'; figure: number; unit: Unit | null }
+  | { state: 'ambiguous'; readings: string[] }
+  | { state: 'unknown-unit'; spelling: string }
+  | { state: 'not-a-quantity' };
+
+const LONGEST = 60;
+const HOURS_AND_MINUTES =
+  /^(\d{1,3})\s*(?:h|hr|hrs|hour|hours|:)\s*(\d{1,2})\s*(?:m|min|mins|minutes)?$/i;
+const GAUGE = /^(?:#\s*(\d{1,2})|awg\s*(\d{1,2}|[1-4]\/0)|(\d{1,2}|[1-4]\/0)\s*(?:awg|ga|gauge))$/i;
+
+/**
+ * Reads a typed quantity: figure, and unit where one is typed. `wanted` only settles spellings
+ * that stand for two units; the figure is never compared with anything.
+ */
+export function readQuantity(typed: string, wanted: Dimension | null): QuantityReading {
+  const text = typed.trim();
+  if (text === '') return { state: 'blank' };
+  if (text.length > LONGEST) return { state: 'not-a-quantity' };
+  const special = readHoursAndMinutes(text) ?? readGauge(text);
+  if (special) return special;
+  const bare = text.replace(/^(?:≈|~|=)\s*/, '');
+  const number = readNumber(bare);
+  if (number.state === 'none') return { state: 'not-a-quantity' };
+  const spelling = bare.slice(number.length).trim();
+  if (/^[\d.,/×^+*-]/.test(spelling)) return { state: 'not-a-quantity' };
+  if (number.state === 'ambiguous') {
+    return { state: 'ambiguous', readings: number.readings.map((r) => `${r} ${spelling}`.trim()) };
+  }
+  if (spelling === '') return { state: 'quantity', figure: number.value, unit: null };
+  const unit = chooseUnit(unitsSpelt(spelling), wanted);
+  return unit
+    ? { state: 'quantity', figure: number.value, unit }
+    : { state: 'unknown-unit', spelling };
+}
+
+function chooseUnit(units: readonly Unit[], wanted: Dimension | null): Unit | undefined {
+  const fitting = wanted && units.find((unit) => sameDimension(unit.dimension, wanted));
+  return fitting ?? units[0];
+}
+
+function readHoursAndMinutes(text: string): QuantityReading | null {
+  const found = HOURS_AND_MINUTES.exec(text);
+  const minutes = Number(found?.[2]);
+  const hour = unitsSpelt('h')[0];
+  if (!found || !hour || !(minutes < 60)) return null;
+  return { state: 'quantity', figure: Number(found[1]) + minutes / 60, unit: hour };
+}
+
+/** AWG to its bare copper area, ASTM B258 (from memory): d = 0.127 mm × 92^((36 − n)/39). */
+function readGauge(text: string): QuantityReading | null {
+  const found = GAUGE.exec(text);
+  const gauge = found?.[1] ?? found?.[2] ?? found?.[3];
+  const mm2 = unitsSpelt('mm²')[0];
+  if (gauge === undefined || !mm2) return null;
+  const number = gauge.endsWith('/0') ? 1 - Number(gauge[0]) : Number(gauge);
+  if (number > 40) return null;
+  const diameterMm = 0.127 * 92 ** ((36 - number) / 39);
+  return { state: 'quantity', figure: (Math.PI / 4) * diameterMm ** 2, unit: mm2 };
+}

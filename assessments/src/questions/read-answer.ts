@@ -1,0 +1,98 @@
+import { toShortFigures } from './format.ts';
+import { readQuantity } from './quantity.ts';
+import { type PartView, type RawAnswer, type Reading } from './types.ts';
+import { parseUnit } from './unit-expression.ts';
+import { NO_DIMENSION, sameDimension, toSi, type Unit, unitsSpelt } from './units.ts';
+
+/** A figure a person typed, with the unit it stands in. */
+export interface TypedQuantity {
+  figure: number;
+  unit: Unit;
+  /** False when the unit measures something else than is asked. */
+  isOfKind: boolean;
+}
+type TypedReading =
+  { state: 'typed'; typed: TypedQuantity } | Exclude<Reading, { state: 'understood' }>;
+
+/** Enough to give back what was typed. */
+const SHOWN_FIGURES = 10;
+
+/** Reads what was typed or chosen; never compares it with a key. */
+export function readAnswer(part: PartView, answer: RawAnswer): Reading {
+  if (part.kind === 'choice') return readChoice(part, answer);
+  const reading = readTyped(part, answer);
+  if (reading.state !== 'typed') return reading;
+  const { figure, unit, isOfKind } = reading.typed;
+  if (!isOfKind) {
+    return {
+      state: 'not-understood',
+      ask: `${unit.symbol} measures something else than this part asks for; give it in ${unitList(part)}.`,
+    };
+  }
+  return { state: 'understood', value: toSi(figure, unit), shown: showTyped(reading.typed) };
+}
+
+/** A typed quantity as it is shown back: "48.1 mΩ". */
+export function showTyped({ figure, unit }: TypedQuantity): string {
+  const shown = toShortFigures(figure, SHOWN_FIGURES);
+  return unit.symbol === '' ? shown : `${shown} ${unit.symbol}`;
+}
+
+function readChoice(part: PartView, answer: RawAnswer): Reading {
+  if (answer.option === null || answer.option === '') return { state: 'blank' };
+  const chosen = part.options.find((option) => option.id === answer.option);
+  return chosen
+    ? { state: 'understood', value: null, shown: chosen.text }
+    : { state: 'not-understood', ask: 'That choice is not on this paper; choose again.' };
+}
+
+/** Figure and unit of a quantity answer; a typed unit goes before a chosen one. */
+export function readTyped(part: PartView, answer: RawAnswer): TypedReading {
+  const offered = part.units.map(parseUnit);
+  const dimension = offered[0]?.dimension ?? NO_DIMENSION;
+  const read = readQuantity(answer.text, dimension);
+  switch (read.state) {
+    case 'blank':
+      return { state: 'blank' };
+    case 'ambiguous':
+      return askWhich(read.readings);
+    case 'unknown-unit':
+      return {
+        state: 'not-understood',
+        ask: `"${read.spelling}" is not a unit we know; give it in ${unitList(part)}.`,
+      };
+    case 'not-a-quantity':
+      return {
+        state: 'not-understood',
+        ask: `We could not read "${answer.text.trim().slice(0, 40)}"; type one figure, such as 12.5.`,
+      };
+    case 'quantity': {
+      const unit = read.unit ?? chosenUnit(offered, answer.unit);
+      if (!unit) {
+        return { state: 'not-understood', ask: `Which unit is it in? Give ${unitList(part)}.` };
+      }
+      const isOfKind = sameDimension(unit.dimension, dimension);
+      return { state: 'typed', typed: { figure: read.figure, unit, isOfKind } };
+    }
+  }
+}
+
+function chosenUnit(offered: readonly Unit[], chosen: string | null): Unit | undefined {
+  if (chosen === null || chosen === '') {
+    return offered.length <= 1 ? (offered[0] ?? parseUnit('')) : undefined;
+  }
+  return offered.find((unit) => unit.symbol === chosen) ?? unitsSpelt(chosen)[0];
+}
+
+function askWhich(readings: string[]): Reading & { state: 'ambiguous' } {
+  const [first = '', second] = readings;
+  const ask =
+    second === undefined
+      ? `Did you mean ${first}? Type it with one mark only, the decimal one.`
+      : `Did you mean ${first} or ${second}? Type it without a mark between thousands.`;
+  return { state: 'ambiguous', ask, readings };
+}
+
+function unitList(part: PartView): string {
+  return part.units.length === 0 ? 'a pure number, without a unit' : part.units.join(' or ');
+}

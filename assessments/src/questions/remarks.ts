@@ -1,0 +1,93 @@
+import { type Part } from './compiled.ts';
+import { type Judged, type Page } from './judged.ts';
+import { fillIn } from './placeholders.ts';
+import { type Remark } from './types.ts';
+
+/** What the marker writes beside a part. */
+export function remarksOn(page: Page, judged: Judged): Remark[] {
+  const fill = (text: string): string => fillIn(text, page.question.givens, page.drawn.values);
+  return rawRemarks(page, judged).map((remark) => ({ ...remark, text: fill(remark.text) }));
+}
+
+function rawRemarks(page: Page, judged: Judged): Remark[] {
+  const { part, finding } = judged;
+  switch (finding.verdict) {
+    case 'right':
+      return onRight(judged);
+    case 'carried-forward':
+      return [gained('Carried forward', `right sum on your own answer to ${partsUsed(judged)}`)];
+    case 'not-carried':
+      return [lost('Not carried forward', part.because)];
+    case 'slip':
+      return onSlip(page, judged);
+    case 'wrong-unit':
+      return onWrongUnit(judged);
+    case 'power-of-ten':
+      return onPowerOfTen(judged);
+    case 'blank':
+      return [lost(null, 'not answered')];
+    case 'not-understood':
+      return [lost('Not understood', finding.detail)];
+    case 'wrong':
+      return onWrong(page, judged);
+  }
+}
+
+const gained = (heading: string | null, text: string): Remark => ({
+  sign: 'gained',
+  heading,
+  text,
+});
+const lost = (heading: string | null, text: string): Remark => ({ sign: 'lost', heading, text });
+const note = (text: string): Remark => ({ sign: 'note', heading: null, text });
+
+function onRight({ finding }: Judged): Remark[] {
+  const remarks = [gained(null, 'right')];
+  return finding.rule === 'right-on-own-rounding'
+    ? [...remarks, note('worked on from your own rounded value: keep a figure more until the end')]
+    : remarks;
+}
+
+function partsUsed({ own }: Judged): string {
+  return (own?.parts ?? []).map((id) => `(${id})`).join(' and ');
+}
+
+function onSlip({ question }: Page, { finding, part }: Judged): Remark[] {
+  const slip = question.slips[finding.slip ?? -1];
+  if (!slip) return [];
+  const remarks = [lost(null, slip.say)];
+  // A size that is unsafe says so, whichever way it was reached.
+  if (part.carry === 'never') remarks.push(note(part.because));
+  return finding.marks > 0 && slip.credit !== null
+    ? [gained(null, slip.credit), ...remarks]
+    : remarks;
+}
+
+function onWrongUnit({ finding, typed, part }: Judged): Remark[] {
+  const fits = finding.fits?.symbol ?? '';
+  const given = typed?.unit.symbol === '' ? 'no unit' : (typed?.unit.symbol ?? 'another unit');
+  const text = `wrong unit: the figure is right in ${fits}, you gave ${given}`;
+  return withHalf(finding.marks, part, lost(null, text));
+}
+
+function onPowerOfTen({ finding, part }: Judged): Remark[] {
+  const power = finding.power ?? 0;
+  const factor = String(10 ** Math.abs(power));
+  const text = `right figures, ${factor} times too ${power > 0 ? 'large' : 'small'}: check prefix and decimal point`;
+  return withHalf(finding.marks, part, lost(null, text));
+}
+
+function withHalf(marks: number, part: Part, remark: Remark): Remark[] {
+  return marks > 0 ? [gained(null, `sum right: ${marks} of ${part.marks} kept`), remark] : [remark];
+}
+
+function onWrong({ drawn }: Page, { part, answer }: Judged): Remark[] {
+  const held = drawn.parts[part.id];
+  if (part.kind === 'choice' && held?.kind === 'options') {
+    const chosen = held.options.find(({ id }) => id === answer.option);
+    const say = chosen && part.options[chosen.index]?.say;
+    return say ? [lost(null, say)] : [lost(null, 'not this one')];
+  }
+  const why = 'no slip we know leads here: put your lines beside the worked ones';
+  return part.carry === 'never' ? [lost(null, why), note(part.because)] : [lost(null, why)];
+}
