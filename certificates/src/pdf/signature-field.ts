@@ -7,7 +7,7 @@ import {
   PDFString,
 } from 'pdf-lib';
 import { type CertificateStatement } from '../certificate.ts';
-import { reservedContents, reservedDate, reservedHead } from '../signature-place.ts';
+import { dictionaryTail, reservedContents, reservedHead } from '../signature-place.ts';
 
 const hiddenPrintedLocked = 2 | 4 | 128;
 
@@ -21,15 +21,11 @@ export function reserveSignature(
   statement: CertificateStatement,
 ): void {
   const { context } = document;
-  const dictionary = [
-    `${reservedHead}${reservedContents}`,
-    reservedDate,
-    `/Name ${PDFHexString.fromText(statement.issuer.name).toString()}`,
-    `/Reason (Certificate ${statement.number})`,
-    '/Reference [<< /Type /SigRef /TransformMethod /DocMDP',
-    '/TransformParams << /Type /TransformParams /P 1 /V /1.2 >> >>]',
-    '>>',
-  ].join('\n');
+  const signer = {
+    nameHex: PDFHexString.fromText(statement.issuer.name).asString(),
+    number: statement.number,
+  };
+  const dictionary = reservedHead + reservedContents + dictionaryTail(signer);
   // Written byte for byte: a dictionary object could be moved, compressed or spelt otherwise.
   const signature = context.register(PDFInvalidObject.of(Buffer.from(dictionary, 'latin1')));
   const field = context.register(
