@@ -11,8 +11,10 @@ import {
   startPostmaster,
 } from './steps/postmaster.mjs';
 import { readJson, writePrivateJson } from './steps/private-files.mjs';
-import { run, StepFailed } from './steps/processes.mjs';
+import { pause, run, StepFailed } from './steps/processes.mjs';
 import { makeThrowawayFolder, sweepThrowawayFolders } from './steps/throwaway-folders.mjs';
+
+const watchMilliseconds = 2000;
 
 const newPassword = () => randomBytes(24).toString('hex');
 
@@ -47,6 +49,12 @@ function addresses({ port, passwords }) {
   };
 }
 
+/** Resolves when the server is gone: it is no child of ours, so nobody else would tell. */
+async function watchPostmaster(dataFolder, signal) {
+  while (!signal.aborted && findPostmaster(dataFolder)) await pause(watchMilliseconds);
+  return 'gone';
+}
+
 /**
  * Starts a private PostgreSQL on loopback, making it first when there is none.
  *
@@ -78,7 +86,11 @@ export async function startCluster({ folder, throwaway = false, report = () => {
     await stopCluster(cluster);
     throw error;
   }
-  return { ...found, stop: () => stopCluster(cluster) };
+  return {
+    ...found,
+    stop: () => stopCluster(cluster),
+    hasEnded: (signal) => watchPostmaster(dataFolder, signal),
+  };
 }
 
 /** A cluster for tests: quick, separate from every other, gone when stopped. */

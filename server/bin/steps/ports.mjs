@@ -35,3 +35,12 @@ export async function nextFreePort(wanted) {
   }
   throw new StepFailed(`Ports ${wanted} to ${wanted + 99} on 127.0.0.1 are all taken.`);
 }
+
+/** The port named in the environment, if any. */
+export function askedPort() {
+  const asked = process.env.PORT;
+  if (!asked) return undefined;
+  const port = Number(asked);
+  if (Number.isInteger(port) && port > 0 && port < 65_436) return port;
+  throw new StepFailed(`PORT is ${asked}; it must be a whole number from 1 to 65435.`);
+}

@@ -11,9 +11,10 @@ import {
 import { join } from 'node:path';
 import { freePort } from './ports.mjs';
 import { writePrivate } from './private-files.mjs';
-import { isRunning, run, runOrFail, StepFailed } from './processes.mjs';
+import { isRunning, pause, run, runOrFail, StepFailed } from './processes.mjs';
 
 const startAttempts = 4;
+const endSeconds = 10;
 const largestLogBytes = 5_000_000;
 
 export function makeClusterFolder(folder, account) {
@@ -75,6 +76,15 @@ export function findPostmaster(dataFolder) {
   // Left by a crash: its number may belong to some other process by now.
   rmSync(pidFile, { force: true });
   return undefined;
+}
+
+/** Ends a server nobody answers for any more; SIGINT asks for a fast shutdown. */
+export async function endPostmaster(dataFolder) {
+  const found = findPostmaster(dataFolder);
+  if (!found) return;
+  process.kill(found.pid, 'SIGINT');
+  const deadline = Date.now() + endSeconds * 1000;
+  while (findPostmaster(dataFolder) && Date.now() < deadline) await pause(50);
 }
 
 export async function startPostmaster({

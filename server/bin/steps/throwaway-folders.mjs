@@ -1,11 +1,18 @@
-import { mkdtempSync, readdirSync, readFileSync, rmSync, statSync, writeFileSync } from 'node:fs';
-import { chmodSync } from 'node:fs';
+import {
+  chmodSync,
+  mkdtempSync,
+  readdirSync,
+  readFileSync,
+  rmSync,
+  statSync,
+  writeFileSync,
+} from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { isRunning, pause } from './processes.mjs';
+import { endPostmaster } from './postmaster.mjs';
+import { isRunning } from './processes.mjs';
 
 const prefix = 'ferrule-throwaway-';
-const stopSeconds = 5;
 
 /** A new folder that names its owner, so that a later run can tell when it was abandoned. */
 export function makeThrowawayFolder() {
@@ -40,12 +47,7 @@ export async function sweepThrowawayFolders() {
     .map((name) => join(tmpdir(), name))
     .filter(isAbandoned);
   for (const folder of folders) {
-    const dataFolder = join(folder, 'postgres', 'data');
-    const postmaster = readNumber(join(dataFolder, 'postmaster.pid'));
-    // SIGINT asks for a fast shutdown.
-    if (isRunning(postmaster, dataFolder)) process.kill(postmaster, 'SIGINT');
-    const deadline = Date.now() + stopSeconds * 1000;
-    while (isRunning(postmaster, dataFolder) && Date.now() < deadline) await pause(50);
+    await endPostmaster(join(folder, 'postgres', 'data'));
     rmSync(folder, { recursive: true, force: true });
   }
 }
