@@ -25,6 +25,7 @@ export interface CompiledLesson {
   readonly unit: number;
   readonly subject: string;
   readonly level: string;
+  readonly pool: 'practice';
   readonly author: string;
   readonly checkedBy: string;
   readonly minutes: number;

@@ -1,0 +1,26 @@
+import { fileURLToPath } from 'node:url';
+import { ContentNotInOrder } from '../publishing/problem-list.ts';
+import { publish } from '../publishing/publish.ts';
+
+const checkout = (folder: string) => fileURLToPath(new URL(`../../../${folder}`, import.meta.url));
+
+const ownerUrl = process.env['MIGRATION_DATABASE_URL'];
+if (!ownerUrl) {
+  console.error(
+    'MIGRATION_DATABASE_URL is missing: the address of the database with the owner role.',
+  );
+  process.exit(1);
+}
+const [lessons = checkout('lessons'), assessments = checkout('assessments')] =
+  process.argv.slice(2);
+try {
+  const report = await publish(ownerUrl, { lessons, assessments });
+  for (const name of report.published) console.log(`Published ${name}.`);
+  console.log(`${report.published.length} published, ${report.unchanged} unchanged.`);
+} catch (error) {
+  if (!(error instanceof ContentNotInOrder)) throw error;
+  console.error(error.message);
+  const count = error.problems.length;
+  console.error(`${count} ${count === 1 ? 'problem' : 'problems'}; nothing was published.`);
+  process.exitCode = 1;
+}

@@ -1,0 +1,31 @@
+import { z } from 'zod';
+import { day, language, lessonNumber, line, revision, slug, subject } from './sheet-fields.ts';
+
+const LEAST_RECALL = 3;
+
+/** Front matter of a lesson. */
+export const lessonFrontMatter = z.strictObject({
+  number: lessonNumber,
+  slug,
+  title: line(120),
+  revision,
+  issued: day,
+  language,
+  unit: z.number().int().min(1).max(99),
+  subject,
+  level: z.enum(['recall', 'apply', 'reason']),
+  pool: z.literal('practice', { error: 'lessons are for practice: write pool: practice' }),
+  author: line(80),
+  checkedBy: line(80),
+  minutes: z.number().int().min(1).max(180),
+  lead: line(500),
+  can: z.array(line(200)).min(1, 'say at least one thing the reader can do afterwards').max(12),
+  words: z.record(line(60), line(300)).default({}),
+  sources: z.array(line(300)).min(1, 'name at least one source').max(40),
+  cautions: z.array(line(120)).max(20).default([]),
+  recall: z
+    .array(z.strictObject({ ask: line(400), answer: line(800) }))
+    .min(LEAST_RECALL, `too few recall questions: at least ${LEAST_RECALL}`)
+    .max(20),
+});
+export type LessonFrontMatter = z.infer<typeof lessonFrontMatter>;

@@ -1,0 +1,70 @@
+import { readdir, readFile } from 'node:fs/promises';
+import { dirname, join, relative } from 'node:path';
+
+export interface SourceFile {
+  /** As an author would type it, relative to where publishing was started. */
+  readonly path: string;
+  readonly text: string;
+}
+
+export interface LessonFile extends SourceFile {
+  /** Folder name of the course. */
+  readonly course: string;
+  /** Drawings beside the lesson, by file name. */
+  readonly drawings: ReadonlyMap<string, SourceFile>;
+}
+
+export interface Sources {
+  readonly courses: readonly SourceFile[];
+  readonly lessons: readonly LessonFile[];
+  readonly questions: readonly SourceFile[];
+  readonly blueprints: readonly SourceFile[];
+}
+
+export interface SourceFolders {
+  readonly lessons: string;
+  /** Holds `bank/` and `papers/`. */
+  readonly assessments: string;
+}
+
+async function filesUnder(folder: string): Promise<string[]> {
+  const entries = await readdir(folder, { recursive: true, withFileTypes: true });
+  return entries
+    .filter((entry) => entry.isFile())
+    .map((entry) => join(entry.parentPath, entry.name))
+    .sort();
+}
+
+async function read(file: string): Promise<SourceFile> {
+  const text = await readFile(file, 'utf8');
+  return { path: relative(process.cwd(), file), text: text.replaceAll('\r\n', '\n') };
+}
+
+async function readLesson(file: string, lessonsFolder: string): Promise<LessonFile> {
+  const folder = dirname(file);
+  const names = (await readdir(folder)).filter((name) => name.endsWith('.svg')).sort();
+  const drawings = new Map<string, SourceFile>();
+  for (const name of names) drawings.set(name, await read(join(folder, name)));
+  const [course = ''] = relative(lessonsFolder, file).split(/[\\/]/);
+  return { ...(await read(file)), course, drawings };
+}
+
+/** Reads everything that may be published; nothing is judged yet. */
+export async function readSources(folders: SourceFolders): Promise<Sources> {
+  const lessonFiles = (await filesUnder(folders.lessons)).filter((file) => file.endsWith('.md'));
+  const isCourse = (file: string) => file.endsWith('course.md');
+  const sheets = async (folder: string) => {
+    const files = await filesUnder(join(folders.assessments, folder)).catch(() => []);
+    return Promise.all(files.filter((file) => file.endsWith('.md')).map(read));
+  };
+  return {
+    courses: await Promise.all(lessonFiles.filter(isCourse).map(read)),
+    lessons: await Promise.all(
+      lessonFiles
+        .filter((file) => !isCourse(file))
+        .map((file) => readLesson(file, folders.lessons)),
+    ),
+    questions: await sheets('bank'),
+    blueprints: await sheets('papers'),
+  };
+}
