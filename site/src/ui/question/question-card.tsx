@@ -1,0 +1,68 @@
+import { type ReactNode } from 'react';
+import Markdown from 'react-markdown';
+import { Hazard } from '../hazard.tsx';
+import { GivenTable } from './given-table.tsx';
+import { PartEntry } from './part-entry.tsx';
+import './question.css';
+import { Schematic } from './schematic.tsx';
+import { type Answers, type QuestionView, type RawAnswer } from './views.ts';
+
+interface QuestionCardProps {
+  question: QuestionView;
+  answers: Answers;
+  /** By part id: what is asked back. */
+  unclear?: Record<string, string>;
+  readOnly?: boolean;
+  /** Drawn between the given values and the parts: the curve of a curve reading. */
+  curve?: ReactNode;
+  onChange: (part: string, answer: RawAnswer) => void;
+  onLeave?: (part: string) => void;
+}
+
+/** A question as it is answered: given values, drawing, cautions, lettered parts with their marks. */
+export function QuestionCard({ question, answers, unclear = {}, ...props }: QuestionCardProps) {
+  return (
+    <div className="question">
+      <QuestionFacts question={question} />
+      {props.curve}
+      <ol className="parts">
+        {question.parts.map((part) => (
+          <PartEntry
+            key={part.id}
+            part={part}
+            answer={answers[part.id]}
+            unclear={unclear[part.id]}
+            readOnly={props.readOnly ?? false}
+            onChange={(answer) => props.onChange(part.id, answer)}
+            onLeave={() => props.onLeave?.(part.id)}
+          />
+        ))}
+      </ol>
+    </div>
+  );
+}
+
+/** All that a question states before it asks anything. */
+function QuestionFacts({ question }: { question: QuestionView }) {
+  return (
+    <div className="question-facts">
+      {question.body && (
+        <div className="question-text">
+          <Markdown>{question.body}</Markdown>
+        </div>
+      )}
+      {question.given.length > 0 && <GivenTable given={question.given} />}
+      {question.diagram && <Schematic diagram={question.diagram} />}
+      {question.cautions.map((caution) => (
+        <Hazard key={caution.title} level={caution.level} title={caution.title}>
+          <Markdown>{caution.text}</Markdown>
+        </Hazard>
+      ))}
+      <p className="question-profile fine">
+        {question.profile === 'metric' ? 'Metric practice' : 'AWG practice'}
+        {question.aids.length > 0 && <>. You may use: {question.aids.join(', ')}</>}. Your local
+        code decides.
+      </p>
+    </div>
+  );
+}
