@@ -1,5 +1,6 @@
 import { Test } from '@nestjs/testing';
 import type { NestFastifyApplication } from '@nestjs/platform-fastify';
+import type { SendMailOptions } from 'nodemailer';
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -8,6 +9,7 @@ import { createAdapter, setUpApp } from '../src/app.setup.ts';
 import { Clock } from '../src/clock/clock.ts';
 import { readConfig } from '../src/config/config.schema.ts';
 import { JobsService } from '../src/jobs/jobs.service.ts';
+import { MailTransport } from '../src/mail/mail-transport.ts';
 import { createTestDatabase, type TestDatabase } from './test-database.ts';
 
 /** A clock that stands where it is put. */
@@ -16,6 +18,10 @@ export class SetClock extends Clock {
 
   override now(): Date {
     return new Date(this.at);
+  }
+
+  override agreed(): Date {
+    return this.now();
   }
 
   set(instant: string | Date): void {
@@ -27,10 +33,28 @@ export class SetClock extends Clock {
   }
 }
 
+/** Keeps what would be sent, in order. */
+export class KeptMails {
+  readonly sent: SendMailOptions[] = [];
+  /** Set to make the next mails fail with it. */
+  failure: Error | null = null;
+
+  async send(mail: SendMailOptions): Promise<void> {
+    if (this.failure) throw this.failure;
+    this.sent.push(mail);
+  }
+
+  /** The newest mail to an address. */
+  lastTo(email: string): SendMailOptions | undefined {
+    return this.sent.findLast(({ to }) => (to as { address: string }).address === email);
+  }
+}
+
 export interface TestApp {
   readonly app: NestFastifyApplication;
   readonly clock: SetClock;
   readonly database: TestDatabase;
+  readonly mails: KeptMails;
   /** Runs every waiting job, and those they enqueue. */
   runJobs(): Promise<number>;
   close(): Promise<void>;
@@ -54,15 +78,18 @@ function testConfig(webUrl: string, keysFolder: string) {
   });
 }
 
-/** The whole server on a database of its own; only the clock is replaced. */
+/** The whole server on a database of its own; only the clock and the mail server are replaced. */
 export async function createTestApp(): Promise<TestApp> {
   const database = await createTestDatabase();
   const keysFolder = mkdtempSync(join(tmpdir(), 'ferrule-keys-'));
   const clock = new SetClock();
+  const mails = new KeptMails();
   const config = testConfig(database.webUrl, keysFolder);
   const testing = await Test.createTestingModule({ imports: [AppModule.with(config)] })
     .overrideProvider(Clock)
     .useValue(clock)
+    .overrideProvider(MailTransport)
+    .useValue(mails)
     .compile();
   const app = testing.createNestApplication<NestFastifyApplication>(createAdapter(config));
   await setUpApp(app, config);
@@ -72,6 +99,7 @@ export async function createTestApp(): Promise<TestApp> {
     app,
     clock,
     database,
+    mails,
     runJobs: () => app.get(JobsService).runWaiting(),
     close: async () => {
       await app.close();

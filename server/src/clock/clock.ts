@@ -6,6 +6,14 @@ export class Clock {
   now(): Date {
     return new Date();
   }
+
+  /**
+   * The time where several servers must agree, such as at a deadline: the database's reading,
+   * taken with the row it decides about.
+   */
+  agreed(databaseTime: Date): Date {
+    return databaseTime;
+  }
 }
 
 @Global()

@@ -10,4 +10,14 @@ export const catalogue: Record<string, { status: number; title: string }> = {
   'too-many-attempts': { status: 429, title: 'Too many tries' },
   'second-factor-needed': { status: 403, title: 'Second factor needed' },
   unavailable: { status: 503, title: 'Not available just now' },
+  // papers, sittings
+  'agreement-changed': { status: 409, title: 'The rules have changed' },
+  'already-certified': { status: 409, title: 'Certified already' },
+  'paper-not-ready': { status: 409, title: 'This paper cannot be sat just now' },
+  'result-not-ready': { status: 409, title: 'Not marked yet' },
+  'sequence-used': { status: 409, title: 'Another answer has this number' },
+  'sitting-already-open': { status: 409, title: 'A paper is open already' },
+  'sitting-closed': { status: 409, title: 'This paper has been handed in' },
+  'taken-over': { status: 409, title: 'Being written on another device' },
+  'wait-not-over': { status: 409, title: 'The waiting time is not over' },
 };

@@ -17,7 +17,8 @@ import {
   type ResultsPage,
   type ResultsQuery,
 } from './papers.schemas.ts';
-import { ResultsService } from './results.service.ts';
+import { LooksService } from './looks.service.ts';
+import { ResultsListService } from './results-list.service.ts';
 import { StandingService } from './standing.service.ts';
 
 /** What a paper asks for, and what came of it. */
@@ -25,7 +26,8 @@ import { StandingService } from './standing.service.ts';
 export class PapersController {
   constructor(
     private readonly standings: StandingService,
-    private readonly results: ResultsService,
+    private readonly results: ResultsListService,
+    private readonly looks: LooksService,
   ) {}
 
   @Get('papers/:slug')
@@ -56,6 +58,6 @@ export class PapersController {
     @Param('id', { schema: sittingIdSchema }) id: string,
     @Body({ schema: lookSchema }) input: Look,
   ): Promise<OpenedItems> {
-    return this.results.openItems(account.id, id, input.reason);
+    return this.looks.open(account.id, id, input.reason);
   }
 }

@@ -4,6 +4,7 @@ import { Allow } from '../http/allow.decorator.ts';
 import { CurrentAccount } from '../http/current-account.decorator.ts';
 import { Responds } from '../http/responds.decorator.ts';
 import { ResultsService } from './results.service.ts';
+import { SavingService } from './saving.service.ts';
 import { sittingIdSchema } from './papers.schemas.ts';
 import {
   comeBackSchema,
@@ -30,6 +31,7 @@ import { SittingsService } from './sittings.service.ts';
 export class SittingsController {
   constructor(
     private readonly sittings: SittingsService,
+    private readonly saving: SavingService,
     private readonly results: ResultsService,
   ) {}
 
@@ -63,7 +65,7 @@ export class SittingsController {
     @Param('part', { schema: partSchema }) part: string,
     @Body({ schema: saveAnswerSchema }) input: SaveAnswer,
   ): Promise<Saved> {
-    return this.sittings.save(account, { id, key, part }, input);
+    return this.saving.save(account, { id, key, part }, input);
   }
 
   @Put(':id/items/:key/come-back')

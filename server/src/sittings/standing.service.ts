@@ -1,9 +1,50 @@
 import { Injectable } from '@nestjs/common';
+import { CertificatesService } from '../certificates/certificates.service.ts';
+import type { Paper } from '../papers/paper.ts';
+import { PapersService } from '../papers/papers.service.ts';
+import { AllowancesRepository } from './allowances.repository.ts';
+import { ClosingService } from './closing.service.ts';
+import { presentPaper } from './paper.presenter.ts';
 import type { PaperView } from './papers.schemas.ts';
+import { ResultsRepository } from './results.repository.ts';
+import { SittingsRepository } from './sittings.repository.ts';
+import { decideStanding, type Standing } from './standing.ts';
 
+/** Whether a person may start a paper now. */
 @Injectable()
 export class StandingService {
-  async paper(_accountId: string, _slug: string): Promise<PaperView> {
-    throw new Error('not built');
+  constructor(
+    private readonly papers: PapersService,
+    private readonly certificates: CertificatesService,
+    private readonly closing: ClosingService,
+    private readonly sittings: SittingsRepository,
+    private readonly results: ResultsRepository,
+    private readonly allowances: AllowancesRepository,
+  ) {}
+
+  async standing(accountId: string, paperSlug: string): Promise<Standing> {
+    const paper = await this.papers.current(paperSlug);
+    await this.closing.closeDueOf(accountId);
+    return this.decide(accountId, paper);
+  }
+
+  /** Where the person stands, leaving out a sitting that is only being started. */
+  async decide(accountId: string, paper: Paper, startingId?: string): Promise<Standing> {
+    const { slug, scheme } = paper.blueprint;
+    const now = await this.sittings.now();
+    const certificateId = await this.certificates.heldBy(accountId, scheme.slug, now);
+    const earlier = await this.results.earlier(accountId, slug);
+    const sittings = earlier.filter(({ id }) => id !== startingId);
+    return decideStanding({ sittings, certificateId, now, zone: scheme.zone });
+  }
+
+  async paper(accountId: string, slug: string): Promise<PaperView> {
+    const paper = await this.papers.current(slug);
+    await this.closing.closeDueOf(accountId);
+    return presentPaper(paper, {
+      standing: await this.decide(accountId, paper),
+      marks: await this.papers.marks(paper),
+      extraTimePercent: await this.allowances.percentFor(accountId),
+    });
   }
 }

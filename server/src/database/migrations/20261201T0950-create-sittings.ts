@@ -16,6 +16,18 @@ CREATE TABLE schemes (
 CREATE TRIGGER schemes_immutable BEFORE UPDATE OR DELETE ON schemes
   FOR EACH ROW EXECUTE FUNCTION refuse_change();
 
+CREATE TABLE time_allowances (
+  id bigint GENERATED ALWAYS AS IDENTITY PRIMARY KEY,
+  account_id uuid NOT NULL REFERENCES accounts (id),
+  percent integer NOT NULL CONSTRAINT time_allowances_percent CHECK (percent BETWEEN 0 AND 300),
+  reason text NOT NULL,
+  granted_by uuid NOT NULL REFERENCES accounts (id),
+  granted_at timestamptz NOT NULL
+);
+CREATE INDEX time_allowances_by_account ON time_allowances (account_id, id DESC);
+CREATE TRIGGER time_allowances_append_only BEFORE UPDATE OR DELETE ON time_allowances
+  FOR EACH ROW EXECUTE FUNCTION refuse_change();
+
 CREATE TABLE sittings (
   id uuid PRIMARY KEY DEFAULT gen_random_uuid(),
   account_id uuid NOT NULL REFERENCES accounts (id),
@@ -43,8 +55,10 @@ BEGIN
   IF TG_OP = 'DELETE' OR OLD.handed_in_at IS NOT NULL THEN
     RAISE EXCEPTION 'a closed sitting is never changed' USING ERRCODE = 'restrict_violation';
   END IF;
-  IF NEW.closes_at < OLD.closes_at OR NEW.rules IS DISTINCT FROM OLD.rules
-     OR NEW.account_id <> OLD.account_id OR NEW.started_at <> OLD.started_at THEN
+  IF NEW.closes_at < OLD.closes_at
+     OR (to_jsonb(NEW) - '{writing_session_id,closes_at,handed_in_at,handed_in_how}'::text[])
+        IS DISTINCT FROM
+        (to_jsonb(OLD) - '{writing_session_id,closes_at,handed_in_at,handed_in_how}'::text[]) THEN
     RAISE EXCEPTION 'the terms of a sitting are fixed at its start' USING ERRCODE = 'restrict_violation';
   END IF;
   RETURN NEW;
@@ -116,7 +130,8 @@ CREATE TRIGGER item_looks_append_only BEFORE UPDATE OR DELETE ON item_looks
 
 GRANT SELECT ON schemes TO ferrule_web;
 GRANT SELECT, INSERT, UPDATE ON sittings TO ferrule_web;
-GRANT SELECT, INSERT ON sitting_items, sitting_answers, sitting_results, item_looks TO ferrule_web;
+GRANT SELECT, INSERT ON time_allowances, sitting_items, sitting_answers, sitting_results, item_looks
+  TO ferrule_web;
 GRANT SELECT, INSERT, DELETE ON sitting_pennants TO ferrule_web;
 `,
 };

@@ -1,0 +1,39 @@
+import { presentQuestion } from '@ferrule/assessments';
+import { dayIn } from './days.ts';
+import type { RecordedLook } from './looks.repository.ts';
+import type { OpenedItems } from './papers.schemas.ts';
+import { toAnswers, type Result } from './result.ts';
+import { answersThatCount, type SavedAnswer, type Sitting } from './sitting.ts';
+import { candidateName, type ShownItem } from './sitting.presenter.ts';
+
+interface Opened {
+  readonly items: readonly ShownItem[];
+  readonly saved: readonly SavedAnswer[];
+  readonly looks: readonly RecordedLook[];
+}
+
+/** Questions, answers and marking of a paper, for a certification manager only. */
+export function presentOpenedItems(sitting: Sitting, result: Result, opened: Opened): OpenedItems {
+  const counted = answersThatCount(opened.saved);
+  const marked = new Map(result.marked.map((item) => [item.key, item.marked]));
+  return {
+    id: sitting.id,
+    name: candidateName(sitting),
+    satOn: dayIn(sitting.rules.scheme.zone, sitting.startedAt),
+    marks: result.marks,
+    outOf: result.outOf,
+    passed: result.passed,
+    looks: opened.looks.map(({ at, by, reason }) => ({ at: at.toISOString(), by, reason })),
+    items: opened.items.flatMap(({ item, question }) => {
+      const marking = marked.get(item.key);
+      if (!marking) return [];
+      return {
+        number: item.number,
+        subject: item.subject,
+        question: presentQuestion(question, item.drawn),
+        answers: toAnswers(counted.get(item.key)),
+        marked: marking,
+      };
+    }),
+  };
+}
