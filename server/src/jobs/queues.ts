@@ -1,5 +1,9 @@
+/** What somebody asked for at an address that may or may not have an account. */
+export type AddressAsk = 'sign-up' | 'confirm-again' | 'reset-password';
+
 /** Every queue with what may wait in it. Queues are made by the migrate command. */
 export interface JobPayloads {
+  'answer-address': { requestId: string; ask: AddressAsk; email: string };
   'send-mail': { messageId: string };
   'close-sitting': { sittingId: string };
   'mark-sitting': { sittingId: string };
@@ -9,6 +13,7 @@ export interface JobPayloads {
 export type QueueName = keyof JobPayloads;
 
 export const QUEUES: readonly QueueName[] = [
+  'answer-address',
   'send-mail',
   'close-sitting',
   'mark-sitting',

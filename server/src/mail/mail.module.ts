@@ -1,5 +1,14 @@
 import { Module } from '@nestjs/common';
+import { SequelizeModule } from '@nestjs/sequelize';
+import { MailSender } from './mail-sender.ts';
+import { MailTransport } from './mail-transport.ts';
+import { MailRepository } from './mail.repository.ts';
 import { MailService } from './mail.service.ts';
+import { MailMessageModel } from './models/mail-message.model.ts';
 
-@Module({ providers: [MailService], exports: [MailService] })
+@Module({
+  imports: [SequelizeModule.forFeature([MailMessageModel])],
+  providers: [MailRepository, MailSender, MailService, MailTransport],
+  exports: [MailService],
+})
 export class MailModule {}

@@ -71,10 +71,12 @@ CREATE INDEX account_tokens_open ON account_tokens (account_id, purpose) WHERE u
 
 CREATE TABLE second_factors (
   account_id uuid PRIMARY KEY REFERENCES accounts (id),
-  secret_sealed bytea NOT NULL,
+  secret_sealed bytea,
+  pending_sealed bytea,
   created_at timestamptz NOT NULL DEFAULT now(),
   confirmed_at timestamptz,
-  last_step bigint
+  last_step bigint,
+  CONSTRAINT second_factors_confirmed_with_secret CHECK ((secret_sealed IS NULL) = (confirmed_at IS NULL))
 );
 
 CREATE TABLE recovery_codes (

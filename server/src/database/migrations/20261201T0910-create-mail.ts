@@ -6,6 +6,7 @@ CREATE TABLE mail_messages (
   dedupe_key text NOT NULL,
   account_id uuid REFERENCES accounts (id),
   recipient text NOT NULL,
+  recipient_name text NOT NULL DEFAULT '',
   template text NOT NULL,
   subject text NOT NULL,
   body_text text NOT NULL,

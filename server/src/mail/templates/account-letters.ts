@@ -1,0 +1,97 @@
+import type { LetterTemplate } from '../letter.ts';
+
+const plain = { tone: 'plain', facts: [], after: [], holdsKey: false } as const;
+
+/** Letters about the account itself. Names typed by a stranger stay out of them. */
+export const accountLetters = {
+  'confirm-email': {
+    ...plain,
+    needs: ['url'],
+    subject: 'Confirm your email',
+    preview: 'One step is left before the account is open.',
+    kicker: 'Account',
+    heading: 'Confirm your email',
+    before: [
+      'Press the button, then press Confirm on the page that opens. After that you can sign in.',
+    ],
+    button: { label: 'Confirm this email', url: '{{ url }}' },
+    after: [
+      'The link works once, for 24 hours. A newer one replaces it.',
+      'If you did not open an account, leave this mail alone: without the link nothing happens.',
+    ],
+    reason: 'You get this mail because an account was asked for with this address.',
+    holdsKey: true,
+  },
+  'already-registered': {
+    ...plain,
+    needs: ['signInUrl', 'resetUrl'],
+    subject: 'You already have an account',
+    preview: 'Somebody asked for an account with this address. There is one already.',
+    kicker: 'Account',
+    heading: 'You already have an account',
+    before: ['Somebody, perhaps you, asked for an account with this address. Yours is unchanged.'],
+    button: { label: 'Sign in', url: '{{ signInUrl }}' },
+    after: ['If the passphrase is gone, choose a new one: {{ resetUrl }}'],
+    reason: 'You get this mail because an account was asked for with this address.',
+  },
+  'reset-password': {
+    ...plain,
+    needs: ['url'],
+    subject: 'Choose a new passphrase',
+    preview: 'The link in this mail works for 30 minutes.',
+    kicker: 'Account',
+    heading: 'Choose a new passphrase',
+    before: ['The button opens a page where you choose it. You sign in with it afterwards.'],
+    button: { label: 'Choose a new passphrase', url: '{{ url }}' },
+    after: [
+      'The link works once, for 30 minutes. A newer one replaces it.',
+      'If you did not ask for this, leave this mail alone: your passphrase stays as it is.',
+    ],
+    reason: 'You get this mail because a new passphrase was asked for.',
+    holdsKey: true,
+  },
+  'password-changed': {
+    ...plain,
+    needs: ['changedAt', 'resetUrl'],
+    subject: 'Your passphrase was changed',
+    preview: 'If it was not you, choose a new one now.',
+    kicker: 'Account',
+    heading: 'Your passphrase was changed',
+    facts: [['Changed', '{{ changedAt }}']],
+    before: ['If it was you, there is nothing to do. If it was not, choose a new one now.'],
+    button: { label: 'It was not me', url: '{{ resetUrl }}' },
+    reason: 'You get this mail because the passphrase of your account changed.',
+  },
+  'email-change-confirm': {
+    ...plain,
+    needs: ['url'],
+    subject: 'Confirm your new email',
+    preview: 'One step is left before mail goes to this address.',
+    kicker: 'Account',
+    heading: 'Confirm your new email',
+    before: [
+      'Press the button, then press Confirm on the page that opens. Until then nothing changes.',
+    ],
+    button: { label: 'Confirm this email', url: '{{ url }}' },
+    after: ['The link works once, for 24 hours. A newer one replaces it.'],
+    reason: 'You get this mail because this address was given as the new one of an account.',
+    holdsKey: true,
+  },
+  'email-change-notice': {
+    ...plain,
+    needs: ['changedAt', 'url'],
+    subject: 'The email of your account was changed',
+    preview: 'If it was not you, this mail lets you take it back.',
+    kicker: 'Account',
+    heading: 'Your email was changed',
+    facts: [['Changed', '{{ changedAt }}']],
+    before: [
+      'Mail now goes to another address. If it was you, there is nothing to do.',
+      'If it was not, take it back: every session ends, this address returns, and you choose a new passphrase.',
+    ],
+    button: { label: 'Take it back', url: '{{ url }}' },
+    after: ['The link works once, for seven days.'],
+    reason: 'You get this mail because this was the address of the account until now.',
+    holdsKey: true,
+  },
+} satisfies Record<string, LetterTemplate>;
