@@ -20,6 +20,8 @@ const groupOrder = 0xffffffff00000000ffffffffffffffffbce6faada7179e84f3b9cac2fc6
 
 interface Signer {
   privateKey: KeyObject;
+  validFrom: Date;
+  validTo: Date;
   /** The leaf first. */
   certificates: Buffer[];
   issuerAndSerialNumber: Buffer;
@@ -33,11 +35,12 @@ const signers = new WeakMap<SigningKey, Signer>();
  * A detached CMS signature (RFC 5652) in the CAdES baseline form of ETSI EN 319 122-1: content
  * type, message digest and signing-certificate-v2, and no signing time.
  *
- * @throws {KeyUnsuitable} when the key is not on P-256 or is not the certificate's.
+ * @throws {KeyUnsuitable} when the key is not on P-256, not the certificate's or out of date.
  */
-export function signDetached(contentDigest: Uint8Array, key: SigningKey): Buffer {
+export function signDetached(contentDigest: Uint8Array, key: SigningKey, signedAt: Date): Buffer {
   const signer = signers.get(key) ?? readSigner(key);
   signers.set(key, signer);
+  requireValidAt(signedAt, key.keyId, signer);
 
   const attributes = derSetOf([
     attribute(oid.contentType, oid.data),
@@ -98,6 +101,8 @@ function readSigner(key: SigningKey): Signer {
   const essCertificate = der(tags.sequence, der(tags.octetString, leafHash));
   return {
     privateKey,
+    validFrom: leaf.notBefore,
+    validTo: leaf.notAfter,
     certificates: certificates.map(({ rawData }) => Buffer.from(rawData)),
     issuerAndSerialNumber: der(
       tags.sequence,
@@ -126,6 +131,15 @@ function requireSameKey(keyId: string, privateKey: KeyObject, leaf: X509Certific
   if (!ours.equals(Buffer.from(leaf.publicKey.rawData))) {
     throw new KeyUnsuitable(
       `The private key of ${keyId} does not belong to its certificate. Load the two together.`,
+    );
+  }
+}
+
+function requireValidAt(instant: Date, keyId: string, { validFrom, validTo }: Signer): void {
+  if (instant < validFrom || instant > validTo) {
+    throw new KeyUnsuitable(
+      `Key ${keyId} is valid from ${validFrom.toISOString()} to ${validTo.toISOString()}, not at ` +
+        `${instant.toISOString()}. Sign with a key that is in date.`,
     );
   }
 }

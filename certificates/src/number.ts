@@ -27,7 +27,7 @@ function grouped(characters: string): string {
  *
  * @param randomBytes - at least 9 bytes from a cryptographic source; five bits of each are used.
  * @throws {RangeError} when there are fewer.
- * @example newCertificateNumber(new Uint8Array(9)) // 'HQ22-2222-223F'
+ * @example newCertificateNumber(new Uint8Array(9)) // 'HQ22-2222-222H'
  */
 export function newCertificateNumber(randomBytes: Uint8Array): string {
   if (randomBytes.length < freeCharacters) {

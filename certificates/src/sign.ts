@@ -37,7 +37,7 @@ export async function signPdf(
     .update(signed.subarray(0, gapStart))
     .update(signed.subarray(gapEnd))
     .digest();
-  const signature = signDetached(digest, key).toString('hex');
+  const signature = signDetached(digest, key, signedAt).toString('hex');
   if (signature.length > reservedContents.length - 2) {
     throw new KeyUnsuitable(
       `The certificates of key ${key.keyId} make a signature of ${signature.length / 2} bytes; ` +

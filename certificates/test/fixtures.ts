@@ -1,0 +1,111 @@
+import { createHash } from 'node:crypto';
+import { readFileSync } from 'node:fs';
+import { createRequire } from 'node:module';
+import { signDetached } from '../src/cms.ts';
+import {
+  type Authority,
+  type CertificateFonts,
+  type CertificateStatement,
+  createAuthority,
+  fontFiles,
+  renderCertificate,
+  type SigningKey,
+  signPdf,
+} from '../src/index.ts';
+import {
+  dictionaryHead,
+  reservedContents,
+  reservedDate,
+  reservedHead,
+} from '../src/signature-place.ts';
+import { type IssuerCertificate } from '../src/verify.ts';
+
+const { resolve } = createRequire(import.meta.url);
+
+export const fonts = Object.fromEntries(
+  Object.entries(fontFiles).map(([face, file]) => [face, readFileSync(resolve(file))]),
+) as unknown as CertificateFonts;
+
+export const statement: CertificateStatement = {
+  number: 'HQ7K-2M4T-9XWD',
+  holderName: 'Priya Vandermeer',
+  scheme: { slug: 'HQ-DC2', revision: 'F', title: 'Auxiliary DC systems installer' },
+  scope: [
+    'Design and installation of auxiliary systems up to 50 V DC',
+    'Cable sizing, protection and crimped terminations',
+    'Charging from a vehicle, from solar and from DC-DC chargers',
+  ],
+  limits: ['AC mains, inverters above 50 V and shore supplies', 'Traction batteries'],
+  howSat: 'Unsupervised, at a place of the candidate’s choosing.',
+  issuedOn: '2026-11-03',
+  expiresOn: '2029-11-03',
+  issuer: {
+    name: 'Harrow Quay Technical School',
+    address: 'Unit 4, The Old Ropewalk, Harrow Quay, HQ1 4RW',
+  },
+  registerUrl: 'https://register.example/c/Zk3vQx8mT1yR5uWbN0aLhQ',
+  registerPage: 'register.example',
+};
+
+/** Outside programs check against today's date, so the test authority is a day old. */
+export const signedAt = new Date();
+const aDayAgo = new Date(signedAt.getTime() - 86_400_000);
+
+export function newAuthority(organisation = statement.issuer.name): Promise<Authority> {
+  return createAuthority({ organisation, now: aDayAgo, leafYears: 5, rootYears: 20 });
+}
+
+export function keyOf(authority: Authority): SigningKey {
+  return {
+    keyId: authority.keyId,
+    privateKeyPem: authority.privateKeyPem,
+    certificatePem: authority.certificatePem,
+    chainPem: [authority.rootCertificatePem],
+  };
+}
+
+export function issuersOf(authority: Authority): IssuerCertificate[] {
+  return [
+    { keyId: authority.rootKeyId, kind: 'root', pem: authority.rootCertificatePem },
+    { keyId: authority.keyId, kind: 'leaf', pem: authority.certificatePem },
+  ];
+}
+
+export async function signedCertificate(authority: Authority, at = signedAt): Promise<Buffer> {
+  const pdf = await renderCertificate(statement, fonts);
+  return Buffer.from(await signPdf(pdf, keyOf(authority), at));
+}
+
+/** Where the signature stands in a signed file: from its `<` to after its `>`. */
+export function signaturePlace(file: Buffer): { gapStart: number; gapEnd: number } {
+  const [, gapStart, gapEnd] = /\/ByteRange \[0 (\d+) (\d+)/.exec(file.toString('latin1')) ?? [];
+  return { gapStart: Number(gapStart), gapEnd: Number(gapEnd) };
+}
+
+/** The signature of a signed file in hexadecimal, without the zeros that fill its place. */
+export function messageOf(file: Buffer): string {
+  const { gapStart } = signaturePlace(file);
+  const length = Number.parseInt(file.toString('latin1', gapStart + 5, gapStart + 9), 16);
+  return file.toString('latin1', gapStart + 1, gapStart + 1 + (length + 4) * 2);
+}
+
+/** A certificate signed by hand, its signature's place shaped otherwise than it was reserved. */
+export async function signedWithGap(
+  signer: SigningKey,
+  shape: (contents: string) => string,
+): Promise<Buffer> {
+  const [before = '', after = ''] = Buffer.from(await renderCertificate(statement, fonts))
+    .toString('latin1')
+    .replace(reservedDate, '/M (D:20261103100000Z)')
+    .split(reservedHead + reservedContents);
+  const gap = shape(reservedContents);
+  const gapStart = before.length + reservedHead.length;
+  const range = `[0 ${gapStart} ${gapStart + gap.length} ${after.length}]`;
+  const head = before + dictionaryHead(range);
+  const digest = createHash('sha256')
+    .update(Buffer.from(head + after, 'latin1'))
+    .digest();
+  const message = signDetached(digest, signer, signedAt).toString('hex');
+  const filled = shape(`<${message}${'0'.repeat(reservedContents.length - 2 - message.length)}>`);
+  return Buffer.from(head + filled + after, 'latin1');
+}
