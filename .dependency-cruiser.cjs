@@ -56,7 +56,8 @@ module.exports = {
     {
       name: 'features-through-their-service',
       severity: 'error',
-      comment: "Another feature is reached through its exported service, module, errors or pure types.",
+      comment:
+        'Another feature is reached through its exported service, module, errors or pure types.',
       from: { path: '^server/src/([^/]+)/', pathNot: '\\.spec\\.ts$' },
       to: {
         path: '^server/src/[^/]+/.+\\.(repository|controller|schemas)\\.ts$|^server/src/[^/]+/models/',
@@ -97,6 +98,9 @@ module.exports = {
     exclude: { path: '(^|/)(dist|dist-types|node_modules/\\.)' },
     tsConfig: { fileName: 'tsconfig.base.json' },
     tsPreCompilationDeps: true,
-    enhancedResolveOptions: { conditionNames: ['@ferrule/source', 'import', 'node', 'types', 'default'], exportsFields: ['exports'] },
+    enhancedResolveOptions: {
+      conditionNames: ['@ferrule/source', 'import', 'node', 'types', 'default'],
+      exportsFields: ['exports'],
+    },
   },
 };

@@ -65,7 +65,13 @@ export default tseslint.config(
     },
   },
   {
-    files: ['**/*.spec.ts', '**/*.spec.tsx', 'server/test/**', 'site/e2e/**', 'site/src/testing/**'],
+    files: [
+      '**/*.spec.ts',
+      '**/*.spec.tsx',
+      'server/test/**',
+      'site/e2e/**',
+      'site/src/testing/**',
+    ],
     rules: {
       'max-lines': ['error', { max: 400, skipBlankLines: true, skipComments: true }],
       'max-lines-per-function': 'off',

@@ -88,6 +88,7 @@ export async function startCluster({ folder, throwaway = false, report = () => {
   }
   return {
     ...found,
+    folder,
     stop: () => stopCluster(cluster),
     hasEnded: (signal) => watchPostmaster(dataFolder, signal),
   };

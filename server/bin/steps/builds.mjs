@@ -36,7 +36,7 @@ function listFiles(path) {
 }
 
 /** One hash over the names and bytes of files and of what folders hold. */
-export function hashSources(paths) {
+function hashSources(paths) {
   const hash = createHash('sha256');
   const files = paths.flatMap((path) =>
     /\.json$/.test(path) ? [fromRoot(path)] : listFiles(fromRoot(path)),
@@ -70,7 +70,7 @@ async function buildWhenStale(part, build) {
 }
 
 /** Takes out what was compiled from a file that is gone: an old migration must not linger. */
-export function removeOrphans(workspace) {
+function removeOrphans(workspace) {
   const dist = fromRoot(workspace, 'dist');
   if (!existsSync(dist)) return;
   for (const name of readdirSync(dist, { recursive: true })) {
@@ -82,20 +82,21 @@ export function removeOrphans(workspace) {
 
 const local = (...parts) => fromRoot('node_modules', ...parts);
 
-/** Compiles the server and the libraries it stands on. */
-export function compile({ signal, targets = ['server'] }) {
+async function compile(target, signal) {
   // The compiler trusts its record even when what it wrote was deleted.
   const force = isBuilt(serverPart) ? [] : ['--force'];
-  const args = [local('typescript', 'bin', 'tsc'), '-b', ...targets, ...force];
-  return runOrFail(process.execPath, args, { cwd: root, signal });
+  const args = [local('typescript', 'bin', 'tsc'), '-b', target, ...force];
+  await runOrFail(process.execPath, args, { cwd: root, signal });
+  compiled.forEach(removeOrphans);
 }
 
-export const buildServer = (signal) =>
-  buildWhenStale(serverPart, async () => {
-    await compile({ signal });
-    compiled.forEach(removeOrphans);
-  });
+/** Checks every workspace's types and compiles the libraries and the server. */
+export const buildEverything = (signal) => compile('.', signal);
 
+/** Compiles the server and the libraries it stands on, when a source changed. */
+export const buildServer = (signal) => buildWhenStale(serverPart, () => compile('server', signal));
+
+/** Builds the site, when a source changed. */
 export const buildSite = (signal) =>
   buildWhenStale(sitePart, () =>
     runOrFail(process.execPath, [local('vite', 'bin', 'vite.js'), 'build'], {
