@@ -19,7 +19,7 @@ const schema = z.strictObject({
   'pass mark': z.number().min(1).max(100),
   'wait days': z.int().min(0).max(365),
   sat: line,
-  questions: z.record(z.enum(Object.keys(SUBJECTS)), z.int().min(1).max(60)),
+  questions: z.partialRecord(z.enum(Object.keys(SUBJECTS)), z.int().min(1).max(60)),
   aids: z.array(line).default([]),
   scheme: z.strictObject({
     id: z.string().regex(/^[a-z][a-z0-9-]{2,60}$/),
@@ -67,7 +67,9 @@ export function parseBlueprint(source: string, path: string): Blueprint {
     passPercent: front['pass mark'],
     waitDays: front['wait days'],
     sat: front.sat,
-    questions: Object.entries(front.questions).map(([subject, count]) => ({ subject, count })),
+    questions: Object.entries(front.questions).flatMap(([subject, count]) =>
+      count === undefined ? [] : [{ subject, count }],
+    ),
     aids: front.aids,
     agreement,
     scheme: {
