@@ -20,7 +20,7 @@ export interface CertificateStatement {
   registerPage: string;
 }
 
-/** The bytes of the fonts, TTF, WOFF or WOFF2; see `fontFiles`. */
+/** The bytes of the files of `fontFiles`. */
 export interface CertificateFonts {
   text: Uint8Array;
   textBold: Uint8Array;

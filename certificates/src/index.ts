@@ -17,6 +17,7 @@ export {
 export { foldName } from './fold-name.ts';
 export { newCertificateNumber, readCertificateNumber } from './number.ts';
 export { fontFiles } from './pdf/fonts.ts';
+export { checkHolderName } from './pdf/holder-name.ts';
 export { renderCertificate } from './pdf/render.ts';
 export { signPdf } from './sign.ts';
 export { strandPattern } from './strand-pattern.ts';

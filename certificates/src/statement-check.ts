@@ -13,7 +13,7 @@ export function checkStatement(statement: CertificateStatement): CertificateStat
   const { scheme, issuer } = statement;
   return {
     number: checkNumber(statement.number),
-    holderName: checkText('holder’s name', statement.holderName),
+    holderName: checkName(statement.holderName),
     scheme: {
       slug: checkText('scheme reference', scheme.slug),
       revision: checkText('scheme revision', scheme.revision),
@@ -30,6 +30,11 @@ export function checkStatement(statement: CertificateStatement): CertificateStat
     registerUrl: checkUrl(statement.registerUrl),
     registerPage: checkText('register address', statement.registerPage),
   };
+}
+
+/** @throws {StatementInvalid} for a name that may not be printed. */
+export function checkName(holderName: string): string {
+  return checkText('holder’s name', holderName);
 }
 
 function checkNumber(number: string): string {

@@ -1,6 +1,5 @@
 import { createHash } from 'node:crypto';
 import { readFileSync } from 'node:fs';
-import { createRequire } from 'node:module';
 import { signDetached } from '../src/cms.ts';
 import {
   type Authority,
@@ -20,10 +19,8 @@ import {
 } from '../src/signature-place.ts';
 import { type IssuerCertificate } from '../src/verify.ts';
 
-const { resolve } = createRequire(import.meta.url);
-
 export const fonts = Object.fromEntries(
-  Object.entries(fontFiles).map(([face, file]) => [face, readFileSync(resolve(file))]),
+  Object.entries(fontFiles()).map(([face, file]) => [face, readFileSync(file)]),
 ) as unknown as CertificateFonts;
 
 export const statement: CertificateStatement = {

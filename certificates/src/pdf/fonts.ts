@@ -1,3 +1,4 @@
+import { createRequire } from 'node:module';
 import fontkit from '@pdf-lib/fontkit';
 import { type PDFDocument, type PDFFont } from 'pdf-lib';
 import subsetFont from 'subset-font';
@@ -7,24 +8,28 @@ import { CharacterNotInFonts } from '../errors.ts';
 export type Face = keyof CertificateFonts;
 
 /**
- * Where the font files are: module specifiers to resolve from a package that depends on this one.
- * The library reads no files; the caller does, once, and passes the bytes to `renderCertificate`.
+ * Where the font files are. The library reads no files: the caller reads these once and passes the
+ * bytes to `renderCertificate`.
  */
-export const fontFiles: Readonly<Record<Face, string>> = {
-  text: '@expo-google-fonts/merriweather/400Regular/Merriweather_400Regular.ttf',
-  textBold: '@expo-google-fonts/merriweather/700Bold/Merriweather_700Bold.ttf',
-  textItalic:
-    '@expo-google-fonts/merriweather/400Regular_Italic/Merriweather_400Regular_Italic.ttf',
-  data: '@expo-google-fonts/source-sans-3/400Regular/SourceSans3_400Regular.ttf',
-  dataBold: '@expo-google-fonts/source-sans-3/600SemiBold/SourceSans3_600SemiBold.ttf',
-  number:
-    '@fontsource/atkinson-hyperlegible-mono/files/atkinson-hyperlegible-mono-latin-600-normal.woff',
-};
+export function fontFiles(): Record<Face, string> {
+  const require = createRequire(import.meta.url);
+  return {
+    text: require.resolve('@expo-google-fonts/merriweather/400Regular/Merriweather_400Regular.ttf'),
+    textBold: require.resolve('@expo-google-fonts/merriweather/700Bold/Merriweather_700Bold.ttf'),
+    textItalic:
+      require.resolve('@expo-google-fonts/merriweather/400Regular_Italic/Merriweather_400Regular_Italic.ttf'),
+    data: require.resolve('@expo-google-fonts/source-sans-3/400Regular/SourceSans3_400Regular.ttf'),
+    dataBold:
+      require.resolve('@expo-google-fonts/source-sans-3/600SemiBold/SourceSans3_600SemiBold.ttf'),
+    number:
+      require.resolve('@fontsource/atkinson-hyperlegible-mono/files/atkinson-hyperlegible-mono-latin-600-normal.woff'),
+  };
+}
 
 /** Ligatures would make searching and copying the text unreliable. */
 const features = { liga: false, clig: false };
 
-const faces = Object.keys(fontFiles) as Face[];
+const faces: Face[] = ['text', 'textBold', 'textItalic', 'data', 'dataBold', 'number'];
 
 /** Which face lends a letter that another lacks. */
 const lenders: Readonly<Record<Face, Face[]>> = {
@@ -48,7 +53,7 @@ interface Glyph {
 }
 
 /** Letters of one face, ready to be shown. */
-export interface Run {
+interface Run {
   face: Face;
   glyphs: Glyph[];
 }

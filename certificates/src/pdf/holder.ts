@@ -38,13 +38,7 @@ export function drawHolder(
   pen: Pen,
   statement: CertificateStatement,
 ): { elements: Element[]; bottom: number } {
-  const name = fitTwoLines(pen, statement.holderName, {
-    what: 'holder’s name',
-    style: nameStyle,
-    width: textWidth,
-    oneLineFrom: 44,
-    smallest: 20,
-  });
+  const name = fitName(pen, statement.holderName);
   const title = fitTwoLines(pen, statement.scheme.title, {
     what: 'title of the scheme',
     style: titleStyle,
@@ -67,6 +61,17 @@ export function drawHolder(
   y += 23 + title.style.size;
   elements.push(drawCentred(pen, 'H2', { ...title, y }));
   return { elements, bottom: y + (title.lines.length - 1) * lineHeight(title) };
+}
+
+/** @throws {StatementTooLong} when two lines do not hold the name. */
+export function fitName(pen: Pen, holderName: string): SetLines {
+  return fitTwoLines(pen, holderName, {
+    what: 'holder’s name',
+    style: nameStyle,
+    width: textWidth,
+    oneLineFrom: 44,
+    smallest: 20,
+  });
 }
 
 function lineHeight({ style }: SetLines): number {

@@ -151,7 +151,7 @@ const months =
   );
 
 /** 2026-11-03 as 3 November 2026. */
-export function longDate(date: string): string {
+function longDate(date: string): string {
   const [year, month, day] = date.split('-').map(Number);
   return `${day} ${months[(month ?? 0) - 1]} ${year}`;
 }
