@@ -47,7 +47,6 @@ export interface RegisterAnswer {
     issuedOn: string;
     expiresOn: string;
     withdrawnOn: string | null;
-    replacedBy: null;
   };
 }
 

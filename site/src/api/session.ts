@@ -37,19 +37,23 @@ export function readNext(search: string): string | null {
 
 /**
  * For loaders of pages that need a session: gives it, or sends the person to sign in (or to
- * the second step) and back here afterwards.
+ * the second step) and back here afterwards. With roles named, one of them is needed.
  */
 export async function requireSession(
   args: Pick<LoaderArgs, 'context' | 'request'>,
-  role?: Role,
+  ...roles: Role[]
 ): Promise<SessionView> {
   const session = await cacheOf(args).ensureQueryData(sessionQuery);
   const url = new URL(args.request.url);
   const next = encodeURIComponent(url.pathname + url.search);
   if (!session) sendTo(`/sign-in?next=${next}`);
-  if (role && !session.account.roles.includes(role)) sendTo('/problems/not-allowed');
-  if (role && needsSecondStep(session)) sendTo(`/second-factor?next=${next}`);
+  if (!holdsOneOf(session, roles)) sendTo('/problems/not-allowed');
+  if (roles.length > 0 && needsSecondStep(session)) sendTo(`/second-factor?next=${next}`);
   return session;
+}
+
+function holdsOneOf({ account }: SessionView, roles: Role[]): boolean {
+  return roles.length === 0 || roles.some((role) => account.roles.includes(role));
 }
 
 function sendTo(path: string): never {

@@ -24,15 +24,19 @@ interface FormFieldProps {
   className?: string;
   value?: string;
   onValue?: (value: string) => void;
+  /** The id of one more element that describes the entry. */
+  describedBy?: string;
   children?: ReactNode;
 }
 
 /** Label, entry, hint and, when something is wrong, what is wrong. Stands in a `Form`. */
 export function FormField({ label, hint, missing, wrong, children, ...props }: FormFieldProps) {
-  const { onValue, className, ...input } = props;
+  const { onValue, className, describedBy, ...input } = props;
   const id = useId();
   const error = use(FormContext)[props.name];
-  const described = [hint && `${id}-hint`, error && `${id}-error`].filter(Boolean).join(' ');
+  const described = [error && `${id}-error`, hint && `${id}-hint`, describedBy]
+    .filter(Boolean)
+    .join(' ');
   return (
     <div className={error ? 'field wrong' : 'field'}>
       <label className="field-label" htmlFor={id}>
@@ -70,17 +74,13 @@ interface PassphraseFieldProps {
   /** A new one shows the rule of fifteen divisions. */
   isNew?: boolean;
   hint?: ReactNode;
+  /** Why what stands there is refused, though it is long enough. */
+  refusal?: string | null | undefined;
   onValue?: (value: string) => void;
 }
 
 /** A passphrase: may be pasted, may be shown. */
-export function PassphraseField({
-  name,
-  label,
-  isNew = false,
-  hint,
-  onValue,
-}: PassphraseFieldProps) {
+export function PassphraseField({ name, label, isNew = false, ...props }: PassphraseFieldProps) {
   const [value, setValue] = useState('');
   const [shown, setShown] = useState(false);
   const ruleId = useId();
@@ -98,10 +98,11 @@ export function PassphraseField({
         missing={isNew ? 'Choose a passphrase.' : 'Type your passphrase.'}
         maxLength={200}
         value={value}
-        hint={hint}
+        hint={props.hint}
+        {...(isNew && { describedBy: ruleId })}
         onValue={(typed) => {
           setValue(typed);
-          onValue?.(typed);
+          props.onValue?.(typed);
         }}
       >
         <TextField.Slot side="right">
@@ -116,7 +117,7 @@ export function PassphraseField({
           </button>
         </TextField.Slot>
       </FormField>
-      {isNew && <PassRule length={characters} id={ruleId} />}
+      {isNew && <PassRule length={characters} id={ruleId} refusal={props.refusal} />}
     </>
   );
 }
