@@ -84,7 +84,8 @@ export async function embedFonts(
   document.registerFontkit(fontkit);
   const cut = {} as Record<Face, CutFont>;
   for (const face of faces) {
-    const bytes = await subsetFont(Buffer.from(files[face]), text, { targetFormat: 'sfnt' });
+    // The A, because a font cut down to no letter at all cannot be read.
+    const bytes = await subsetFont(Buffer.from(files[face]), `A${text}`, { targetFormat: 'sfnt' });
     cut[face] = {
       loaded: fontkit.create(bytes),
       embedded: await document.embedFont(bytes, { subset: true, features }),

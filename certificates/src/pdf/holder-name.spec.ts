@@ -6,6 +6,7 @@ describe('a name its holder confirms', () => {
   it.each([
     ['Zoë Nguyễn-Łukasiewicz', 'Zoë Nguyễn-Łukasiewicz'],
     ['  Ema  ', 'Ema'],
+    ['Ελένη', 'Ελένη'],
     ['Tawhiri'.replace('a', 'a\u0304'), 'Tāwhiri'],
   ])('is taken as it will be printed: %s', async (typed, name) => {
     expect(await checkHolderName(typed, fonts)).toEqual({ ok: true, name });
