@@ -7,6 +7,7 @@ export { presentQuestion } from './questions/present.ts';
 export { readAnswer } from './questions/read-answer.ts';
 export { markQuestion } from './questions/mark.ts';
 export { workQuestion } from './questions/work.ts';
+export { slipWords } from './questions/slip-words.ts';
 export { parseBlueprint } from './papers/blueprint.ts';
 export { assemblePaper } from './papers/assemble.ts';
 export { PoolTooSmall } from './papers/pool-too-small.ts';

@@ -45,8 +45,6 @@ export interface ChargeLog {
   readings: ChargeReading[];
   bulkEndsH: number | null;
   floatStartsH: number | null;
-  /** Out of the charger up to the end of bulk, Ah. */
-  bulkAh: number;
 }
 
 interface State {
@@ -69,7 +67,7 @@ interface State {
 export function logCharge(run: ChargeRun): ChargeLog {
   requireSettings(run);
   const stepH = run.stepS / 3600;
-  const log: ChargeLog = { readings: [], bulkEndsH: null, floatStartsH: null, bulkAh: 0 };
+  const log: ChargeLog = { readings: [], bulkEndsH: null, floatStartsH: null };
   let state: State = {
     hour: 0,
     charge: run.charge,
@@ -95,7 +93,6 @@ function record(run: ChargeRun, state: State, log: ChargeLog): void {
     state.stage = 'absorption';
     state.absorptionFromH = state.hour;
     log.bulkEndsH = state.hour;
-    log.bulkAh = run.charger.limitA * state.hour;
   } else if (state.stage === 'absorption' && absorptionIsOver(run, state, reading.amps)) {
     state.stage = 'float';
     log.floatStartsH = state.hour;

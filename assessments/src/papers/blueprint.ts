@@ -33,6 +33,10 @@ const schema = z.strictObject({
   appeal: z.string().trim().min(1).max(1000),
 });
 
+function hasNoDouble(questions: { subject: string }[]): boolean {
+  return new Set(questions.map(({ subject }) => subject)).size === questions.length;
+}
+
 function isZone(name: string): boolean {
   try {
     return new Intl.DateTimeFormat('en', { timeZone: name }).resolvedOptions().timeZone !== '';

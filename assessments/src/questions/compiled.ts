@@ -1,4 +1,5 @@
 import { type BatteryKind } from '../electrical/battery.ts';
+import { type Stage } from '../electrical/charging.ts';
 import { type Expr } from './expression.ts';
 import {
   type CautionView,
@@ -35,7 +36,7 @@ export type CurveRead =
   | { kind: 'bulk ends' }
   | { kind: 'float starts' }
   | { kind: 'absorption lasts' }
-  | { kind: 'charge in bulk' }
+  | { kind: 'amps before float' }
   | { kind: 'amps at'; at: string }
   | { kind: 'volts at'; at: string }
   | { kind: 'battery amps at'; at: string };
@@ -109,7 +110,8 @@ export interface CurvePlan {
   };
   load: { amps: string; from: string | null } | null;
   hours: number;
-  intervals: { label: string; stage: 'bulk' | 'absorption' | 'float' }[];
+  /** An interval may be kept before or after the time a given names. */
+  intervals: { label: string; stage: Stage; before: string | null; after: string | null }[];
 }
 
 /** A question as it is kept: everything checked, nothing left to parse. */

@@ -24,12 +24,25 @@ export function planCurve(curve: CurveSheet, givens: readonly Given[]): CurvePla
     },
     load: load ? { amps: load.amps, from: load.from ?? null } : null,
     hours,
-    intervals: Object.entries(intervals).map(([label, stage]) => ({ label, stage })),
+    intervals: Object.entries(intervals).map(([label, entry]) => {
+      const marked = typeof entry === 'string' ? { stage: entry } : entry;
+      return { label, before: null, after: null, ...marked };
+    }),
   };
 }
 
-function settingsOf({ battery, charger, load }: CurveSheet): [string | undefined, string][] {
+function settingsOf(curve: CurveSheet): [string | undefined, string][] {
+  const { battery, charger, load, intervals } = curve;
+  const times = Object.values(intervals).flatMap((entry): [string | undefined, string][] =>
+    typeof entry === 'string'
+      ? []
+      : [
+          [entry.before, 'h'],
+          [entry.after, 'h'],
+        ],
+  );
   return [
+    ...times,
     [battery.capacity, 'Ah'],
     [battery.charge, '%'],
     [charger.limit, 'A'],

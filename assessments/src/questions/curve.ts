@@ -57,9 +57,10 @@ export function readOff(log: ChargeLog, read: CurveRead, values: Values): number
       const from = onRun(log.bulkEndsH, 'bulk does not end');
       return (onRun(log.floatStartsH, 'float does not start') - from) * SECONDS_PER_HOUR;
     }
-    case 'charge in bulk':
-      onRun(log.bulkEndsH, 'bulk does not end');
-      return log.bulkAh * SECONDS_PER_HOUR;
+    case 'amps before float': {
+      onRun(log.floatStartsH, 'float does not start');
+      return log.readings.findLast((reading) => reading.stage === 'absorption')?.amps ?? NaN;
+    }
     default: {
       const reading = readingAt(log.readings, (values.get(read.at) ?? NaN) / SECONDS_PER_HOUR);
       if (read.kind === 'volts at') return reading.volts;
@@ -91,7 +92,7 @@ function readingAt(readings: readonly ChargeReading[], hour: number): ChargeRead
 }
 
 /** What is printed: at most 400 samples, every jump kept, and the intervals to be named. */
-export function drawCurve(plan: CurvePlan, log: ChargeLog): CurveView {
+export function drawCurve(plan: CurvePlan, log: ChargeLog, values: Values): CurveView {
   const stride = Math.ceil(log.readings.length / MOST_SAMPLES);
   const kept = log.readings.filter((reading, index) => {
     const next = log.readings[index + 1];
@@ -103,7 +104,7 @@ export function drawCurve(plan: CurvePlan, log: ChargeLog): CurveView {
     hours: kept.map((reading) => round(reading.hour, 4)),
     volts: kept.map((reading) => round(reading.volts, 3)),
     amps: kept.map((reading) => round(reading.amps, 2)),
-    intervals: markIntervals(plan, log),
+    intervals: markIntervals(plan, log, values),
   };
 }
 
@@ -111,23 +112,28 @@ function round(value: number, decimals: number): number {
   return Number(value.toFixed(decimals));
 }
 
-/** A stage marked twice is cut in two: one interval in each half. */
-function markIntervals(plan: CurvePlan, log: ChargeLog): CurveView['intervals'] {
-  return plan.intervals.map(({ label, stage }, index) => {
+/** A stage marked twice without times is cut in two: one interval in each half. */
+function markIntervals(plan: CurvePlan, log: ChargeLog, values: Values): CurveView['intervals'] {
+  const hourOf = (name: string | null, otherwise: number): number =>
+    name === null ? otherwise : (values.get(name) ?? NaN) / SECONDS_PER_HOUR;
+  return plan.intervals.map((interval, index) => {
+    const { label, stage, before, after } = interval;
     const [from, to] = spanOf(stage, plan, log);
-    const alike = plan.intervals.filter((one) => one.stage === stage).length;
-    const before = plan.intervals.slice(0, index).filter((one) => one.stage === stage).length;
-    const piece = (to - from) / alike;
+    const isSame = (one: typeof interval): boolean =>
+      one.stage === stage && one.before === before && one.after === after;
+    const pieces = plan.intervals.filter(isSame).length;
+    const place = plan.intervals.slice(0, index).filter(isSame).length;
+    const start = Math.max(from, hourOf(after, from));
+    const piece = (Math.min(to, hourOf(before, to)) - start) / pieces;
     if (!(piece >= SHORTEST_INTERVAL_H)) {
       throw new Error(
         `Interval ${label} (${stage}) is too short to read; narrow the given values.`,
       );
     }
-    const start = from + piece * before;
     return {
       label,
-      fromH: round(start + piece * INSET, 2),
-      toH: round(start + piece * (1 - INSET), 2),
+      fromH: round(start + piece * (place + INSET), 2),
+      toH: round(start + piece * (place + 1 - INSET), 2),
     };
   });
 }

@@ -84,7 +84,7 @@ function drawReadings(question: Compiled, values: Map<string, number>): CurveVie
   for (const step of question.steps) {
     if (step.how.kind === 'read') values.set(step.name, readOff(log, step.how.read, values));
   }
-  return drawCurve(question.curve, log);
+  return drawCurve(question.curve, log, values);
 }
 
 function drawGiven({ source, unit }: Given, draws: Draws): number {

@@ -14,7 +14,7 @@ import { explainPart } from './explain.ts';
 import { type Finding, judgeQuantity } from './judge.ts';
 import { judgeOption } from './judge-option.ts';
 import { type Judged } from './judged.ts';
-import { type OwnValues, ownFor } from './own-values.ts';
+import { isBeyondSense, type OwnValues, ownFor } from './own-values.ts';
 import { presentPart } from './present.ts';
 import { readAnswer, readTyped } from './read-answer.ts';
 import { sizeSi } from './sizes.ts';
@@ -148,17 +148,13 @@ function markOption(
   return { ...judged, finding, own };
 }
 
-/** A step nobody could have meant is not carried on: wrong sign, or a million times out. */
-const FURTHEST = 1e6;
-
 function keepOwn(
   desk: Desk,
   part: QuantityPart | SizePart,
   { finding, value }: { finding: Finding; value: number },
 ): void {
-  const key = desk.drawn.values[part.step] ?? NaN;
-  const ratio = value / key;
-  if (key !== 0 && !(ratio >= 1 / FURTHEST && ratio <= FURTHEST)) {
+  const step = desk.question.steps.find((one) => one.name === part.step);
+  if (step && isBeyondSense(value, desk.drawn.values[part.step] ?? NaN, step.unit)) {
     const detail = 'the value is beyond sense and is not carried on';
     desk.trace.push({ part: part.id, rule: 'carry-stopped', detail });
     return;

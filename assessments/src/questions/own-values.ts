@@ -1,6 +1,8 @@
 import { type Compiled, type Drawn, type Option } from './compiled.ts';
 import { namesIn } from './expression.ts';
 import { leansOn, solve } from './solve.ts';
+import { parseUnit } from './unit-expression.ts';
+import { type Dimension, sameDimension, type Unit } from './units.ts';
 
 /** A trainee's own answer to a step, and whether it was anything but right. */
 export type OwnValues = Map<string, { value: number; part: string; isOff: boolean }>;
@@ -46,8 +48,25 @@ function usedOwn(question: Compiled, { step, options, own }: Wanted): [string, O
   const conditions = (options ?? []).flatMap(({ right }) =>
     typeof right === 'boolean' ? [] : [...namesIn(right)],
   );
-  const needed = leansOn(question, step === undefined ? conditions : [step]);
+  // What an own value was made of matters no more: the search stops there.
+  const stop = new Set([...own.keys()].filter((name) => name !== step));
+  const needed = leansOn(question, step === undefined ? conditions : [step], stop);
   return [...own].filter(([name]) => needed.has(name) && name !== step);
 }
 
 type OwnValue = { value: number; part: string; isOff: boolean };
+
+/** A value a million times out could not be meant. */
+const FURTHEST = 1e6;
+/** Currents and voltages run both ways, and so does what is left of them; nothing else here does. */
+const RUNS_BOTH_WAYS: readonly Dimension[] = ['A', 'V', ''].map(
+  (unit) => parseUnit(unit).dimension,
+);
+
+/** Whether a trainee's own value is one nobody could have meant: a cable of minus 4 mm². */
+export function isBeyondSense(value: number, key: number, unit: Unit): boolean {
+  const ratio = Math.abs(value / key);
+  const isFar = key !== 0 && !(ratio >= 1 / FURTHEST && ratio <= FURTHEST);
+  const mayBeNegative = RUNS_BOTH_WAYS.some((one) => sameDimension(one, unit.dimension));
+  return isFar || !Number.isFinite(value) || (value <= 0 && key > 0 && !mayBeNegative);
+}

@@ -1,7 +1,7 @@
-import { type Part } from './compiled.ts';
+import { type Drawn, type Part, type SizePart } from './compiled.ts';
 import { type Judged, type Page } from './judged.ts';
 import { fillIn } from './placeholders.ts';
-import { type Remark } from './types.ts';
+import { type RawAnswer, type Remark } from './types.ts';
 
 /** What the marker writes beside a part. */
 export function remarksOn(page: Page, judged: Judged): Remark[] {
@@ -89,5 +89,15 @@ function onWrong({ drawn }: Page, { part, answer }: Judged): Remark[] {
     return say ? [lost(null, say)] : [lost(null, 'not this one')];
   }
   const why = 'no slip we know leads here: put your lines beside the worked ones';
-  return part.carry === 'never' ? [lost(null, why), note(part.because)] : [lost(null, why)];
+  const remark = lost(null, part.kind === 'size' ? sizeWords(drawn, { part, answer }) : why);
+  return part.carry === 'never' && part.kind !== 'size' ? [remark, note(part.because)] : [remark];
+}
+
+function sizeWords(drawn: Drawn, { part, answer }: { part: SizePart; answer: RawAnswer }): string {
+  const held = drawn.parts[part.id];
+  if (held?.kind !== 'options') return '';
+  const place = (id: string | null): number => held.options.findIndex((one) => one.id === id);
+  return place(answer.option) < place(held.right)
+    ? `too small for the job: ${part.because || 'it must be the next size that passes'}`
+    : 'it would do, but a smaller stock size does as well';
 }

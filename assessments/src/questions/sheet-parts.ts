@@ -114,9 +114,10 @@ function readChoice(
 }
 
 function readStage(label: string, scope: PartScope): Bare<ChoicePart> {
-  const stage = scope.curve?.intervals[label];
-  if (!stage) throw new Error(`No interval ${label} is marked on a curve; add it to the curve.`);
-  return { kind: 'choice', options: stageOptions(stage, STAGES) };
+  const entry = scope.curve?.intervals[label];
+  if (!entry) throw new Error(`No interval ${label} is marked on a curve; add it to the curve.`);
+  const right = typeof entry === 'string' ? entry : entry.stage;
+  return { kind: 'choice', options: stageOptions(right, STAGES) };
 }
 
 function stepNamed(name: string, scope: PartScope): Step {

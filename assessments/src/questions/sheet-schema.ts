@@ -38,7 +38,7 @@ const read = z.strictObject({
     'bulk ends',
     'float starts',
     'absorption lasts',
-    'charge in bulk',
+    'amps before float',
     'amps at',
     'volts at',
     'battery amps at',
@@ -47,6 +47,8 @@ const read = z.strictObject({
   because: text,
   figures: z.int().min(1).max(6).default(3),
 });
+
+const stage = z.enum(['bulk', 'absorption', 'float']);
 
 const curve = z.strictObject({
   battery: z.strictObject({
@@ -66,7 +68,7 @@ const curve = z.strictObject({
   hours: z.number().min(0.5).max(24),
   intervals: z.record(
     z.string().regex(/^[A-E]$/, 'intervals are lettered A to E'),
-    z.enum(['bulk', 'absorption', 'float']),
+    z.union([stage, z.strictObject({ stage, before: name.optional(), after: name.optional() })]),
   ),
   reads: z.record(name, read).default({}),
 });

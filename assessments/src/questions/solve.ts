@@ -2,15 +2,19 @@ import { type Compiled } from './compiled.ts';
 import { evaluate, NotFinite } from './evaluate.ts';
 import { type Expr, namesIn } from './expression.ts';
 
-/** Steps a set of names leans on, themselves included, in no order. */
-export function leansOn(question: Compiled, names: Iterable<string>): Set<string> {
+/** Steps a set of names leans on, themselves included; the search goes no further than `stop`. */
+export function leansOn(
+  question: Compiled,
+  names: Iterable<string>,
+  stop?: ReadonlySet<string>,
+): Set<string> {
   const found = new Set<string>();
   const waiting = [...names];
   for (let name = waiting.pop(); name !== undefined; name = waiting.pop()) {
     const step = question.steps.find((one) => one.name === name);
     if (!step || found.has(name)) continue;
     found.add(name);
-    if (step.how.kind === 'sum') waiting.push(...namesIn(step.how.expr));
+    if (step.how.kind === 'sum' && !stop?.has(name)) waiting.push(...namesIn(step.how.expr));
   }
   return found;
 }
