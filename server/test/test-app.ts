@@ -1,9 +1,11 @@
 import { Test } from '@nestjs/testing';
 import type { NestFastifyApplication } from '@nestjs/platform-fastify';
 import type { SendMailOptions } from 'nodemailer';
+import { getConnectionToken } from '@nestjs/sequelize';
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { QueryTypes, type Sequelize } from 'sequelize';
 import { AppModule } from '../src/app.module.ts';
 import { createAdapter, setUpApp } from '../src/app.setup.ts';
 import { Clock } from '../src/clock/clock.ts';
@@ -57,6 +59,8 @@ export interface TestApp {
   readonly mails: KeptMails;
   /** Runs every waiting job, and those they enqueue. */
   runJobs(): Promise<number>;
+  /** Looks straight into the database, with the server's role. */
+  query<T extends object>(sql: string, bind?: unknown[]): Promise<T[]>;
   close(): Promise<void>;
 }
 
@@ -65,6 +69,7 @@ export const PUBLIC_URL = 'http://127.0.0.1:4780';
 function testConfig(webUrl: string, keysFolder: string) {
   return readConfig({
     NODE_ENV: 'test',
+    JOB_WORKERS: '0',
     DEMONSTRATION: '1',
     PUBLIC_URL,
     DATABASE_URL: webUrl,
@@ -101,6 +106,8 @@ export async function createTestApp(): Promise<TestApp> {
     database,
     mails,
     runJobs: () => app.get(JobsService).runWaiting(),
+    query: <T extends object>(sql: string, bind: unknown[] = []) =>
+      app.get<Sequelize>(getConnectionToken()).query<T>(sql, { bind, type: QueryTypes.SELECT }),
     close: async () => {
       await app.close();
       await database.drop();

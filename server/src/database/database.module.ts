@@ -23,6 +23,8 @@ useAmbientTransactions();
         dialectOptions: {
           statement_timeout: 15_000,
           application_name: 'ferrule',
+          // A receipt is a promise: what was answered is on disk, whatever the cluster's default.
+          options: '-c synchronous_commit=on',
         },
         retryAttempts: 0,
       }),

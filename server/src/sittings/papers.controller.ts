@@ -4,6 +4,10 @@ import { Allow } from '../http/allow.decorator.ts';
 import { CurrentAccount } from '../http/current-account.decorator.ts';
 import { Responds } from '../http/responds.decorator.ts';
 import {
+  grantedTimesSchema,
+  timeAllowanceSchema,
+  type GrantedTimes,
+  type TimeAllowance,
   lookSchema,
   openedItemsSchema,
   paperSlugSchema,
@@ -17,6 +21,7 @@ import {
   type ResultsPage,
   type ResultsQuery,
 } from './papers.schemas.ts';
+import { AllowancesService } from './allowances.service.ts';
 import { LooksService } from './looks.service.ts';
 import { ResultsListService } from './results-list.service.ts';
 import { StandingService } from './standing.service.ts';
@@ -28,6 +33,7 @@ export class PapersController {
     private readonly standings: StandingService,
     private readonly results: ResultsListService,
     private readonly looks: LooksService,
+    private readonly allowances: AllowancesService,
   ) {}
 
   @Get('papers/:slug')
@@ -48,6 +54,23 @@ export class PapersController {
     @Query({ schema: resultsQuerySchema }) query: ResultsQuery,
   ): Promise<ResultsPage> {
     return this.results.list(slug, query.cursor ?? null);
+  }
+
+  @Get('time-allowances')
+  @Allow('certification-manager')
+  @Responds(200, grantedTimesSchema)
+  allowedTimes(): Promise<GrantedTimes> {
+    return this.allowances.list();
+  }
+
+  @Post('time-allowances')
+  @Allow('certification-manager')
+  @Responds(201, grantedTimesSchema)
+  allowTime(
+    @CurrentAccount() account: SignedInAccount,
+    @Body({ schema: timeAllowanceSchema }) input: TimeAllowance,
+  ): Promise<GrantedTimes> {
+    return this.allowances.grant(account.id, input);
   }
 
   @Post('sittings/:id/looks')

@@ -84,7 +84,7 @@ export const lookSchema = z.strictObject({
   reason: z
     .string()
     .trim()
-    .min(10, 'say in ten letters or more why you open the items')
+    .min(10, 'give the reason in ten letters or more')
     .max(500)
     .regex(/^[^\0\p{Surrogate}]*$/u, 'holds characters that cannot be kept'),
 });
@@ -110,3 +110,23 @@ export const openedItemsSchema = z.object({
   ),
 });
 export type OpenedItems = z.infer<typeof openedItemsSchema>;
+
+export const timeAllowanceSchema = z.strictObject({
+  email: z.string().trim().toLowerCase().min(3).max(254),
+  percent: z.int().min(0).max(300),
+  reason: lookSchema.shape.reason,
+});
+export type TimeAllowance = z.infer<typeof timeAllowanceSchema>;
+
+/** Extra time as it counts for a person's next sitting. */
+const grantedTimeSchema = z.object({
+  name: z.string(),
+  email: z.string(),
+  percent: z.number(),
+  reason: z.string(),
+  grantedAt: instant,
+});
+export type GrantedTime = z.infer<typeof grantedTimeSchema>;
+
+export const grantedTimesSchema = z.object({ allowances: z.array(grantedTimeSchema) });
+export type GrantedTimes = z.infer<typeof grantedTimesSchema>;

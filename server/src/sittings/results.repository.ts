@@ -89,6 +89,21 @@ export class ResultsRepository {
     );
   }
 
+  /** How far each of several people has come with a paper; who never sat it is left out. */
+  async progressOf(
+    accountIds: readonly string[],
+    paperSlug: string,
+    now: Date,
+  ): Promise<{ accountId: string; isOpen: boolean; passed: boolean }[]> {
+    return this.sequelize.query(
+      `SELECT s.account_id AS "accountId", coalesce(bool_or(r.passed), false) AS passed,
+              bool_or(s.handed_in_at IS NULL AND s.closes_at > $3) AS "isOpen"
+         FROM sittings s LEFT JOIN sitting_results r ON r.sitting_id = s.id
+        WHERE s.account_id = ANY($1::uuid[]) AND s.paper_slug = $2 GROUP BY s.account_id`,
+      { bind: [[...accountIds], paperSlug, now], type: QueryTypes.SELECT },
+    );
+  }
+
   /** Papers handed in, the newest start first. */
   async list(paperSlug: string, after: Place | null, limit: number): Promise<ListedSitting[]> {
     return this.sequelize.query<ListedSitting>(

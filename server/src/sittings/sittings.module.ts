@@ -5,6 +5,7 @@ import { MailModule } from '../mail/mail.module.ts';
 import { PapersModule } from '../papers/papers.module.ts';
 import { QuestionsModule } from '../questions/questions.module.ts';
 import { AllowancesRepository } from './allowances.repository.ts';
+import { AllowancesService } from './allowances.service.ts';
 import { AnswersRepository } from './answers.repository.ts';
 import { ClosingService } from './closing.service.ts';
 import { LooksRepository } from './looks.repository.ts';
@@ -52,6 +53,7 @@ import { StartingService } from './starting.service.ts';
   controllers: [PapersController, SittingsController],
   providers: [
     AllowancesRepository,
+    AllowancesService,
     AnswersRepository,
     ClosingService,
     LooksRepository,

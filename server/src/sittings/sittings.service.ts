@@ -10,7 +10,7 @@ import { SittingClosed } from './sittings.errors.ts';
 import { SittingsRepository, type SittingNow } from './sittings.repository.ts';
 import type { HandedIn, SittingView, StartSitting } from './sittings.schemas.ts';
 import { SittingSheets } from './sitting-sheets.ts';
-import { StandingService } from './standing.service.ts';
+import { StandingService, type Progress } from './standing.service.ts';
 import { StartingService } from './starting.service.ts';
 
 @Injectable()
@@ -27,6 +27,11 @@ export class SittingsService {
   /** Where a person stands with a paper, for whatever shows it. */
   async standing(accountId: string, paperSlug: string): Promise<StandingView> {
     return presentStanding(await this.standings.standing(accountId, paperSlug));
+  }
+
+  /** How far each of several people has come with a paper; who never sat it is left out. */
+  progressOf(accountIds: readonly string[], paperSlug: string): Promise<Map<string, Progress>> {
+    return this.standings.progressOf(accountIds, paperSlug);
   }
 
   async start(account: SignedInAccount, input: StartSitting): Promise<SittingView> {

@@ -10,6 +10,9 @@ import { ResultsRepository } from './results.repository.ts';
 import { SittingsRepository } from './sittings.repository.ts';
 import { decideStanding, type Standing } from './standing.ts';
 
+/** How far someone has come with a paper. */
+export type Progress = 'sitting' | 'passed' | 'not-passed';
+
 /** Whether a person may start a paper now. */
 @Injectable()
 export class StandingService {
@@ -36,6 +39,18 @@ export class StandingService {
     const earlier = await this.results.earlier(accountId, slug);
     const sittings = earlier.filter(({ id }) => id !== startingId);
     return decideStanding({ sittings, certificateId, now, zone: scheme.zone });
+  }
+
+  /** How far each of several people has come; who never sat the paper is left out. */
+  async progressOf(accountIds: readonly string[], slug: string): Promise<Map<string, Progress>> {
+    const now = await this.sittings.now();
+    const rows = await this.results.progressOf(accountIds, slug, now);
+    return new Map(
+      rows.map(({ accountId, isOpen, passed }) => [
+        accountId,
+        isOpen ? 'sitting' : passed ? 'passed' : 'not-passed',
+      ]),
+    );
   }
 
   async paper(accountId: string, slug: string): Promise<PaperView> {
