@@ -4,7 +4,7 @@ import { ClassViewModule } from './classes/class-view.module.ts';
 import { ClassesModule } from './classes/classes.module.ts';
 import { AccountsModule } from './accounts/accounts.module.ts';
 import { AuditModule } from './audit/audit.module.ts';
-import { ClockModule } from './clock/clock.ts';
+import { Clock, ClockModule } from './clock/clock.ts';
 import { ConfigModule } from './config/config.module.ts';
 import type { Config } from './config/config.schema.ts';
 import { CoursesModule } from './courses/courses.module.ts';
@@ -23,12 +23,12 @@ import { WorksheetsModule } from './worksheets/worksheets.module.ts';
 /** The list of features, nothing else. */
 @Module({})
 export class AppModule {
-  static with(config: Config): DynamicModule {
+  static with(config: Config, clock = new Clock()): DynamicModule {
     return {
       module: AppModule,
       imports: [
         ConfigModule.with(config),
-        ClockModule,
+        ClockModule.with(clock),
         DatabaseModule,
         JobsModule,
         CertificatesModule,

@@ -1,4 +1,4 @@
-import { Global, Injectable, Module } from '@nestjs/common';
+import { Global, Injectable, Module, type DynamicModule } from '@nestjs/common';
 
 /** The time, injected so that tests can set it. */
 @Injectable()
@@ -17,5 +17,13 @@ export class Clock {
 }
 
 @Global()
-@Module({ providers: [Clock], exports: [Clock] })
-export class ClockModule {}
+@Module({})
+export class ClockModule {
+  static with(clock: Clock): DynamicModule {
+    return {
+      module: ClockModule,
+      providers: [{ provide: Clock, useValue: clock }],
+      exports: [Clock],
+    };
+  }
+}

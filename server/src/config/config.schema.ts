@@ -23,6 +23,7 @@ export const configSchema = z
     MAIL_SINK_URL: z.string().default(''),
     KEYS_FOLDER: z.string().min(1),
     SITE_FOLDER: z.string().default(''),
+    JOB_WORKERS: z.enum(['0', '1']).default('1'),
   })
   .superRefine((env, context) => {
     const address = new URL(env.PUBLIC_URL);

@@ -27,18 +27,18 @@ interface RawConnection {
 export class JobsService implements OnApplicationBootstrap, OnApplicationShutdown {
   private readonly boss: PgBoss;
   private readonly handlers = new Map<QueueName, Handler>();
-  private readonly isTest: boolean;
+  private readonly hasWorkers: boolean;
 
   constructor(
     @Inject(CONFIG) config: Config,
     private readonly transactions: Transactions,
   ) {
-    this.isTest = config.NODE_ENV === 'test';
+    this.hasWorkers = config.JOB_WORKERS === '1';
     this.boss = new PgBoss({
       connectionString: config.DATABASE_URL,
       schema: JOBS_SCHEMA,
       migrate: false,
-      supervise: !this.isTest,
+      supervise: this.hasWorkers,
       schedule: false,
       max: 4,
       application_name: 'ferrule-jobs',
@@ -53,7 +53,7 @@ export class JobsService implements OnApplicationBootstrap, OnApplicationShutdow
 
   async onApplicationBootstrap(): Promise<void> {
     await this.boss.start();
-    if (this.isTest) return;
+    if (!this.hasWorkers) return;
     for (const [queue, handler] of this.handlers) {
       await this.boss.work<object>(queue, { pollingIntervalSeconds: 1 }, async (jobs) => {
         for (const job of jobs) await handler(job.data);
