@@ -1,0 +1,40 @@
+/** Reads what a style sheet takes from packages, so that fonts count as used. */
+const packagesOfStyleSheet = (text) =>
+  [...text.matchAll(/(?:@import|url\()\s*['"]([@a-z.][^'"]+)['"]/g)]
+    .map(([, specifier]) => `import '${specifier}';`)
+    .join('\n');
+
+export default {
+  // A type that only an exported function of its own file names is part of that function.
+  ignoreExportsUsedInFile: { interface: true, type: true },
+  compilers: { css: packagesOfStyleSheet },
+  workspaces: {
+    // The checks run the boundaries tool by its path.
+    '.': { entry: [], ignoreDependencies: ['dependency-cruiser'] },
+    assessments: {
+      entry: ['src/**/*.spec.ts', 'test/**/*.spec.ts'],
+      project: ['src/**/*.ts', 'test/**/*.ts'],
+    },
+    certificates: {
+      entry: ['src/**/*.spec.ts', 'test/**/*.spec.ts'],
+      project: ['src/**/*.ts', 'test/**/*.ts'],
+    },
+    server: {
+      entry: [
+        'src/main.ts',
+        'src/cli/*.ts',
+        'src/**/*.spec.ts',
+        'bin/{start,test,bench,postgres}.mjs',
+        'bin/**/*.spec.mjs',
+        'fakes/**/*.spec.mjs',
+        'fakes/mail/sink.mjs',
+      ],
+      project: ['src/**/*.ts', 'test/**/*.{ts,mjs}', 'bin/**/*.mjs', 'fakes/**/*.mjs'],
+    },
+    site: {
+      entry: ['src/main.tsx', 'src/**/*.spec.{ts,tsx}', 'e2e/**/*.spec.ts'],
+      project: ['src/**/*.{ts,tsx,css}', 'e2e/**/*.ts', '*.ts'],
+      ignore: ['src/api/schema.gen.ts'],
+    },
+  },
+};
