@@ -3,7 +3,7 @@ export default {
   testEnvironment: 'node',
   testEnvironmentOptions: { customExportConditions: ['@ferrule/source', 'node', 'node-addons'] },
   extensionsToTreatAsEsm: ['.ts'],
-  testMatch: ['<rootDir>/src/**/*.spec.ts'],
+  testMatch: ['<rootDir>/src/**/*.spec.ts', '<rootDir>/{bin,fakes}/**/*.spec.mjs'],
   globalSetup: '<rootDir>/test/global-setup.mjs',
   globalTeardown: '<rootDir>/test/global-teardown.mjs',
   setupFiles: ['<rootDir>/test/setup-metadata.ts'],
