@@ -18,7 +18,12 @@ export const classListSchema = z.object({
 });
 export type ClassList = z.infer<typeof classListSchema>;
 
-export const joinClassSchema = z.strictObject({ joinCode: z.string().trim().min(1).max(40) });
+export const joinClassSchema = z.strictObject({
+  joinCode: z
+    .string()
+    .trim()
+    .regex(/^[A-Za-z0-9 -]{1,40}$/, 'letters, digits and hyphens, as the school gave it'),
+});
 export type JoinClass = z.infer<typeof joinClassSchema>;
 
 export const joinedClassSchema = z.object({

@@ -1,14 +1,96 @@
 import { Injectable } from '@nestjs/common';
 import type { SignedInAccount } from '../accounts/account.ts';
-import { NotFound } from '../problems/common.errors.ts';
+import { Clock } from '../clock/clock.ts';
+import { TooManyAttempts } from '../problems/common.errors.ts';
+import { PublishedContentService } from '../publishing/published-content.service.ts';
+import type { ClassMember, ClassRecord, Enrolment, School } from './class-records.ts';
+import { AlreadyInClass, JoinCodeUnknown } from './classes.errors.ts';
+import { ClassesRepository } from './classes.repository.ts';
 import type { ClassList, JoinedClass } from './classes.schemas.ts';
+import { WrongCodes } from './wrong-codes.ts';
+
+const MOST_WRONG_CODES = 10;
+const WRONG_CODES_WINDOW_MS = 15 * 60_000;
+
+/** An administrator who has given the second factor sees every class. */
+export const seesEveryClass = ({ roles, secondFactorAt }: SignedInAccount): boolean =>
+  roles.includes('administrator') && secondFactorAt !== null;
 
 @Injectable()
 export class ClassesService {
-  async listFor(_account: SignedInAccount): Promise<ClassList> {
-    throw new NotFound();
+  constructor(
+    private readonly repository: ClassesRepository,
+    private readonly wrongCodes: WrongCodes,
+    private readonly content: PublishedContentService,
+    private readonly clock: Clock,
+  ) {}
+
+  async listFor(account: SignedInAccount): Promise<ClassList> {
+    const classes = await this.repository.listFor(account.id, seesEveryClass(account));
+    const courses = await this.content.all('course');
+    const titles = new Map(courses.map(({ slug, content }) => [slug, content.title]));
+    return {
+      classes: classes.map(({ courseSlug, joinCode, ...listed }) => ({
+        ...listed,
+        course: titles.get(courseSlug) ?? courseSlug,
+        joinCode: listed.trainer ? joinCode : null,
+      })),
+    };
   }
-  async join(_accountId: string, _joinCode: string): Promise<JoinedClass> {
-    throw new NotFound();
+
+  /**
+   * @throws {JoinCodeUnknown}
+   * @throws {AlreadyInClass}
+   * @throws {TooManyAttempts} after too many wrong codes.
+   */
+  async join(accountId: string, joinCode: string): Promise<JoinedClass> {
+    await this.refuseGuessing(accountId);
+    const found = await this.repository.findByJoinCode(joinCode.toUpperCase());
+    if (!found) {
+      await this.wrongCodes.add(accountId, this.clock.now());
+      throw new JoinCodeUnknown();
+    }
+    const isAdded = await this.repository.addMember(found.id, accountId, this.clock.now());
+    if (!isAdded) throw new AlreadyInClass(found.name);
+    return { class: { id: found.id, name: found.name } };
   }
+
+  /** Whether the trainee is in a class of this trainer. */
+  trains(trainerId: string, traineeId: string): Promise<boolean> {
+    return this.repository.trains(trainerId, traineeId);
+  }
+
+  /** The school of a person, or of this place when the person is in no class. */
+  schoolOf(accountId: string | null): Promise<School | null> {
+    return this.repository.school(accountId);
+  }
+
+  enrolment(accountId: string, courseSlug: string): Promise<Enrolment | null> {
+    return this.repository.enrolment(accountId, courseSlug);
+  }
+
+  /** A class with its people, for those who may see it; null otherwise. */
+  async trainedClass(account: SignedInAccount, id: string): Promise<TrainedClass | null> {
+    const record = await this.repository.findTrained(id, account.id, seesEveryClass(account));
+    if (!record) return null;
+    const [trainers, members] = await Promise.all([
+      this.repository.trainers(id),
+      this.repository.members(id),
+    ]);
+    return { record, trainers, members };
+  }
+
+  private async refuseGuessing(accountId: string): Promise<void> {
+    const now = this.clock.now().getTime();
+    const from = new Date(now - WRONG_CODES_WINDOW_MS);
+    const { count, firstAt } = await this.wrongCodes.since(accountId, from);
+    if (count < MOST_WRONG_CODES || !firstAt) return;
+    throw new TooManyAttempts(Math.ceil((firstAt.getTime() + WRONG_CODES_WINDOW_MS - now) / 1_000));
+  }
+}
+
+export interface TrainedClass {
+  readonly record: ClassRecord;
+  readonly trainers: readonly string[];
+  readonly members: readonly ClassMember[];
 }

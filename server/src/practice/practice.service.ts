@@ -1,14 +1,59 @@
+import { markQuestion } from '@ferrule/assessments';
 import { Injectable } from '@nestjs/common';
+import { randomUUID } from 'node:crypto';
+import { Clock } from '../clock/clock.ts';
 import { NotFound } from '../problems/common.errors.ts';
+import { AnswerUnclear } from '../questions/answers.errors.ts';
 import type { Answers } from '../questions/question-view.ts';
+import { QuestionsService } from '../questions/questions.service.ts';
+import { requireKnownParts, unclearParts } from '../questions/read-answers.ts';
+import { PracticeAnswered } from './practice.errors.ts';
+import { PracticeRepository } from './practice.repository.ts';
 import type { PracticeMarked, PracticeView } from './practice.schemas.ts';
 
+/** One question in the middle of a sheet, to be tried as often as one likes. */
 @Injectable()
 export class PracticeService {
-  async start(_accountId: string, _slug: string): Promise<PracticeView> {
-    throw new NotFound();
+  constructor(
+    private readonly questions: QuestionsService,
+    private readonly repository: PracticeRepository,
+    private readonly clock: Clock,
+  ) {}
+
+  /** @throws {NotFound} for a question of the paper pool too: it must look as if there were none. */
+  async start(accountId: string, slug: string): Promise<PracticeView> {
+    const published = await this.questions.practice(slug);
+    const id = randomUUID();
+    const { revisionId, drawn, view } = this.questions.drawFor(`practice:${id}`, published);
+    await this.repository.add({
+      id,
+      accountId,
+      questionRevisionId: revisionId,
+      kept: { drawn, view },
+      startedAt: this.clock.now(),
+      handedInAt: null,
+    });
+    return { id, question: view };
   }
-  async answer(_accountId: string, _id: string, _answers: Answers): Promise<PracticeMarked> {
-    throw new NotFound();
+
+  /**
+   * Marks the answers, once.
+   *
+   * @throws {AnswerUnclear} when an answer must be asked back; it may then be given again.
+   */
+  async answer(accountId: string, id: string, answers: Answers): Promise<PracticeMarked> {
+    const attempt = await this.repository.findOwned(id, accountId);
+    if (!attempt) throw new NotFound();
+    if (attempt.handedInAt) throw new PracticeAnswered();
+    const { drawn, view } = attempt.kept;
+    requireKnownParts(view, answers);
+    const unclear = unclearParts(view, answers);
+    if (unclear.length > 0) throw new AnswerUnclear(unclear);
+    const { question } = await this.questions.byRevision(attempt.questionRevisionId);
+    const marked = markQuestion(question, drawn, answers);
+    const handedInAt = this.clock.now();
+    const isKept = await this.repository.keepMarked(id, { answers, marked, handedInAt });
+    if (!isKept) throw new PracticeAnswered();
+    return { marked };
   }
 }

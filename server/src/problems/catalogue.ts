@@ -10,6 +10,13 @@ export const catalogue: Record<string, { status: number; title: string }> = {
   'too-many-attempts': { status: 429, title: 'Too many tries' },
   'second-factor-needed': { status: 403, title: 'Second factor needed' },
   unavailable: { status: 503, title: 'Not available just now' },
+  // classes, lessons, practice, worksheets
+  'already-in-class': { status: 409, title: 'In this class already' },
+  'answer-unclear': { status: 422, title: 'Some answers cannot be read' },
+  'join-code-unknown': { status: 404, title: 'No class has this code' },
+  'lesson-revised': { status: 409, title: 'A newer revision is out' },
+  'practice-answered': { status: 409, title: 'Marked already' },
+  'worksheet-handed-in': { status: 409, title: 'Handed in already' },
   // papers, sittings
   'agreement-changed': { status: 409, title: 'The rules have changed' },
   'already-certified': { status: 409, title: 'Certified already' },

@@ -15,6 +15,7 @@ export type ContentKind = keyof ContentByKind;
 /** One published revision without its contents. */
 export interface Listing {
   readonly id: string;
+  readonly kind: ContentKind;
   readonly slug: string;
   readonly revision: string;
   readonly hash: string;

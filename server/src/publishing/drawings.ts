@@ -63,13 +63,16 @@ function checkRoot(root: TreeNode, complain: Complain): void {
   }
 }
 
+/** Line breaks between elements, which draw nothing. */
+const isLayout = ({ type, value }: TreeNode) => type === 'text' && /^\s*\n\s*$/.test(value ?? '');
+
 const OWN_REFERENCE = /url\(#([^)]+)\)/g;
 
 /** Names inside a drawing made its own, since several drawings share one page. */
 function withOwnNames(prefix: string) {
   const own = (name: string) => `${prefix}-${name}`;
-  return (node: TreeNode): TreeNode => {
-    if (node.type !== 'element') return node;
+  return (node: TreeNode): TreeNode | null => {
+    if (node.type !== 'element') return isLayout(node) ? null : node;
     const properties = Object.entries(node.properties ?? {}).map(([key, value]) => {
       if (typeof value !== 'string') return [key, value] as const;
       if (key === 'id' || key === 'ariaLabelledBy') return [key, own(value)] as const;

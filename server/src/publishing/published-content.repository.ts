@@ -1,14 +1,15 @@
 import { Injectable } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
 import { ContentRevisionModel } from './models/content-revision.model.ts';
-import type { ContentKind, Listing } from './content.ts';
+import type { ContentByKind, ContentKind, Listing, Published } from './content.ts';
 
-const LISTED = ['id', 'slug', 'revision', 'hash', 'pool', 'subject', 'lesson'];
+const LISTED = ['id', 'kind', 'slug', 'revision', 'hash', 'pool', 'subject', 'lesson'];
 
 function toListing(row: ContentRevisionModel): Listing {
-  const { id, slug, revision, pool, subject, lesson } = row;
+  const { id, kind, slug, revision, pool, subject, lesson } = row;
   return Object.freeze({
     id,
+    kind,
     slug,
     revision,
     hash: row.hash.toString('hex'),
@@ -46,11 +47,18 @@ export class PublishedContentRepository {
     return row ? toListing(row) : null;
   }
 
-  async compiled(ids: readonly string[]): Promise<Map<string, unknown>> {
+  /** The listed revisions with their contents. */
+  async compiled(listings: readonly Listing[]): Promise<Published<ContentKind>[]> {
     const rows = await this.revisions.findAll({
       attributes: ['id', 'compiled'],
-      where: { id: [...ids] },
+      where: { id: listings.map(({ id }) => id) },
     });
-    return new Map(rows.map((row) => [row.id, row.compiled]));
+    const contents = new Map(rows.map((row) => [row.id, row.compiled]));
+    return listings.map((listing) =>
+      Object.freeze({
+        ...listing,
+        content: contents.get(listing.id) as ContentByKind[ContentKind],
+      }),
+    );
   }
 }

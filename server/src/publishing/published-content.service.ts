@@ -1,16 +1,16 @@
 import { Injectable } from '@nestjs/common';
-import type { ContentByKind, ContentKind, Listing, Published } from './content.ts';
+import type { ContentKind, Listing, Published } from './content.ts';
 import { PublishedContentRepository } from './published-content.repository.ts';
 
 const MOST_KEPT = 1_000;
 
 /**
- * Reads what has been published. A revision never changes, so its compiled form is kept in
- * memory; which revision is current is asked each time.
+ * Reads what has been published. A revision never changes, so it is kept in memory; which
+ * revision is current is asked each time.
  */
 @Injectable()
 export class PublishedContentService {
-  private readonly kept = new Map<string, unknown>();
+  private readonly kept = new Map<string, Published<ContentKind>>();
 
   constructor(private readonly repository: PublishedContentRepository) {}
 
@@ -30,31 +30,28 @@ export class PublishedContentService {
 
   /** Any revision, superseded ones too: what was once handed out stays readable. */
   async byId<K extends ContentKind>(kind: K, id: string): Promise<Published<K> | null> {
+    const kept = this.kept.get(id);
+    if (kept) return kept.kind === kind ? (kept as Published<K>) : null;
     return this.fillOne<K>(await this.repository.findById(kind, id));
   }
 
   private async fillOne<K extends ContentKind>(
     found: Listing | null,
   ): Promise<Published<K> | null> {
-    if (!found) return null;
-    const [published] = await this.fill<K>([found]);
+    const [published] = await this.fill<K>(found ? [found] : []);
     return published ?? null;
   }
 
   private async fill<K extends ContentKind>(listings: Listing[]): Promise<Published<K>[]> {
-    const missing = listings.map(({ id }) => id).filter((id) => !this.kept.has(id));
-    const read =
-      missing.length > 0 ? await this.repository.compiled(missing) : new Map<string, unknown>();
-    const filled = listings.map((listing) => ({
-      ...listing,
-      content: (this.kept.get(listing.id) ?? read.get(listing.id)) as ContentByKind[K],
-    }));
+    const missing = listings.filter(({ id }) => !this.kept.has(id));
+    const read = missing.length > 0 ? await this.repository.compiled(missing) : [];
+    const found = new Map([...this.kept, ...read.map((item) => [item.id, item] as const)]);
     this.keep(read);
-    return filled;
+    return listings.flatMap(({ id }) => (found.get(id) as Published<K> | undefined) ?? []);
   }
 
-  private keep(read: Map<string, unknown>): void {
-    for (const [id, compiled] of read) this.kept.set(id, compiled);
+  private keep(read: readonly Published<ContentKind>[]): void {
+    for (const item of read) this.kept.set(item.id, item);
     for (const id of this.kept.keys()) {
       if (this.kept.size <= MOST_KEPT) return;
       this.kept.delete(id);

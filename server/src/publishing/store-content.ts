@@ -13,35 +13,31 @@ export interface PublishingReport {
 interface StoredRevision {
   readonly hash: Buffer;
   readonly state: 'current' | 'superseded';
+  readonly formatVersion: number;
 }
 
 const nameOf = ({ kind, slug, revision, lesson }: Revision) =>
   `${kind} ${kind === 'lesson' && lesson ? `${lesson} ` : ''}${slug}, revision ${revision}`;
 
-async function findStored(client: pg.ClientBase, item: Revision): Promise<StoredRevision | null> {
+async function findStored(client: pg.ClientBase, item: Revision): Promise<StoredRevision[]> {
   const { rows } = await client.query<StoredRevision>(
-    `SELECT hash, state FROM content_revisions
+    `SELECT hash, state, format_version AS "formatVersion" FROM content_revisions
       WHERE kind = $1 AND slug = $2 AND language = $3 AND revision = $4`,
     [item.kind, item.slug, item.language, item.revision],
   );
-  return rows[0] ?? null;
+  return rows;
 }
 
-function judgeStored(item: Revision, stored: StoredRevision, problems: ProblemList): void {
-  const { path, revision } = item;
-  if (!stored.hash.equals(item.hash)) {
-    problems.add(
-      path,
-      1,
-      `${item.kind} "${item.slug}" was changed but is still revision ${revision}, which is published: give it the next revision letter`,
-    );
-  } else if (stored.state === 'superseded') {
-    problems.add(
-      path,
-      1,
-      `revision ${revision} of ${item.kind} "${item.slug}" has been superseded: give it a revision letter not used before`,
-    );
+/** Why a revision that is stored already may not be published; null when it is the same. */
+function whyNot(item: Revision, stored: readonly StoredRevision[]): string | null {
+  const { kind, slug, revision, hash } = item;
+  if (stored.some((one) => !one.hash.equals(hash))) {
+    return `${kind} "${slug}" was changed but is still revision ${revision}, which is published: give it the next revision letter`;
   }
+  if (stored.length > 0 && stored.every(({ state }) => state === 'superseded')) {
+    return `revision ${revision} of ${kind} "${slug}" has been superseded: give it a revision letter not used before`;
+  }
+  return null;
 }
 
 async function storeRevision(client: pg.ClientBase, item: Revision): Promise<void> {
@@ -123,10 +119,11 @@ export async function storeContent(
   const published: string[] = [];
   for (const item of content.revisions) {
     const stored = await findStored(client, item);
-    if (stored) {
-      judgeStored(item, stored, problems);
-      continue;
-    }
+    const reason = whyNot(item, stored);
+    if (reason) problems.add(item.path, 1, reason);
+    // The same sheet compiled to a newer form is stored again beside the old one.
+    const isKept = stored.some(({ formatVersion }) => formatVersion === item.formatVersion);
+    if (reason || isKept) continue;
     await storeRevision(client, item);
     published.push(nameOf(item));
   }

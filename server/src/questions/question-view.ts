@@ -84,13 +84,20 @@ export const questionViewSchema = z
   .meta({ id: 'QuestionView' }) satisfies z.ZodType<LibraryQuestionView>;
 export type QuestionView = z.infer<typeof questionViewSchema>;
 
+/** Text that the database can keep: no NUL, no half of a character pair. */
+const typed = (most: number) =>
+  z
+    .string()
+    .max(most)
+    .regex(/^[^\0\p{Surrogate}]*$/u, 'holds characters that cannot be kept');
+
 /** One part's answer as it was typed; bounded, since it comes from outside. */
 export const rawAnswerSchema = z
   .strictObject({
-    text: z.string().max(200),
-    unit: z.string().max(20).nullable(),
-    option: z.string().max(80).nullable(),
-    working: z.string().max(2_000),
+    text: typed(200),
+    unit: typed(20).nullable(),
+    option: typed(80).nullable(),
+    working: typed(2_000),
   })
   .meta({ id: 'RawAnswer' });
 

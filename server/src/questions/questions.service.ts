@@ -44,6 +44,14 @@ export class QuestionsService {
     return publishedQuestion(found);
   }
 
+  /** @throws {NotFound} when no such question is published for practice. */
+  async practice(slug: string): Promise<PublishedQuestion> {
+    const found = await this.current(slug);
+    if (found.question.meta.pool !== 'practice')
+      throw new NotFound(`There is no question "${slug}".`);
+    return found;
+  }
+
   /** A revision that was handed out once, current or not. */
   async byRevision(revisionId: string): Promise<PublishedQuestion> {
     const found = await this.content.byId('question', revisionId);

@@ -51,7 +51,7 @@ export class WorksheetsController {
     @CurrentAccount() account: SignedInAccount,
     @Param('id', { schema: z.uuid() }) id: string,
   ): Promise<WorksheetView> {
-    return this.worksheets.open(account.id, id);
+    return this.worksheets.open(account, id);
   }
 
   @Put('worksheet-attempts/:id/items/:key/answers')

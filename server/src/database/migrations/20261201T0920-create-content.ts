@@ -16,7 +16,7 @@ CREATE TABLE content_revisions (
   lesson text,
   state text NOT NULL DEFAULT 'current' CONSTRAINT content_revisions_state CHECK (state IN ('current', 'superseded')),
   published_at timestamptz NOT NULL DEFAULT now(),
-  CONSTRAINT content_revisions_once UNIQUE (kind, slug, language, revision),
+  CONSTRAINT content_revisions_once UNIQUE (kind, slug, language, revision, format_version),
   CONSTRAINT content_revisions_question_has_pool CHECK (kind <> 'question' OR pool IS NOT NULL)
 );
 CREATE UNIQUE INDEX content_revisions_one_current ON content_revisions (kind, slug, language) WHERE state = 'current';

@@ -1,0 +1,16 @@
+import type { DrawnQuestion } from '@ferrule/assessments';
+import type { QuestionView } from '../questions/question-view.ts';
+
+/** What was drawn and what was shown of it. */
+export interface KeptDraw {
+  readonly drawn: DrawnQuestion;
+  readonly view: QuestionView;
+}
+
+export interface PracticeAttempt {
+  readonly id: string;
+  readonly accountId: string;
+  readonly questionRevisionId: string;
+  readonly kept: KeptDraw;
+  readonly handedInAt: Date | null;
+}

@@ -1,0 +1,70 @@
+import type { DrawnQuestion, MarkedQuestion } from '@ferrule/assessments';
+import { createHash } from 'node:crypto';
+import type { Answers, QuestionView } from '../questions/question-view.ts';
+
+/** One question of an attempt: all that was drawn and shown, so that it opens again as it was. */
+export interface KeptItem {
+  readonly key: string;
+  readonly slug: string;
+  readonly revisionId: string;
+  readonly author: string;
+  /** The sheet to read again, if the question has one in this course. */
+  readonly sheet: { readonly number: string; readonly title: string } | null;
+  readonly drawn: DrawnQuestion;
+  readonly view: QuestionView;
+}
+
+export type AnswersByItem = Record<string, Answers>;
+export type MarkedByItem = Record<string, MarkedQuestion>;
+
+/** What lists and course maps need of an attempt. */
+export interface AttemptSummary {
+  readonly id: string;
+  readonly accountId: string;
+  readonly worksheet: string;
+  readonly attempt: number;
+  readonly startedAt: Date;
+  readonly handedInAt: Date | null;
+  readonly marks: number | null;
+  readonly outOf: number;
+}
+
+export interface WorksheetAttempt extends AttemptSummary {
+  readonly courseRevisionId: string;
+  readonly variant: string;
+  readonly items: readonly KeptItem[];
+  readonly answers: AnswersByItem;
+  readonly savedAt: Date | null;
+  readonly marked: MarkedByItem | null;
+}
+
+/** An attempt about to be kept; its number is given by the database. */
+export type NewAttempt = Pick<
+  WorksheetAttempt,
+  | 'id'
+  | 'accountId'
+  | 'worksheet'
+  | 'courseRevisionId'
+  | 'variant'
+  | 'items'
+  | 'outOf'
+  | 'startedAt'
+>;
+
+const LETTERS = 'ABCDEFGHJKLMNPQRSTUVWXYZ';
+
+/** A short code to tell attempts apart on paper, such as K7-218. */
+export function variantOf(attemptId: string): string {
+  const [letter = 0, digit = 0, high = 0, low = 0] = createHash('sha256')
+    .update(attemptId)
+    .digest();
+  const number = ((high << 8) | low) % 1_000;
+  return `${LETTERS[letter % LETTERS.length] ?? 'A'}${digit % 10}-${String(number).padStart(3, '0')}`;
+}
+
+/** What a trainee would recognise: the same figures drawn again are the same. */
+export const figuresOf = ({ given, curve }: QuestionView): string =>
+  JSON.stringify([given.map(({ label, value, unit }) => [label, value, unit]), curve]);
+
+export const marksOf = (marked: MarkedByItem): number =>
+  Object.values(marked).reduce((sum, { marks }) => sum + marks, 0);

@@ -1,0 +1,82 @@
+import { Injectable } from '@nestjs/common';
+import { randomUUID } from 'node:crypto';
+import { Clock } from '../clock/clock.ts';
+import type { Published } from '../publishing/content.ts';
+import { PublishedContentService } from '../publishing/published-content.service.ts';
+import { QuestionsService, type Draw } from '../questions/questions.service.ts';
+import { figuresOf, variantOf, type KeptItem, type NewAttempt } from './worksheet-attempt.ts';
+import type { PlacedWorksheet } from './worksheet.presenter.ts';
+import { WorksheetsRepository } from './worksheets.repository.ts';
+
+/** How often figures are drawn anew when the person has seen them before. */
+const MOST_DRAWS = 25;
+
+interface Wanted {
+  readonly accountId: string;
+  readonly course: Published<'course'>;
+  readonly placed: PlacedWorksheet;
+}
+
+/** Draws the figures of a new attempt. */
+@Injectable()
+export class WorksheetDrawing {
+  constructor(
+    private readonly questions: QuestionsService,
+    private readonly content: PublishedContentService,
+    private readonly repository: WorksheetsRepository,
+    private readonly clock: Clock,
+  ) {}
+
+  async draw({ accountId, course, placed }: Wanted): Promise<NewAttempt> {
+    const { worksheet } = placed;
+    const id = randomUUID();
+    const earlier = await this.repository.earlierItems(accountId, worksheet.number);
+    const seen = new Set(earlier.map(({ slug, view }) => slug + figuresOf(view)));
+    const titles = await this.sheetTitles();
+    const items: KeptItem[] = [];
+    for (const [at, slug] of worksheet.questions.entries()) {
+      const draw = await this.drawUnseen(`worksheet:${id}`, slug, seen);
+      items.push(keptItem(String(at + 1), draw, titles));
+    }
+    return {
+      id,
+      accountId,
+      worksheet: worksheet.number,
+      courseRevisionId: course.id,
+      variant: variantOf(id),
+      items,
+      outOf: items.reduce((sum, { view }) => sum + view.marks, 0),
+      startedAt: this.clock.now(),
+    };
+  }
+
+  /** Figures the person has not had on this worksheet, as long as the question has any left. */
+  private async drawUnseen(
+    purpose: string,
+    slug: string,
+    seen: ReadonlySet<string>,
+  ): Promise<Draw> {
+    const published = await this.questions.practice(slug);
+    let draw = this.questions.drawFor(purpose, published);
+    for (let again = 1; again < MOST_DRAWS && seen.has(slug + figuresOf(draw.view)); again += 1) {
+      draw = this.questions.drawFor(`${purpose}:${again}`, published);
+    }
+    return draw;
+  }
+
+  private async sheetTitles(): Promise<Map<string, string>> {
+    const lessons = await this.content.all('lesson');
+    return new Map(lessons.map(({ content }) => [content.number, content.title]));
+  }
+}
+
+function keptItem(
+  key: string,
+  { revisionId, question, drawn, view }: Draw,
+  titles: ReadonlyMap<string, string>,
+): KeptItem {
+  const { slug, author, lesson } = question.meta;
+  const title = titles.get(lesson);
+  const sheet = title === undefined ? null : { number: lesson, title };
+  return { key, slug, revisionId, author, sheet, drawn, view };
+}
