@@ -72,7 +72,7 @@ async function openDemonstration(isFresh) {
   const onService = (service) => claim.note(service);
   const school = await startDemonstration({ folder, cluster, progress, lifetime, onService });
   claim.note(school.services.at(-1), school.siteUrl);
-  console.log(await welcomeToDemonstration({ ...school, seconds: secondsTaken() }));
+  console.log(welcomeToDemonstration({ ...school, seconds: secondsTaken() }));
   return [...school.services, { name: 'database', hasEnded: cluster.hasEnded(lifetime.signal) }];
 }
 

@@ -19,7 +19,7 @@ const gzipKb = (file) => gzipSync(readFileSync(fromRoot('site', 'dist', file))).
 const sumKb = (files) => [...new Set(files)].reduce((sum, file) => sum + gzipKb(file), 0);
 
 /** What the first page loads, compressed: the entry, its page and all they import at once. */
-export function measureFirstLoad() {
+function measureFirstLoad() {
   const manifest = readJson(fromRoot('site', 'dist', '.vite', 'manifest.json'));
   if (!manifest) throw new Error('The site was built without a manifest.');
   const entry = Object.keys(manifest).find((key) => manifest[key].isEntry);

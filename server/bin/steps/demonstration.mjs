@@ -1,7 +1,7 @@
 import { existsSync, mkdirSync, readdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { hashContent } from './builds.mjs';
-import { demonstrationAddresses } from './people.mjs';
+import { readDemonstrationPeople } from './people.mjs';
 import { fromRoot, root } from './paths.mjs';
 import { askedPort, nextFreePort } from './ports.mjs';
 import { readJson, writePrivateJson } from './private-files.mjs';
@@ -12,7 +12,7 @@ import { startService } from './services.mjs';
 const usualPort = 4780;
 
 /** What any program of ours may know of the terminal it was started from. */
-export function plainEnvironment() {
+function plainEnvironment() {
   const names = ['PATH', 'HOME', 'LANG', 'TZ', 'TMPDIR'];
   return Object.fromEntries(
     names.filter((name) => process.env[name]).map((name) => [name, process.env[name]]),
@@ -77,6 +77,25 @@ async function prepareDatabase({ folder, env, progress, signal }) {
   writePrivateJson(path, { content });
 }
 
+const sinkService = (folder, ports) => ({
+  name: 'mail sink',
+  script: fromRoot('server', 'fakes', 'mail', 'sink.mjs'),
+  env: {
+    ...plainEnvironment(),
+    SINK_SMTP_PORT: String(ports.mail),
+    SINK_PAGE_PORT: String(ports.mailPage),
+    SINK_FOLDER: join(folder, 'mail'),
+  },
+  logFile: join(folder, 'mail-log.txt'),
+});
+
+const serverService = (folder, env) => ({
+  name: 'server',
+  script: fromRoot('server', 'dist', 'main.js'),
+  env,
+  logFile: join(folder, 'server-log.txt'),
+});
+
 /**
  * Prepares a database and starts the mail sink and the server on it.
  *
@@ -87,7 +106,11 @@ export async function startDemonstration({ folder, cluster, progress, lifetime, 
   mkdirSync(join(folder, 'keys'), { recursive: true, mode: 0o700 });
   const ports = await choosePorts(folder);
   const env = settings({ folder, cluster, ports });
-  const passphrases = ensurePassphrases(folder, await demonstrationAddresses());
+  const { people, classToJoin } = await readDemonstrationPeople();
+  const passphrases = ensurePassphrases(
+    folder,
+    people.map(({ email }) => email),
+  );
   const ownerEnv = {
     ...env,
     MIGRATION_DATABASE_URL: cluster.ownerUrl,
@@ -101,27 +124,13 @@ export async function startDemonstration({ folder, cluster, progress, lifetime, 
     onService(started);
     return started;
   };
-  const sink = await start('Mail sink', {
-    name: 'mail sink',
-    script: fromRoot('server', 'fakes', 'mail', 'sink.mjs'),
-    env: {
-      ...plainEnvironment(),
-      SINK_SMTP_PORT: String(ports.mail),
-      SINK_PAGE_PORT: String(ports.mailPage),
-      SINK_FOLDER: join(folder, 'mail'),
-    },
-    logFile: join(folder, 'mail-log.txt'),
-  });
-  const server = await start('Server', {
-    name: 'server',
-    script: fromRoot('server', 'dist', 'main.js'),
-    env,
-    logFile: join(folder, 'server-log.txt'),
-  });
+  const sink = await start('Mail sink', sinkService(folder, ports));
+  const server = await start('Server', serverService(folder, env));
   return {
     siteUrl: env.PUBLIC_URL,
     mailUrl: env.MAIL_SINK_URL,
-    passphrases,
+    people: people.map((person) => ({ ...person, passphrase: passphrases[person.email] })),
+    classToJoin,
     services: [sink, server],
   };
 }

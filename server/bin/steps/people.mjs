@@ -1,10 +1,14 @@
 import { pathToFileURL } from 'node:url';
 import { fromRoot } from './paths.mjs';
 
-/** The addresses of the people the demonstration school has, from the compiled seed. */
-export async function demonstrationAddresses() {
-  const { demonstrationPeople } = await import(
-    pathToFileURL(fromRoot('server', 'dist', 'seed', 'people.js')).href
-  );
-  return demonstrationPeople.map(({ email }) => email);
+/** The people one can sign in as and the class one can join, as the compiled seed names them. */
+export async function readDemonstrationPeople() {
+  const compiled = fromRoot('server', 'dist', 'seed', 'people.js');
+  const seed = await import(pathToFileURL(compiled).href);
+  const people = seed.demonstrationPeople.map(({ email, givenName, familyName, roles }) => ({
+    email,
+    name: `${givenName} ${familyName}`.trim(),
+    role: roles.map((role) => seed.roleNames[role]).join(', '),
+  }));
+  return { people, classToJoin: seed.demonstrationClass };
 }

@@ -14,7 +14,7 @@ function tryListen(port) {
   });
 }
 
-export const isPortFree = async (port) => (await tryListen(port)) !== undefined;
+const isPortFree = async (port) => (await tryListen(port)) !== undefined;
 
 /** The remembered port when nobody has it, otherwise any free one; never PostgreSQL's usual port. */
 export async function freePort(remembered) {

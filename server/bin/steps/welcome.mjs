@@ -1,12 +1,5 @@
 const caution = 'This is training. Local codes and licensed practice come first, always.';
 
-async function listPeople(siteUrl) {
-  const reply = await fetch(`${siteUrl}/api/front`, { signal: AbortSignal.timeout(10_000) });
-  if (!reply.ok) return [];
-  const { people } = await reply.json();
-  return people;
-}
-
 function table(rows) {
   const widths = rows[0].map((_, column) => Math.max(...rows.map((row) => row[column].length)));
   return rows.map((row) =>
@@ -15,9 +8,8 @@ function table(rows) {
 }
 
 /** What someone needs to know to walk through the demonstration. */
-export async function welcomeToDemonstration({ siteUrl, mailUrl, passphrases, seconds }) {
-  const people = await listPeople(siteUrl);
-  const rows = people.map(({ role, name, email }) => [role, name, email, passphrases[email] ?? '']);
+export function welcomeToDemonstration({ siteUrl, mailUrl, people, classToJoin, seconds }) {
+  const rows = people.map(({ role, name, email, passphrase }) => [role, name, email, passphrase]);
   return [
     '',
     `Ferrule is running (${seconds} s).`,
@@ -26,7 +18,10 @@ export async function welcomeToDemonstration({ siteUrl, mailUrl, passphrases, se
     `  Mail  ${mailUrl}  (every mail it sends ends there)`,
     '',
     'People, with the passphrases of this installation:',
-    ...(rows.length ? table(rows) : ['  none']),
+    ...table(rows),
+    '',
+    `Someone new signs up on the site, confirms the address from the mail page and joins the`,
+    `${classToJoin.name} with the code ${classToJoin.joinCode}.`,
     '',
     'This is a demonstration with invented people: nobody is certified for work by it.',
     caution,
