@@ -6,6 +6,7 @@ export { drawQuestion } from './questions/draw.ts';
 export { presentQuestion } from './questions/present.ts';
 export { readAnswer } from './questions/read-answer.ts';
 export { markQuestion } from './questions/mark.ts';
+export { keyAnswers } from './questions/key-answers.ts';
 export { workQuestion } from './questions/work.ts';
 export { slipWords } from './questions/slip-words.ts';
 export { parseBlueprint } from './papers/blueprint.ts';

@@ -83,12 +83,12 @@ export class JobsService implements OnApplicationBootstrap, OnApplicationShutdow
     await this.boss.send(queue, payload, options);
   }
 
-  /** Runs what waits now, in turn, until nothing is left. For tests, which start no workers. */
-  async runWaiting(): Promise<number> {
+  /** Runs what waits now, in turn, until nothing is left: for a process without workers. */
+  async runWaiting(queues: readonly QueueName[] = QUEUES): Promise<number> {
     let ran = 0;
     for (let before = -1; before !== ran;) {
       before = ran;
-      for (const queue of QUEUES) ran += await this.runQueue(queue);
+      for (const queue of queues) ran += await this.runQueue(queue);
     }
     return ran;
   }

@@ -1,0 +1,111 @@
+/** What happened at the school before today, in order of time. All invented. */
+export type Happening = {
+  /** An instant, UTC. */
+  readonly at: string;
+  /** The person, by e-mail. */
+  readonly who: string;
+} & (
+  | { readonly does: 'join' }
+  | { readonly does: 'read'; readonly sheet: string; readonly paragraph: number }
+  | { readonly does: 'finish'; readonly sheet: string }
+  /** `slipped`: per question, in its order, the parts answered with a predicted slip. */
+  | { readonly does: 'worksheet'; readonly number: string; readonly slipped: readonly string[][] }
+  /** `slipped`: whole questions answered wrongly, by their place on the paper from the end. */
+  | { readonly does: 'paper'; readonly wrongFromEnd: number }
+);
+
+const home = (name: string) => `${name}@people.example`;
+const right: readonly string[][] = [];
+
+const join = (at: string, name: string): Happening => ({ at, who: home(name), does: 'join' });
+const finish = (at: string, name: string, sheet: string): Happening => ({
+  ...{ at, sheet },
+  who: home(name),
+  does: 'finish',
+});
+const worksheet = (
+  at: string,
+  [name, number]: [string, string],
+  slipped: readonly string[][] = right,
+): Happening => ({ ...{ at, number, slipped }, who: home(name), does: 'worksheet' });
+const paper = (at: string, name: string, wrongFromEnd: number): Happening => ({
+  ...{ at, wrongFromEnd },
+  who: home(name),
+  does: 'paper',
+});
+
+const unitWorksheets = ['W1', 'W3', 'W4', 'W5', 'W6'];
+const sheets = ['1.4', '3.4', '4.1', '5.6', '6.7'];
+
+/** Someone who went through all sheets and worksheets, one a day from that day. */
+function wholeCourse(from: string, name: string): Happening[] {
+  const day = (index: number, hour: string) => {
+    const date = new Date(`${from}T00:00:00Z`);
+    date.setUTCDate(date.getUTCDate() + index);
+    return `${date.toISOString().slice(0, 10)}T${hour}:00Z`;
+  };
+  return sheets.flatMap((sheet, index) => [
+    finish(day(index, '18:10'), name, sheet),
+    worksheet(day(index, '18:40'), [name, unitWorksheets[index] ?? '']),
+  ]);
+}
+
+const oneWay = [['a', 'd'], [], []];
+
+const happenings: Happening[] = [
+  paper('2023-10-14T09:00:00Z', 'anselm.tau', 0),
+  paper('2026-02-10T10:00:00Z', 'emrys.quillfeather', 1),
+  ...[
+    'ifeoma.castellan',
+    'hemi.tawhiri-boyd',
+    'signe.holloway',
+    'caspian.rudd',
+    'amadi.thrale',
+    'oona.kirkbride',
+    'zuleika.varga',
+    'maren.stoddart',
+    'bartholomew.quist',
+    'priya.vandermeer',
+  ].map((name, index) => join(`2026-09-14T09:0${index}:00Z`, name)),
+  join('2026-09-21T09:00:00Z', 'iolo.farrant'),
+  join('2026-10-05T09:00:00Z', 'zoe.nguyen-lukasiewicz'),
+  join('2026-11-16T09:00:00Z', 'oluwaseun.brack'),
+  ...wholeCourse('2026-09-20', 'bartholomew.quist'),
+  ...wholeCourse('2026-09-22', 'priya.vandermeer'),
+  ...wholeCourse('2026-10-01', 'iolo.farrant'),
+  ...wholeCourse('2026-10-12', 'zoe.nguyen-lukasiewicz'),
+  ...wholeCourse('2026-10-18', 'hemi.tawhiri-boyd').slice(0, 8),
+  finish('2026-10-08T17:20:00Z', 'ifeoma.castellan', '1.4'),
+  worksheet('2026-10-09T18:00:00Z', ['ifeoma.castellan', 'W1']),
+  {
+    at: '2026-11-30T19:12:00Z',
+    who: home('ifeoma.castellan'),
+    does: 'read',
+    sheet: '3.4',
+    paragraph: 4,
+  },
+  worksheet('2026-11-30T19:40:00Z', ['ifeoma.castellan', 'W3'], oneWay),
+  finish('2026-10-09T17:00:00Z', 'signe.holloway', '1.4'),
+  worksheet('2026-11-20T18:00:00Z', ['signe.holloway', 'W3'], oneWay),
+  finish('2026-11-21T17:00:00Z', 'caspian.rudd', '3.4'),
+  worksheet('2026-11-21T18:00:00Z', ['caspian.rudd', 'W3'], [['a'], [], ['a']]),
+  worksheet('2026-11-22T18:00:00Z', ['amadi.thrale', 'W3'], oneWay),
+  worksheet('2026-11-23T18:00:00Z', ['oona.kirkbride', 'W3'], [['d'], ['a'], []]),
+  finish('2026-11-24T18:00:00Z', 'zuleika.varga', '1.4'),
+  worksheet('2026-11-24T19:00:00Z', ['zuleika.varga', 'W1'], [['a']]),
+  {
+    at: '2026-11-15T18:30:00Z',
+    who: home('maren.stoddart'),
+    does: 'read',
+    sheet: '1.4',
+    paragraph: 3,
+  },
+  finish('2026-11-25T18:30:00Z', 'oluwaseun.brack', '1.4'),
+  paper('2026-10-27T10:00:00Z', 'bartholomew.quist', 1),
+  paper('2026-10-27T10:05:00Z', 'priya.vandermeer', 0),
+  paper('2026-11-24T10:00:00Z', 'zoe.nguyen-lukasiewicz', 4),
+];
+
+export const history: readonly Happening[] = happenings.toSorted((a, b) =>
+  a.at.localeCompare(b.at),
+);
