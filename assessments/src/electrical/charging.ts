@@ -47,14 +47,6 @@ export interface ChargeLog {
   floatStartsH: number | null;
 }
 
-interface State {
-  hour: number;
-  charge: number;
-  stage: Stage;
-  absorptionFromH: number;
-  underTailFromH: number | null;
-}
-
 /**
  * Runs a staged charger against a battery: bulk at the current limit, absorption at a held
  * voltage, float at a lower one. Deterministic; second order in the step, with the moment a
@@ -66,113 +58,123 @@ interface State {
  */
 export function logCharge(run: ChargeRun): ChargeLog {
   requireSettings(run);
-  const stepH = run.stepS / 3600;
-  const log: ChargeLog = { readings: [], bulkEndsH: null, floatStartsH: null };
-  let state: State = {
-    hour: 0,
-    charge: run.charge,
-    stage: 'bulk',
-    absorptionFromH: 0,
-    underTailFromH: null,
-  };
-  log.readings.push(readingOf(run, state));
-  while (state.hour < run.hours - 1e-9) {
-    const edge = run.load.fromH > state.hour + 1e-9 ? run.load.fromH : Infinity;
-    const spanH = Math.min(stepH, run.hours - state.hour, edge - state.hour);
-    state = advance(run, state, spanH);
-    record(run, state, log);
+  return new Logger(run).log();
+}
+
+class Logger {
+  private readonly run: ChargeRun;
+  private hour = 0;
+  private charge: number;
+  private stage: Stage = 'bulk';
+  private bulkEndsH: number | null = null;
+  private floatStartsH: number | null = null;
+  private underTailFromH: number | null = null;
+  private readonly readings: ChargeReading[] = [];
+
+  constructor(run: ChargeRun) {
+    this.run = run;
+    this.charge = run.charge;
   }
-  return log;
-}
 
-/** Appends a reading and, where a stage has just ended, its time and the reading after it. */
-function record(run: ChargeRun, state: State, log: ChargeLog): void {
-  const reading = readingOf(run, state);
-  log.readings.push(reading);
-  if (state.stage === 'bulk' && chargerAmps(run, state) < run.charger.limitA * (1 - 1e-9)) {
-    state.stage = 'absorption';
-    state.absorptionFromH = state.hour;
-    log.bulkEndsH = state.hour;
-  } else if (state.stage === 'absorption' && absorptionIsOver(run, state, reading.amps)) {
-    state.stage = 'float';
-    log.floatStartsH = state.hour;
-    log.readings.push(readingOf(run, state));
+  log(): ChargeLog {
+    this.read();
+    while (this.hour < this.run.hours - 1e-9) {
+      this.advance();
+      this.read();
+      this.changeStage();
+    }
+    const { readings, bulkEndsH, floatStartsH } = this;
+    return { readings, bulkEndsH, floatStartsH };
   }
-}
 
-function absorptionIsOver(run: ChargeRun, state: State, amps: number): boolean {
-  const { tailA, tailHoldH, longestAbsorptionH } = run.charger;
-  if (amps >= tailA) state.underTailFromH = null;
-  else state.underTailFromH ??= state.hour;
-  const heldH = state.underTailFromH === null ? -1 : state.hour - state.underTailFromH;
-  return (
-    heldH >= tailHoldH - 1e-9 || state.hour - state.absorptionFromH >= longestAbsorptionH - 1e-9
-  );
-}
-
-/** One step, cut short where bulk reaches its voltage, the tail is crossed or a time runs out. */
-function advance(run: ChargeRun, state: State, spanH: number): State {
-  const wholeH = Math.min(spanH, untilTimedEvent(run, state));
-  const whole = move(run, state, wholeH);
-  const crossed = (end: State): boolean =>
-    state.stage === 'bulk'
-      ? chargerAmps(run, end) < run.charger.limitA * (1 - 1e-9)
-      : state.stage === 'absorption' &&
-        state.underTailFromH === null &&
-        chargerAmps(run, end) < run.charger.tailA;
-  if (!crossed(whole)) return whole;
-  let before = 0;
-  let after = wholeH;
-  for (let cut = 0; cut < 40; cut += 1) {
-    const middle = (before + after) / 2;
-    if (crossed(move(run, state, middle))) after = middle;
-    else before = middle;
+  private read(): void {
+    const { hour, charge, stage } = this;
+    const amps = this.chargerAmps(charge);
+    const batteryAmps = amps - this.loadAmps();
+    const { battery } = this.run;
+    const volts = openCircuitV(battery, charge) + batteryAmps * chargingOhms(battery, charge);
+    this.readings.push({ hour, volts, amps, batteryAmps, charge, stage });
   }
-  return move(run, state, after);
-}
 
-function untilTimedEvent(run: ChargeRun, state: State): number {
-  if (state.stage !== 'absorption') return Infinity;
-  const timeOut = state.absorptionFromH + run.charger.longestAbsorptionH - state.hour;
-  const held =
-    state.underTailFromH === null
-      ? Infinity
-      : state.underTailFromH + run.charger.tailHoldH - state.hour;
-  return Math.max(1e-9, Math.min(timeOut, held));
-}
+  /** One step, cut short where bulk reaches its voltage, the tail is crossed or a time runs out. */
+  private advance(): void {
+    const wholeH = Math.min(this.run.stepS / 3600, this.untilNextEvent());
+    let spanH = wholeH;
+    if (this.isCrossed(this.after(wholeH))) {
+      let before = 0;
+      for (let cut = 0; cut < 24; cut += 1) {
+        const middle = (before + spanH) / 2;
+        if (this.isCrossed(this.after(middle))) spanH = middle;
+        else before = middle;
+      }
+    }
+    this.charge = this.after(spanH);
+    this.hour += spanH;
+  }
 
-/** Midpoint rule: the slope half-way through the step carries the whole of it. */
-function move(run: ChargeRun, state: State, spanH: number): State {
-  const halfway = state.charge + (slopePerH(run, state) * spanH) / 2;
-  const middle = { ...state, hour: state.hour, charge: clampShare(halfway) };
-  const charge = clampShare(state.charge + slopePerH(run, middle) * spanH);
-  return { ...state, hour: state.hour + spanH, charge };
-}
+  /** Hours to the next moment that is known beforehand. */
+  private untilNextEvent(): number {
+    const { charger, load, hours } = this.run;
+    const timed = [hours];
+    if (load.fromH > this.hour + 1e-9) timed.push(load.fromH);
+    if (this.stage === 'absorption') {
+      timed.push((this.bulkEndsH ?? 0) + charger.longestAbsorptionH);
+      if (this.underTailFromH !== null) timed.push(this.underTailFromH + charger.tailHoldH);
+    }
+    return Math.max(1e-9, Math.min(...timed) - this.hour);
+  }
 
-function slopePerH(run: ChargeRun, state: State): number {
-  const amps = chargerAmps(run, state) - loadAmps(run, state);
-  const kept = amps > 0 ? amps * run.battery.efficiency : amps;
-  return kept / run.battery.capacityAh;
-}
+  /** Charge after so long; the slope half-way through carries the whole step (midpoint rule). */
+  private after(spanH: number): number {
+    const middle = clampShare(this.charge + (this.slopePerH(this.charge) * spanH) / 2);
+    return clampShare(this.charge + this.slopePerH(middle) * spanH);
+  }
 
-function chargerAmps(run: ChargeRun, state: State): number {
-  const holdV = state.stage === 'float' ? run.charger.floatV : run.charger.absorptionV;
-  const taken =
-    (holdV - openCircuitV(run.battery, state.charge)) / chargingOhms(run.battery, state.charge);
-  const wanted = taken + loadAmps(run, state);
-  return Math.max(0, Math.min(run.charger.limitA, wanted));
-}
+  private isCrossed(charge: number): boolean {
+    const { limitA, tailA } = this.run.charger;
+    if (this.stage === 'bulk') return this.chargerAmps(charge) < limitA * (1 - 1e-9);
+    const isTailOpen = this.stage === 'absorption' && this.underTailFromH === null;
+    return isTailOpen && this.chargerAmps(charge) < tailA;
+  }
 
-function loadAmps(run: ChargeRun, state: State): number {
-  return state.hour >= run.load.fromH - 1e-9 ? run.load.amps : 0;
-}
+  /** Moves to the next stage where its time has come; float is read once more, at its own voltage. */
+  private changeStage(): void {
+    if (this.stage === 'bulk' && this.isCrossed(this.charge)) {
+      this.stage = 'absorption';
+      this.bulkEndsH = this.hour;
+    } else if (this.stage === 'absorption' && this.isAbsorptionOver()) {
+      this.stage = 'float';
+      this.floatStartsH = this.hour;
+      this.read();
+    }
+  }
 
-function readingOf(run: ChargeRun, state: State): ChargeReading {
-  const amps = chargerAmps(run, state);
-  const batteryAmps = amps - loadAmps(run, state);
-  const volts =
-    openCircuitV(run.battery, state.charge) + batteryAmps * chargingOhms(run.battery, state.charge);
-  return { hour: state.hour, volts, amps, batteryAmps, charge: state.charge, stage: state.stage };
+  private isAbsorptionOver(): boolean {
+    const { tailA, tailHoldH, longestAbsorptionH } = this.run.charger;
+    if (this.chargerAmps(this.charge) >= tailA) this.underTailFromH = null;
+    else this.underTailFromH ??= this.hour;
+    const isHeld =
+      this.underTailFromH !== null && this.hour - this.underTailFromH >= tailHoldH - 1e-9;
+    return isHeld || this.hour - (this.bulkEndsH ?? 0) >= longestAbsorptionH - 1e-9;
+  }
+
+  private slopePerH(charge: number): number {
+    const amps = this.chargerAmps(charge) - this.loadAmps();
+    const { efficiency, capacityAh } = this.run.battery;
+    return (amps > 0 ? amps * efficiency : amps) / capacityAh;
+  }
+
+  private chargerAmps(charge: number): number {
+    const { battery, charger } = this.run;
+    const holdV = this.stage === 'float' ? charger.floatV : charger.absorptionV;
+    const taken = (holdV - openCircuitV(battery, charge)) / chargingOhms(battery, charge);
+    return Math.max(0, Math.min(charger.limitA, taken + this.loadAmps()));
+  }
+
+  private loadAmps(): number {
+    const { amps, fromH } = this.run.load;
+    return this.hour >= fromH - 1e-9 ? amps : 0;
+  }
 }
 
 function clampShare(charge: number): number {

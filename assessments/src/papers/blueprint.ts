@@ -19,7 +19,15 @@ const schema = z.strictObject({
   'pass mark': z.number().min(1).max(100),
   'wait days': z.int().min(0).max(365),
   sat: line,
-  questions: z.partialRecord(z.enum(Object.keys(SUBJECTS)), z.int().min(1).max(60)),
+  questions: z
+    .array(
+      z.strictObject({
+        subject: z.enum(Object.keys(SUBJECTS)),
+        count: z.int().min(1).max(60),
+      }),
+    )
+    .min(1)
+    .refine(hasNoDouble, 'a subject is named once; add its counts up'),
   aids: z.array(line).default([]),
   scheme: z.strictObject({
     id: z.string().regex(/^[a-z][a-z0-9-]{2,60}$/),
@@ -71,9 +79,7 @@ export function parseBlueprint(source: string, path: string): Blueprint {
     passPercent: front['pass mark'],
     waitDays: front['wait days'],
     sat: front.sat,
-    questions: Object.entries(front.questions).flatMap(([subject, count]) =>
-      count === undefined ? [] : [{ subject, count }],
-    ),
+    questions: front.questions,
     aids: front.aids,
     agreement,
     scheme: {

@@ -1,3 +1,4 @@
+import { type ChargeLog } from '../electrical/charging.ts';
 import {
   type ChoicePart,
   type Compiled,
@@ -69,22 +70,21 @@ function drawValues(
 ): { values: Map<string, number>; curve: CurveView | null } {
   for (let tries = 0; tries < MOST_TRIES; tries += 1) {
     const values = new Map(question.givens.map((given) => [given.name, drawGiven(given, draws)]));
-    const curve = question.curve ? drawReadings(question, values) : null;
+    const log = question.curve ? runCurve(question.curve, values) : null;
+    if (log) readInto(values, question, log);
     if (question.require.every((condition) => holds(question, condition, values))) {
+      const curve = question.curve && log ? drawCurve(question.curve, log, values) : null;
       return { values: solve(question, values), curve };
     }
   }
   throw new Error(`none of ${MOST_TRIES} draws meets its conditions; widen the given values.`);
 }
 
-/** Runs the charger and adds what is read off its curve to the values. */
-function drawReadings(question: Compiled, values: Map<string, number>): CurveView | null {
-  if (!question.curve) return null;
-  const log = runCurve(question.curve, values);
+/** Adds what is read off a curve to the values. */
+function readInto(values: Map<string, number>, question: Compiled, log: ChargeLog): void {
   for (const step of question.steps) {
     if (step.how.kind === 'read') values.set(step.name, readOff(log, step.how.read, values));
   }
-  return drawCurve(question.curve, log, values);
 }
 
 function drawGiven({ source, unit }: Given, draws: Draws): number {
