@@ -17,6 +17,7 @@ import { MailModule } from './mail/mail.module.ts';
 import { PeopleModule } from './people/people.module.ts';
 import { SecondFactorsModule } from './second-factors/second-factors.module.ts';
 import { SessionsModule } from './sessions/sessions.module.ts';
+import { SignInModule } from './sessions/sign-in.module.ts';
 import { SittingsModule } from './sittings/sittings.module.ts';
 import { WorksheetsModule } from './worksheets/worksheets.module.ts';
 
@@ -37,6 +38,7 @@ export class AppModule {
         SessionsModule,
         AccountsModule,
         SecondFactorsModule,
+        SignInModule,
         PeopleModule,
         SittingsModule,
         ClassesModule,

@@ -8,6 +8,7 @@ import type { FastifyReply, FastifyRequest } from 'fastify';
 import multipart from '@fastify/multipart';
 import rateLimit from '@fastify/rate-limit';
 import type { Config } from './config/config.schema.ts';
+import { refuseNullCharacters } from './http/refuse-null-characters.ts';
 import { refuseCrossSite } from './http/same-origin.ts';
 import { InvalidRequest, TooManyAttempts } from './problems/common.errors.ts';
 import { ProblemFilter, sendProblem } from './problems/problem.filter.ts';
@@ -93,6 +94,7 @@ export async function setUpApp(app: NestFastifyApplication, config: Config): Pro
     refuseCrossSite(request, config.PUBLIC_URL);
     if (request.url.startsWith('/api/')) void reply.header('cache-control', 'no-store');
   });
+  fastify.addHook('preValidation', async (request) => refuseNullCharacters(request));
   app.useGlobalPipes(new StandardSchemaValidationPipe({ exceptionFactory: invalid }));
   app.useGlobalInterceptors(new StandardSchemaSerializerInterceptor(app.get(Reflector)));
   app.useGlobalFilters(new ProblemFilter());

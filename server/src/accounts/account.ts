@@ -15,3 +15,17 @@ export interface SignedInAccount {
   /** When a second factor was given in this session. */
   readonly secondFactorAt: Date | null;
 }
+
+/** An account as its own services see it. Never sent anywhere. */
+export interface Account {
+  readonly id: string;
+  readonly email: string;
+  readonly givenName: string;
+  readonly familyName: string;
+  readonly passwordHash: string | null;
+  readonly isConfirmed: boolean;
+  readonly isSuspended: boolean;
+}
+
+export const fullName = (person: { givenName: string; familyName: string }): string =>
+  `${person.givenName} ${person.familyName}`.trim();

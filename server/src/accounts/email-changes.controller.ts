@@ -15,10 +15,14 @@ import {
   type UseToken,
 } from './accounts.schemas.ts';
 import { EmailChangesService } from './email-changes.service.ts';
+import { EmailMovesService } from './email-moves.service.ts';
 
 @Controller('api')
 export class EmailChangesController {
-  constructor(private readonly changes: EmailChangesService) {}
+  constructor(
+    private readonly changes: EmailChangesService,
+    private readonly moves: EmailMovesService,
+  ) {}
 
   @Post('me/email-changes')
   @Allow('signed-in')
@@ -38,7 +42,7 @@ export class EmailChangesController {
     @Body({ schema: useTokenSchema }) { token }: UseToken,
     @CurrentSource() source: RequestSource,
   ): Promise<AddressNow> {
-    return this.changes.confirm(token, source);
+    return this.moves.confirm(token, source);
   }
 
   @Post('email-changes/undo')
@@ -48,6 +52,6 @@ export class EmailChangesController {
     @Body({ schema: useTokenSchema }) { token }: UseToken,
     @CurrentSource() source: RequestSource,
   ): Promise<AddressNow> {
-    return this.changes.undo(token, source);
+    return this.moves.undo(token, source);
   }
 }

@@ -14,11 +14,17 @@ import {
   type ChangePassword,
   type ResetPassword,
 } from './accounts.schemas.ts';
-import { PasswordsService } from './passwords.service.ts';
+import { AddressAsksService } from './address-asks.service.ts';
+import { PasswordChangesService } from './password-changes.service.ts';
+import { PasswordResetsService } from './password-resets.service.ts';
 
 @Controller('api')
 export class PasswordsController {
-  constructor(private readonly passwords: PasswordsService) {}
+  constructor(
+    private readonly changes: PasswordChangesService,
+    private readonly asks: AddressAsksService,
+    private readonly resets: PasswordResetsService,
+  ) {}
 
   @Put('me/password')
   @Allow('signed-in')
@@ -28,17 +34,18 @@ export class PasswordsController {
     @Body({ schema: changePasswordSchema }) input: ChangePassword,
     @CurrentSource() source: RequestSource,
   ): Promise<void> {
-    return this.passwords.change(account, input, source);
+    return this.changes.change(account, input, source);
   }
 
   @Post('password-resets')
   @Allow('anyone')
   @Responds(202, acceptedSchema)
-  askForReset(
+  async askForReset(
     @Body({ schema: addressSchema }) { email }: Address,
     @CurrentSource() source: RequestSource,
   ): Promise<Accepted> {
-    return this.passwords.askForReset(email, source);
+    await this.asks.askCounted('reset-password', email, source);
+    return {};
   }
 
   @Post('password-resets/confirmations')
@@ -48,6 +55,6 @@ export class PasswordsController {
     @Body({ schema: resetPasswordSchema }) input: ResetPassword,
     @CurrentSource() source: RequestSource,
   ): Promise<void> {
-    return this.passwords.reset(input, source);
+    return this.resets.reset(input, source);
   }
 }

@@ -1,19 +1,22 @@
 import { Injectable } from '@nestjs/common';
-
-export interface SecurityEvent {
-  readonly kind: string;
-  /** Whom it concerns. */
-  readonly accountId: string | null;
-  /** Who did it. */
-  readonly actorId: string | null;
-  readonly address?: string;
-  /** Plain facts; never a secret, a token, a passphrase or an answer. */
-  readonly detail?: Readonly<Record<string, string | number | boolean>>;
-}
+import { Clock } from '../clock/clock.ts';
+import type { SecurityEvent } from './security-event.ts';
+import { SecurityEventsRepository, type RecordedEvent } from './security-events.repository.ts';
 
 @Injectable()
 export class SecurityEventsService {
-  async record(_event: SecurityEvent): Promise<void> {
-    throw new Error('not ready');
+  constructor(
+    private readonly repository: SecurityEventsRepository,
+    private readonly clock: Clock,
+  ) {}
+
+  /** Joins the open transaction: what is rolled back is not recorded as done. */
+  record(event: SecurityEvent): Promise<void> {
+    return this.repository.add(event, this.clock.now());
+  }
+
+  /** The newest events that concern an account. */
+  latelyOf(accountId: string, most: number): Promise<RecordedEvent[]> {
+    return this.repository.latelyOf(accountId, most);
   }
 }

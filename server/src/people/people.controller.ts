@@ -19,12 +19,16 @@ import {
   type PersonView,
   type Suspend,
 } from './people.schemas.ts';
+import { AdministrationService } from './administration.service.ts';
 import { PeopleService } from './people.service.ts';
 
 /** The administrator's people page. */
 @Controller('api/people')
 export class PeopleController {
-  constructor(private readonly people: PeopleService) {}
+  constructor(
+    private readonly people: PeopleService,
+    private readonly administration: AdministrationService,
+  ) {}
 
   @Get()
   @Allow('administrator')
@@ -45,11 +49,11 @@ export class PeopleController {
   @Responds(200, personViewSchema)
   giveRole(
     @CurrentAccount() actor: SignedInAccount,
-    @Param('id', { schema: personIdSchema }) id: string,
+    @Param('id', { schema: personIdSchema }) personId: string,
     @Param('role', { schema: roleSchema }) role: Role,
     @CurrentSource() source: RequestSource,
   ): Promise<PersonView> {
-    return this.people.giveRole({ actor, source }, id, role);
+    return this.administration.giveRole({ actor, source, personId }, role);
   }
 
   @Delete(':id/roles/:role')
@@ -57,11 +61,11 @@ export class PeopleController {
   @Responds(200, personViewSchema)
   takeRole(
     @CurrentAccount() actor: SignedInAccount,
-    @Param('id', { schema: personIdSchema }) id: string,
+    @Param('id', { schema: personIdSchema }) personId: string,
     @Param('role', { schema: roleSchema }) role: Role,
     @CurrentSource() source: RequestSource,
   ): Promise<PersonView> {
-    return this.people.takeRole({ actor, source }, id, role);
+    return this.administration.takeRole({ actor, source, personId }, role);
   }
 
   @Put(':id/suspension')
@@ -69,11 +73,11 @@ export class PeopleController {
   @Responds(200, personViewSchema)
   suspend(
     @CurrentAccount() actor: SignedInAccount,
-    @Param('id', { schema: personIdSchema }) id: string,
+    @Param('id', { schema: personIdSchema }) personId: string,
     @Body({ schema: suspendSchema }) { reason }: Suspend,
     @CurrentSource() source: RequestSource,
   ): Promise<PersonView> {
-    return this.people.suspend({ actor, source }, id, reason);
+    return this.administration.suspend({ actor, source, personId }, reason);
   }
 
   @Delete(':id/suspension')
@@ -81,21 +85,22 @@ export class PeopleController {
   @Responds(200, personViewSchema)
   reinstate(
     @CurrentAccount() actor: SignedInAccount,
-    @Param('id', { schema: personIdSchema }) id: string,
+    @Param('id', { schema: personIdSchema }) personId: string,
     @CurrentSource() source: RequestSource,
   ): Promise<PersonView> {
-    return this.people.reinstate({ actor, source }, id);
+    return this.administration.reinstate({ actor, source, personId });
   }
 
   @Post(':id/password-reset')
   @Allow('administrator')
   @Responds(202, acceptedSchema)
-  startReset(
+  async startReset(
     @CurrentAccount() actor: SignedInAccount,
-    @Param('id', { schema: personIdSchema }) id: string,
+    @Param('id', { schema: personIdSchema }) personId: string,
     @CurrentSource() source: RequestSource,
   ): Promise<Record<string, never>> {
-    return this.people.startReset({ actor, source }, id);
+    await this.administration.startReset({ actor, source, personId });
+    return {};
   }
 
   @Delete(':id/sessions')
@@ -103,9 +108,9 @@ export class PeopleController {
   @Responds(204)
   endSessions(
     @CurrentAccount() actor: SignedInAccount,
-    @Param('id', { schema: personIdSchema }) id: string,
+    @Param('id', { schema: personIdSchema }) personId: string,
     @CurrentSource() source: RequestSource,
   ): Promise<void> {
-    return this.people.endSessions({ actor, source }, id);
+    return this.administration.endSessions({ actor, source, personId });
   }
 }

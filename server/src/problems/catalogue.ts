@@ -8,7 +8,6 @@ export const catalogue: Record<string, { status: number; title: string }> = {
   'not-signed-in': { status: 401, title: 'Not signed in' },
   'payload-too-large': { status: 413, title: 'Too large' },
   'too-many-attempts': { status: 429, title: 'Too many tries' },
-  'second-factor-needed': { status: 403, title: 'Second factor needed' },
   unavailable: { status: 503, title: 'Not available just now' },
   // classes, lessons, practice, worksheets
   'already-in-class': { status: 409, title: 'In this class already' },
@@ -17,6 +16,15 @@ export const catalogue: Record<string, { status: number; title: string }> = {
   'lesson-revised': { status: 409, title: 'A newer revision is out' },
   'practice-answered': { status: 409, title: 'Marked already' },
   'worksheet-handed-in': { status: 409, title: 'Handed in already' },
+  // accounts, sessions, people
+  'administrator-exists': { status: 409, title: 'There is an administrator' },
+  'fresh-sign-in-needed': { status: 403, title: 'Passphrase needed once more' },
+  'last-administrator': { status: 409, title: 'The last administrator' },
+  'link-not-valid': { status: 410, title: 'This link no longer works' },
+  'no-enrolment': { status: 409, title: 'Nothing to confirm' },
+  'not-on-oneself': { status: 409, title: 'Not on your own account' },
+  'second-factor-needed': { status: 403, title: 'Second factor needed' },
+  'sign-in-refused': { status: 401, title: 'Not signed in' },
   // papers, sittings
   'agreement-changed': { status: 409, title: 'The rules have changed' },
   'already-certified': { status: 409, title: 'Certified already' },

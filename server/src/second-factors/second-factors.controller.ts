@@ -12,19 +12,19 @@ import {
   type Enrolment,
   type RecoveryCodes,
 } from './second-factors.schemas.ts';
-import { SecondFactorsService } from './second-factors.service.ts';
+import { EnrolmentsService } from './enrolments.service.ts';
 
 @Controller('api/me/second-factor')
 export class SecondFactorsController {
-  constructor(private readonly factors: SecondFactorsService) {}
+  constructor(private readonly enrolments: EnrolmentsService) {}
 
   @Post()
   @Allow('administrator')
   @BeforeSecondFactor()
   @FreshSignIn()
   @Responds(201, enrolmentSchema)
-  enrol(@CurrentAccount() account: SignedInAccount): Promise<Enrolment> {
-    return this.factors.enrol(account);
+  begin(@CurrentAccount() account: SignedInAccount): Promise<Enrolment> {
+    return this.enrolments.begin(account);
   }
 
   @Post('confirmation')
@@ -37,6 +37,6 @@ export class SecondFactorsController {
     @Body({ schema: confirmEnrolmentSchema }) { code }: ConfirmEnrolment,
     @CurrentSource() source: RequestSource,
   ): Promise<RecoveryCodes> {
-    return this.factors.confirm(account, code, source);
+    return this.enrolments.confirm(account, code, source);
   }
 }

@@ -5,10 +5,8 @@ import { Strategy } from 'passport-jwt';
 import type { SignedInAccount } from '../accounts/account.ts';
 import { CONFIG } from '../config/config.module.ts';
 import type { Config } from '../config/config.schema.ts';
-import type { SessionToken } from './session.ts';
+import { TOKEN_AUDIENCE, type SessionToken } from './session.ts';
 import { sessionCookie, SessionsService } from './sessions.service.ts';
-
-export const TOKEN_AUDIENCE = 'ferrule-session';
 
 @Injectable()
 export class SessionStrategy extends PassportStrategy(Strategy, 'session') {

@@ -19,14 +19,16 @@ import {
   type SessionView,
   type SignIn,
 } from './sessions.schemas.ts';
-import { SessionsService } from './sessions.service.ts';
+import { SessionStepsService } from './session-steps.service.ts';
+import { SessionViewsService } from './session-views.service.ts';
 import { SignInService } from './sign-in.service.ts';
 
 @Controller('api')
 export class SessionsController {
   constructor(
     private readonly signing: SignInService,
-    private readonly sessions: SessionsService,
+    private readonly steps: SessionStepsService,
+    private readonly views: SessionViewsService,
     private readonly cookies: SessionCookies,
   ) {}
 
@@ -41,20 +43,17 @@ export class SessionsController {
   ): Promise<SessionView> {
     const knownDevice = this.cookies.readDevice(request);
     const replaced = request.account?.sessionId;
-    const { opened, device, view } = await this.signing.signIn(input, source, {
-      knownDevice,
-      replaced,
-    });
+    const { opened, device } = await this.signing.signIn(input, source, { knownDevice, replaced });
     this.cookies.set(reply, opened);
     this.cookies.setDevice(reply, device);
-    return view;
+    return this.views.current(opened.id);
   }
 
   @Get('session')
   @Allow('signed-in')
   @Responds(200, sessionViewSchema)
-  current(@CurrentAccount() account: SignedInAccount): Promise<SessionView> {
-    return this.sessions.view(account);
+  current(@CurrentAccount() { sessionId }: SignedInAccount): Promise<SessionView> {
+    return this.views.current(sessionId);
   }
 
   @Delete('session')
@@ -70,39 +69,45 @@ export class SessionsController {
   }
 
   @Post('session/second-factor')
-  @Allow('signed-in')
+  @Allow('administrator')
+  @BeforeSecondFactor()
   @Responds(200, sessionViewSchema)
-  giveCode(
+  async giveCode(
     @CurrentAccount() account: SignedInAccount,
     @Body({ schema: secondFactorCodeSchema }) { code }: SecondFactorCode,
     @CurrentSource() source: RequestSource,
   ): Promise<SessionView> {
-    return this.signing.giveCode(account, code, source);
+    await this.steps.giveCode(account, code, source);
+    return this.views.current(account.sessionId);
   }
 
   @Post('session/confirmation')
   @Allow('signed-in')
   @Responds(200, sessionViewSchema)
-  confirmPassword(
+  async confirmPassword(
     @CurrentAccount() account: SignedInAccount,
     @Body({ schema: confirmPasswordSchema }) { password }: ConfirmPassword,
     @CurrentSource() source: RequestSource,
   ): Promise<SessionView> {
-    return this.signing.confirmPassword(account, password, source);
+    await this.steps.confirmPassword(account, password, source);
+    return this.views.current(account.sessionId);
   }
 
   @Get('me/sessions')
   @Allow('signed-in')
   @Responds(200, ownSessionsSchema)
   list(@CurrentAccount() account: SignedInAccount): Promise<OwnSessions> {
-    return this.sessions.listOwn(account);
+    return this.views.listOwn(account);
   }
 
   @Delete('me/sessions')
   @Allow('signed-in')
   @Responds(204)
-  endOthers(@CurrentAccount() account: SignedInAccount): Promise<void> {
-    return this.sessions.endOthers(account);
+  endOthers(
+    @CurrentAccount() account: SignedInAccount,
+    @CurrentSource() source: RequestSource,
+  ): Promise<void> {
+    return this.views.endOthers(account, source);
   }
 
   @Delete('me/sessions/:id')
@@ -111,7 +116,8 @@ export class SessionsController {
   endOne(
     @CurrentAccount() account: SignedInAccount,
     @Param('id', { schema: z.uuid() }) id: string,
+    @CurrentSource() source: RequestSource,
   ): Promise<void> {
-    return this.sessions.endOwn(account, id);
+    return this.views.endOne(account, id, source);
   }
 }

@@ -5,15 +5,14 @@ import { PassportModule } from '@nestjs/passport';
 import { SequelizeModule } from '@nestjs/sequelize';
 import { CONFIG } from '../config/config.module.ts';
 import type { Config } from '../config/config.schema.ts';
+import { KnownDevicesService } from './known-devices.service.ts';
 import { SessionModel } from './models/session.model.ts';
 import { SessionGuard } from './session.guard.ts';
-import { SessionCookies } from './session-cookies.ts';
-import { SessionsController } from './sessions.controller.ts';
-import { SignInService } from './sign-in.service.ts';
-import { SessionStrategy, TOKEN_AUDIENCE } from './session.strategy.ts';
+import { SessionStrategy } from './session.strategy.ts';
 import { SessionsRepository } from './sessions.repository.ts';
 import { SessionsService } from './sessions.service.ts';
 
+/** Sessions and the guard that asks for them. Signing in is a module of its own, above accounts. */
 @Module({
   imports: [
     PassportModule,
@@ -21,20 +20,18 @@ import { SessionsService } from './sessions.service.ts';
       inject: [CONFIG],
       useFactory: (config: Config) => ({
         secret: config.SESSION_SECRET,
-        signOptions: { algorithm: 'HS256', audience: TOKEN_AUDIENCE },
+        signOptions: { algorithm: 'HS256' },
       }),
     }),
     SequelizeModule.forFeature([SessionModel]),
   ],
-  controllers: [SessionsController],
   providers: [
-    SessionCookies,
-    SignInService,
+    KnownDevicesService,
     SessionsService,
     SessionsRepository,
     SessionStrategy,
     { provide: APP_GUARD, useClass: SessionGuard },
   ],
-  exports: [SessionsService],
+  exports: [KnownDevicesService, SessionsService],
 })
 export class SessionsModule {}

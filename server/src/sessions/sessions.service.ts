@@ -5,8 +5,16 @@ import type { SignedInAccount } from '../accounts/account.ts';
 import { Clock } from '../clock/clock.ts';
 import { CONFIG } from '../config/config.module.ts';
 import type { Config } from '../config/config.schema.ts';
-import { ABSOLUTE_MS, IDLE_MS, TOUCH_MS, type SessionToken } from './session.ts';
-import type { OwnSessions, SessionView } from './sessions.schemas.ts';
+import { NotFound, NotSignedIn } from '../problems/common.errors.ts';
+import {
+  ABSOLUTE_MS,
+  IDLE_MS,
+  TOKEN_AUDIENCE,
+  TOUCH_MS,
+  type OpenSession,
+  type SessionStanding,
+  type SessionToken,
+} from './session.ts';
 import { SessionsRepository } from './sessions.repository.ts';
 
 const hash = (key: string) => createHash('sha256').update(key).digest();
@@ -34,6 +42,7 @@ export class SessionsService {
     const tokenHash = hash(key);
     const id = await this.repository.add({ accountId, tokenHash, startedAt, endsAt, ...from });
     const token = await this.jwt.signAsync({ sid: id, key } satisfies SessionToken, {
+      audience: TOKEN_AUDIENCE,
       expiresIn: ABSOLUTE_MS / 1_000,
     });
     return { id, token, endsAt };
@@ -42,10 +51,7 @@ export class SessionsService {
   /** The account behind a token, or null when the session is over for any reason. */
   async resolve(token: SessionToken): Promise<SignedInAccount | null> {
     const now = this.clock.now();
-    const found = await this.repository.findOpen(token.sid, hash(token.key), {
-      now,
-      idleSince: new Date(now.getTime() - IDLE_MS),
-    });
+    const found = await this.repository.findOpen(token.sid, hash(token.key), this.openNow());
     if (!found) return null;
     if (now.getTime() - found.lastSeenAt.getTime() > TOUCH_MS) {
       await this.repository.touch(token.sid, now);
@@ -53,22 +59,49 @@ export class SessionsService {
     return found.account;
   }
 
-  async view(_account: SignedInAccount): Promise<SessionView> {
-    throw new Error('not ready');
+  /** How an open session stands, for the person it belongs to. */
+  async standing(sessionId: string): Promise<SessionStanding> {
+    const standing = await this.repository.findStanding(sessionId, this.openNow());
+    if (!standing) throw new NotSignedIn();
+    return standing;
   }
-  async listOwn(_account: SignedInAccount): Promise<OwnSessions> {
-    throw new Error('not ready');
+
+  listOpen(accountId: string): Promise<OpenSession[]> {
+    return this.repository.listOpen(accountId, this.openNow());
   }
-  async endOthers(_account: SignedInAccount): Promise<void> {
-    throw new Error('not ready');
+
+  /** Ends a session, whatever it stands at. */
+  async end(sessionId: string): Promise<void> {
+    await this.repository.end(sessionId, this.clock.now());
   }
-  async endOwn(_account: SignedInAccount, _id: string): Promise<void> {
-    throw new Error('not ready');
+
+  /** @throws {NotFound} when it is not an open session of this account. */
+  async endOwn(accountId: string, sessionId: string): Promise<void> {
+    const ended = await this.repository.endOwn(accountId, sessionId, this.clock.now());
+    if (!ended) throw new NotFound('There is no open session of yours under this address.');
+  }
+
+  /** @param exceptId - a session that goes on. */
+  async endAll(accountId: string, exceptId: string | null = null): Promise<void> {
+    await this.repository.endAll(accountId, exceptId, this.clock.now());
+  }
+
+  async markSecondFactor(sessionId: string): Promise<void> {
+    await this.repository.mark(sessionId, { secondFactorAt: this.clock.now() });
+  }
+
+  async markFresh(sessionId: string): Promise<void> {
+    await this.repository.mark(sessionId, { authenticatedAt: this.clock.now() });
   }
 
   /** Name and attributes of the session cookie under this public address. */
   cookie(): { name: string; options: CookieOptions } {
     return sessionCookie(this.config);
+  }
+
+  private openNow(): { now: Date; idleSince: Date } {
+    const now = this.clock.now();
+    return { now, idleSince: new Date(now.getTime() - IDLE_MS) };
   }
 }
 
