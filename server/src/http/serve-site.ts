@@ -1,8 +1,18 @@
 import type { NestFastifyApplication } from '@nestjs/platform-fastify';
 import fastifyStatic from '@fastify/static';
+import type { FastifyReply, FastifyRequest } from 'fastify';
+import { readdir } from 'node:fs/promises';
 import { join } from 'node:path';
 import { NotFound } from '../problems/common.errors.ts';
 import { sendProblem } from '../problems/problem.filter.ts';
+
+const SERVER_PATHS = /^\/(api|assets|livez|readyz)(\/|$)/;
+
+async function filesBeside(folder: string): Promise<Set<string>> {
+  const entries = await readdir(folder, { withFileTypes: true });
+  const files = entries.filter((entry) => entry.isFile() && !entry.name.startsWith('.'));
+  return new Set(files.map(({ name }) => name));
+}
 
 /** Serves the built site; every address that is not a file or a route is one of its pages. */
 export async function serveSite(app: NestFastifyApplication, folder: string): Promise<void> {
@@ -12,12 +22,14 @@ export async function serveSite(app: NestFastifyApplication, folder: string): Pr
     prefix: '/assets/',
     immutable: true,
     maxAge: '365d',
-    decorateReply: true,
   });
-  fastify.setNotFoundHandler((request, reply) => {
-    const isPage =
-      request.method === 'GET' && !/^\/(api|assets|livez|readyz)(\/|$)/.test(request.url);
-    if (!isPage) return sendProblem(new NotFound(), request, reply);
-    return reply.header('cache-control', 'no-cache').sendFile('index.html', folder);
+  const files = await filesBeside(folder);
+  // A route and not a not-found handler: Nest has that one, and there is only one.
+  fastify.get('/*', (request: FastifyRequest, reply: FastifyReply) => {
+    const [path = '/'] = request.url.split('?', 1);
+    if (SERVER_PATHS.test(path)) return sendProblem(new NotFound(), request, reply);
+    const name = path.slice(1);
+    void reply.header('cache-control', 'no-cache');
+    return reply.sendFile(files.has(name) ? name : 'index.html', folder, { cacheControl: false });
   });
 }
