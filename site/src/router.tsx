@@ -22,6 +22,7 @@ const pages: RouteObject[] = [
   { path: 'account', lazy: () => import('./routes/account.tsx') },
   { path: 'check', lazy: () => import('./routes/check.tsx') },
   { path: 'check/:code', lazy: () => import('./routes/check-link.tsx') },
+  { path: 'course', lazy: () => import('./routes/course.tsx') },
   { path: 'people', lazy: () => import('./routes/people.tsx') },
   { path: 'certificates', lazy: () => import('./routes/certificates.tsx') },
   { path: 'problems/:slug', lazy: () => import('./routes/problem.tsx') },

@@ -1,7 +1,10 @@
 import '@testing-library/jest-dom/vitest';
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { afterAll, afterEach, beforeAll, vi } from 'vitest';
 import { apiServer } from './api-server.ts';
+
+// The first test of a file waits while its page is fetched and compiled.
+configure({ asyncUtilTimeout: 5000 });
 
 // jsdom knows neither.
 vi.stubGlobal('matchMedia', (media: string) =>

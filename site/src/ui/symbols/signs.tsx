@@ -70,3 +70,15 @@ export function PenCross() {
     </svg>
   );
 }
+
+/** A sheet has a newer revision than the one that was read. */
+export function RevisedSign({ letter }: { letter: string }) {
+  return (
+    <svg className="revised-sign" viewBox="0 0 20 18" width="20" height="18" aria-hidden="true">
+      <path d="M10 1 19 17H1Z" />
+      <text x="10" y="14.4" textAnchor="middle">
+        {letter}
+      </text>
+    </svg>
+  );
+}
