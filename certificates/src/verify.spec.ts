@@ -1,7 +1,8 @@
-import { createHash } from 'node:crypto';
+import { createHash, X509Certificate } from 'node:crypto';
 import fc from 'fast-check';
 import { beforeAll, describe, expect, it } from 'vitest';
 import {
+  edited,
   issuersOf,
   keyOf,
   messageOf,
@@ -9,9 +10,12 @@ import {
   signaturePlace,
   signedAt,
   signedCertificate,
-  signedWithGap,
+  signedByHand,
+  withMessage,
 } from '../test/fixtures.ts';
 import { type Authority } from './certificate.ts';
+import { der, positiveInteger } from './der.ts';
+import { readDer } from './verify/der-reader.ts';
 import {
   type FileFinding,
   type IssuerCertificate,
@@ -156,17 +160,28 @@ describe('a file with something added', () => {
 
   it('is refused when the gap was enlarged, though our own key signed what is around it', async () => {
     const key = keyOf(authority);
-    const wider = await signedWithGap(
-      key,
-      (contents) => `${contents.slice(0, -1)}${'00'.repeat(50)}>`,
-    );
-    expect(await check(wider)).toMatchObject({ fault: 'added-to' });
-    const beside = await signedWithGap(key, (contents) => `${contents} /Note (not signed)`);
-    expect(await check(beside)).toMatchObject({ fault: 'added-to' });
-    const before = await signedWithGap(key, (contents) => ` ${contents}`);
-    expect(await check(before)).toMatchObject({ fault: 'added-to' });
-    const usual = await signedWithGap(key, (contents) => contents);
-    expect(await check(usual)).toMatchObject({ ok: true });
+    for (const gap of [
+      (contents: string): string => `${contents.slice(0, -1)}${'00'.repeat(50)}>`,
+      (contents: string): string => `${contents} /Note (not signed)`,
+      (contents: string): string => ` ${contents}`,
+    ]) {
+      expect(await check(await signedByHand(key, { gap }))).toMatchObject({ fault: 'added-to' });
+    }
+    expect(await check(await signedByHand(key, {}))).toMatchObject({ ok: true });
+  });
+
+  it('is refused when it holds two versions, though our own key signed both', async () => {
+    const key = keyOf(authority);
+    for (const end of [
+      (tail: string): string => `${tail}\n%%EOF\n`,
+      (tail: string): string => tail.replace('startxref', '%%EOF\nstartxref'),
+      (tail: string): string => tail.replace('startxref', 'startxref\n0\nstartxref'),
+      (tail: string): string => tail.replace('trailer\n<<', 'trailer\n<< /Prev 99'),
+      (tail: string): string => tail.replace('trailer\n<<', 'trailer\n<< /XRefStm 99'),
+      (tail: string): string => `${tail}\nand more`,
+    ]) {
+      expect(await check(await signedByHand(key, { end }))).toMatchObject({ fault: 'added-to' });
+    }
   });
 
   it('is refused when the range in it is made to fit', async () => {
@@ -178,6 +193,79 @@ describe('a file with something added', () => {
     expect(fitting).toHaveLength(range.length);
     const changed = overwritten(longer.indexOf(range), fitting, longer);
     expect((await check(changed)).ok).toBe(false);
+  });
+});
+
+describe('a signature that other programs would take', () => {
+  const signedData = [1, 0];
+  const signerInfo = [...signedData, 4, 0];
+  const addMember =
+    (member: Buffer) =>
+    (value: Buffer): Buffer => {
+      const { tag, content } = readDer(value);
+      return der(tag, content, member);
+    };
+  /** The same signature with the other of the two values of s that verify. */
+  const twin = (value: Buffer): Buffer =>
+    edited(value, [1], (s) => {
+      const order = 0xffffffff00000000ffffffffffffffffbce6faada7179e84f3b9cac2fc632551n;
+      const other = order - BigInt(`0x${s.subarray(2).toString('hex')}`);
+      return positiveInteger(Buffer.from(other.toString(16).padStart(64, '0'), 'hex'));
+    });
+  const attribute = Buffer.from('3009060355040331021300', 'hex');
+  const strangersRoot = (): Buffer => new X509Certificate(stranger.rootCertificatePem).raw;
+
+  it.each<[string, number[], (value: Buffer) => Buffer]>([
+    ['turned into its twin', [...signerInfo, 5, 0], twin],
+    ['given an unsigned attribute', signerInfo, addMember(der(0xa1, attribute))],
+    ['made by two', [...signedData, 4], (set) => addMember(Buffer.from(readDer(set).content))(set)],
+    ['wrapped around content', [...signedData, 2], addMember(der(0xa0, der(0x04)))],
+    ['given another certificate', [...signedData, 3], (set) => addMember(strangersRoot())(set)],
+    ['without its certificate', [...signedData, 3], () => der(0xa0, strangersRoot())],
+    [
+      'with the same certificate twice',
+      [...signedData, 3],
+      (set) => addMember(set.subarray(4))(set),
+    ],
+    ['of another version', [...signedData, 0], () => Buffer.from('020103', 'hex')],
+    ['made with parameters', [...signerInfo, 2], addMember(Buffer.from('0500', 'hex'))],
+    ['made another way', [...signerInfo, 4], () => Buffer.from('300a06082a8648ce3d040301', 'hex')],
+    ['with another attribute', [...signerInfo, 3], addMember(attribute)],
+    ['followed by something', [], addMember(Buffer.from('0500', 'hex'))],
+  ])('is refused when it was %s', async (_, path, edit) => {
+    const message = Buffer.from(messageOf(signed), 'hex');
+    expect(
+      await check(
+        withMessage(
+          signed,
+          edited(message, path, (value) => value),
+        ),
+      ),
+    ).toEqual({
+      ok: true,
+      number: 'HQ7K-2M4T-9XWD',
+    });
+    expect(await check(withMessage(signed, edited(message, path, edit)))).toMatchObject({
+      fault: 'malformed-signature',
+    });
+  });
+
+  it('is refused when it carries another certificate for the same key than the one it names', async () => {
+    const leaf = new X509Certificate(authority.certificatePem).raw;
+    const other = edited(leaf, [2], (bits) => {
+      const signature = Buffer.from(readDer(bits).content.subarray(1));
+      return der(0x03, Buffer.of(0), twin(signature));
+    });
+    const root = new X509Certificate(authority.rootCertificatePem).raw;
+    const message = edited(Buffer.from(messageOf(signed), 'hex'), [...signedData, 3], () =>
+      der(0xa0, other, root),
+    );
+    const pem = new X509Certificate(other).toString();
+    const archive: IssuerCertificate[] = [...issuers, { keyId: 'other', kind: 'leaf', pem }];
+    expect(await check(withMessage(signed, message), archive)).toMatchObject({
+      fault: 'malformed-signature',
+      detail: expect.stringContaining('names another certificate') as string,
+    });
   });
 });
 

@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto';
 import { readFileSync } from 'node:fs';
 import { signDetached } from '../src/cms.ts';
+import { der } from '../src/der.ts';
 import {
   type Authority,
   type CertificateFonts,
@@ -18,6 +19,7 @@ import {
   reservedHead,
 } from '../src/signature-place.ts';
 import { type IssuerCertificate } from '../src/verify.ts';
+import { membersOf, readDer } from '../src/verify/der-reader.ts';
 
 export const fonts = Object.fromEntries(
   Object.entries(fontFiles()).map(([face, file]) => [face, readFileSync(file)]),
@@ -86,16 +88,38 @@ export function messageOf(file: Buffer): string {
   return file.toString('latin1', gapStart + 1, gapStart + 1 + (length + 4) * 2);
 }
 
-/** A certificate signed by hand, its signature's place shaped otherwise than it was reserved. */
-export async function signedWithGap(
+/** The file with another message in the place of its signature. */
+export function withMessage(file: Buffer, message: Buffer): Buffer {
+  const { gapStart, gapEnd } = signaturePlace(file);
+  const changed = Buffer.from(file);
+  changed.write(message.toString('hex').padEnd(gapEnd - gapStart - 2, '0'), gapStart + 1, 'latin1');
+  return changed;
+}
+
+/** A DER value with the member at a path replaced, and every length around it made right. */
+export function edited(value: Buffer, path: number[], edit: (member: Buffer) => Buffer): Buffer {
+  const [place, ...deeper] = path;
+  if (place === undefined) return edit(value);
+  const { tag } = readDer(value);
+  const members = membersOf(readDer(value), tag).map(({ octets }) => Buffer.from(octets));
+  const rebuilt = members.map((member, index) =>
+    index === place ? edited(member, deeper, edit) : member,
+  );
+  return der(tag, ...rebuilt);
+}
+
+/** A certificate signed by hand: the place of its signature, or its end, is not as we make them. */
+export async function signedByHand(
   signer: SigningKey,
-  shape: (contents: string) => string,
+  shape: { gap?: (contents: string) => string; end?: (tail: string) => string },
 ): Promise<Buffer> {
-  const [before = '', after = ''] = Buffer.from(await renderCertificate(statement, fonts))
+  const { gap: shapeGap = (contents) => contents, end: shapeEnd = (tail) => tail } = shape;
+  const [before = '', tail = ''] = Buffer.from(await renderCertificate(statement, fonts))
     .toString('latin1')
     .replace(reservedDate, '/M (D:20261103100000Z)')
     .split(reservedHead + reservedContents);
-  const gap = shape(reservedContents);
+  const after = shapeEnd(tail);
+  const gap = shapeGap(reservedContents);
   const gapStart = before.length + reservedHead.length;
   const range = `[0 ${gapStart} ${gapStart + gap.length} ${after.length}]`;
   const head = before + dictionaryHead(range);
@@ -103,6 +127,6 @@ export async function signedWithGap(
     .update(Buffer.from(head + after, 'latin1'))
     .digest();
   const message = signDetached(digest, signer, signedAt).toString('hex');
-  const filled = shape(`<${message}${'0'.repeat(reservedContents.length - 2 - message.length)}>`);
+  const filled = shapeGap(`<${message.padEnd(reservedContents.length - 2, '0')}>`);
   return Buffer.from(head + filled + after, 'latin1');
 }

@@ -118,10 +118,8 @@ function readSignerInfo(signerInfo: DerValue | undefined, carried: ReadCertifica
   requireAlgorithm(algorithm, identifiers.ecdsaWithSha256);
   requireNothing(unsigned);
   const named = contentOf(signerId, derTags.sequence);
-  const [signer, ...same] = carried.filter((one) => areEqual(one.issuerAndSerialNumber, named));
-  if (!signer || same.length > 0) {
-    throw malformed('it does not carry the one certificate it names.');
-  }
+  const signer = carried.find((one) => areEqual(one.issuerAndSerialNumber, named));
+  if (!signer) throw malformed('it does not carry the certificate it names.');
   const signedAttributes = new Uint8Array(attributes?.octets ?? []);
   // Signed as a SET OF, carried as [0] IMPLICIT (RFC 5652, section 5.4).
   signedAttributes[0] = derTags.set;
