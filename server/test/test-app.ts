@@ -8,6 +8,7 @@ import { join } from 'node:path';
 import { QueryTypes, type Sequelize } from 'sequelize';
 import { AppModule } from '../src/app.module.ts';
 import { createAdapter, setUpApp } from '../src/app.setup.ts';
+import { makeKey } from '../src/certificates/keys/key-folder.ts';
 import { Clock } from '../src/clock/clock.ts';
 import { readConfig } from '../src/config/config.schema.ts';
 import { JobsService } from '../src/jobs/jobs.service.ts';
@@ -57,10 +58,14 @@ export interface TestApp {
   readonly clock: SetClock;
   readonly database: TestDatabase;
   readonly mails: KeptMails;
+  /** Where the signing key of this app is. */
+  readonly keysFolder: string;
   /** Runs every waiting job, and those they enqueue. */
   runJobs(): Promise<number>;
   /** Looks straight into the database, with the server's role. */
   query<T extends object>(sql: string, bind?: unknown[]): Promise<T[]>;
+  /** How many statements the work sent to the database. */
+  countQueries(work: () => Promise<unknown>): Promise<number>;
   close(): Promise<void>;
 }
 
@@ -87,6 +92,10 @@ function testConfig(webUrl: string, keysFolder: string) {
 export async function createTestApp(): Promise<TestApp> {
   const database = await createTestDatabase();
   const keysFolder = mkdtempSync(join(tmpdir(), 'ferrule-keys-'));
+  await makeKey(keysFolder, {
+    organisation: 'Harrow Quay Technical School',
+    validFrom: new Date('2023-09-01T00:00:00Z'),
+  });
   const clock = new SetClock();
   const mails = new KeptMails();
   const config = testConfig(database.webUrl, keysFolder);
@@ -105,9 +114,20 @@ export async function createTestApp(): Promise<TestApp> {
     clock,
     database,
     mails,
+    keysFolder,
     runJobs: () => app.get(JobsService).runWaiting(),
     query: <T extends object>(sql: string, bind: unknown[] = []) =>
       app.get<Sequelize>(getConnectionToken()).query<T>(sql, { bind, type: QueryTypes.SELECT }),
+    countQueries: async (work) => {
+      const sequelize = app.get<Sequelize>(getConnectionToken());
+      let count = 0;
+      sequelize.addHook('beforeQuery', 'count', () => {
+        count += 1;
+      });
+      await work();
+      sequelize.removeHook('beforeQuery', 'count');
+      return count;
+    },
     close: async () => {
       await app.close();
       await database.drop();

@@ -1,4 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
+import { readdir, rm } from 'node:fs/promises';
+import { join } from 'node:path';
 import { createTestApp, type TestApp } from '../../test/test-app.ts';
 import { stranger } from '../../test/sign-in.ts';
 
@@ -13,7 +15,12 @@ describe('health', () => {
     expect((await stranger(test.app).call('GET', '/livez')).status).toBe(200);
   });
 
+  it('is ready with its schema and its key', async () => {
+    expect((await stranger(test.app).call('GET', '/readyz')).status).toBe(200);
+  });
+
   it('is not ready without a signing key, and says so to this machine', async () => {
+    for (const file of await readdir(test.keysFolder)) await rm(join(test.keysFolder, file));
     const reply = await stranger(test.app).call('GET', '/readyz');
     expect(reply.status).toBe(503);
     expect(reply.body.missing).toEqual(['There is no signing key.']);
