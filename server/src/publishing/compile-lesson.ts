@@ -1,7 +1,7 @@
 import { drawQuestion, workQuestion, type CompiledQuestion } from '@ferrule/assessments';
 import { createHash } from 'node:crypto';
 import type { CompiledFigure, CompiledLesson, Tree } from './compiled-lesson.ts';
-import { whyNotPractice } from './course-sheet.ts';
+import { whyNotPractice, type Pools } from './course-sheet.ts';
 import { readDrawing } from './drawings.ts';
 import { typesetFormulas } from './formulas.ts';
 import type { Sheet } from './front-matter.ts';
@@ -14,6 +14,7 @@ import { checkText, type Complain, type LinkTargets } from './text-checks.ts';
 
 export interface LessonReferences {
   readonly questions: ReadonlyMap<string, CompiledQuestion>;
+  readonly pools: Pools;
   readonly targets: LinkTargets;
 }
 
@@ -76,9 +77,8 @@ const workedSeed = (question: string, seed: string) =>
 
 function compileWorked(work: LessonWork, blocks: LessonBlocks): CompiledLesson['worked'] {
   const worked: Record<string, CompiledLesson['worked'][string]> = {};
-  const pools = new Map([...work.references.questions].map(([slug, q]) => [slug, q.meta.pool]));
   for (const { node, question, seed } of [...blocks.worked, ...blocks.tries]) {
-    const reason = whyNotPractice(question, pools);
+    const reason = whyNotPractice(question, work.references.pools);
     if (reason) work.complain(node, reason);
     const compiled = work.references.questions.get(question);
     if (reason || !compiled || !seed) continue;

@@ -60,11 +60,14 @@ export function readCourse(file: SourceFile, problems: ProblemList): ReadCourse 
   return { file, sheet, compiled: { ...sheet.front, units, intro: sheet.body.trim() } };
 }
 
+/** Pool of each question; a sheet that could not be read is wrong already, whoever names it. */
+export type Pools = ReadonlyMap<string, 'practice' | 'paper' | 'unread'>;
+
 /** What a course sheet may refer to. */
 export interface CourseReferences {
   /** Numbers of the lessons in the course's folder. */
   readonly lessons: ReadonlySet<string>;
-  readonly pools: ReadonlyMap<string, 'practice' | 'paper'>;
+  readonly pools: Pools;
   readonly targets: LinkTargets;
 }
 
@@ -120,10 +123,7 @@ export function checkCourse(
 }
 
 /** Why a question may not be shown for practice; null when it may. */
-export function whyNotPractice(
-  question: string,
-  pools: ReadonlyMap<string, 'practice' | 'paper'>,
-): string | null {
+export function whyNotPractice(question: string, pools: Pools): string | null {
   const pool = pools.get(question);
   if (pool === undefined)
     return `unknown question "${question}": there is no such sheet in the bank`;
