@@ -1,7 +1,3 @@
-/** The calendar day of an instant in a zone, as YYYY-MM-DD. */
-export const dayIn = (zone: string, at: Date): string =>
-  new Intl.DateTimeFormat('en-CA', { dateStyle: 'short', timeZone: zone }).format(at);
-
-/** The same day in words: 1 December 2026. */
+/** The calendar day of an instant in a zone, in words: 1 December 2026. */
 export const longDay = (zone: string, at: Date): string =>
   new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: zone }).format(at);

@@ -1,5 +1,5 @@
 import { presentQuestion } from '@ferrule/assessments';
-import { dayIn } from './days.ts';
+import { localDay } from '../clock/local-day.ts';
 import type { RecordedLook } from './looks.repository.ts';
 import type { OpenedItems } from './papers.schemas.ts';
 import { toAnswers, type Result } from './result.ts';
@@ -19,7 +19,7 @@ export function presentOpenedItems(sitting: Sitting, result: Result, opened: Ope
   return {
     id: sitting.id,
     name: candidateName(sitting),
-    satOn: dayIn(sitting.rules.scheme.zone, sitting.startedAt),
+    satOn: localDay(sitting.startedAt, sitting.rules.scheme.zone),
     marks: result.marks,
     outOf: result.outOf,
     passed: result.passed,

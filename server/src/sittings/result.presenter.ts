@@ -1,6 +1,6 @@
 import type { CertificateOfSitting } from '../certificates/certificate.ts';
+import { localDay } from '../clock/local-day.ts';
 import type { Practice } from '../papers/paper.ts';
-import { dayIn } from './days.ts';
 import type { Result } from './result.ts';
 import { percentOf, type Sitting } from './sitting.ts';
 import { candidateName } from './sitting.presenter.ts';
@@ -19,7 +19,7 @@ export function presentResult(sitting: Sitting, result: Result, around: Around):
     id: sitting.id,
     paper: { slug, number, title },
     name: candidateName(sitting),
-    satOn: dayIn(rules.scheme.zone, sitting.startedAt),
+    satOn: localDay(sitting.startedAt, rules.scheme.zone),
     handedInHow: sitting.handedInHow ?? 'at-the-deadline',
     markedAt: result.markedAt.toISOString(),
     ...{ marks, outOf, passed },

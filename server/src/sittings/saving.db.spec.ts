@@ -103,6 +103,18 @@ describe('saving', () => {
     expect((await save(caller, place, reused)).status).toBe(422);
   });
 
+  it('asks the database a handful of things, however long the paper is', async () => {
+    const { caller, sitting, place } = await openPaper();
+    await save(caller, place, { answer: typed('1', 'V'), sequence: 1 });
+    const asked = await test.countQueries(() =>
+      save(caller, place, { answer: typed('2', 'V'), sequence: 2 }),
+    );
+    // The session, then BEGIN, the sitting, the question, the answer and COMMIT.
+    expect(asked).toBeLessThanOrEqual(6);
+    const toLook = await test.countQueries(() => look(caller, sitting));
+    expect(toLook).toBeLessThanOrEqual(6);
+  });
+
   it('answers only after a commit that is durable', async () => {
     expect(await test.query('SHOW synchronous_commit')).toEqual([{ synchronous_commit: 'on' }]);
   });

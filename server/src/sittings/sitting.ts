@@ -60,7 +60,8 @@ export interface SavedAnswer {
 
 /** The smallest whole number of marks that is the pass percentage or more. */
 export function passMarks(outOf: number, passPercent: number): number {
-  return Math.ceil((outOf * passPercent) / 100);
+  // Rounded first: 66.6 % of 500 is 333, whatever binary fractions make of it.
+  return Math.ceil(Math.round(outOf * passPercent * 1_000) / 100_000);
 }
 
 /** Whole per cent, never rounded up: 69.9 is not a pass at 70. */

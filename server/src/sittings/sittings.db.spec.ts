@@ -13,13 +13,14 @@ import {
   askToStart,
   createCandidate,
   handIn,
+  markWaiting,
   rightAnswers,
   save,
   startPaper,
   typed,
   type Candidate,
 } from '../../test/factories/sitting.ts';
-import { signIn } from '../../test/sign-in.ts';
+import { signIn, type Reply } from '../../test/sign-in.ts';
 import { createTestApp, type TestApp } from '../../test/test-app.ts';
 import { JobsService } from '../jobs/jobs.service.ts';
 import { Marker } from './marker.ts';
@@ -106,7 +107,7 @@ describe('starting', () => {
     const sitting = await startPaper(candidate);
     await answerAll(candidate.caller, sitting);
     await handIn(candidate.caller, sitting);
-    await test.runJobs();
+    await markWaiting(test);
     const { state, certificateId } = await standing();
     expect(state).toBe('passed');
     const reply = await askToStart(candidate);
@@ -117,7 +118,7 @@ describe('starting', () => {
 
   it('is refused until the waiting time after a failed paper is over', async () => {
     await handIn(candidate.caller, await startPaper(candidate));
-    await test.runJobs();
+    await markWaiting(test);
     const mayStartAt = '2026-12-15T00:00:00.000Z';
     test.clock.set('2026-12-14T23:59:59Z');
     candidate = { ...candidate, caller: await signIn(test.app, candidate.account.id) };
@@ -155,7 +156,7 @@ describe('the terms', () => {
     const answer = rightAnswers(item).a;
     await save(candidate.caller, { sitting, item, part: 'a' }, { answer, sequence: 99 });
     await handIn(candidate.caller, sitting);
-    await test.runJobs();
+    await markWaiting(test);
     const result = await candidate.caller.call('GET', `/api/sittings/${sitting.id}/result`);
     expect(result.body).toMatchObject({ marks: 14, passMarks: 13, passPercent: 70, passed: true });
     const later = await startPaper(await createCandidate(test));
@@ -173,13 +174,13 @@ describe('the end', () => {
     test.clock.advance(45);
     const handedIn = await Promise.all([
       ...TWENTY.map(() => handIn(candidate.caller, sitting)),
-      jobs.enqueue('close-sitting', { sittingId: sitting.id }).then(() => test.runJobs()),
+      jobs.enqueue('close-sitting', { sittingId: sitting.id }).then(() => markWaiting(test)),
     ]);
-    const replies = handedIn.filter((reply) => typeof reply !== 'number');
+    const replies = handedIn.filter((reply): reply is Reply => typeof reply !== 'number');
     expect(new Set(replies.map(({ status }) => status))).toEqual(new Set([200]));
-    expect(new Set(replies.map(({ body }) => body.handedInAt)).size).toBe(1);
+    expect(new Set(replies.map(({ body }) => String(body.handedInAt))).size).toBe(1);
     await jobs.enqueue('mark-sitting', { sittingId: sitting.id });
-    await Promise.all([test.runJobs(), test.runJobs()]);
+    await Promise.all([markWaiting(test), markWaiting(test)]);
     expect(await whatCameOf(sitting.id)).toEqual({
       ...{ results: 1, decisions: 1, certificates: 1, mails: 1 },
     });
@@ -196,11 +197,11 @@ describe('the end', () => {
     const jobs = test.app.get(JobsService);
     test.clock.set('2026-12-01T10:45:02Z');
     await jobs.enqueue('close-sitting', { sittingId: sitting.id });
-    await test.runJobs();
+    await markWaiting(test);
     expect(await whatCameOf(sitting.id)).toMatchObject({ results: 0 });
     test.clock.set('2026-12-01T10:45:03Z');
     await jobs.enqueue('close-sitting', { sittingId: sitting.id });
-    await test.runJobs();
+    await markWaiting(test);
     const result = await candidate.caller.call('GET', `/api/sittings/${sitting.id}/result`);
     expect(result.body).toMatchObject({ handedInHow: 'at-the-deadline', marks: 18, passed: true });
     expect(await view(candidate.caller, sitting.id)).toMatchObject({
@@ -224,7 +225,7 @@ describe('the end', () => {
     });
     const again = await save(candidate.caller, place, kept);
     expect(again.body.receipt).toBe(inTime.body.receipt);
-    await test.runJobs();
+    await markWaiting(test);
     expect(await whatCameOf(sitting.id)).toMatchObject({ results: 1, mails: 1 });
   });
 
@@ -238,16 +239,16 @@ describe('the end', () => {
 
 describe('marking', () => {
   it('begins with the hand-in: saving does not mark', async () => {
-    await test.runJobs();
+    await markWaiting(test);
     const mark = jest.spyOn(test.app.get(Marker), 'mark');
     const sitting = await startPaper(candidate);
     await answerAll(candidate.caller, sitting);
     await view(candidate.caller, sitting.id);
-    await test.runJobs();
+    await markWaiting(test);
     expect(mark).not.toHaveBeenCalled();
     await handIn(candidate.caller, sitting);
     expect(mark).not.toHaveBeenCalled();
-    await test.runJobs();
+    await markWaiting(test);
     expect(mark).toHaveBeenCalledTimes(1);
     mark.mockRestore();
   });

@@ -2,12 +2,13 @@ import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
 import { randomUUID } from 'node:crypto';
 import type { Role } from '../accounts/account.ts';
 import { createAccount } from '../../test/factories/account.ts';
-import { CANARIES, PAPER, publishPaper } from '../../test/factories/paper.ts';
+import { CANARIES, PAPER, publishCourse, publishPaper } from '../../test/factories/paper.ts';
 import {
   answerAll,
   askToStart,
   createCandidate,
   handIn,
+  markWaiting,
   save,
   startPaper,
   typed,
@@ -123,7 +124,7 @@ describe('a candidate', () => {
     const seen: string[] = [];
     const caller: Caller = {
       sessionId: person.caller.sessionId,
-       
+
       call: async (...request) => {
         const reply = await person.caller.call(...request);
         seen.push(JSON.stringify([reply.headers, reply.body]));
@@ -140,7 +141,7 @@ describe('a candidate', () => {
     await caller.call('GET', `/api/sittings/${paper.id}`);
     await handIn(caller, paper);
     await save(caller, { sitting: paper, item, part: 'a' }, { ...wrong, sequence: 60 });
-    await test.runJobs();
+    await markWaiting(test);
     await caller.call('GET', `/api/sittings/${paper.id}`);
     const result = await caller.call('GET', `/api/sittings/${paper.id}/result`);
     expect(result.body).toMatchObject({ marks: 15, passed: true });
@@ -169,18 +170,22 @@ describe('a candidate', () => {
   });
 
   it('learns after a failed paper what to practise and when to sit again', async () => {
+    await publishCourse(test);
     const person = await createCandidate(test);
     const paper = await startPaper(person);
     await handIn(person.caller, paper);
-    await test.runJobs();
+    await markWaiting(test);
     const { body } = await person.caller.call('GET', `/api/sittings/${paper.id}/result`);
     expect(body).toMatchObject({
       ...{ marks: 0, outOf: 18, percent: 0, passMarks: 13, passed: false, certificate: null },
       ...{ satOn: '2026-12-01', maySitAgainAt: '2026-12-15T00:00:00.000Z' },
       appeal: 'Write to the school within ten working days.',
       bySubject: [
-        { subject: 'VD', name: 'voltage drop', marks: 0, outOf: 12 },
-        { subject: 'RD', name: 'rating and derating', marks: 0, outOf: 6 },
+        {
+          ...{ subject: 'VD', name: 'voltage drop', marks: 0, outOf: 12 },
+          practise: { sheet: '3.4', title: 'The long run', worksheet: 'W3' },
+        },
+        { subject: 'RD', marks: 0, outOf: 6, practise: null },
       ],
     });
   });
@@ -206,7 +211,7 @@ describe('a certification manager', () => {
     const manager = await desk('certification-manager');
     const path = `/api/sittings/${paper.id}/looks`;
     expect((await manager.call('POST', path, { reason })).status).toBe(409);
-    await test.runJobs();
+    await markWaiting(test);
     expect((await manager.call('POST', path, { reason: 'why not' })).status).toBe(422);
     const looks = [
       await manager.call('POST', path, { reason }),
@@ -230,7 +235,7 @@ describe('a certification manager', () => {
     const both = { account, caller: await signIn(test.app, account.id) };
     const own = await startPaper(both);
     await handIn(both.caller, own);
-    await test.runJobs();
+    await markWaiting(test);
     const refused = await both.caller.call('POST', `/api/sittings/${own.id}/looks`, { reason });
     expect(refused.status).toBe(403);
     expect(await test.query('SELECT 1 FROM item_looks WHERE sitting_id = $1', [own.id])).toEqual(

@@ -111,7 +111,7 @@ minutes: ${minutes}
 pass mark: ${passMark}
 wait days: 14
 sat: unsupervised, on the candidate's own device
-questions: { VD: 2, RD: 1 }
+questions: [{ subject: VD, count: 2 }, { subject: RD, count: 1 }]
 aids: [Calculator, Cable table]
 scheme:
   id: dc-installer
@@ -139,7 +139,7 @@ async function asOwner(test: TestApp, work: (client: pg.Client) => Promise<void>
 }
 
 interface Revision {
-  readonly kind: 'question' | 'blueprint';
+  readonly kind: 'course' | 'lesson' | 'question' | 'blueprint';
   readonly slug: string;
   readonly revision: string;
   readonly source: string;
@@ -198,4 +198,15 @@ export async function publishPaper(test: TestApp): Promise<void> {
     await publishQuestion(test, questionSheet({ id, subject: 'RD', lesson: '4.1' }));
   }
   await publishBlueprint(test, blueprintSheet());
+}
+
+/** A course with one sheet and its worksheet, as far as a result points to them. */
+export async function publishCourse(test: TestApp): Promise<void> {
+  const lesson = { number: '3.4', title: 'The long run' };
+  const unit = { number: 3, title: 'Voltage drop', sheets: ['3.4'], worksheet: { number: 'W3' } };
+  const shared = { revision: 'A', source: '', subject: null };
+  await asOwner(test, async (client) => {
+    await add(client, { ...shared, kind: 'lesson', slug: 'the-long-run', compiled: lesson });
+    await add(client, { ...shared, kind: 'course', slug: 'hq-dc2', compiled: { units: [unit] } });
+  });
 }

@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto';
+import { JobsService } from '../../src/jobs/jobs.service.ts';
 import type { SittingView } from '../../src/sittings/sittings.schemas.ts';
 import { signIn, type Caller, type Reply } from '../sign-in.ts';
 import type { TestApp } from '../test-app.ts';
@@ -78,3 +79,7 @@ export async function answerAll(caller: Caller, sitting: SittingView): Promise<v
 
 export const handIn = (caller: Caller, sitting: Pick<SittingView, 'id'>): Promise<Reply> =>
   caller.call('POST', `/api/sittings/${sitting.id}/hand-in`, {});
+
+/** Closes and marks what waits; certificates are drawn and letters sent by others. */
+export const markWaiting = (test: TestApp): Promise<number> =>
+  test.app.get(JobsService).runWaiting(['close-sitting', 'mark-sitting']);

@@ -4,102 +4,6 @@
  */
 
 export interface paths {
-    "/api/sessions": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post: operations["Sessions_signIn"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/api/session": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get: operations["Sessions_current"];
-        put?: never;
-        post?: never;
-        delete: operations["Sessions_signOut"];
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/api/session/second-factor": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post: operations["Sessions_giveCode"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/api/session/confirmation": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post: operations["Sessions_confirmPassword"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/api/me/sessions": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get: operations["Sessions_list"];
-        put?: never;
-        post?: never;
-        delete: operations["Sessions_endOthers"];
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/api/me/sessions/{id}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post?: never;
-        delete: operations["Sessions_endOne"];
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
     "/api/administrator-claims": {
         parameters: {
             query?: never;
@@ -285,7 +189,7 @@ export interface paths {
         };
         get?: never;
         put?: never;
-        post: operations["SecondFactors_enrol"];
+        post: operations["SecondFactors_begin"];
         delete?: never;
         options?: never;
         head?: never;
@@ -303,6 +207,102 @@ export interface paths {
         put?: never;
         post: operations["SecondFactors_confirm"];
         delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Sessions_signIn"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Sessions_current"];
+        put?: never;
+        post?: never;
+        delete: operations["Sessions_signOut"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session/second-factor": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Sessions_giveCode"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session/confirmation": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Sessions_confirmPassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/me/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Sessions_list"];
+        put?: never;
+        post?: never;
+        delete: operations["Sessions_endOthers"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/me/sessions/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["Sessions_endOne"];
         options?: never;
         head?: never;
         patch?: never;
@@ -430,6 +430,22 @@ export interface paths {
         get: operations["Papers_list"];
         put?: never;
         post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/time-allowances": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Papers_allowedTimes"];
+        put?: never;
+        post: operations["Papers_allowTime"];
         delete?: never;
         options?: never;
         head?: never;
@@ -975,257 +991,6 @@ export interface components {
 }
 export type $defs = Record<string, never>;
 export interface operations {
-    Sessions_signIn: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": {
-                    email: string;
-                    password: string;
-                };
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": {
-                        account: {
-                            /** Format: uuid */
-                            id: string;
-                            givenName: string;
-                            familyName: string;
-                            email: string;
-                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
-                        };
-                        /** @enum {string} */
-                        secondFactor: "none" | "needed" | "to-enrol" | "done";
-                        /** Format: date-time */
-                        idleEndsAt: string;
-                        /** Format: date-time */
-                        endsAt: string;
-                        /** Format: date-time */
-                        authenticatedAt: string;
-                        demonstration: boolean;
-                    };
-                };
-            };
-        };
-    };
-    Sessions_current: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": {
-                        account: {
-                            /** Format: uuid */
-                            id: string;
-                            givenName: string;
-                            familyName: string;
-                            email: string;
-                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
-                        };
-                        /** @enum {string} */
-                        secondFactor: "none" | "needed" | "to-enrol" | "done";
-                        /** Format: date-time */
-                        idleEndsAt: string;
-                        /** Format: date-time */
-                        endsAt: string;
-                        /** Format: date-time */
-                        authenticatedAt: string;
-                        demonstration: boolean;
-                    };
-                };
-            };
-        };
-    };
-    Sessions_signOut: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-        };
-    };
-    Sessions_giveCode: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": {
-                    code: string;
-                };
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": {
-                        account: {
-                            /** Format: uuid */
-                            id: string;
-                            givenName: string;
-                            familyName: string;
-                            email: string;
-                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
-                        };
-                        /** @enum {string} */
-                        secondFactor: "none" | "needed" | "to-enrol" | "done";
-                        /** Format: date-time */
-                        idleEndsAt: string;
-                        /** Format: date-time */
-                        endsAt: string;
-                        /** Format: date-time */
-                        authenticatedAt: string;
-                        demonstration: boolean;
-                    };
-                };
-            };
-        };
-    };
-    Sessions_confirmPassword: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": {
-                    password: string;
-                };
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": {
-                        account: {
-                            /** Format: uuid */
-                            id: string;
-                            givenName: string;
-                            familyName: string;
-                            email: string;
-                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
-                        };
-                        /** @enum {string} */
-                        secondFactor: "none" | "needed" | "to-enrol" | "done";
-                        /** Format: date-time */
-                        idleEndsAt: string;
-                        /** Format: date-time */
-                        endsAt: string;
-                        /** Format: date-time */
-                        authenticatedAt: string;
-                        demonstration: boolean;
-                    };
-                };
-            };
-        };
-    };
-    Sessions_list: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": {
-                        sessions: {
-                            /** Format: uuid */
-                            id: string;
-                            current: boolean;
-                            /** Format: date-time */
-                            startedAt: string;
-                            /** Format: date-time */
-                            lastSeenAt: string;
-                            device: string;
-                            address: string;
-                        }[];
-                    };
-                };
-            };
-        };
-    };
-    Sessions_endOthers: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-        };
-    };
-    Sessions_endOne: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                id: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-        };
-    };
     AdministratorClaims_claim: {
         parameters: {
             query?: never;
@@ -1518,7 +1283,7 @@ export interface operations {
             };
         };
     };
-    SecondFactors_enrol: {
+    SecondFactors_begin: {
         parameters: {
             query?: never;
             header?: never;
@@ -1565,6 +1330,257 @@ export interface operations {
                         recoveryCodes: string[];
                     };
                 };
+            };
+        };
+    };
+    Sessions_signIn: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    email: string;
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        account: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        };
+                        /** @enum {string} */
+                        secondFactor: "none" | "needed" | "to-enrol" | "done";
+                        /** Format: date-time */
+                        idleEndsAt: string;
+                        /** Format: date-time */
+                        endsAt: string;
+                        /** Format: date-time */
+                        authenticatedAt: string;
+                        demonstration: boolean;
+                    };
+                };
+            };
+        };
+    };
+    Sessions_current: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        account: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        };
+                        /** @enum {string} */
+                        secondFactor: "none" | "needed" | "to-enrol" | "done";
+                        /** Format: date-time */
+                        idleEndsAt: string;
+                        /** Format: date-time */
+                        endsAt: string;
+                        /** Format: date-time */
+                        authenticatedAt: string;
+                        demonstration: boolean;
+                    };
+                };
+            };
+        };
+    };
+    Sessions_signOut: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+        };
+    };
+    Sessions_giveCode: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    code: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        account: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        };
+                        /** @enum {string} */
+                        secondFactor: "none" | "needed" | "to-enrol" | "done";
+                        /** Format: date-time */
+                        idleEndsAt: string;
+                        /** Format: date-time */
+                        endsAt: string;
+                        /** Format: date-time */
+                        authenticatedAt: string;
+                        demonstration: boolean;
+                    };
+                };
+            };
+        };
+    };
+    Sessions_confirmPassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        account: {
+                            /** Format: uuid */
+                            id: string;
+                            givenName: string;
+                            familyName: string;
+                            email: string;
+                            roles: ("trainee" | "trainer" | "certification-manager" | "administrator")[];
+                        };
+                        /** @enum {string} */
+                        secondFactor: "none" | "needed" | "to-enrol" | "done";
+                        /** Format: date-time */
+                        idleEndsAt: string;
+                        /** Format: date-time */
+                        endsAt: string;
+                        /** Format: date-time */
+                        authenticatedAt: string;
+                        demonstration: boolean;
+                    };
+                };
+            };
+        };
+    };
+    Sessions_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        sessions: {
+                            /** Format: uuid */
+                            id: string;
+                            current: boolean;
+                            /** Format: date-time */
+                            startedAt: string;
+                            /** Format: date-time */
+                            lastSeenAt: string;
+                            device: string;
+                            address: string;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    Sessions_endOthers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+        };
+    };
+    Sessions_endOne: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
         };
     };
@@ -1962,6 +1978,70 @@ export interface operations {
                             looks: number;
                         }[];
                         nextCursor: string | null;
+                    };
+                };
+            };
+        };
+    };
+    Papers_allowedTimes: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        allowances: {
+                            name: string;
+                            email: string;
+                            percent: number;
+                            reason: string;
+                            /** Format: date-time */
+                            grantedAt: string;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    Papers_allowTime: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    email: string;
+                    percent: number;
+                    reason: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        allowances: {
+                            name: string;
+                            email: string;
+                            percent: number;
+                            reason: string;
+                            /** Format: date-time */
+                            grantedAt: string;
+                        }[];
                     };
                 };
             };
