@@ -85,7 +85,7 @@ function repeatedSecrets(environment) {
 export function findSettingFaults(environment) {
   const faults = needed.flatMap((setting) => {
     const fault = faultOf(setting, environment);
-    return fault ? [`${setting.name} ${fault}. It is ${setting.purpose}.`] : [];
+    return fault ? [`${setting.name} (${setting.purpose}) ${fault}`] : [];
   });
   return [...faults, ...repeatedSecrets(environment)];
 }

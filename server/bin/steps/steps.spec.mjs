@@ -29,7 +29,7 @@ describe('the settings of a school of its own', () => {
   it.each(Object.keys(realSettings))('are refused without %s, naming it', (name) => {
     const faults = findSettingFaults({ ...realSettings, [name]: '' });
     expect(faults).toHaveLength(1);
-    expect(faults[0]).toMatch(new RegExp(`^${name} is missing\\. It is .{10}`));
+    expect(faults[0]).toMatch(new RegExp(`^${name} \\(.{10,}\\) is missing`));
   });
 
   it.each([

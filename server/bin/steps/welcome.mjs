@@ -34,7 +34,9 @@ export function welcomeToOwnDatabase({ siteUrl, localUrl, link, seconds }) {
   return [
     '',
     `Ferrule is running (${seconds} s) for ${siteUrl} and listens at ${localUrl}.`,
-    ...(link ? ['', link] : []),
+    ...(link
+      ? ['', 'The first administrator signs up here; the link serves once:', `  ${link}`]
+      : []),
     '',
     caution,
     '',
