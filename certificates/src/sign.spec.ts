@@ -2,6 +2,7 @@ import { generateKeyPairSync, X509Certificate } from 'node:crypto';
 import { Certificate, ContentInfo, SignedData } from 'pkijs';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
+  drawnCertificate,
   fonts,
   keyOf,
   newAuthority,
@@ -121,7 +122,7 @@ describe('signing', () => {
   });
 
   it('refuses a key that is not its certificate’s, is of another kind, or is out of date', async () => {
-    const pdf = await renderCertificate(statement, fonts);
+    const pdf = await drawnCertificate();
     const other = await newAuthority();
     const rsa = generateKeyPairSync('rsa', { modulusLength: 2048 }).privateKey;
     const attempts = [

@@ -70,9 +70,17 @@ export function issuersOf(authority: Authority): IssuerCertificate[] {
   ];
 }
 
+// Drawn once for all tests of a file; drawing takes far longer than signing.
+let drawing: Promise<Uint8Array> | undefined;
+
+/** The statement above, drawn and not signed. */
+export function drawnCertificate(): Promise<Uint8Array> {
+  drawing ??= renderCertificate(statement, fonts);
+  return drawing;
+}
+
 export async function signedCertificate(authority: Authority, at = signedAt): Promise<Buffer> {
-  const pdf = await renderCertificate(statement, fonts);
-  return Buffer.from(await signPdf(pdf, keyOf(authority), at));
+  return Buffer.from(await signPdf(await drawnCertificate(), keyOf(authority), at));
 }
 
 /** Where the signature stands in a signed file: from its `<` to after its `>`. */
@@ -114,7 +122,7 @@ export async function signedByHand(
   shape: { gap?: (contents: string) => string; end?: (tail: string) => string },
 ): Promise<Buffer> {
   const { gap: shapeGap = (contents) => contents, end: shapeEnd = (tail) => tail } = shape;
-  const [before = '', tail = ''] = Buffer.from(await renderCertificate(statement, fonts))
+  const [before = '', tail = ''] = Buffer.from(await drawnCertificate())
     .toString('latin1')
     .replace(reservedDate, '/M (D:20261103100000Z)')
     .split(reservedHead + reservedContents);
