@@ -2,7 +2,7 @@ import type { Blueprint, RawAnswer } from '@ferrule/assessments';
 import { SittingClosed, TakenOver } from './sittings.errors.ts';
 
 /** How long after the time an answer that was on its way is still taken. */
-export const GRACE_MS = 2_000;
+const GRACE_MS = 2_000;
 
 const MINUTE_MS = 60_000;
 
