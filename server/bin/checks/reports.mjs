@@ -4,7 +4,14 @@ import { readJson } from '../steps/private-files.mjs';
 
 const skippedText = 'It was skipped: a check that does not run proves nothing.';
 
-const failure = (title, text) => ({ title, text });
+/** Without the runner's own part of a stack: it says nothing about the failure. */
+const withoutRunner = (text) =>
+  text
+    .split('\n')
+    .filter((line) => !/^\s+at .*node_modules/.test(line))
+    .join('\n');
+
+const failure = (title, text) => ({ title, text: withoutRunner(text) });
 
 /** What a runner said when its own report is missing or does not explain its exit. */
 function judge({ passed, failures, code, said, name }) {
