@@ -23,13 +23,18 @@ const pages: RouteObject[] = [
   { path: 'check', lazy: () => import('./routes/check.tsx') },
   { path: 'check/:code', lazy: () => import('./routes/check-link.tsx') },
   { path: 'course', lazy: () => import('./routes/course.tsx') },
+  { path: 'sheets/:number', lazy: () => import('./routes/sheet.tsx') },
+  { path: 'papers/:slug', lazy: () => import('./routes/paper.tsx') },
   { path: 'people', lazy: () => import('./routes/people.tsx') },
   { path: 'certificates', lazy: () => import('./routes/certificates.tsx') },
   { path: 'problems/:slug', lazy: () => import('./routes/problem.tsx') },
   { path: '*', lazy: () => import('./routes/not-found.tsx') },
 ];
 
-const barePages: RouteObject[] = [];
+const barePages: RouteObject[] = [
+  { path: 'sittings/:id', lazy: () => import('./routes/sitting.tsx') },
+  { path: 'sittings/:id/review', lazy: () => import('./routes/sitting-review.tsx') },
+];
 
 export const routes: RouteObject[] = [
   {

@@ -47,3 +47,14 @@ export function sayMoment(instant: string): string {
 export function sayMomentInUtc(instant: string): string {
   return `${utcMoment.format(new Date(instant)).replace(', ', ' at ')} UTC`;
 }
+
+const timeOfDay = new Intl.DateTimeFormat('en-GB', {
+  hour: '2-digit',
+  minute: '2-digit',
+  second: '2-digit',
+});
+
+/** "10:27:04", in the reader's own zone. */
+export function sayTimeOfDay(instant: string): string {
+  return timeOfDay.format(new Date(instant));
+}

@@ -1,0 +1,155 @@
+import { Button } from '@radix-ui/themes';
+import { useSuspenseQuery } from '@tanstack/react-query';
+import { Link, useParams } from 'react-router-dom';
+import { cacheOf, type LoaderArgs, requireSession, sessionQuery } from '../api/session.ts';
+import '../features/papers/papers.css';
+import { paperQuery, type PaperView } from '../features/papers/queries.ts';
+import { StartForm } from '../features/papers/start-form.tsx';
+import { sayDate, sayMoment } from '../ui/dates.ts';
+import { PageTitle } from '../ui/page-title.tsx';
+import { Sheet, SheetHead } from '../ui/sheet.tsx';
+import { TitleBlock } from '../ui/title-block.tsx';
+
+export async function loader(args: LoaderArgs) {
+  await requireSession(args);
+  return cacheOf(args).fetchQuery(paperQuery(args.params.slug ?? ''));
+}
+
+export function Component() {
+  const { slug = '' } = useParams();
+  const { data: paper } = useSuspenseQuery(paperQuery(slug));
+  const { data: session } = useSuspenseQuery(sessionQuery);
+  return (
+    <>
+      <PageTitle>{paper.title}</PageTitle>
+      <Sheet>
+        <SheetHead
+          kicker="Certification paper"
+          title={paper.title}
+          standfirst={`Passing it certifies you as ${paper.scheme.title}, for ${paper.scheme.validYears} years.`}
+          titleBlock={<PaperBlock paper={paper} />}
+        />
+        <div className="columns two">
+          <section className="section">
+            <Standing paper={paper} />
+            {paper.standing.state === 'open' && session && (
+              <StartForm
+                paper={paper}
+                givenName={session.account.givenName}
+                familyName={session.account.familyName}
+              />
+            )}
+          </section>
+          <section className="section">
+            <PaperFacts paper={paper} />
+          </section>
+        </div>
+      </Sheet>
+    </>
+  );
+}
+
+function PaperBlock({ paper }: { paper: PaperView }) {
+  return (
+    <TitleBlock
+      cells={[
+        { label: 'Paper no.', value: paper.number, span: 2, kind: 'strong' },
+        { label: 'Questions', value: String(paper.questions), span: 2 },
+        { label: 'Minutes', value: String(paper.minutes), span: 2, kind: 'strong' },
+        { label: 'Marks', value: paper.marks === null ? 'varies' : String(paper.marks), span: 2 },
+        { label: 'To pass', value: `${paper.passPercent} %`, span: 2 },
+        { label: 'Wait between sittings', value: `${paper.waitDays} days`, span: 2 },
+        { label: 'How it is sat', value: paper.sat, span: 6 },
+      ]}
+    />
+  );
+}
+
+function Standing({ paper }: { paper: PaperView }) {
+  const { standing } = paper;
+  if (standing.state === 'sitting' && standing.sittingId) {
+    return (
+      <>
+        <h2>Your paper is open</h2>
+        <p>The clock is running. The same questions and the same time wait for you.</p>
+        <div className="actions">
+          <Button size="3" asChild>
+            <Link to={`/sittings/${standing.sittingId}?q=1`}>Go on with the paper</Link>
+          </Button>
+        </div>
+      </>
+    );
+  }
+  if (standing.state === 'passed') {
+    return (
+      <>
+        <h2>You have passed</h2>
+        <p>Your certificate is in your record.</p>
+        <div className="actions">
+          {standing.certificateId && (
+            <Button size="3" asChild>
+              <Link to={`/certificates/${standing.certificateId}`}>Open the certificate</Link>
+            </Button>
+          )}
+        </div>
+      </>
+    );
+  }
+  if (standing.state === 'waiting') {
+    return (
+      <>
+        <h2>
+          You may sit again{' '}
+          {standing.mayStartAt ? `from ${sayMoment(standing.mayStartAt)}` : 'later'}
+        </h2>
+        {standing.reasons.map((reason) => (
+          <p key={reason}>{reason}</p>
+        ))}
+        <EarlierSittings paper={paper} />
+      </>
+    );
+  }
+  return null;
+}
+
+function EarlierSittings({ paper }: { paper: PaperView }) {
+  return (
+    <ul className="dash-list">
+      {paper.standing.sittings.map((sitting) => (
+        <li key={sitting.id}>
+          <Link to={`/sittings/${sitting.id}/result`}>Sat on {sayDate(sitting.startedAt)}</Link>
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+function PaperFacts({ paper }: { paper: PaperView }) {
+  return (
+    <>
+      <h2>What the certificate will say</h2>
+      <ul className="dash-list">
+        {paper.scheme.scope.map((line) => (
+          <li key={line}>{line}</li>
+        ))}
+      </ul>
+      <h2>What it does not say</h2>
+      <ul className="dash-list">
+        {paper.scheme.limits.map((line) => (
+          <li key={line}>{line}</li>
+        ))}
+      </ul>
+      <h2>What you may use</h2>
+      <ul className="dash-list">
+        {paper.aids.map((aid) => (
+          <li key={aid}>{aid}</li>
+        ))}
+      </ul>
+      {paper.extraTimePercent > 0 && (
+        <p>Your {paper.minutes} minutes include the extra time approved for you.</p>
+      )}
+      <h2>If you do not agree with the result</h2>
+      <p>{paper.appeal}</p>
+    </>
+  );
+}
