@@ -9,12 +9,16 @@ import multipart from '@fastify/multipart';
 import rateLimit from '@fastify/rate-limit';
 import type { Config } from './config/config.schema.ts';
 import { refuseNullCharacters } from './http/refuse-null-characters.ts';
+import { refuseOtherMedia } from './http/refuse-other-media.ts';
 import { refuseCrossSite } from './http/same-origin.ts';
+import { contentPolicy, earlyHeaders } from './http/security-headers.ts';
 import { InvalidRequest, TooManyAttempts } from './problems/common.errors.ts';
 import { ProblemFilter, sendProblem } from './problems/problem.filter.ts';
 
 const MAX_BODY_BYTES = 100_000;
 export const MAX_UPLOAD_BYTES = 5_000_000;
+
+const isHttps = (config: Config) => config.PUBLIC_URL.startsWith('https:');
 
 /** The adapter with its limits; errors raised before Nest sees the request are problems too. */
 export function createAdapter(config: Config): FastifyAdapter {
@@ -24,6 +28,7 @@ export function createAdapter(config: Config): FastifyAdapter {
     requestTimeout: 30_000,
     routerOptions: { maxParamLength: 300 },
     frameworkErrors: (error: Error, request: FastifyRequest, reply: FastifyReply) => {
+      void reply.headers(earlyHeaders(isHttps(config)));
       sendProblem(new InvalidRequest([{ pointer: '#', detail: error.message }]), request, reply);
     },
   });
@@ -48,27 +53,15 @@ function invalid(issues: readonly SchemaIssue[]): InvalidRequest {
 }
 
 async function registerPlugins(app: NestFastifyApplication, config: Config): Promise<void> {
-  const isHttps = config.PUBLIC_URL.startsWith('https:');
   await app.register(cookie);
   await app.register(helmet, {
     contentSecurityPolicy: {
       useDefaults: false,
-      directives: {
-        defaultSrc: ["'none'"],
-        scriptSrc: ["'self'"],
-        // Radix sets style attributes.
-        styleSrc: ["'self'", "'unsafe-inline'"],
-        imgSrc: ["'self'", 'data:', 'blob:'],
-        fontSrc: ["'self'"],
-        connectSrc: ["'self'"],
-        manifestSrc: ["'self'"],
-        objectSrc: ["'none'"],
-        baseUri: ["'none'"],
-        formAction: ["'self'"],
-        frameAncestors: ["'none'"],
-      },
+      directives: contentPolicy,
     },
-    strictTransportSecurity: isHttps ? { maxAge: 31_536_000, includeSubDomains: true } : false,
+    strictTransportSecurity: isHttps(config)
+      ? { maxAge: 31_536_000, includeSubDomains: true }
+      : false,
     referrerPolicy: { policy: 'no-referrer' },
     crossOriginOpenerPolicy: { policy: 'same-origin' },
   });
@@ -89,9 +82,9 @@ async function registerPlugins(app: NestFastifyApplication, config: Config): Pro
 export async function setUpApp(app: NestFastifyApplication, config: Config): Promise<void> {
   await registerPlugins(app, config);
   const fastify = app.getHttpAdapter().getInstance();
-  fastify.removeContentTypeParser('application/x-www-form-urlencoded');
   fastify.addHook('onRequest', async (request, reply) => {
     refuseCrossSite(request, config.PUBLIC_URL);
+    refuseOtherMedia(request);
     if (request.url.startsWith('/api/')) void reply.header('cache-control', 'no-store');
   });
   fastify.addHook('preValidation', async (request) => refuseNullCharacters(request));

@@ -1,7 +1,4 @@
-import type { NestFastifyApplication } from '@nestjs/platform-fastify';
-import { getConnectionToken } from '@nestjs/sequelize';
 import { randomUUID } from 'node:crypto';
-import { QueryTypes, type Sequelize } from 'sequelize';
 import type { TestApp } from './test-app.ts';
 import { stranger } from './sign-in.ts';
 
@@ -36,19 +33,10 @@ export async function openAccount(
   await anyone.call('POST', '/api/accounts', { givenName, familyName, email, password });
   await test.runJobs();
   await anyone.call('POST', '/api/email-confirmations', { token: keyFromMail(test, email) });
-  const [row] = await select<{ id: string }>(test.app, 'SELECT id FROM accounts WHERE email = $1', [
+  const [row] = await test.query<{ id: string }>('SELECT id FROM accounts WHERE email = $1', [
     email,
   ]);
   return { id: row?.id ?? '', email, password };
-}
-
-/** Rows of the database, for what no route shows. */
-export function select<T extends object>(
-  app: NestFastifyApplication,
-  sql: string,
-  bind: unknown[] = [],
-): Promise<T[]> {
-  return app.get<Sequelize>(getConnectionToken()).query<T>(sql, { bind, type: QueryTypes.SELECT });
 }
 
 /** The cookies of an answer, as a browser would send them back. */

@@ -11,6 +11,7 @@ import { createAdapter, setUpApp } from '../src/app.setup.ts';
 import { makeKey } from '../src/certificates/keys/key-folder.ts';
 import { Clock } from '../src/clock/clock.ts';
 import { readConfig } from '../src/config/config.schema.ts';
+import { serveSite } from '../src/http/serve-site.ts';
 import { JobsService } from '../src/jobs/jobs.service.ts';
 import { MailTransport } from '../src/mail/mail-transport.ts';
 import { createTestDatabase, type TestDatabase } from './test-database.ts';
@@ -71,12 +72,18 @@ export interface TestApp {
 
 export const PUBLIC_URL = 'http://127.0.0.1:4780';
 
-function testConfig(webUrl: string, keysFolder: string) {
+interface TestAppOptions {
+  readonly publicUrl?: string;
+  /** A built site to serve. */
+  readonly siteFolder?: string;
+}
+
+function testConfig(webUrl: string, keysFolder: string, publicUrl: string) {
   return readConfig({
     NODE_ENV: 'test',
     JOB_WORKERS: '0',
     DEMONSTRATION: '1',
-    PUBLIC_URL,
+    PUBLIC_URL: publicUrl,
     DATABASE_URL: webUrl,
     DATABASE_POOL: '6',
     SESSION_SECRET: 'a1'.repeat(32),
@@ -89,7 +96,7 @@ function testConfig(webUrl: string, keysFolder: string) {
 }
 
 /** The whole server on a database of its own; only the clock and the mail server are replaced. */
-export async function createTestApp(): Promise<TestApp> {
+export async function createTestApp(options: TestAppOptions = {}): Promise<TestApp> {
   const database = await createTestDatabase();
   const keysFolder = mkdtempSync(join(tmpdir(), 'ferrule-keys-'));
   await makeKey(keysFolder, {
@@ -98,7 +105,7 @@ export async function createTestApp(): Promise<TestApp> {
   });
   const clock = new SetClock();
   const mails = new KeptMails();
-  const config = testConfig(database.webUrl, keysFolder);
+  const config = testConfig(database.webUrl, keysFolder, options.publicUrl ?? PUBLIC_URL);
   const testing = await Test.createTestingModule({ imports: [AppModule.with(config)] })
     .overrideProvider(Clock)
     .useValue(clock)
@@ -107,6 +114,7 @@ export async function createTestApp(): Promise<TestApp> {
     .compile();
   const app = testing.createNestApplication<NestFastifyApplication>(createAdapter(config));
   await setUpApp(app, config);
+  if (options.siteFolder !== undefined) await serveSite(app, options.siteFolder);
   await app.init();
   await app.getHttpAdapter().getInstance().ready();
   return {

@@ -1,11 +1,5 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from '@jest/globals';
-import {
-  freshEmail,
-  keyFromMail,
-  openAccount,
-  PASSPHRASE,
-  select,
-} from '../../test/account-steps.ts';
+import { freshEmail, keyFromMail, openAccount, PASSPHRASE } from '../../test/account-steps.ts';
 import { signIn, stranger } from '../../test/sign-in.ts';
 import { createTestApp, type TestApp } from '../../test/test-app.ts';
 
@@ -34,8 +28,7 @@ const mailsTo = (email: string) =>
   test.mails.sent.filter(({ to }) => (to as { address: string }).address === email);
 const kindsOf = async (accountId: string) =>
   (
-    await select<{ kind: string }>(
-      test.app,
+    await test.query<{ kind: string }>(
       'SELECT kind FROM security_events WHERE account_id = $1 ORDER BY id',
       [accountId],
     )
@@ -196,7 +189,7 @@ describe('the links of mails', () => {
     expect(Buffer.from(token, 'base64url')).toHaveLength(32);
     const tables = ['account_tokens', 'mail_messages', 'security_events', 'jobs.job'];
     for (const table of tables) {
-      const rows = await select(test.app, `SELECT * FROM ${table}`);
+      const rows = await test.query(`SELECT * FROM ${table}`);
       expect(JSON.stringify(rows)).not.toContain(token);
     }
   });
@@ -383,8 +376,6 @@ it('never shows a passphrase to the database in clear, or to the records at all'
   await test.runJobs();
   const tables = ['accounts', 'security_events', 'mail_messages', 'failed_tries', 'jobs.job'];
   for (const table of tables) {
-    expect(JSON.stringify(await select(test.app, `SELECT * FROM ${table}`))).not.toContain(
-      'canary',
-    );
+    expect(JSON.stringify(await test.query(`SELECT * FROM ${table}`))).not.toContain('canary');
   }
 });

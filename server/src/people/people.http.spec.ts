@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from '@jest/globals';
 import { randomUUID } from 'node:crypto';
-import { keyFromMail, openAccount, PASSPHRASE, select } from '../../test/account-steps.ts';
+import { keyFromMail, openAccount, PASSPHRASE } from '../../test/account-steps.ts';
 import { createAccount, type TestAccount } from '../../test/factories/account.ts';
 import { signIn, stranger, type Caller } from '../../test/sign-in.ts';
 import { createTestApp, PUBLIC_URL, type TestApp } from '../../test/test-app.ts';
@@ -26,9 +26,7 @@ describe('the first administrator', () => {
     });
 
   it('opens their account by the newest link, once, and nobody can sign in before', async () => {
-    expect(
-      await select(test.app, 'SELECT 1 FROM accounts WHERE password_hash IS NOT NULL'),
-    ).toEqual([]);
+    expect(await test.query('SELECT 1 FROM accounts WHERE password_hash IS NOT NULL')).toEqual([]);
     const older = await makeAdministratorLink(test.database.webUrl, PUBLIC_URL);
     const link = await makeAdministratorLink(test.database.webUrl, PUBLIC_URL);
     expect(link).toMatch(/^http:\/\/127\.0\.0\.1:4780\/first-administrator#[\w-]{43}$/);
@@ -44,18 +42,17 @@ describe('the first administrator', () => {
     ]);
     expect(replies.map(({ status }) => status).sort()).toEqual([201, 410]);
     expect(await makeAdministratorLink(test.database.webUrl, PUBLIC_URL)).toBeNull();
-    const held = await select(
-      test.app,
+    const held = await test.query(
       `SELECT a.given_name, r.role FROM account_roles r JOIN accounts a ON a.id = r.account_id WHERE r.role = 'administrator'`,
     );
     expect(held).toEqual([{ given_name: 'Marit', role: 'administrator' }]);
-    await select(test.app, `DELETE FROM account_roles WHERE role = 'administrator' RETURNING role`);
+    await test.query(`DELETE FROM account_roles WHERE role = 'administrator' RETURNING role`);
   });
 });
 
 describe('the people page', () => {
   beforeEach(async () => {
-    await select(test.app, `DELETE FROM account_roles WHERE role = 'administrator' RETURNING role`);
+    await test.query(`DELETE FROM account_roles WHERE role = 'administrator' RETURNING role`);
     administrator = await createAccount(test.app, { roles: ['administrator'] });
     office = await signIn(test.app, administrator.id);
   });
@@ -152,8 +149,7 @@ describe('the people page', () => {
       office.call('DELETE', `/api/people/${second.id}/roles/administrator`),
       secondOffice.call('DELETE', `${own}/roles/administrator`),
     ]);
-    const left = await select(
-      test.app,
+    const left = await test.query(
       `SELECT account_id FROM account_roles WHERE role = 'administrator'`,
     );
     expect(left).toHaveLength(1);
@@ -190,8 +186,7 @@ describe('the people page', () => {
     await office.call('DELETE', `${path}/suspension`);
     await office.call('DELETE', `${path}/sessions`);
     await (await signIn(test.app, person.id)).call('GET', '/api/people');
-    const events = await select(
-      test.app,
+    const events = await test.query(
       'SELECT kind, actor_id, address, detail FROM security_events WHERE account_id = $1 ORDER BY id',
       [person.id],
     );

@@ -1,6 +1,6 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from '@jest/globals';
 import { generate } from 'otplib';
-import { cookiesOf, openAccount, select, type OpenedAccount } from '../../test/account-steps.ts';
+import { cookiesOf, openAccount, type OpenedAccount } from '../../test/account-steps.ts';
 import { createAccount } from '../../test/factories/account.ts';
 import { signIn, stranger, type Reply } from '../../test/sign-in.ts';
 import { createTestApp, type TestApp } from '../../test/test-app.ts';
@@ -17,8 +17,7 @@ afterAll(() => test.close());
 beforeEach(async () => {
   test.clock.advance(61);
   administrator = await openAccount(test);
-  await select(
-    test.app,
+  await test.query(
     `INSERT INTO account_roles (account_id, role) VALUES ($1, 'administrator') RETURNING role`,
     [administrator.id],
   );
@@ -132,7 +131,7 @@ describe('an administrator with a second factor', () => {
     const give = () => call('POST', '/api/session/second-factor', { code });
     expect((await give()).body.secondFactor).toBe('done');
     expect((await give()).status).toBe(422);
-    const rows = await select(test.app, 'SELECT * FROM recovery_codes');
+    const rows = await test.query('SELECT * FROM recovery_codes');
     expect(JSON.stringify(rows)).not.toContain(recoveryCodes[0]);
   });
 
@@ -155,7 +154,7 @@ it('is for administrators: a trainee is refused', async () => {
 it('keeps no secret in clear', async () => {
   const { secret } = await enrol(await browser());
   for (const table of ['second_factors', 'security_events']) {
-    const text = JSON.stringify(await select(test.app, `SELECT * FROM ${table}`));
+    const text = JSON.stringify(await test.query(`SELECT * FROM ${table}`));
     expect(text).not.toContain(secret);
     expect(text).not.toContain(JSON.stringify([...Buffer.from(secret)]).slice(1, -1));
   }

@@ -4,7 +4,6 @@ import {
   cookiesOf,
   keyFromMail,
   openAccount,
-  select,
   type OpenedAccount,
 } from '../../test/account-steps.ts';
 import { createAccount } from '../../test/factories/account.ts';
@@ -101,8 +100,7 @@ describe('signing in', () => {
   it('keeps a hash of 19 MiB and two passes, and renews one made with less', async () => {
     const hashOf = async () =>
       (
-        await select<{ password_hash: string }>(
-          test.app,
+        await test.query<{ password_hash: string }>(
           'SELECT password_hash FROM accounts WHERE id = $1',
           [account.id],
         )
@@ -111,10 +109,7 @@ describe('signing in', () => {
     expect(await hashOf()).toMatch(cost);
     const { hash } = await import('@node-rs/argon2');
     const weak = await hash(account.password, { algorithm: 2, memoryCost: 8_192, timeCost: 1 });
-    await select(test.app, 'UPDATE accounts SET password_hash = $2 WHERE id = $1', [
-      account.id,
-      weak,
-    ]);
+    await test.query('UPDATE accounts SET password_hash = $2 WHERE id = $1', [account.id, weak]);
     await tryToSignIn('not the passphrase');
     expect(await hashOf()).toBe(weak);
     await tryToSignIn(account.password);
@@ -154,8 +149,7 @@ describe('guessing', () => {
 
   it('shuts nobody out: after 101 wrong tries a device known before still signs in', async () => {
     const device = deviceCookie(cookiesOf((await tryToSignIn(account.password)).headers));
-    await select(
-      test.app,
+    await test.query(
       `INSERT INTO failed_tries (kind, subject_hash, at)
        SELECT 'sign-in-account', sha256(convert_to($1, 'UTF8')), $2 FROM generate_series(1, 101) RETURNING id`,
       [account.email, test.clock.now()],
