@@ -49,7 +49,7 @@ export function readExpression(text: string, names: ReadonlySet<string>): Expr {
     );
   }
   // Refused before parsing: the parser would build them, and none is ever allowed.
-  const stray = /[^A-Za-z0-9_.,+\-*/^()<>=!?: ]/.exec(text);
+  const stray = /[^A-Za-z0-9_.,+\-*/^()<>=!?: ]|\b0[bxo]/i.exec(text);
   if (stray || text.trim() === '') {
     const what = stray ? `"${stray[0]}"` : 'nothing';
     throw new ExpressionRefused(

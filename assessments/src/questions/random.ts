@@ -35,8 +35,9 @@ function foldSeed(seed: string): [number, number, number, number] {
   for (let at = 0; at < seed.length; at += 8) {
     const slot = (at / 8) % 4;
     const word = parseInt(seed.slice(at, at + 8), 16) >>> 0;
-    const held = words[slot] ?? 0;
-    words[slot] = (Math.imul(held, 0x9e3779b1) ^ word) >>> 0;
+    const mixed = Math.imul((words[slot] ?? 0) ^ word, 0x9e3779b1);
+    // Shifting down spreads high digits too: a product alone only carries upwards.
+    words[slot] = (mixed ^ (mixed >>> 15)) >>> 0;
   }
   return words;
 }

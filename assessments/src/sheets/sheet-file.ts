@@ -33,15 +33,34 @@ export function openSheet<T>(source: string, path: string, schema: z.ZodType<T>)
   const lineOf = (field: readonly PropertyKey[]): number => lineIn(document, lines, field);
   const checked = schema.safeParse(asPlain(document, path));
   if (!checked.success) {
+    const issues = checked.error.issues.flatMap((issue) => plainIssues(issue, []));
     throw new SheetInvalid(
       path,
-      checked.error.issues.map((issue) => ({
-        line: lineOf(issue.path),
-        message: `${issue.path.join(' › ') || 'front matter'}: ${issue.message}`,
+      issues.map(({ field, message }) => ({
+        line: lineOf(field),
+        message: `${field.join(' › ') || 'front matter'}: ${message}`,
       })),
     );
   }
   return { front: checked.data, ...sectionsOf(text, textLine), lineOf };
+}
+
+interface FieldIssue {
+  field: PropertyKey[];
+  message: string;
+}
+
+/** A field that fits none of several shapes is told what the nearest shape lacks. */
+function plainIssues(issue: z.core.$ZodIssue, above: PropertyKey[]): FieldIssue[] {
+  const field = [...above, ...issue.path];
+  if (issue.code === 'invalid_key') {
+    return issue.issues.map(({ message }) => ({ field, message }));
+  }
+  if (issue.code !== 'invalid_union' || issue.errors.length === 0) {
+    return [{ field, message: issue.message }];
+  }
+  const nearest = issue.errors.reduce((a, b) => (b.length < a.length ? b : a));
+  return nearest.flatMap((inner) => plainIssues(inner, field));
 }
 
 function split(source: string, path: string): { yaml: string; text: string; textLine: number } {

@@ -1,0 +1,133 @@
+import { describe, expect, it } from 'vitest';
+import * as forms from '../../test/typed-forms.ts';
+import { readAnswer } from './read-answer.ts';
+import { type PartView, type RawAnswer } from './types.ts';
+
+function part(...units: string[]): PartView {
+  return {
+    id: 'a',
+    kind: 'quantity',
+    prompt: '',
+    marks: 1,
+    symbol: 'x',
+    units,
+    rounding: null,
+    options: [],
+    layout: 'rows',
+  };
+}
+
+function typed(text: string, unit: string | null = null): RawAnswer {
+  return { text, unit, option: null, working: '' };
+}
+
+const STATES = { ask: 'ambiguous', no: 'not-understood', blank: 'blank' } as const;
+
+function checkForm(units: string[], text: string, expected: forms.Expected): void {
+  const reading = readAnswer(part(...units), typed(text, units[0] ?? null));
+  if (typeof expected === 'string') {
+    expect(reading.state).toBe(STATES[expected]);
+    return;
+  }
+  expect(reading.state).toBe('understood');
+  if (reading.state !== 'understood' || reading.value === null) return;
+  const relative = Math.abs(reading.value - expected) / Math.max(Math.abs(expected), 1e-12);
+  expect(relative).toBeLessThan(1e-7);
+}
+
+describe('what people type', () => {
+  it.each(forms.PURE)('pure number %j', (text, expected) => checkForm([], text, expected));
+  it.each(forms.OHMS)('resistance %j', (text, expected) => checkForm(['mΩ', 'Ω'], text, expected));
+  it.each(forms.VOLTS)('voltage %j', (text, expected) => checkForm(['V', 'mV'], text, expected));
+  it.each(forms.AMPS)('current %j', (text, expected) => checkForm(['A'], text, expected));
+  it.each(forms.SIZES)('area %j', (text, expected) => checkForm(['mm²'], text, expected));
+  it.each(forms.HOURS)('time %j', (text, expected) => checkForm(['h', 'min'], text, expected));
+  it.each(forms.CHARGE)('charge %j', (text, expected) => checkForm(['Ah'], text, expected));
+  it.each(forms.DEGREES)('temperature %j', (text, expected) => checkForm(['°C'], text, expected));
+  it.each(forms.SHARES)('share %j', (text, expected) => checkForm(['%'], text, expected));
+
+  it('covers about two hundred forms', () => {
+    expect(Object.values(forms).flat().length).toBeGreaterThan(200);
+  });
+});
+
+describe('reading an answer', () => {
+  it('asks back with both readings of a lone comma before three digits', () => {
+    expect(readAnswer(part('mΩ'), typed('1,234', 'mΩ'))).toEqual({
+      state: 'ambiguous',
+      ask: 'Did you mean 1.234 or 1234? Type it without a mark between thousands.',
+      readings: ['1.234', '1234'],
+    });
+    expect(readAnswer(part('mΩ'), typed('1.234,5 mΩ', 'mΩ'))).toMatchObject({
+      state: 'ambiguous',
+      readings: ['1234.5 mΩ'],
+    });
+  });
+
+  it('shows back what it understood, in the unit it was given in', () => {
+    const shown = (text: string, unit: string | null): string => {
+      const reading = readAnswer(part('mΩ', 'Ω'), typed(text, unit));
+      return reading.state === 'understood' ? reading.shown : reading.state;
+    };
+    expect(shown('48,1', 'mΩ')).toBe('48.1 mΩ');
+    expect(shown('0.0481', 'Ω')).toBe('0.0481 Ω');
+    expect(shown('48.10 milliohm', 'Ω')).toBe('48.1 mΩ');
+    expect(shown('-3', 'Ω')).toBe('\u22123 Ω');
+  });
+
+  it('asks for the unit where several are offered and none is given', () => {
+    expect(readAnswer(part('mΩ', 'Ω'), typed('48.1'))).toEqual({
+      state: 'not-understood',
+      ask: 'Which unit is it in? Give mΩ or Ω.',
+    });
+    expect(readAnswer(part('V'), typed('0.674'))).toMatchObject({ state: 'understood' });
+  });
+
+  it('says what a unit of another kind is wrong about', () => {
+    expect(readAnswer(part('V', 'mV'), typed('3 A'))).toEqual({
+      state: 'not-understood',
+      ask: 'A measures something else than this part asks for; give it in V or mV.',
+    });
+    expect(readAnswer(part('V'), typed('3 parsecs'))).toEqual({
+      state: 'not-understood',
+      ask: '"parsecs" is not a unit we know; give it in V.',
+    });
+  });
+
+  it('reads an option by its id and refuses one of another paper', () => {
+    const choice: PartView = {
+      ...part(),
+      kind: 'choice',
+      options: [{ id: 'k3f9', text: 'Bulk' }],
+    };
+    const chosen = (option: string | null): RawAnswer => ({ ...typed('ignored'), option });
+    expect(readAnswer(choice, chosen('k3f9'))).toEqual({
+      state: 'understood',
+      value: null,
+      shown: 'Bulk',
+    });
+    expect(readAnswer(choice, chosen(null))).toEqual({ state: 'blank' });
+    expect(readAnswer(choice, chosen('other'))).toMatchObject({ state: 'not-understood' });
+  });
+
+  it('takes long or hostile text in no time and without throwing', () => {
+    const hostile = [
+      '9'.repeat(5000),
+      ' '.repeat(5000) + 'x',
+      '1,'.repeat(2000),
+      '1 000'.repeat(900),
+    ];
+    for (const text of [
+      ...hostile,
+      '__proto__',
+      'constructor',
+      '1 constructor',
+      '\u0000',
+      '1e-99999',
+    ]) {
+      const started = performance.now();
+      expect(readAnswer(part('V'), typed(text)).state).not.toBe('understood');
+      expect(performance.now() - started).toBeLessThan(50);
+    }
+  });
+});
