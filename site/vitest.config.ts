@@ -8,5 +8,6 @@ export default defineConfig({
     include: ['src/**/*.spec.ts', 'src/**/*.spec.tsx'],
     setupFiles: ['src/testing/setup.ts'],
     css: false,
+    testTimeout: 30_000,
   },
 });

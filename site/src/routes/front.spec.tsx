@@ -32,6 +32,7 @@ it('counts the course from the server and says what in the demonstration is inve
 it('signs a trainee in and opens the course map', async () => {
   serve('get', '/api/front', front);
   serve('post', '/api/sessions', makeSession());
+  serveWith('get', '/api/course', () => problemReply(404, 'not-found'));
   const { user, router } = renderRoute('/');
   await user.type(await screen.findByLabelText('Email'), 'ifeoma.castellan@harrowquay.example');
   await user.type(screen.getByLabelText('Passphrase'), 'tin kettle over harbour');

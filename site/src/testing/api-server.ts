@@ -14,6 +14,13 @@ export function problemReply(status: number, slug: string, more: object = {}) {
   );
 }
 
+/** 202 or 204: done, nothing to say. */
+export function acceptedReply(status: 202 | 204 = 202): HttpResponse<JsonBodyType> {
+  return status === 202
+    ? HttpResponse.json({}, { status })
+    : new HttpResponse<JsonBodyType>(null, { status });
+}
+
 type Method = 'get' | 'post' | 'put' | 'delete';
 
 /** Answers one route with a body: `serve('get', '/api/front', front)`. */

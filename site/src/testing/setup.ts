@@ -12,6 +12,9 @@ vi.stubGlobal('matchMedia', (media: string) =>
 );
 vi.stubGlobal('scrollTo', () => {});
 
+// A loaded machine may take its time over the first page.
+configure({ asyncUtilTimeout: 5_000 });
+
 beforeAll(() => apiServer.listen({ onUnhandledRequest: 'error' }));
 afterEach(() => {
   cleanup();
