@@ -32,19 +32,18 @@ function linksFor(session: SessionView | null | undefined) {
 /** Running head by role, then the page. */
 export function Shell() {
   const { data: session } = useQuery(sessionQuery);
+  const { pathname } = useLocation();
+  const offersSignIn = session === null && pathname !== '/' && pathname !== '/sign-in';
   return (
     <>
-      <RunningHead links={linksFor(session)} end={<WhoIsHere session={session} />} />
+      <RunningHead
+        links={linksFor(session)}
+        end={offersSignIn && <Link to="/sign-in">Sign in</Link>}
+        own={session && <SignedIn session={session} />}
+      />
       <Outlet />
     </>
   );
-}
-
-function WhoIsHere({ session }: { session: SessionView | null | undefined }) {
-  const { pathname } = useLocation();
-  if (session === undefined) return null;
-  if (session) return <SignedIn session={session} />;
-  return pathname === '/' || pathname === '/sign-in' ? null : <Link to="/sign-in">Sign in</Link>;
 }
 
 function SignedIn({ session }: { session: SessionView }) {

@@ -112,8 +112,7 @@ export function PassphraseField({ name, label, isNew = false, ...props }: Passph
             aria-pressed={shown}
             onClick={() => setShown(!shown)}
           >
-            {shown ? 'Hide' : 'Show'}
-            <span className="visually-hidden"> {label.toLowerCase()}</span>
+            {shown ? 'Hide' : 'Show'} <span className="visually-hidden">{label.toLowerCase()}</span>
           </button>
         </TextField.Slot>
       </FormField>

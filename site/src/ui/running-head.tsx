@@ -5,12 +5,14 @@ import { Wordmark } from './wordmark.tsx';
 
 interface RunningHeadProps {
   links?: { label: string; to: string }[];
-  /** Right of the head: a saved state, the name, a link. */
+  /** Right of the head, always in sight: a saved state, a clock, a link. */
   end?: ReactNode;
+  /** The name and sign-out; on a phone they fold behind "Menu" with the words. */
+  own?: ReactNode;
 }
 
 /** Mark, at most five words of navigation, and who is here. On a phone the words fold behind "Menu". */
-export function RunningHead({ links = [], end }: RunningHeadProps) {
+export function RunningHead({ links = [], end, own }: RunningHeadProps) {
   const { pathname } = useLocation();
   const [openOn, setOpenOn] = useState<string | null>(null);
   // Opened on one page, it is closed on the next.
@@ -29,6 +31,7 @@ export function RunningHead({ links = [], end }: RunningHeadProps) {
       </nav>
       <div className="running-head-end">
         {end}
+        {own && <div className="running-head-own">{own}</div>}
         {links.length > 0 && (
           <button
             type="button"

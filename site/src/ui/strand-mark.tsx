@@ -1,3 +1,4 @@
+import { strandCentres, strandKinds, strandPatternOf } from '@ferrule/certificates/verify';
 import { useEffect, useState } from 'react';
 
 interface StrandMarkProps {
@@ -6,31 +7,8 @@ interface StrandMarkProps {
   struck?: boolean;
 }
 
-const strandCount = 37;
 const outerRadius = 100;
 const pitch = (outerRadius * 0.86) / 3.42;
-
-/** Hexagonal lay of 37 strands (1 + 6 + 12 + 18), top row first. */
-function layStrands(): { x: number; y: number }[] {
-  const lay: { x: number; y: number }[] = [];
-  for (let row = -3; row <= 3; row += 1) {
-    const inRow = 7 - Math.abs(row);
-    for (let place = 0; place < inRow; place += 1) {
-      lay.push({ x: pitch * (place - (inRow - 1) / 2), y: pitch * 0.866 * row });
-    }
-  }
-  return lay;
-}
-
-/** Two bits a strand of SHA-256 over the certificate number: 0 ring, 1 ring with dot, else solid. */
-export async function readStrands(certificateNumber: string): Promise<number[]> {
-  const bytes = new TextEncoder().encode(certificateNumber);
-  const digest = new Uint8Array(await crypto.subtle.digest('SHA-256', bytes));
-  return Array.from({ length: strandCount }, (_, index) => {
-    const byte = digest[index >> 1] ?? 0;
-    return (byte >> (index % 2 ? 4 : 0)) & 3;
-  });
-}
 
 const hexagon = (size: number) =>
   `M${Array.from({ length: 6 }, (_, corner) => {
@@ -47,7 +25,7 @@ export function StrandMark({
   const [strands, setStrands] = useState<number[]>([]);
   useEffect(() => {
     let isCurrent = true;
-    void readStrands(certificateNumber).then((read) => {
+    void strandPatternOf(certificateNumber).then((read) => {
       if (isCurrent) setStrands(read);
     });
     return () => {
@@ -63,23 +41,32 @@ export function StrandMark({
     >
       <path className="crimp" d={hexagon(103)} />
       <path className="crimp inner" d={hexagon(96.5)} />
-      {layStrands().map(({ x, y }, index) => (
-        <Strand key={index} x={x} y={y} fill={strands[index]} />
+      {strandCentres().map(({ x, y }, index) => (
+        <Strand key={index} x={x * pitch} y={y * pitch} kind={strands[index]} />
       ))}
       {struck && <path className="strike" d="M-90 88 90 -88" />}
     </svg>
   );
 }
 
-function Strand({ x, y, fill }: { x: number; y: number; fill: number | undefined }) {
+interface StrandProps {
+  x: number;
+  y: number;
+  /** Not known until the number has been hashed. */
+  kind: number | undefined;
+}
+
+function Strand({ x, y, kind }: StrandProps) {
   const radius = pitch * 0.44;
-  if (fill !== undefined && fill > 1) {
+  if (kind === strandKinds.solid) {
     return <circle className="strand solid" cx={x} cy={y} r={radius * 1.06} />;
   }
   return (
     <>
       <circle className="strand" cx={x} cy={y} r={radius} />
-      {fill === 1 && <circle className="strand solid" cx={x} cy={y} r={radius * 0.42} />}
+      {kind === strandKinds.ringWithDot && (
+        <circle className="strand solid" cx={x} cy={y} r={radius * 0.42} />
+      )}
     </>
   );
 }

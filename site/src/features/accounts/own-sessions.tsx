@@ -76,7 +76,7 @@ function SessionRow({ session, busy, onEnd }: SessionRowProps) {
           'This one'
         ) : (
           <button type="button" className="text-button" disabled={busy} onClick={onEnd}>
-            End<span className="visually-hidden"> the session on {session.device}</span>
+            End <span className="visually-hidden">the session on {session.device}</span>
           </button>
         )}
       </td>

@@ -1,6 +1,7 @@
 import { Button } from '@radix-ui/themes';
 import { isProblem } from '../../api/problem.ts';
 import { type CertificateView } from '../../api/views.ts';
+import { sayDate } from '../../ui/dates.ts';
 import { Form } from '../../ui/form.tsx';
 import { FormField } from '../../ui/form-field.tsx';
 import { ConfirmIdentity } from './confirm-identity.tsx';
@@ -59,7 +60,7 @@ export function Withdraw({ certificate }: { certificate: CertificateView }) {
 }
 
 function sayPeriod({ state, expiresOn }: CertificateView): string {
-  return `${state === 'valid' ? 'until' : 'on'} ${expiresOn}`;
+  return `${state === 'valid' ? 'until' : 'on'} ${sayDate(expiresOn)}`;
 }
 
 function sayBeforeAfter(certificate: CertificateView): string {

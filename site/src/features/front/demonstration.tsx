@@ -10,27 +10,25 @@ export function Demonstration({ people }: { people: FrontView['people'] }) {
         anything passed here, and its certificates vouch for nothing.
       </p>
       {people.length > 0 && (
-        <div className="table-scroll">
-          <table>
-            <caption className="visually-hidden">People to sign in as</caption>
-            <thead>
-              <tr>
-                <th>Sign in as</th>
-                <th>Email</th>
-                <th>Who is</th>
+        <table>
+          <caption className="visually-hidden">People to sign in as</caption>
+          <thead>
+            <tr>
+              <th>Sign in as</th>
+              <th>Email</th>
+              <th>Who is</th>
+            </tr>
+          </thead>
+          <tbody>
+            {people.map((person) => (
+              <tr key={person.email}>
+                <td>{person.name}</td>
+                <td>{person.email}</td>
+                <td>{person.role}</td>
               </tr>
-            </thead>
-            <tbody>
-              {people.map((person) => (
-                <tr key={person.email}>
-                  <td>{person.name}</td>
-                  <td>{person.email}</td>
-                  <td>{person.role}</td>
-                </tr>
-              ))}
-            </tbody>
-          </table>
-        </div>
+            ))}
+          </tbody>
+        </table>
       )}
       <p className="fine">
         Their passphrases are made anew for each installation and shown where it was started.

@@ -2,6 +2,7 @@ import { type ReactNode } from 'react';
 import { EmptyStrandMark } from '../../ui/strand-mark.tsx';
 import { sayFinding } from './file-words.ts';
 import { type FileReport } from './look-at-file.ts';
+import { sizeOfWord } from './verdict-words.ts';
 
 interface FileVerdictProps {
   report: FileReport;
@@ -14,7 +15,7 @@ interface FileVerdictProps {
 export function FileVerdict({ report, fileName, actions }: FileVerdictProps) {
   const { word, says } = sayFinding(report.finding);
   return (
-    <section className={`verdict faulty-file${word.length > 9 ? ' long' : ''}`}>
+    <section className={`verdict faulty-file ${sizeOfWord(word)}`}>
       <div className="verdict-word">
         <p className="kicker">
           File <span className="file-name">{fileName}</span>

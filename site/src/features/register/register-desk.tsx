@@ -78,7 +78,12 @@ export function WholeAnswer({ answer, typedNumber, veryFile = false }: WholeAnsw
           <b>This is the very file that was issued.</b> Its signature was checked and holds.
         </p>
       )}
-      {answer.certificate && <CertificateFacts certificate={answer.certificate} />}
+      {answer.certificate && (
+        <CertificateFacts
+          certificate={answer.certificate}
+          withScope={answer.answer !== 'withdrawn'}
+        />
+      )}
     </>
   );
 }

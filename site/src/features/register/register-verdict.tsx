@@ -1,7 +1,8 @@
+import { readCertificateNumber } from '@ferrule/certificates/verify';
 import { type RegisterAnswer } from '../../api/views.ts';
 import { sayMomentInUtc } from '../../ui/dates.ts';
 import { EmptyStrandMark, StrandMark } from '../../ui/strand-mark.tsx';
-import { sayVerdict } from './verdict-words.ts';
+import { sayVerdict, sizeOfWord } from './verdict-words.ts';
 
 interface RegisterVerdictProps {
   answer: RegisterAnswer;
@@ -14,20 +15,24 @@ export function RegisterVerdict({ answer, typedNumber }: RegisterVerdictProps) {
   const { word, until, todo } = sayVerdict(answer);
   const isMissing = answer.certificate === null;
   return (
-    <section className={`verdict ${answer.answer}${isMissing ? ' long' : ''}`}>
+    <section className={`verdict ${answer.answer} ${sizeOfWord(word)}`}>
       <div className="verdict-word">
         <NumberLine answer={answer} typedNumber={typedNumber} />
         <h1>{word}</h1>
         {until && <p className="until">{until}</p>}
         <p className="todo">{todo}</p>
-        {typedNumber && isMissing && /[OI]/i.test(typedNumber) && (
-          <p className="todo">Certificate numbers never use the letters O or I.</p>
-        )}
+        {isMissing && typedNumber && <SlipInNumber typedNumber={typedNumber} />}
         <p className="when">Checked against the register on {sayMomentInUtc(answer.checkedAt)}</p>
       </div>
       <VerdictMark answer={answer} />
     </section>
   );
+}
+
+/** What a look at the number alone tells, by its own check character. */
+function SlipInNumber({ typedNumber }: { typedNumber: string }) {
+  const reading = readCertificateNumber(typedNumber);
+  return reading.ok ? null : <p className="todo">{reading.reason}</p>;
 }
 
 function NumberLine({ answer, typedNumber }: RegisterVerdictProps) {

@@ -44,3 +44,9 @@ export function sayVerdict({ answer, certificate }: RegisterAnswer): VerdictWord
       };
   }
 }
+
+/** Longer words are set smaller, so that none of them breaks. */
+export function sizeOfWord(word: string): string {
+  if (word.length > 12) return 'long';
+  return word.length > 7 ? 'wide-word' : '';
+}
