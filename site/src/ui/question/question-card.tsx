@@ -43,7 +43,7 @@ export function QuestionCard({ question, answers, unclear = {}, ...props }: Ques
 }
 
 /** All that a question states before it asks anything. */
-function QuestionFacts({ question }: { question: QuestionView }) {
+export function QuestionFacts({ question }: { question: QuestionView }) {
   return (
     <div className="question-facts">
       {question.body && (

@@ -1,0 +1,105 @@
+import { type ReactNode, use } from 'react';
+import Markdown, { type Components } from 'react-markdown';
+import remarkDirective from 'remark-directive';
+import remarkGfm from 'remark-gfm';
+import remarkMath from 'remark-math';
+import { Hazard, type HazardLevel } from '../../ui/hazard.tsx';
+import { layOutSheet } from './lay-out-sheet.ts';
+import { LessonContext } from './lesson-context.ts';
+import { LessonFigure } from './lesson-figure.tsx';
+import { type LessonView } from './queries.ts';
+import { DrawnTree } from './tree.tsx';
+import { TryQuestion } from './try-question.tsx';
+import { WorkedExample } from './worked-example.tsx';
+
+interface RowProps {
+  paragraph?: number;
+  children?: ReactNode;
+}
+
+/** A numbered paragraph with what stands beside it; people quote the number. */
+function SheetRow({ paragraph, children }: RowProps) {
+  if (!paragraph) return <div className="sheet-row">{children}</div>;
+  return (
+    <div className="sheet-row" id={`p${paragraph}`} data-paragraph={paragraph}>
+      <p className="paragraph-number">
+        <span className="visually-hidden">Paragraph </span>
+        {paragraph}
+      </p>
+      {children}
+    </div>
+  );
+}
+
+function SheetFormula({ source, display }: { source: string; display?: boolean }) {
+  const tree = use(LessonContext).formulas[source];
+  const formula = tree ? <DrawnTree tree={tree} /> : <code>{source}</code>;
+  return display ? <span className="formula">{formula}</span> : formula;
+}
+
+function MarginNote({ title, children }: { title: string; children?: ReactNode }) {
+  return (
+    <div className="margin-note" role="note">
+      <b>{title}</b>
+      {children}
+    </div>
+  );
+}
+
+function SheetHazard(props: { level: HazardLevel; title: string; children?: ReactNode }) {
+  return (
+    <Hazard level={props.level} title={props.title}>
+      {props.children}
+    </Hazard>
+  );
+}
+
+function LocalCode({ children }: { children?: ReactNode }) {
+  return (
+    <div className="local-code" role="note">
+      <b>Your local code</b>
+      {children}
+    </div>
+  );
+}
+
+function SheetTable({ children }: { children?: ReactNode }) {
+  return (
+    // A wide table scrolls sideways on a phone, so the keyboard must reach it.
+    // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex
+    <div className="table-scroll" role="region" aria-label="Table" tabIndex={0}>
+      <table>{children}</table>
+    </div>
+  );
+}
+
+const components = {
+  'sheet-row': SheetRow,
+  'sheet-formula': SheetFormula,
+  'sheet-margin': MarginNote,
+  'sheet-hazard': SheetHazard,
+  'sheet-local': LocalCode,
+  'sheet-figure': LessonFigure,
+  'sheet-worked': WorkedExample,
+  'sheet-try': TryQuestion,
+  table: SheetTable,
+} as Components;
+
+/** The text of a sheet. Raw HTML is never drawn; formulas and figures come with the lesson. */
+export function LessonText({ lesson }: { lesson: LessonView }) {
+  return (
+    <LessonContext value={lesson}>
+      <Markdown
+        remarkPlugins={[
+          remarkGfm,
+          remarkMath,
+          remarkDirective,
+          [layOutSheet, { words: lesson.words }],
+        ]}
+        components={components}
+      >
+        {lesson.body}
+      </Markdown>
+    </LessonContext>
+  );
+}

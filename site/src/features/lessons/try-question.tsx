@@ -1,0 +1,106 @@
+import { Button } from '@radix-ui/themes';
+import { useMutation } from '@tanstack/react-query';
+import { useState } from 'react';
+import Markdown from 'react-markdown';
+import { ProblemCallout } from '../../ui/problem-callout.tsx';
+import { CurveReader } from '../../ui/question/curve-reader.tsx';
+import { MarkedQuestion } from '../../ui/question/marked-question.tsx';
+import { QuestionCard, QuestionFacts } from '../../ui/question/question-card.tsx';
+import { type Answers } from '../../ui/question/views.ts';
+import { answerPractice, type PracticeView, startPractice, unclearParts } from './practice.ts';
+
+/** One practice question in the middle of the sheet, marked where it stands. */
+export function TryQuestion({ question }: { question: string }) {
+  const start = useMutation({ mutationFn: () => startPractice(question) });
+  return (
+    <section className="try-question" aria-label="Try it">
+      {start.data ? (
+        <Attempt
+          key={start.data.id}
+          practice={start.data}
+          isRenewing={start.isPending}
+          onAgain={() => start.mutate()}
+        />
+      ) : (
+        <div className="try-invitation">
+          <div>
+            <h2>Try it</h2>
+            <p>One question with figures of its own, marked here. It counts for nothing.</p>
+          </div>
+          <Button variant="outline" disabled={start.isPending} onClick={() => start.mutate()}>
+            {start.isPending ? 'Drawing figures' : 'Draw my figures'}
+          </Button>
+        </div>
+      )}
+      <ProblemCallout error={start.error} />
+    </section>
+  );
+}
+
+interface AttemptProps {
+  practice: PracticeView;
+  isRenewing: boolean;
+  onAgain: () => void;
+}
+
+function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
+  const { question } = practice;
+  const [answers, setAnswers] = useState<Answers>({});
+  const mark = useMutation({ mutationFn: () => answerPractice(practice.id, answers) });
+  const unclear = unclearParts(mark.error);
+  const curve = question.curve && <CurveReader curve={question.curve} />;
+  const again = (
+    <Button variant="outline" disabled={isRenewing} onClick={onAgain}>
+      Again with fresh figures
+    </Button>
+  );
+  return (
+    <>
+      <header className="try-head">
+        <p className="kicker">{mark.data ? 'Try it, marked' : 'Try it'}</p>
+        <h2>{question.title}</h2>
+        <Markdown>{mark.data ? mark.data.marked.summary : question.lead}</Markdown>
+      </header>
+      {mark.data ? (
+        <>
+          <MarkedQuestion marked={mark.data.marked} />
+          <div className="marked-facts">
+            <QuestionFacts question={question} />
+            {curve}
+          </div>
+          <div className="action-strip">
+            <p role="status">
+              <b>
+                {mark.data.marked.marks} of {mark.data.marked.outOf} marks.
+              </b>{' '}
+              Practice: it counts for nothing.
+            </p>
+            {again}
+          </div>
+        </>
+      ) : (
+        <>
+          <QuestionCard
+            question={question}
+            answers={answers}
+            unclear={unclear ?? {}}
+            curve={curve}
+            onChange={(part, answer) => setAnswers((kept) => ({ ...kept, [part]: answer }))}
+          />
+          {!unclear && <ProblemCallout error={mark.error} />}
+          <div className="action-strip">
+            <p role="status">
+              {unclear ? 'Some answers cannot be read. Nothing has been marked.' : ''}
+            </p>
+            <span className="buttons">
+              {again}
+              <Button disabled={mark.isPending} onClick={() => mark.mutate()}>
+                {mark.isPending ? 'Marking' : 'Mark it'}
+              </Button>
+            </span>
+          </div>
+        </>
+      )}
+    </>
+  );
+}

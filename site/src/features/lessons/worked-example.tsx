@@ -1,0 +1,52 @@
+import { use } from 'react';
+import Markdown from 'react-markdown';
+import { Line } from '../../ui/line.tsx';
+import { CurveReader } from '../../ui/question/curve-reader.tsx';
+import { GivenTable } from '../../ui/question/given-table.tsx';
+import { InlineMarkdown } from '../../ui/question/inline-markdown.tsx';
+import { Schematic } from '../../ui/question/schematic.tsx';
+import { LessonContext } from './lesson-context.ts';
+
+interface WorkedExampleProps {
+  question: string;
+  seed: string;
+}
+
+/** A practice question worked line by line, its figures fixed by the sheet. */
+export function WorkedExample({ question, seed }: WorkedExampleProps) {
+  const worked = use(LessonContext).worked[`${question}#${seed}`];
+  if (!worked) return null;
+  return (
+    <section className="worked-example" aria-label={`Worked example: ${worked.title}`}>
+      <header>
+        <p className="kicker">Worked example</p>
+        <h3>{worked.title}</h3>
+        <Markdown>{worked.lead}</Markdown>
+      </header>
+      {(worked.given.length > 0 || worked.diagram) && (
+        <div className="worked-given">
+          {worked.given.length > 0 && <GivenTable given={worked.given} />}
+          {worked.diagram && <Schematic diagram={worked.diagram} />}
+        </div>
+      )}
+      {worked.curve && <CurveReader curve={worked.curve} />}
+      <ol className="worked-steps">
+        {worked.parts.map((part) => (
+          <li key={part.id}>
+            <span className="worked-letter">({part.id})</span>
+            <span>
+              <InlineMarkdown>{part.prompt}</InlineMarkdown>
+            </span>
+            <div>
+              {part.lines.map((tokens, index) => (
+                <p key={index}>
+                  <Line tokens={tokens} />
+                </p>
+              ))}
+            </div>
+          </li>
+        ))}
+      </ol>
+    </section>
+  );
+}
