@@ -1,14 +1,14 @@
 import { Module } from '@nestjs/common';
 import { PublishingModule } from '../publishing/publishing.module.ts';
+import { ThrottlesModule } from '../throttles/throttles.module.ts';
 import { ClassesController } from './classes.controller.ts';
 import { ClassesRepository } from './classes.repository.ts';
 import { ClassesService } from './classes.service.ts';
-import { WrongCodes } from './wrong-codes.ts';
 
 @Module({
-  imports: [PublishingModule],
+  imports: [PublishingModule, ThrottlesModule],
   controllers: [ClassesController],
-  providers: [ClassesService, ClassesRepository, WrongCodes],
+  providers: [ClassesService, ClassesRepository],
   exports: [ClassesService],
 })
 export class ClassesModule {}

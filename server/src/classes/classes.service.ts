@@ -1,26 +1,32 @@
 import { Injectable } from '@nestjs/common';
 import type { SignedInAccount } from '../accounts/account.ts';
 import { Clock } from '../clock/clock.ts';
-import { TooManyAttempts } from '../problems/common.errors.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
+import type { ThrottleRule } from '../throttles/throttle.ts';
+import { ThrottlesService } from '../throttles/throttles.service.ts';
 import type { ClassMember, ClassRecord, Enrolment, School } from './class-records.ts';
 import { AlreadyInClass, JoinCodeUnknown } from './classes.errors.ts';
 import { ClassesRepository } from './classes.repository.ts';
 import type { ClassList, JoinedClass } from './classes.schemas.ts';
-import { WrongCodes } from './wrong-codes.ts';
 
-const MOST_WRONG_CODES = 10;
-const WRONG_CODES_WINDOW_MS = 15 * 60_000;
+/** Nobody tries the codes of a school one after the other. */
+const joinCodeTry: ThrottleRule = {
+  kind: 'join-code',
+  freeTries: 10,
+  firstWaitMs: 60_000,
+  longestWaitMs: 15 * 60_000,
+  memoryMs: 60 * 60_000,
+};
 
 /** An administrator who has given the second factor sees every class. */
-export const seesEveryClass = ({ roles, secondFactorAt }: SignedInAccount): boolean =>
+const seesEveryClass = ({ roles, secondFactorAt }: SignedInAccount): boolean =>
   roles.includes('administrator') && secondFactorAt !== null;
 
 @Injectable()
 export class ClassesService {
   constructor(
     private readonly repository: ClassesRepository,
-    private readonly wrongCodes: WrongCodes,
+    private readonly throttles: ThrottlesService,
     private readonly content: PublishedContentService,
     private readonly clock: Clock,
   ) {}
@@ -44,12 +50,10 @@ export class ClassesService {
    * @throws {TooManyAttempts} after too many wrong codes.
    */
   async join(accountId: string, joinCode: string): Promise<JoinedClass> {
-    await this.refuseGuessing(accountId);
+    const counted = await this.throttles.count({ rule: joinCodeTry, subject: accountId });
     const found = await this.repository.findByJoinCode(joinCode.toUpperCase());
-    if (!found) {
-      await this.wrongCodes.add(accountId, this.clock.now());
-      throw new JoinCodeUnknown();
-    }
+    if (!found) throw new JoinCodeUnknown();
+    await counted.forgive();
     const isAdded = await this.repository.addMember(found.id, accountId, this.clock.now());
     if (!isAdded) throw new AlreadyInClass(found.name);
     return { class: { id: found.id, name: found.name } };
@@ -78,14 +82,6 @@ export class ClassesService {
       this.repository.members(id),
     ]);
     return { record, trainers, members };
-  }
-
-  private async refuseGuessing(accountId: string): Promise<void> {
-    const now = this.clock.now().getTime();
-    const from = new Date(now - WRONG_CODES_WINDOW_MS);
-    const { count, firstAt } = await this.wrongCodes.since(accountId, from);
-    if (count < MOST_WRONG_CODES || !firstAt) return;
-    throw new TooManyAttempts(Math.ceil((firstAt.getTime() + WRONG_CODES_WINDOW_MS - now) / 1_000));
   }
 }
 

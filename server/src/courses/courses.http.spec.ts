@@ -37,6 +37,11 @@ describe('the front page', () => {
       school: { name: 'Harrow Quay Technical School' },
       course: { number: 'HQ-DC2', sheets: 2, units: 2, questions: 2, minutesToRead: 24 },
     });
+    expect(body.people).toContainEqual({
+      role: 'Trainer',
+      name: 'Odile Marchetti',
+      email: 'odile.marchetti@harrow-quay.example',
+    });
   });
 });
 

@@ -4,6 +4,7 @@ import { CONFIG } from '../config/config.module.ts';
 import type { Config } from '../config/config.schema.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
+import { demonstrationPeople, roleNames, type SeededPerson } from '../seed/people.ts';
 import type { Front } from './courses.schemas.ts';
 
 /** What anyone sees before signing in. */
@@ -23,7 +24,7 @@ export class FrontService {
       demonstration: isDemonstration,
       school: school ?? { name: course?.owner ?? '', address: '' },
       course: course?.facts ?? null,
-      people: [],
+      people: isDemonstration ? demonstrationPeople.map(introduce) : [],
     };
   }
 
@@ -43,3 +44,9 @@ export class FrontService {
     return { owner, facts: { number, title, ...counts } };
   }
 }
+
+const introduce = ({ roles, givenName, familyName, email }: SeededPerson) => ({
+  role: roles.map((role) => roleNames[role]).join(', '),
+  name: `${givenName} ${familyName}`,
+  email,
+});

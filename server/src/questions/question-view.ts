@@ -157,7 +157,6 @@ export const markedQuestionSchema = z
     trace: z.array(z.object({ part: text, rule: text, detail: text })),
   })
   .meta({ id: 'MarkedQuestion' }) satisfies z.ZodType<LibraryMarkedQuestion>;
-export type MarkedQuestion = z.infer<typeof markedQuestionSchema>;
 
 export const workedAnswerSchema = z
   .object({
@@ -169,4 +168,3 @@ export const workedAnswerSchema = z
     parts: z.array(z.object({ id: text, prompt: text, lines: z.array(lineSchema) })),
   })
   .meta({ id: 'WorkedAnswer' }) satisfies z.ZodType<LibraryWorkedAnswer>;
-export type WorkedAnswer = z.infer<typeof workedAnswerSchema>;
