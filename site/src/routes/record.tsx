@@ -1,0 +1,98 @@
+import '../features/record/record.css';
+import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
+import { cacheOf, type LoaderArgs, requireSession, sessionQuery } from '../api/session.ts';
+import { ownCertificatesQuery } from '../features/certificates/holder-queries.ts';
+import { courseQuery, type CourseMapView } from '../features/course/queries.ts';
+import { paperQuery } from '../features/papers/queries.ts';
+import { RecordCertificates } from '../features/record/record-certificates.tsx';
+import { RecordSittings } from '../features/record/record-sittings.tsx';
+import { RecordWorksheets } from '../features/record/record-worksheets.tsx';
+import { sayDate } from '../ui/dates.ts';
+import { PageTitle } from '../ui/page-title.tsx';
+import { Sheet, SheetHead } from '../ui/sheet.tsx';
+import { FailedState, RuledLines } from '../ui/states.tsx';
+import { FootStrip } from '../ui/thumb-index.tsx';
+import { TitleBlock } from '../ui/title-block.tsx';
+
+export async function loader(args: LoaderArgs) {
+  await requireSession(args);
+  return cacheOf(args).fetchQuery(courseQuery);
+}
+
+export function Component() {
+  const { data: map } = useSuspenseQuery(courseQuery);
+  return (
+    <>
+      <PageTitle>My record</PageTitle>
+      <Sheet>
+        <SheetHead
+          kicker={map.title}
+          title="My record"
+          standfirst="What you have sat, what was marked, and the certificates that came of it."
+          titleBlock={<RecordBlock map={map} />}
+        />
+        <section className="section">
+          <h2>Certificates</h2>
+          <Certificates />
+        </section>
+        <div className="columns two">
+          <section>
+            <h2>Paper</h2>
+            {map.paper ? (
+              <Sittings slug={map.paper.slug} />
+            ) : (
+              <p>No paper is set for this course.</p>
+            )}
+          </section>
+          <section>
+            <h2>Worksheets</h2>
+            <RecordWorksheets map={map} />
+          </section>
+        </div>
+      </Sheet>
+      <FootStrip
+        label="Record"
+        links={[
+          { label: 'Course map', to: '/course' },
+          { label: 'My record', to: '/record', current: true },
+        ]}
+      />
+    </>
+  );
+}
+
+function RecordBlock({ map }: { map: CourseMapView }) {
+  const { data: session } = useSuspenseQuery(sessionQuery);
+  const account = session?.account;
+  const done = map.units.filter(({ worksheet }) => worksheet?.lit).length;
+  const issued = map.units.filter(({ worksheet }) => worksheet).length;
+  return (
+    <TitleBlock
+      cells={[
+        { label: 'Course', value: map.number, span: 3, kind: 'strong' },
+        { label: 'Worksheets passed', value: `${done} of ${issued}`, span: 3, kind: 'strong' },
+        {
+          label: 'Trainee',
+          value: account ? `${account.givenName} ${account.familyName}`.trim() : '',
+          span: 3,
+        },
+        { label: 'Class', value: map.class?.name ?? 'none yet', span: 3 },
+        { label: 'Enrolled', value: map.enrolledOn ? sayDate(map.enrolledOn) : 'not yet', span: 6 },
+      ]}
+    />
+  );
+}
+
+function Certificates() {
+  const list = useQuery(ownCertificatesQuery);
+  if (list.isPending) return <RuledLines what="your certificates" />;
+  if (list.isError) return <FailedState error={list.error} retry={() => void list.refetch()} />;
+  return <RecordCertificates certificates={list.data.certificates} />;
+}
+
+function Sittings({ slug }: { slug: string }) {
+  const paper = useQuery(paperQuery(slug));
+  if (paper.isPending) return <RuledLines what="your sittings" />;
+  if (paper.isError) return <FailedState error={paper.error} retry={() => void paper.refetch()} />;
+  return <RecordSittings paper={paper.data} />;
+}
