@@ -4,6 +4,102 @@
  */
 
 export interface paths {
+    "/api/certificates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Certificates_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/certificates/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Certificates_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/certificates/{id}/file": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Certificates_file"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/certificates/{id}/withdrawal": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Certificates_withdraw"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/certificates/{id}/name-correction": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Certificates_correctName"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/me/certificates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["OwnCertificates_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/administrator-claims": {
         parameters: {
             query?: never;
@@ -399,6 +495,86 @@ export interface paths {
         put?: never;
         post?: never;
         delete: operations["People_endSessions"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/register/checks": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Register_check"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/register/links/{code}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Register_followLink"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/register/files/{sha256}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Register_findFile"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/register/issuers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Register_issuers"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/register/files": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Register_checkFile"];
+        delete?: never;
         options?: never;
         head?: never;
         patch?: never;
@@ -991,6 +1167,308 @@ export interface components {
 }
 export type $defs = Record<string, never>;
 export interface operations {
+    Certificates_list: {
+        parameters: {
+            query?: {
+                find?: string;
+                cursor?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        certificates: {
+                            /** Format: uuid */
+                            id: string;
+                            number: string;
+                            holderName: string;
+                            scheme: {
+                                title: string;
+                                revision: string;
+                            };
+                            scope: string[];
+                            limits: string[];
+                            howSat: string;
+                            /** Format: date */
+                            issuedOn: string;
+                            /** Format: date */
+                            expiresOn: string;
+                            /** @enum {string} */
+                            state: "valid" | "expired" | "withdrawn" | "superseded";
+                            ready: boolean;
+                            registerUrl: string;
+                            replacedBy: string | null;
+                            withdrawn: {
+                                /** Format: date */
+                                on: string;
+                                reason: string;
+                            } | null;
+                            history: {
+                                /** Format: date-time */
+                                at: string;
+                                what: string;
+                                by: string;
+                            }[];
+                        }[];
+                        nextCursor: string | null;
+                    };
+                };
+            };
+        };
+    };
+    Certificates_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        number: string;
+                        holderName: string;
+                        scheme: {
+                            title: string;
+                            revision: string;
+                        };
+                        scope: string[];
+                        limits: string[];
+                        howSat: string;
+                        /** Format: date */
+                        issuedOn: string;
+                        /** Format: date */
+                        expiresOn: string;
+                        /** @enum {string} */
+                        state: "valid" | "expired" | "withdrawn" | "superseded";
+                        ready: boolean;
+                        registerUrl: string;
+                        replacedBy: string | null;
+                        withdrawn: {
+                            /** Format: date */
+                            on: string;
+                            reason: string;
+                        } | null;
+                        history: {
+                            /** Format: date-time */
+                            at: string;
+                            what: string;
+                            by: string;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    Certificates_file: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+        };
+    };
+    Certificates_withdraw: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    reason: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        number: string;
+                        holderName: string;
+                        scheme: {
+                            title: string;
+                            revision: string;
+                        };
+                        scope: string[];
+                        limits: string[];
+                        howSat: string;
+                        /** Format: date */
+                        issuedOn: string;
+                        /** Format: date */
+                        expiresOn: string;
+                        /** @enum {string} */
+                        state: "valid" | "expired" | "withdrawn" | "superseded";
+                        ready: boolean;
+                        registerUrl: string;
+                        replacedBy: string | null;
+                        withdrawn: {
+                            /** Format: date */
+                            on: string;
+                            reason: string;
+                        } | null;
+                        history: {
+                            /** Format: date-time */
+                            at: string;
+                            what: string;
+                            by: string;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    Certificates_correctName: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    givenName: string;
+                    familyName: string;
+                    reason: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        number: string;
+                        holderName: string;
+                        scheme: {
+                            title: string;
+                            revision: string;
+                        };
+                        scope: string[];
+                        limits: string[];
+                        howSat: string;
+                        /** Format: date */
+                        issuedOn: string;
+                        /** Format: date */
+                        expiresOn: string;
+                        /** @enum {string} */
+                        state: "valid" | "expired" | "withdrawn" | "superseded";
+                        ready: boolean;
+                        registerUrl: string;
+                        replacedBy: string | null;
+                        withdrawn: {
+                            /** Format: date */
+                            on: string;
+                            reason: string;
+                        } | null;
+                        history: {
+                            /** Format: date-time */
+                            at: string;
+                            what: string;
+                            by: string;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    OwnCertificates_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        certificates: {
+                            /** Format: uuid */
+                            id: string;
+                            number: string;
+                            holderName: string;
+                            scheme: {
+                                title: string;
+                                revision: string;
+                            };
+                            scope: string[];
+                            limits: string[];
+                            howSat: string;
+                            /** Format: date */
+                            issuedOn: string;
+                            /** Format: date */
+                            expiresOn: string;
+                            /** @enum {string} */
+                            state: "valid" | "expired" | "withdrawn" | "superseded";
+                            ready: boolean;
+                            registerUrl: string;
+                            replacedBy: string | null;
+                            withdrawn: {
+                                /** Format: date */
+                                on: string;
+                                reason: string;
+                            } | null;
+                            history: {
+                                /** Format: date-time */
+                                at: string;
+                                what: string;
+                                by: string;
+                            }[];
+                        }[];
+                    };
+                };
+            };
+        };
+    };
     AdministratorClaims_claim: {
         parameters: {
             query?: never;
@@ -1880,6 +2358,226 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+        };
+    };
+    Register_check: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    number: string;
+                    familyName: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @enum {string} */
+                        answer: "valid" | "expired" | "withdrawn" | "superseded" | "not-on-register";
+                        /** Format: date-time */
+                        checkedAt: string;
+                        certificate: {
+                            number: string;
+                            holderName: string | null;
+                            scheme: {
+                                title: string;
+                                revision: string;
+                            };
+                            scope: string[];
+                            limits: string[];
+                            howSat: string;
+                            /** Format: date */
+                            issuedOn: string;
+                            /** Format: date */
+                            expiresOn: string;
+                            /** Format: date */
+                            withdrawnOn: string | null;
+                        } | null;
+                    };
+                };
+            };
+        };
+    };
+    Register_followLink: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                code: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @enum {string} */
+                        answer: "valid" | "expired" | "withdrawn" | "superseded" | "not-on-register";
+                        /** Format: date-time */
+                        checkedAt: string;
+                        certificate: {
+                            number: string;
+                            holderName: string | null;
+                            scheme: {
+                                title: string;
+                                revision: string;
+                            };
+                            scope: string[];
+                            limits: string[];
+                            howSat: string;
+                            /** Format: date */
+                            issuedOn: string;
+                            /** Format: date */
+                            expiresOn: string;
+                            /** Format: date */
+                            withdrawnOn: string | null;
+                        } | null;
+                    };
+                };
+            };
+        };
+    };
+    Register_findFile: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                sha256: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @enum {string} */
+                        answer: "valid" | "expired" | "withdrawn" | "superseded" | "not-on-register";
+                        /** Format: date-time */
+                        checkedAt: string;
+                        certificate: {
+                            number: string;
+                            holderName: string | null;
+                            scheme: {
+                                title: string;
+                                revision: string;
+                            };
+                            scope: string[];
+                            limits: string[];
+                            howSat: string;
+                            /** Format: date */
+                            issuedOn: string;
+                            /** Format: date */
+                            expiresOn: string;
+                            /** Format: date */
+                            withdrawnOn: string | null;
+                        } | null;
+                        /** Format: date-time */
+                        signedAt: string | null;
+                    };
+                };
+            };
+        };
+    };
+    Register_issuers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        issuers: {
+                            keyId: string;
+                            /** @enum {string} */
+                            kind: "root" | "leaf";
+                            pem: string;
+                            /** Format: date-time */
+                            validFrom: string;
+                            /** Format: date-time */
+                            validTo: string;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
+    Register_checkFile: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": {
+                    /** Format: binary */
+                    file: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @enum {string} */
+                        file: "the-very-file" | "not-on-register" | "not-a-pdf" | "not-signed" | "changed-after-signing" | "added-to" | "wrong-issuer" | "unknown-key" | "malformed-signature" | "expired-key-at-issue" | "too-large";
+                        detail: string;
+                        number: string | null;
+                        register: {
+                            /** @enum {string} */
+                            answer: "valid" | "expired" | "withdrawn" | "superseded" | "not-on-register";
+                            /** Format: date-time */
+                            checkedAt: string;
+                            certificate: {
+                                number: string;
+                                holderName: string | null;
+                                scheme: {
+                                    title: string;
+                                    revision: string;
+                                };
+                                scope: string[];
+                                limits: string[];
+                                howSat: string;
+                                /** Format: date */
+                                issuedOn: string;
+                                /** Format: date */
+                                expiresOn: string;
+                                /** Format: date */
+                                withdrawnOn: string | null;
+                            } | null;
+                        };
+                    };
+                };
             };
         };
     };
