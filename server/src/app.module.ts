@@ -15,6 +15,7 @@ import { LessonsModule } from './lessons/lessons.module.ts';
 import { PracticeModule } from './practice/practice.module.ts';
 import { MailModule } from './mail/mail.module.ts';
 import { PeopleModule } from './people/people.module.ts';
+import { RegisterModule } from './register/register.module.ts';
 import { SecondFactorsModule } from './second-factors/second-factors.module.ts';
 import { SessionsModule } from './sessions/sessions.module.ts';
 import { SignInModule } from './sessions/sign-in.module.ts';
@@ -40,6 +41,7 @@ export class AppModule {
         SecondFactorsModule,
         SignInModule,
         PeopleModule,
+        RegisterModule,
         SittingsModule,
         ClassesModule,
         ClassViewModule,

@@ -40,7 +40,7 @@ export class DrawingService {
         ...{ certificateId, pdf, sha256, signedAt },
         keyId: key.keyId,
       });
-      if (isNew) await this.letters.issued(certificate);
+      if (isNew) await this.letters.issued(certificate, signedAt);
     });
   }
 

@@ -25,6 +25,11 @@ export const catalogue: Record<string, { status: number; title: string }> = {
   'not-on-oneself': { status: 409, title: 'Not on your own account' },
   'second-factor-needed': { status: 403, title: 'Second factor needed' },
   'sign-in-refused': { status: 401, title: 'Not signed in' },
+  // certificates
+  'certificate-ended-meanwhile': { status: 409, title: 'Changed just now by somebody else' },
+  'certificate-not-drawn': { status: 409, title: 'The PDF is not ready yet' },
+  'certificate-replaced': { status: 409, title: 'Replaced already' },
+  'certificate-withdrawn': { status: 409, title: 'Withdrawn already' },
   // papers, sittings
   'agreement-changed': { status: 409, title: 'The rules have changed' },
   'already-certified': { status: 409, title: 'Certified already' },

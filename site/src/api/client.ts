@@ -1,6 +1,5 @@
 import createClient from 'openapi-fetch';
 import { noAnswerProblem, toProblem } from './problem.ts';
-import { type PendingRoutes } from './pending-routes.ts';
 import { type paths } from './schema.gen.ts';
 
 let tellSignedOut = () => {};
@@ -11,7 +10,7 @@ export function whenSignedOut(listener: () => void): void {
 }
 
 /** The server's routes, typed by its OpenAPI document. */
-export const api = createClient<paths & PendingRoutes>({
+export const api = createClient<paths>({
   baseUrl: globalThis.location.origin,
   fetch: (request) => globalThis.fetch(request),
 });

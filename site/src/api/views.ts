@@ -16,4 +16,6 @@ export type Role = SessionView['account']['roles'][number];
 export type OwnSession = Answer<'Sessions_list'>['sessions'][number];
 export type PersonView = Answer<'People_get'>['person'];
 export type FrontView = Answer<'Courses_front'>;
-export type { CertificateView, FileAnswer, RegisterAnswer } from './pending-routes.ts';
+export type CertificateView = Answer<'Certificates_get'>;
+export type RegisterAnswer = Answer<'Register_check'>;
+export type FileAnswer = Answer<'Register_checkFile'>;

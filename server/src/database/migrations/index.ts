@@ -5,6 +5,7 @@ import { createClasses } from './20261201T0930-create-classes.ts';
 import { createWorksheets } from './20261201T0940-create-worksheets.ts';
 import { createSittings } from './20261201T0950-create-sittings.ts';
 import { createCertificates } from './20261201T1000-create-certificates.ts';
+import { endCertificatesOnce } from './20261201T1010-end-certificates-once.ts';
 
 /** One step of the schema's history. Never edited once it has landed. */
 export interface Migration {
@@ -20,4 +21,5 @@ export const migrations: readonly Migration[] = [
   createWorksheets,
   createSittings,
   createCertificates,
+  endCertificatesOnce,
 ];

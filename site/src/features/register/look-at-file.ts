@@ -29,7 +29,8 @@ export async function lookAtFile(file: File, queryClient: QueryClient): Promise<
     answerOf(api.GET('/api/register/files/{sha256}', { params: { path: { sha256 } } })),
     queryClient.ensureQueryData(issuersQuery),
   ]);
-  const issuedAt = new Date(register.certificate?.issuedOn ?? register.checkedAt);
+  // The time of issue is the register's own record, never what the file says.
+  const issuedAt = new Date(register.signedAt ?? register.checkedAt);
   const found = await verifyPdf(bytes, { issuers, issuedAt });
   if (!found.ok) {
     return { ...report(found.fault, found.detail), number: found.number ?? numberInPdf(bytes) };
@@ -57,7 +58,7 @@ export async function askTheServer(file: File): Promise<FileReport> {
   const isOurs = answer.file === 'the-very-file';
   return {
     ...report(answer.file, answer.detail),
-    number: answer.register.certificate?.number ?? null,
+    number: answer.number,
     register: isOurs ? answer.register : null,
   };
 }
