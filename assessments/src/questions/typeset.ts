@@ -116,11 +116,18 @@ function typeset(expr: Expr, leaf: Leaf): Token[] {
 function typesetOperation(expr: Extract<Expr, { kind: 'op' }>, leaf: Leaf): Token[] {
   const strength = STRENGTH[expr.op] ?? 1;
   const isFirm = expr.op === '-' || expr.op === '/';
-  const left = bracketed(expr.left, expr.op === '^' ? strength + 1 : strength, leaf);
+  const left = expr.op === '^' ? base(expr.left, leaf) : bracketed(expr.left, strength, leaf);
   const power = expr.op === '^' && expr.right.kind === 'number' && POWERS[expr.right.value];
   if (power) return [...left, operator(power)];
   const right = bracketed(expr.right, isFirm ? strength + 1 : strength, leaf);
   return [...left, operator(SIGNS[expr.op]), ...right];
+}
+
+/** What is raised to a power; a figure with its unit is bracketed, or only the unit would be. */
+function base(expr: Expr, leaf: Leaf): Token[] {
+  const tokens = bracketed(expr, 6, leaf);
+  const isQuantity = tokens.at(-1)?.kind === 'unit';
+  return isQuantity ? [operator('('), ...tokens, operator(')')] : tokens;
 }
 
 function typesetCall(expr: Extract<Expr, { kind: 'call' }>, leaf: Leaf): Token[] {
