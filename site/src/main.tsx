@@ -5,7 +5,7 @@ import { createRoot } from 'react-dom/client';
 import { RouterProvider } from 'react-router-dom';
 import { whenSignedOut } from './api/client.ts';
 import { createQueryClient } from './api/query-client.ts';
-import { sessionQuery } from './api/session.ts';
+import { changeSession, sessionQuery } from './api/session.ts';
 import { createRouter } from './router.tsx';
 
 const queryClient = createQueryClient();
@@ -16,7 +16,9 @@ whenSignedOut(() => {
   queryClient.setQueryData(sessionQuery.queryKey, null);
   if (!wasSignedIn) return;
   const { pathname, search } = router.state.location;
-  void router.navigate(`/sign-in?next=${encodeURIComponent(pathname + search)}`);
+  void router
+    .navigate(`/sign-in?next=${encodeURIComponent(pathname + search)}`)
+    .then(() => changeSession(queryClient, null));
 });
 
 const place = document.getElementById('root');

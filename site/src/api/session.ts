@@ -1,4 +1,4 @@
-import { queryOptions } from '@tanstack/react-query';
+import { type QueryClient, queryOptions } from '@tanstack/react-query';
 import { redirect, type RouterContextProvider } from 'react-router-dom';
 import { answerOf, api } from './client.ts';
 import { isProblem } from './problem.ts';
@@ -17,7 +17,17 @@ export const sessionQuery = queryOptions({
     }
   },
   staleTime: 60_000,
+  meta: { personal: false },
 });
+
+/**
+ * Somebody else is here now, or nobody: what was fetched for the last person is forgotten. A
+ * query marked `meta: { personal: false }` is the same for everybody and stays.
+ */
+export function changeSession(queryClient: QueryClient, session: SessionView | null): void {
+  queryClient.setQueryData(sessionQuery.queryKey, session);
+  queryClient.removeQueries({ predicate: ({ meta }) => meta?.['personal'] !== false });
+}
 
 /** What a loader is given; `context` holds the query cache. */
 export interface LoaderArgs {

@@ -1,6 +1,5 @@
 import '../features/certificates/certificates.css';
 import { useInfiniteQuery, useQuery } from '@tanstack/react-query';
-import { useEffect } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { type LoaderArgs, requireSession, sessionQuery } from '../api/session.ts';
 import { CertificatePanel } from '../features/certificates/certificate-panel.tsx';
@@ -60,7 +59,7 @@ function Desk({ find, selectedId }: DeskProps) {
         <CertificateTable certificates={certificates} selectedId={selectedId} linkTo={linkTo} />
         <TableFoot shown={certificates.length} list={list} />
       </div>
-      {selected && <Panel certificate={selected} />}
+      {selected && <Panel key={selected.id} certificate={selected} />}
     </div>
   );
 }
@@ -77,7 +76,6 @@ function NoCertificates({ find }: { find: string }) {
 
 function Panel({ certificate }: { certificate: CertificateView }) {
   const { data: session } = useQuery(sessionQuery);
-  useScrollToPanel(certificate.id);
   return (
     <aside className="certificate-panel" aria-labelledby="certificate-title">
       <CertificatePanel
@@ -86,12 +84,4 @@ function Panel({ certificate }: { certificate: CertificateView }) {
       />
     </aside>
   );
-}
-
-/** On a phone the panel follows the table: choosing a certificate goes there. */
-function useScrollToPanel(selectedId: string) {
-  useEffect(() => {
-    if (!window.matchMedia('(max-width: 760px)').matches) return;
-    document.querySelector('.certificate-panel')?.scrollIntoView();
-  }, [selectedId]);
 }

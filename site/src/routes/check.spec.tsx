@@ -96,12 +96,17 @@ it('names nobody on a withdrawn certificate behind its code', async () => {
 it('looks at a dropped file here and sends it only when asked', async () => {
   const missing: RegisterAnswer = { ...valid, answer: 'not-on-register', certificate: null };
   const uploads: string[] = [];
-  serve('get', '/api/register/files/:sha256', missing);
+  serve('get', '/api/register/files/:sha256', { ...missing, signedAt: null });
   serve('get', '/api/register/issuers', { issuers: [] });
   apiServer.use(
     http.post('*/api/register/files', ({ request }) => {
       uploads.push(request.headers.get('content-type') ?? '');
-      return HttpResponse.json({ file: 'not-a-pdf', detail: 'No PDF header.', register: missing });
+      return HttpResponse.json({
+        file: 'not-a-pdf',
+        detail: 'No PDF header.',
+        number: null,
+        register: missing,
+      });
     }),
   );
   const { user } = renderRoute('/check');

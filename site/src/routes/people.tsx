@@ -1,6 +1,5 @@
 import '../features/people/people.css';
 import { useInfiniteQuery, useQuery } from '@tanstack/react-query';
-import { useEffect } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { type LoaderArgs, requireSession, sessionQuery } from '../api/session.ts';
 import { PeopleTable } from '../features/people/people-table.tsx';
@@ -22,7 +21,6 @@ export function Component() {
   const find = params.get('find') ?? '';
   const selectedId = params.get('person');
   const { data: session } = useQuery(sessionQuery);
-  useFocusOnPanel(selectedId);
 
   const linkTo = (id: string) => `?${new URLSearchParams({ ...(find && { find }), person: id })}`;
   return (
@@ -43,7 +41,7 @@ export function Component() {
         <PeopleList find={find} selectedId={selectedId} linkTo={linkTo} />
         {selectedId && session && (
           <aside className="person-panel" aria-labelledby="person-title">
-            <PersonPanel id={selectedId} ownId={session.account.id} />
+            <PersonPanel key={selectedId} id={selectedId} ownId={session.account.id} />
           </aside>
         )}
       </div>
@@ -75,13 +73,4 @@ function PeopleList({ find, selectedId, linkTo }: PeopleListProps) {
       <TableFoot shown={people.length} list={list} />
     </div>
   );
-}
-
-/** The panel follows the table on a phone: choosing somebody goes there. */
-function useFocusOnPanel(selectedId: string | null) {
-  useEffect(() => {
-    if (!selectedId) return;
-    const panel = document.querySelector<HTMLElement>('.person-panel');
-    if (window.matchMedia('(max-width: 760px)').matches) panel?.scrollIntoView();
-  }, [selectedId]);
 }

@@ -1,7 +1,7 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { Link, Outlet, useLocation, useNavigate } from 'react-router-dom';
 import { answerOf, api } from '../api/client.ts';
-import { needsSecondStep, sessionQuery } from '../api/session.ts';
+import { changeSession, needsSecondStep, sessionQuery } from '../api/session.ts';
 import { type Role, type SessionView } from '../api/views.ts';
 import { RunningHead } from '../ui/running-head.tsx';
 
@@ -53,8 +53,7 @@ function SignedIn({ session }: { session: SessionView }) {
     mutationFn: () => answerOf(api.DELETE('/api/session')),
     onSuccess: async () => {
       await navigate('/');
-      queryClient.clear();
-      queryClient.setQueryData(sessionQuery.queryKey, null);
+      changeSession(queryClient, null);
     },
   });
   const { givenName, familyName } = session.account;

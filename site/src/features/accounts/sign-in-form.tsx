@@ -2,7 +2,7 @@ import { Button } from '@radix-ui/themes';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { useLocation, useNavigate } from 'react-router-dom';
 import { answerOf, api } from '../../api/client.ts';
-import { homeOf, needsSecondStep, readNext, sessionQuery } from '../../api/session.ts';
+import { changeSession, homeOf, needsSecondStep, readNext } from '../../api/session.ts';
 import { type SessionView } from '../../api/views.ts';
 import { Form } from '../../ui/form.tsx';
 import { FormField, PassphraseField } from '../../ui/form-field.tsx';
@@ -42,8 +42,7 @@ export function useArrival() {
   const navigate = useNavigate();
   const { search } = useLocation();
   return (session: SessionView) => {
-    queryClient.clear();
-    queryClient.setQueryData(sessionQuery.queryKey, session);
+    changeSession(queryClient, session);
     const next = readNext(search);
     if (needsSecondStep(session)) return navigate(`/second-factor${search}`);
     return navigate(next ?? homeOf(session));

@@ -5,6 +5,11 @@ import { CertificateState } from './certificate-table.tsx';
 import { CorrectName } from './correct-name.tsx';
 import { Withdraw } from './withdraw.tsx';
 
+/** Whoever chose a certificate in the list goes on reading here. */
+function takeFocusFromList(heading: HTMLElement | null) {
+  if (document.activeElement?.closest('.certificate-table')) heading?.focus();
+}
+
 interface CertificatePanelProps {
   certificate: CertificateView;
   /** Withdrawing and correcting are an administrator's; others look. */
@@ -25,7 +30,9 @@ export function CertificatePanel({ certificate, mayAct }: CertificatePanelProps)
       <header>
         <div>
           <p className="kicker mono">{certificate.number}</p>
-          <h2 id="certificate-title">{certificate.holderName}</h2>
+          <h2 id="certificate-title" tabIndex={-1} ref={takeFocusFromList}>
+            {certificate.holderName}
+          </h2>
           <p>
             <CertificateState state={certificate.state} />, {certificate.scheme.title}
           </p>

@@ -5,4 +5,5 @@ export const frontQuery = queryOptions({
   queryKey: ['front'],
   queryFn: ({ signal }) => answerOf(api.GET('/api/front', { signal })),
   staleTime: 5 * 60_000,
+  meta: { personal: false },
 });

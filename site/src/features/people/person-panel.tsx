@@ -9,6 +9,11 @@ import { personQuery } from './queries.ts';
 import { RoleTicks } from './role-ticks.tsx';
 import { Suspension } from './suspension.tsx';
 
+/** Whoever chose a name in the list goes on reading here. */
+function takeFocusFromList(heading: HTMLElement | null) {
+  if (document.activeElement?.closest('.people-table')) heading?.focus();
+}
+
 interface PersonPanelProps {
   id: string;
   /** The administrator who is looking. */
@@ -27,7 +32,7 @@ export function PersonPanel({ id, ownId }: PersonPanelProps) {
     <>
       <header>
         <p className="kicker">Since {sayDate(view.joinedAt)}</p>
-        <h2 id="person-title" tabIndex={-1}>
+        <h2 id="person-title" tabIndex={-1} ref={takeFocusFromList}>
           {sayName(view)}
         </h2>
         <p>{view.email}</p>
