@@ -16,7 +16,7 @@ export default {
       project: ['src/**/*.ts', 'test/**/*.ts'],
     },
     certificates: {
-      entry: ['src/**/*.spec.ts', 'test/**/*.spec.ts'],
+      entry: ['src/**/*.spec.ts'],
       project: ['src/**/*.ts', 'test/**/*.ts'],
     },
     server: {
@@ -32,7 +32,7 @@ export default {
       project: ['src/**/*.ts', 'test/**/*.{ts,mjs}', 'bin/**/*.mjs', 'fakes/**/*.mjs'],
     },
     site: {
-      entry: ['src/main.tsx', 'src/**/*.spec.{ts,tsx}', 'e2e/**/*.spec.ts'],
+      entry: ['src/**/*.spec.{ts,tsx}', 'e2e/**/*.spec.ts'],
       project: ['src/**/*.{ts,tsx,css}', 'e2e/**/*.ts', '*.ts'],
       ignore: ['src/api/schema.gen.ts'],
     },

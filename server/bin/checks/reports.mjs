@@ -4,14 +4,17 @@ import { readJson } from '../steps/private-files.mjs';
 
 const skippedText = 'It was skipped: a check that does not run proves nothing.';
 
-/** Without the runner's own part of a stack: it says nothing about the failure. */
-const withoutRunner = (text) =>
+const colours = /\u001b\[[0-9;]*m/g;
+
+/** Without colours and without the runner's own part of a stack, which says nothing. */
+const plain = (text) =>
   text
+    .replaceAll(colours, '')
     .split('\n')
     .filter((line) => !/^\s+at .*node_modules/.test(line))
     .join('\n');
 
-const failure = (title, text) => ({ title, text: withoutRunner(text) });
+const failure = (title, text) => ({ title, text: plain(text) });
 
 /** What a runner said when its own report is missing or does not explain its exit. */
 function judge({ passed, failures, code, said, name }) {
