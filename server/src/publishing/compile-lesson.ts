@@ -7,7 +7,7 @@ import { typesetFormulas } from './formulas.ts';
 import type { Sheet } from './front-matter.ts';
 import { readBlocks, type FigureBlock, type LessonBlocks } from './lesson-blocks.ts';
 import type { LessonFrontMatter } from './lesson-front-matter.ts';
-import { parseText, sourceOf, type TextNode } from './markdown.ts';
+import { isFormula, nodesOf, parseText, sourceOf, type TextNode } from './markdown.ts';
 import type { ProblemList } from './problem-list.ts';
 import type { LessonFile } from './read-sources.ts';
 import { checkText, type Complain, type LinkTargets } from './text-checks.ts';
@@ -88,6 +88,24 @@ function compileWorked(work: LessonWork, blocks: LessonBlocks): CompiledLesson['
   return worked;
 }
 
+/** Recall questions are short Markdown of their own, in the front matter. */
+function checkRecall({ file, sheet, references, problems }: LessonWork): void {
+  sheet.front.recall.forEach(({ ask, answer }, index) => {
+    const at = sheet.lineOf('recall', index);
+    for (const text of [ask, answer]) {
+      const root = parseText(text);
+      checkText(root, references.targets, (_, message) => problems.add(file.path, at, message));
+      if ([...nodesOf(root)].some(isFormula)) {
+        problems.add(
+          file.path,
+          at,
+          'formulas do not stand in a recall question: write it in words',
+        );
+      }
+    }
+  });
+}
+
 function hashOf(work: LessonWork, blocks: LessonBlocks): Buffer {
   const hash = createHash('sha256').update(work.file.text);
   const names = blocks.figures.flatMap(({ src, narrow }) => (narrow ? [src, narrow] : [src]));
@@ -114,6 +132,7 @@ export function compileLesson(
   const root = parseText(sheet.body);
   const alone = formulasAlone(root);
   checkText(root, references.targets, complain);
+  checkRecall(work);
   const blocks = readBlocks(root, complain);
   const paragraphs = (root.children ?? []).filter(({ type }) => type === 'paragraph');
   const { words, ...front } = sheet.front;

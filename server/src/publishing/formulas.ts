@@ -1,7 +1,7 @@
 import { fromHtml } from 'hast-util-from-html';
 import katex from 'katex';
 import type { Tree } from './compiled-lesson.ts';
-import { nodesOf, type TextNode } from './markdown.ts';
+import { isFormula, nodesOf, type TextNode } from './markdown.ts';
 import { plainTree, type TreeNode } from './plain-tree.ts';
 import type { Complain } from './text-checks.ts';
 
@@ -45,7 +45,7 @@ export function typesetFormulas(
   const formulas: Record<string, Tree> = {};
   const displayed = new Set(alone.flatMap(({ children }) => children ?? []));
   for (const node of nodesOf(root)) {
-    if (node.type !== 'math' && node.type !== 'inlineMath') continue;
+    if (!isFormula(node)) continue;
     const latex = node.value ?? '';
     try {
       formulas[latex] ??= typeset(latex, node.type === 'math' || displayed.has(node));

@@ -1,4 +1,4 @@
-import { nodesOf, type TextNode } from './markdown.ts';
+import { isFormula, nodesOf, type TextNode } from './markdown.ts';
 import type { Complain } from './text-checks.ts';
 
 /** A figure as the text calls for it. */
@@ -73,18 +73,25 @@ function checkAttributes(node: TextNode, known: readonly string[], complain: Com
   return missing.length === 0;
 }
 
-function readFigure(node: TextNode, complain: Complain): FigureBlock[] {
-  const [src, narrow] = [attributeOf(node, 'src'), attributeOf(node, 'narrow')];
-  for (const name of [src, narrow]) {
+function checkNames(node: TextNode, names: readonly string[], complain: Complain): void {
+  for (const name of names) {
     if (name && !DRAWING_NAME.test(name)) {
       complain(node, `"${name}" is not the name of an SVG file beside the lesson`);
     }
   }
+}
+
+function readFigure(node: TextNode, complain: Complain): FigureBlock[] {
+  const [src, narrow] = [attributeOf(node, 'src'), attributeOf(node, 'narrow')];
+  checkNames(node, [src, narrow], complain);
   const children = node.children ?? [];
   const description = children.find(({ name }) => name === 'description');
   if (!description?.children?.length) {
     complain(node, 'missing description: put a :::description block inside the figure');
     return [];
+  }
+  for (const inside of nodesOf(description)) {
+    if (isFormula(inside)) complain(inside, 'write a description in words: it is read aloud');
   }
   if (!children.some(({ type }) => type === 'paragraph')) {
     complain(node, 'the figure has no caption');

@@ -37,3 +37,5 @@ export function sourceOf(text: string, nodes: readonly TextNode[]): string {
   const to = nodes.at(-1)?.position?.end.offset ?? from;
   return text.slice(from, to);
 }
+
+export const isFormula = ({ type }: TextNode): boolean => type === 'math' || type === 'inlineMath';

@@ -138,6 +138,16 @@ describe('what is refused', () => {
       '01-the-run.md:19: front matter, recall: too few recall questions: at least 3',
     ],
     [
+      'raw HTML in a recall question',
+      { [LESSON]: lessonSheet().replace('answer: Second.', 'answer: <b>Second</b>.') },
+      '01-the-run.md:21: raw HTML',
+    ],
+    [
+      'a formula in a description',
+      figure(`The run.\n\n:::description\nIt is $L$ long.\n:::`),
+      `01-the-run.md:${BODY_LINE + 6}: write a description in words`,
+    ],
+    [
       'a front matter key that is not known',
       { [LESSON]: lessonSheet({ front: 'colour: red\n' }) },
       '01-the-run.md:23: front matter: there is no key "colour"',
