@@ -1,6 +1,5 @@
-import { mkdtempSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
+import { rmSync } from 'node:fs';
+import { scratchFolder } from './checks/program.mjs';
 import { runTasks } from './checks/schedule.mjs';
 import { tasks } from './checks/tasks.mjs';
 import { installTestPrograms } from './checks/test-programs.mjs';
@@ -82,9 +81,7 @@ async function main(lifetime) {
   const began = Date.now();
   const chosen = chooseTasks(process.argv.slice(2));
   await prepare(chosen, lifetime);
-  const folder = mkdtempSync(join(tmpdir(), 'ferrule-reports-'));
-  lifetime.onEnd(async () => rmSync(folder, { recursive: true, force: true }));
-  const context = { signal: lifetime.signal, folder };
+  const context = { signal: lifetime.signal };
   const results = await runTasks(chosen, { context, onChange: createReporter() });
   lifetime.signal.throwIfAborted();
   const all = [...results.values()];
@@ -106,5 +103,6 @@ try {
   outcome = { passed: 0, failed: 1 };
 }
 await lifetime.end();
+rmSync(scratchFolder, { recursive: true, force: true });
 console.log(`${outcome.passed} passed, ${outcome.failed} failed`);
 process.exit(outcome.failed > 0 ? 1 : 0);

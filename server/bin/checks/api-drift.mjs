@@ -1,17 +1,14 @@
-import { mkdtempSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fromRoot } from '../steps/paths.mjs';
 import { run } from '../steps/processes.mjs';
-import { runTool, tool } from './program.mjs';
+import { runTool, scratchFolder, tool } from './program.mjs';
 
 const limitSeconds = 120;
 
 /** Writes the API's description and the site's types anew and compares them with the kept ones. */
 export async function checkApiDrift(signal) {
-  const folder = mkdtempSync(join(tmpdir(), 'ferrule-api-'));
-  const document = join(folder, 'openapi.json');
-  const types = join(folder, 'schema.gen.ts');
+  const document = join(scratchFolder, 'openapi.json');
+  const types = join(scratchFolder, 'schema.gen.ts');
   const pairs = [
     [fromRoot('server', 'openapi.json'), document],
     [fromRoot('site', 'src', 'api', 'schema.gen.ts'), types],
@@ -20,15 +17,11 @@ export async function checkApiDrift(signal) {
     [fromRoot('server', 'dist', 'cli', 'write-openapi.js'), [document]],
     [tool('openapi-typescript/bin/cli.js'), [document, '-o', types]],
   ];
-  try {
-    for (const [script, args] of writers) {
-      const written = await runTool(script, args, { signal, limitSeconds });
-      if (written.code !== 0) return written;
-    }
-    const differences = await Promise.all(pairs.map((pair) => run('diff', ['-u', ...pair])));
-    const said = differences.map(({ stdout, stderr }) => stdout + stderr).join('');
-    return { code: differences.every(({ code }) => code === 0) ? 0 : 1, said };
-  } finally {
-    rmSync(folder, { recursive: true, force: true });
+  for (const [script, args] of writers) {
+    const written = await runTool(script, args, { signal, limitSeconds });
+    if (written.code !== 0) return written;
   }
+  const differences = await Promise.all(pairs.map((pair) => run('diff', ['-u', ...pair])));
+  const said = differences.map(({ stdout, stderr }) => stdout + stderr).join('');
+  return { code: differences.every(({ code }) => code === 0) ? 0 : 1, said };
 }

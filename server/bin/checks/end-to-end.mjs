@@ -6,7 +6,7 @@ import { createProgress } from '../steps/progress.mjs';
 import { passphrasesFile } from '../steps/secrets.mjs';
 import { fromRoot } from '../steps/paths.mjs';
 import { readBrowserReport } from './reports.mjs';
-import { runTool, tool } from './program.mjs';
+import { runTool, scratchFolder, tool } from './program.mjs';
 
 const limitSeconds = 420;
 const lastLines = 40;
@@ -41,11 +41,11 @@ async function runBrowser({ cluster, demonstration, signal, reportFile }) {
 }
 
 /** The journeys, in a real browser against a demonstration made for them alone. */
-export async function runEndToEnd({ signal, folder }) {
+export async function runEndToEnd({ signal }) {
   const endings = [];
   const lifetime = { signal, onEnd: (ending) => endings.push(ending) };
   const silent = createProgress(() => {});
-  const reportFile = join(folder, 'end-to-end.json');
+  const reportFile = join(scratchFolder, 'end-to-end.json');
   try {
     const cluster = await startThrowawayCluster(() => {});
     endings.push(cluster.stop);

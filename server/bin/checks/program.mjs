@@ -1,8 +1,13 @@
 import { spawn } from 'node:child_process';
-import { existsSync } from 'node:fs';
+import { existsSync, mkdtempSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { fromRoot, root } from '../steps/paths.mjs';
 
 const graceMilliseconds = 5000;
+
+/** Reports and whatever the tools leave behind; removed when the tests are over. */
+export const scratchFolder = mkdtempSync(join(tmpdir(), 'ferrule-scratch-'));
 
 /** The script of an installed command-line tool: at the root or in the workspace that uses it. */
 export function tool(path, workspace = 'site') {
@@ -30,7 +35,7 @@ export function runTool(script, args, { signal, env, cwd = root, limitSeconds })
   return new Promise((resolve) => {
     const child = spawn(process.execPath, [script, ...args], {
       cwd,
-      env: { ...process.env, NO_COLOR: '1', FORCE_COLOR: '0', ...env },
+      env: { ...process.env, NO_COLOR: '1', FORCE_COLOR: '0', TMPDIR: scratchFolder, ...env },
       detached: true,
       stdio: ['ignore', 'pipe', 'pipe'],
     });

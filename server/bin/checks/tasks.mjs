@@ -5,7 +5,7 @@ import { fromRoot } from '../steps/paths.mjs';
 import { checkApiDrift } from './api-drift.mjs';
 import { checkBudgets } from './budgets.mjs';
 import { runEndToEnd } from './end-to-end.mjs';
-import { runTool, tool } from './program.mjs';
+import { runTool, scratchFolder, tool } from './program.mjs';
 import { readCheck, readUnitReport } from './reports.mjs';
 
 const limitSeconds = 300;
@@ -33,8 +33,8 @@ const vitest = (workspace, stage) => ({
   title: `Tests of ${workspace}`,
   stage,
   weight: 1,
-  run: async ({ signal, folder }) => {
-    const reportFile = join(folder, `${workspace}.json`);
+  run: async ({ signal }) => {
+    const reportFile = join(scratchFolder, `${workspace}.json`);
     const reporters = ['--reporter=dot', '--reporter=json', `--outputFile.json=${reportFile}`];
     const args = ['run', '--maxWorkers=1', ...reporters];
     const cwd = fromRoot(workspace);
@@ -43,9 +43,9 @@ const vitest = (workspace, stage) => ({
   },
 });
 
-async function runJest({ signal, folder }) {
+async function runJest({ signal }) {
   const cluster = await startThrowawayCluster(() => {});
-  const reportFile = join(folder, 'server.json');
+  const reportFile = join(scratchFolder, 'server.json');
   try {
     const args = ['--maxWorkers=2', '--json', `--outputFile=${reportFile}`, '--silent'];
     const ended = await runTool(tool('jest/bin/jest.js'), args, {
