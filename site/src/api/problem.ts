@@ -62,14 +62,17 @@ interface Said {
 export function sayProblem(error: unknown): Said {
   const { problem } = error instanceof ProblemError ? error : toProblem(null, 0);
   const detail = problem.detail ?? problem.errors?.map((wrong) => wrong.detail).join(' ') ?? '';
-  return { title: problem.title, detail: detail + sayWait(problem), page: problemPage(problem) };
+  return {
+    title: problem.title,
+    detail: sayWait(problem) ?? detail,
+    page: problemPage(problem),
+  };
 }
 
-function sayWait({ retryAfterSeconds }: Problem): string {
-  if (!retryAfterSeconds) return '';
-  const minutes = Math.ceil(retryAfterSeconds / 60);
-  if (retryAfterSeconds < 90) return ` Try again in ${retryAfterSeconds} seconds.`;
-  return ` Try again in ${minutes} minutes.`;
+function sayWait({ retryAfterSeconds }: Problem): string | null {
+  if (!retryAfterSeconds) return null;
+  if (retryAfterSeconds < 90) return `Try again in ${retryAfterSeconds} seconds.`;
+  return `Try again in ${Math.ceil(retryAfterSeconds / 60)} minutes.`;
 }
 
 function problemPage({ type, status }: Problem): string | null {

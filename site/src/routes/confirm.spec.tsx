@@ -19,7 +19,7 @@ it('uses the link up only when the button is pressed', async () => {
 });
 
 it('offers a new link when this one is spent', async () => {
-  serveWith('post', '/api/email-confirmations', () => problemReply(409, 'link-not-usable'));
+  serveWith('post', '/api/email-confirmations', () => problemReply(410, 'link-not-valid'));
   const { user } = renderRoute('/confirm#old');
   await user.click(await screen.findByRole('button', { name: 'Confirm my address' }));
   expect(await screen.findByRole('link', { name: 'Send a new link' })).toBeVisible();

@@ -1,6 +1,8 @@
 import { Button } from '@radix-ui/themes';
 import { useMutation } from '@tanstack/react-query';
 import { answerOf, api } from '../../api/client.ts';
+import { isProblem } from '../../api/problem.ts';
+import { ConfirmIdentity } from '../../ui/confirm-identity.tsx';
 import { Form } from '../../ui/form.tsx';
 import { ProblemCallout } from '../../ui/problem-callout.tsx';
 import { CodeField } from './code-field.tsx';
@@ -20,6 +22,9 @@ export function EnrolSecondStep({ onKept }: EnrolSecondStepProps) {
   });
   if (prove.isSuccess) {
     return <RecoveryCodes codes={prove.data.recoveryCodes} onKept={onKept} />;
+  }
+  if (isProblem(begin.error, 'fresh-sign-in-needed')) {
+    return <ConfirmIdentity onConfirmed={() => begin.mutate()} />;
   }
   if (!begin.isSuccess) {
     return (

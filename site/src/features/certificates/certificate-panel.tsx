@@ -1,7 +1,7 @@
 import { type CertificateView } from '../../api/views.ts';
 import { sayDate, sayMoment } from '../../ui/dates.ts';
+import { ValidityState } from '../../ui/validity-state.tsx';
 import { StrandMark } from '../../ui/strand-mark.tsx';
-import { CertificateState } from './certificate-table.tsx';
 import { CorrectName } from './correct-name.tsx';
 import { Withdraw } from './withdraw.tsx';
 
@@ -34,7 +34,7 @@ export function CertificatePanel({ certificate, mayAct }: CertificatePanelProps)
             {certificate.holderName}
           </h2>
           <p>
-            <CertificateState state={certificate.state} />, {certificate.scheme.title}
+            <ValidityState state={certificate.state} />, {certificate.scheme.title}
           </p>
         </div>
         <StrandMark

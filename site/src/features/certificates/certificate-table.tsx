@@ -1,7 +1,7 @@
 import { Link } from 'react-router-dom';
 import { type CertificateView } from '../../api/views.ts';
 import { sayDate } from '../../ui/dates.ts';
-import { OpenRingSign, StruckSign, TickSign } from '../../ui/symbols/signs.tsx';
+import { ValidityState } from '../../ui/validity-state.tsx';
 
 interface CertificateTableProps {
   certificates: CertificateView[];
@@ -43,44 +43,11 @@ export function CertificateTable({ certificates, selectedId, linkTo }: Certifica
             <td className="number issued">{sayDate(certificate.issuedOn)}</td>
             <td className="number expires">{sayDate(certificate.expiresOn)}</td>
             <td className="state">
-              <CertificateState state={certificate.state} />
+              <ValidityState state={certificate.state} />
             </td>
           </tr>
         ))}
       </tbody>
     </table>
   );
-}
-
-export function CertificateState({ state }: { state: CertificateView['state'] }) {
-  switch (state) {
-    case 'valid':
-      return (
-        <>
-          <TickSign className="passed" />
-          Valid
-        </>
-      );
-    case 'expired':
-      return (
-        <>
-          <OpenRingSign />
-          Expired
-        </>
-      );
-    case 'withdrawn':
-      return (
-        <>
-          <StruckSign />
-          Withdrawn
-        </>
-      );
-    case 'superseded':
-      return (
-        <>
-          <OpenRingSign />
-          Replaced
-        </>
-      );
-  }
 }

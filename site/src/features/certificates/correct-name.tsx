@@ -2,10 +2,10 @@ import { Button } from '@radix-ui/themes';
 import { useState } from 'react';
 import { isProblem } from '../../api/problem.ts';
 import { type CertificateView } from '../../api/views.ts';
+import { ConfirmIdentity } from '../../ui/confirm-identity.tsx';
 import { Form } from '../../ui/form.tsx';
 import { FormField } from '../../ui/form-field.tsx';
 import { Strip } from '../../ui/strip.tsx';
-import { ConfirmIdentity } from './confirm-identity.tsx';
 import { useCorrectName } from './queries.ts';
 
 /** A misspelt name is corrected by a new certificate with a new number. */

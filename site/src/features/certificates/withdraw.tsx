@@ -2,9 +2,9 @@ import { Button } from '@radix-ui/themes';
 import { isProblem } from '../../api/problem.ts';
 import { type CertificateView } from '../../api/views.ts';
 import { sayDate } from '../../ui/dates.ts';
+import { ConfirmIdentity } from '../../ui/confirm-identity.tsx';
 import { Form } from '../../ui/form.tsx';
 import { FormField } from '../../ui/form-field.tsx';
-import { ConfirmIdentity } from './confirm-identity.tsx';
 import { useWithdraw } from './queries.ts';
 
 /** Withdrawal with its reason, and beside it what the public check will say afterwards. */
@@ -15,9 +15,8 @@ export function Withdraw({ certificate }: { certificate: CertificateView }) {
     <section className="withdrawal">
       <h3>Withdraw</h3>
       <p>
-        The register page and the file check say so at once, and the holder is mailed. It cannot be
-        undone: a certificate withdrawn by mistake is issued anew. The reason is kept in the history
-        and is not published.
+        The register page and the file check say so at once. It cannot be undone: a certificate
+        withdrawn by mistake is issued anew. The reason is kept in the history and is not published.
       </p>
       <div className="before-after" role="img" aria-label={sayBeforeAfter(certificate)}>
         <p>

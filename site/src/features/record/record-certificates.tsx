@@ -2,7 +2,7 @@ import { Link } from 'react-router-dom';
 import { type CertificateView } from '../../api/views.ts';
 import { sayDate } from '../../ui/dates.ts';
 import { StrandMark } from '../../ui/strand-mark.tsx';
-import { CertificateState } from '../certificates/certificate-table.tsx';
+import { ValidityState } from '../../ui/validity-state.tsx';
 
 const tones = {
   valid: 'verdigris',
@@ -38,7 +38,7 @@ export function RecordCertificates({ certificates }: { certificates: Certificate
             </p>
             <p className="mono">{certificate.number}</p>
             <p className="muted">
-              <CertificateState state={certificate.state} />, {sayPeriod(certificate)}
+              <ValidityState state={certificate.state} />, {sayPeriod(certificate)}
             </p>
           </div>
           <p>

@@ -1,8 +1,8 @@
 import { Button } from '@radix-ui/themes';
 import { useMutation } from '@tanstack/react-query';
-import { answerOf, api } from '../../api/client.ts';
-import { Form } from '../../ui/form.tsx';
-import { PassphraseField } from '../../ui/form-field.tsx';
+import { answerOf, api } from '../api/client.ts';
+import { Form } from './form.tsx';
+import { PassphraseField } from './form-field.tsx';
 
 interface ConfirmIdentityProps {
   /** Runs once the passphrase has been accepted. */
@@ -23,7 +23,8 @@ export function ConfirmIdentity({ onConfirmed }: ConfirmIdentityProps) {
       onSubmit={({ password = '' }) => confirm.mutate(password)}
     >
       <p>
-        <b>Confirm that it is you.</b> You signed in a while ago, and this cannot be undone.
+        <b>Confirm that it is you.</b> You gave your passphrase a while ago, and this step asks for
+        it again.
       </p>
       <PassphraseField name="password" label="Your passphrase" />
       <Button type="submit" size="3" disabled={confirm.isPending}>
