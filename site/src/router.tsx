@@ -38,8 +38,14 @@ const pages: RouteObject[] = [
 ];
 
 const barePages: RouteObject[] = [
-  { path: 'sittings/:id', lazy: () => import('./routes/sitting.tsx') },
-  { path: 'sittings/:id/review', lazy: () => import('./routes/sitting-review.tsx') },
+  {
+    path: 'sittings/:id',
+    lazy: () => import('./routes/sitting-desk.tsx'),
+    children: [
+      { index: true, lazy: () => import('./routes/sitting.tsx') },
+      { path: 'review', lazy: () => import('./routes/sitting-review.tsx') },
+    ],
+  },
 ];
 
 export const routes: RouteObject[] = [

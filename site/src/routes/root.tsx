@@ -29,7 +29,8 @@ export function Root() {
 
 function SignalStrip() {
   const hasSignal = useSignal();
-  if (hasSignal) return null;
+  const { pathname } = useLocation();
+  if (hasSignal || isBeingSat(pathname)) return null;
   return (
     <Strip kind="lost" across>
       <b>No signal.</b> What is on this page can still be read. Papers, certificate checks and
@@ -37,6 +38,9 @@ function SignalStrip() {
     </Strip>
   );
 }
+
+/** A paper being sat says itself what the signal means for it. */
+const isBeingSat = (pathname: string) => /^\/sittings\/[^/]+(\/review)?$/.test(pathname);
 
 /** A new page begins at its heading, for the keyboard and for a screen reader alike. */
 function useFocusOnArrival() {

@@ -1,77 +1,41 @@
 import { Button } from '@radix-ui/themes';
-import { useQueryClient, useSuspenseQuery } from '@tanstack/react-query';
-import { useState } from 'react';
-import { Link, Navigate, useParams, useSearchParams } from 'react-router-dom';
-import { cacheOf, type LoaderArgs, requireSession } from '../api/session.ts';
-import { type AnswerDesk, type DeskState } from '../features/sittings/answer-desk.ts';
+import { useEffect, useRef } from 'react';
+import { Link, Navigate, useSearchParams } from 'react-router-dom';
 import { DeskStrips } from '../features/sittings/desk-strips.tsx';
 import { PaperBar } from '../features/sittings/paper-bar.tsx';
-import {
-  setPennant,
-  type SittingItem,
-  sittingQuery,
-  type SittingView,
-  takeOver,
-} from '../features/sittings/queries.ts';
-import { QuestionTerminals, standingsOf } from '../features/sittings/question-terminals.tsx';
+import { type SittingItem, type SittingView } from '../features/sittings/queries.ts';
+import { QuestionTerminals } from '../features/sittings/question-terminals.tsx';
 import { Receipts } from '../features/sittings/receipts.tsx';
-import '../features/sittings/sittings.css';
-import { useAnswerDesk } from '../features/sittings/use-answer-desk.ts';
+import { type SittingDesk, useSittingDesk } from '../features/sittings/sitting-desk.ts';
+import { BareHead } from '../features/sittings/sitting-head.tsx';
 import { TickBox } from '../ui/choice-row.tsx';
 import { sayMoment, sayTimeOfDay } from '../ui/dates.ts';
 import { PageTitle } from '../ui/page-title.tsx';
+import { Quantity } from '../ui/quantity.tsx';
 import { CurveReader } from '../ui/question/curve-reader.tsx';
 import { QuestionCard } from '../ui/question/question-card.tsx';
-import { RunningHead } from '../ui/running-head.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
+import { FootStrip } from '../ui/thumb-index.tsx';
 import { TitleBlock } from '../ui/title-block.tsx';
 
-export async function loader(args: LoaderArgs) {
-  await requireSession(args);
-  return cacheOf(args).ensureQueryData(sittingQuery(args.params.id ?? ''));
-}
+const pageOf = (sittingId: string, number: number) => `/sittings/${sittingId}?q=${number}`;
+const reviewOf = (sittingId: string) => `/sittings/${sittingId}/review`;
 
 export function Component() {
-  const { id = '' } = useParams();
-  const { data: sitting } = useSuspenseQuery(sittingQuery(id));
-  if (sitting.state === 'handed-in') return <Navigate to={`/sittings/${id}/result`} replace />;
-  // A take-over brings a new reading of the paper, and with it a new desk.
-  return <OpenSitting key={String(sitting.readOnly)} sitting={sitting} />;
-}
-
-function OpenSitting({ sitting }: { sitting: SittingView }) {
-  const { desk, state } = useAnswerDesk(sitting);
-  const cache = useQueryClient();
-  const [search] = useSearchParams();
-  const [pennants, setPennants] = useState(() =>
-    Object.fromEntries(sitting.items.map(({ key, comeBack }) => [key, comeBack])),
-  );
-  const at = Math.min(Math.max(1, Number(search.get('q')) || 1), sitting.items.length);
+  const shared = useSittingDesk();
+  const { sitting, standings, pennants } = shared;
+  const at = useQuestionNumber(sitting.items.length);
+  useFocusOnQuestion(at);
   const item = sitting.items[at - 1];
-  const standings = standingsOf(sitting.items, state);
-  if (state.stopped === 'closed' || !item) {
-    return <Navigate to={`/sittings/${sitting.id}/result`} replace />;
-  }
-  const answered = standings.filter((standing) => standing === 'answered').length;
-  const takeOverHere = async () =>
-    cache.setQueryData(sittingQuery(sitting.id).queryKey, await takeOver(sitting.id));
+  if (!item) return <Navigate to={reviewOf(sitting.id)} replace />;
   return (
     <>
       <PageTitle>{`Question ${at}, ${sitting.paper.title}`}</PageTitle>
-      <RunningHead end={<span className="muted">{sitting.paper.title}, being sat</span>} />
+      <BareHead sitting={sitting} to={{ label: 'Review', path: reviewOf(sitting.id) }} />
       <Sheet>
         <SittingHead sitting={sitting} item={item} />
-        <PaperBar
-          state={state}
-          answered={`${answered} of ${sitting.items.length} answered`}
-          closesAt={sitting.closesAt}
-          minutes={sitting.minutes}
-        />
-        <DeskStrips
-          state={state}
-          closesAt={sitting.closesAt}
-          onTakeOver={() => void takeOverHere()}
-        />
+        <DeskStrips {...shared} />
+        <PaperBar {...shared} />
         <QuestionTerminals
           sittingId={sitting.id}
           items={sitting.items}
@@ -79,21 +43,30 @@ function OpenSitting({ sitting }: { sitting: SittingView }) {
           pennants={pennants}
           current={at}
         />
-        <OpenQuestion key={item.key} item={item} desk={desk} state={state} />
-        <Receipts state={state} />
-        <SittingFoot
-          sitting={sitting}
-          at={at}
-          comeBack={pennants[item.key] ?? false}
-          readOnly={state.stopped !== null}
-          onComeBack={(comeBack) => {
-            setPennants({ ...pennants, [item.key]: comeBack });
-            void setPennant(sitting.id, item.key, comeBack);
-          }}
-        />
+        <OpenQuestion key={item.key} shared={shared} item={item} />
+        <Receipts state={shared.state} />
+        <SittingFoot shared={shared} item={item} />
       </Sheet>
+      <SittingFootStrip sitting={sitting} at={at} />
     </>
   );
+}
+
+function useQuestionNumber(count: number): number {
+  const [search] = useSearchParams();
+  return Math.min(Math.max(1, Math.floor(Number(search.get('q'))) || 1), count);
+}
+
+/** From one question to the next the path stays, so the focus is moved here. */
+function useFocusOnQuestion(at: number) {
+  const before = useRef(at);
+  useEffect(() => {
+    if (before.current === at) return;
+    before.current = at;
+    const heading = document.querySelector<HTMLElement>('main h1');
+    heading?.setAttribute('tabindex', '-1');
+    heading?.focus({ preventScroll: true });
+  }, [at]);
 }
 
 function SittingHead({ sitting, item }: { sitting: SittingView; item: SittingItem }) {
@@ -110,7 +83,11 @@ function SittingHead({ sitting, item }: { sitting: SittingView; item: SittingIte
             { label: 'Question', value: `${item.number} of ${items.length}`, span: 2 },
             { label: 'Marks', value: String(item.question.marks), span: 2, kind: 'strong' },
             { label: 'Subject', value: item.subject, span: 4 },
-            { label: 'Time allowed', value: `${sitting.minutes} min`, span: 2 },
+            {
+              label: 'Time allowed',
+              value: <Quantity value={Math.ceil(sitting.minutes)} unit="min" />,
+              span: 2,
+            },
             { label: 'Candidate', value: sitting.name, span: 2 },
             { label: 'Opened', value: sayMoment(sitting.startedAt), span: 2 },
             { label: 'Closes', value: sayTimeOfDay(sitting.closesAt), span: 2 },
@@ -121,13 +98,12 @@ function SittingHead({ sitting, item }: { sitting: SittingView; item: SittingIte
   );
 }
 
-interface OpenQuestionProps {
+interface OpenItemProps {
+  shared: SittingDesk;
   item: SittingItem;
-  desk: AnswerDesk;
-  state: DeskState;
 }
 
-function OpenQuestion({ item, desk, state }: OpenQuestionProps) {
+function OpenQuestion({ shared: { desk, state, isOver }, item }: OpenItemProps) {
   const { question, key } = item;
   const unclear = Object.fromEntries(
     question.parts.flatMap(({ id }) => {
@@ -140,7 +116,7 @@ function OpenQuestion({ item, desk, state }: OpenQuestionProps) {
       question={question}
       answers={state.answers[key] ?? {}}
       unclear={unclear}
-      readOnly={state.stopped !== null}
+      readOnly={state.stopped !== null || isOver}
       curve={question.curve ? <CurveReader curve={question.curve} /> : undefined}
       onChange={(part, answer) => desk.write(key, part, answer)}
       onLeave={() => desk.flush()}
@@ -148,40 +124,49 @@ function OpenQuestion({ item, desk, state }: OpenQuestionProps) {
   );
 }
 
-interface SittingFootProps {
-  sitting: SittingView;
-  at: number;
-  comeBack: boolean;
-  readOnly: boolean;
-  onComeBack: (comeBack: boolean) => void;
-}
-
-function SittingFoot({ sitting, at, comeBack, readOnly, onComeBack }: SittingFootProps) {
-  const page = (number: number) => `/sittings/${sitting.id}?q=${number}`;
+function SittingFoot({ shared, item }: OpenItemProps) {
+  const { sitting, pennants, state, setPennant } = shared;
+  const at = item.number;
   const isLast = at === sitting.items.length;
   return (
     <div className="action-strip">
       <TickBox
         label={`Come back to question ${at}`}
-        checked={comeBack}
-        disabled={readOnly}
-        onChange={onComeBack}
+        checked={pennants[item.key] ?? false}
+        disabled={state.stopped !== null}
+        onChange={(comeBack) => setPennant(item.key, comeBack)}
       />
-      <div className="buttons">
+      <div className="buttons sitting-buttons">
         {at > 1 && (
           <Button size="3" variant="outline" asChild>
-            <Link to={page(at - 1)}>Question {at - 1}</Link>
+            <Link to={pageOf(sitting.id, at - 1)}>Question {at - 1}</Link>
           </Button>
         )}
         <Button size="3" variant={isLast ? 'solid' : 'outline'} asChild>
-          <Link to={`/sittings/${sitting.id}/review`}>Review and hand in</Link>
+          <Link className="to-review" to={reviewOf(sitting.id)}>
+            Review and hand in
+          </Link>
         </Button>
         {!isLast && (
           <Button size="3" asChild>
-            <Link to={page(at + 1)}>Question {at + 1}</Link>
+            <Link to={pageOf(sitting.id, at + 1)}>Question {at + 1}</Link>
           </Button>
         )}
       </div>
     </div>
+  );
+}
+
+function SittingFootStrip({ sitting, at }: { sitting: SittingView; at: number }) {
+  const count = sitting.items.length;
+  return (
+    <FootStrip
+      label="Questions"
+      links={[
+        ...(at > 1 ? [{ label: `‹ ${at - 1}`, to: pageOf(sitting.id, at - 1) }] : []),
+        { label: `All ${count}`, to: reviewOf(sitting.id) },
+        ...(at < count ? [{ label: `${at + 1} ›`, to: pageOf(sitting.id, at + 1) }] : []),
+      ]}
+    />
   );
 }

@@ -1,4 +1,4 @@
-import { isProblem, ProblemError } from '../../api/problem.ts';
+import { isProblem, ProblemError, sayProblem } from '../../api/problem.ts';
 import { blankAnswer, type RawAnswer } from '../../ui/question/views.ts';
 import { Outbox } from './outbox.ts';
 import { type Receipt, type Saved, type Sending, type SittingView } from './queries.ts';
@@ -15,14 +15,17 @@ export interface DeskState {
   /** How many answers have no receipt yet. */
   waiting: number;
   savedAt: string | null;
-  /** The last try to send failed: there is no signal, or no server. */
-  isCut: boolean;
+  /** Why the last try to send came to nothing: no signal, or a server in trouble. */
+  cut: 'signal' | 'server' | null;
+  /** How many answers have gone since the signal came back; none once something new is written. */
+  caughtUp: number;
   stopped: Stopped;
   /** Server time minus the time of this device, in milliseconds. */
   clockOffsetMs: number;
 }
 
 type Send = (sending: Sending) => Promise<Saved>;
+type Draft = Pick<Sending, 'item' | 'part' | 'answer'>;
 
 const typingPauseMs = 900;
 const retryMs = [1_000, 2_000, 5_000, 10_000, 15_000];
@@ -38,11 +41,12 @@ export class AnswerDesk {
   private readonly outbox: Outbox;
   private readonly listeners = new Set<() => void>();
   private readonly sequences = new Map<string, number>();
-  private readonly pauses = new Map<string, ReturnType<typeof setTimeout>>();
   private readonly numbers: Map<string, number>;
+  private pause: ReturnType<typeof setTimeout> | undefined;
   private retry: ReturnType<typeof setTimeout> | undefined;
   private failures = 0;
   private isSending = false;
+  private isLeft = false;
 
   constructor(
     sitting: SittingView,
@@ -50,7 +54,7 @@ export class AnswerDesk {
   ) {
     this.outbox = new Outbox(sitting.id);
     this.numbers = new Map(sitting.items.map(({ key, number }) => [key, number]));
-    this.state = this.opening(sitting);
+    this.state = this.open(sitting);
   }
 
   readonly subscribe = (listener: () => void): (() => void) => {
@@ -62,6 +66,7 @@ export class AnswerDesk {
 
   /** Sends what an earlier visit left behind. */
   start(): void {
+    this.isLeft = false;
     void this.deliver();
   }
 
@@ -70,19 +75,14 @@ export class AnswerDesk {
     if (this.state.stopped) return;
     const ofItem = { ...this.state.answers[item], [part]: answer };
     this.queue({ item, part, answer });
-    this.update({ answers: { ...this.state.answers, [item]: ofItem } });
-    const place = placeOf(item, part);
-    clearTimeout(this.pauses.get(place));
-    this.pauses.set(
-      place,
-      setTimeout(() => void this.deliver(), typingPauseMs),
-    );
+    this.update({ answers: { ...this.state.answers, [item]: ofItem }, caughtUp: 0 });
+    clearTimeout(this.pause);
+    this.pause = setTimeout(() => void this.deliver(), typingPauseMs);
   }
 
   /** Leaving an entry, or going elsewhere: send now. */
   flush(): void {
-    for (const pause of this.pauses.values()) clearTimeout(pause);
-    this.pauses.clear();
+    clearTimeout(this.pause);
     void this.deliver();
   }
 
@@ -93,12 +93,14 @@ export class AnswerDesk {
     void this.deliver();
   }
 
-  stop(): void {
+  /** The page is left: sends what waits once, and tries no more. */
+  leave(): void {
+    this.flush();
+    this.isLeft = true;
     clearTimeout(this.retry);
-    for (const pause of this.pauses.values()) clearTimeout(pause);
   }
 
-  private queue({ item, part, answer }: Pick<Sending, 'item' | 'part' | 'answer'>): void {
+  private queue({ item, part, answer }: Draft): void {
     const place = placeOf(item, part);
     const sequence = (this.sequences.get(place) ?? 0) + 1;
     this.sequences.set(place, sequence);
@@ -112,7 +114,6 @@ export class AnswerDesk {
       next = this.outbox.all[0];
     }
     this.isSending = false;
-    this.update({});
   }
 
   /** False when there is no point in going on now. */
@@ -129,48 +130,59 @@ export class AnswerDesk {
     const { item, part } = sending;
     this.failures = 0;
     this.outbox.remove(sending);
-    const receipt = {
-      ...{ part, savedAt: saved.savedAt, receipt: saved.receipt, sequence: saved.sequence },
-      item: this.numbers.get(item) ?? 0,
-    };
+    const { savedAt, receipt, sequence } = saved;
+    const received = { item: this.numbers.get(item) ?? 0, part, savedAt, receipt, sequence };
     const ask = 'ask' in saved.reading ? saved.reading.ask : '';
+    const wasCut = this.state.cut !== null || this.state.caughtUp > 0;
     this.update({
-      receipts: [receipt, ...this.state.receipts],
-      savedAt: saved.savedAt,
+      receipts: [received, ...this.state.receipts],
+      savedAt,
       unclear: { ...this.state.unclear, [placeOf(item, part)]: ask },
       clockOffsetMs: Date.parse(saved.now) - Date.now(),
-      isCut: false,
+      cut: null,
+      caughtUp: wasCut ? this.state.caughtUp + 1 : 0,
     });
   }
 
   private afterFailure(sending: Sending, error: unknown): boolean {
     if (isProblem(error, 'sitting-closed')) return this.cease('closed');
     if (isProblem(error, 'taken-over')) return this.cease('taken-over');
-    if (isProblem(error, 'sequence-used')) {
-      this.outbox.remove(sending);
-      this.sequences.set(placeOf(sending.item, sending.part), sending.sequence + 100);
-      this.queue(sending);
-      return true;
-    }
-    if (isFinal(error)) {
-      this.outbox.remove(sending);
-      return true;
-    }
-    this.update({ isCut: true });
+    if (isProblem(error, 'sequence-used') && !this.isLeft) return this.sendAnew(sending, error);
+    if (isFinal(error)) return this.giveBack(sending, error);
+    this.update({ cut: isSilence(error) ? 'signal' : 'server' });
     const wait = retryMs[Math.min(this.failures, retryMs.length - 1)];
     this.failures += 1;
     clearTimeout(this.retry);
-    this.retry = setTimeout(() => void this.deliver(), wait);
+    if (!this.isLeft) this.retry = setTimeout(() => void this.deliver(), wait);
     return false;
   }
 
+  /** Another page of this sitting has counted on: what stands here now is newer still. */
+  private sendAnew({ item, part, answer }: Sending, { problem }: ProblemError): boolean {
+    const place = placeOf(item, part);
+    const highest = typeof problem['highest'] === 'number' ? problem['highest'] : 0;
+    this.sequences.set(place, Math.max(highest, this.sequences.get(place) ?? 0));
+    this.queue({ item, part, answer: this.state.answers[item]?.[part] ?? answer });
+    return true;
+  }
+
+  /** Understood and refused: the same again would be refused again, so the page says why. */
+  private giveBack(sending: Sending, error: unknown): boolean {
+    const { title, detail } = sayProblem(error);
+    const place = placeOf(sending.item, sending.part);
+    this.outbox.remove(sending);
+    this.update({
+      unclear: { ...this.state.unclear, [place]: `This was not kept. ${detail || title}` },
+    });
+    return true;
+  }
+
   private cease(stopped: Stopped): boolean {
-    if (stopped === 'closed') this.outbox.empty();
     this.update({ stopped });
     return false;
   }
 
-  private opening(sitting: SittingView): DeskState {
+  private open(sitting: SittingView): DeskState {
     const answers: DeskState['answers'] = {};
     for (const item of sitting.items) {
       const kept = Object.entries(item.answers);
@@ -179,25 +191,31 @@ export class AnswerDesk {
         this.sequences.set(placeOf(item.key, part), sequence);
       }
     }
-    for (const { item, part, answer, sequence } of this.outbox.all) {
+    for (const waiting of this.outbox.all) {
+      const { item, part, answer, sequence } = waiting;
+      // The highest sequence wins: what the server holds may be newer, or this very answer.
+      if (sequence <= (this.sequences.get(placeOf(item, part)) ?? 0)) {
+        this.outbox.remove(waiting);
+        continue;
+      }
       answers[item] = { ...answers[item], [part]: answer };
-      const before = this.sequences.get(placeOf(item, part)) ?? 0;
-      this.sequences.set(placeOf(item, part), Math.max(before, sequence));
+      this.sequences.set(placeOf(item, part), sequence);
     }
     return {
       answers,
       unclear: {},
       receipts: sitting.receipts,
-      waiting: this.outbox.all.length,
+      waiting: this.outbox.size,
       savedAt: sitting.receipts[0]?.savedAt ?? null,
-      isCut: false,
+      cut: null,
+      caughtUp: 0,
       stopped: stoppedFrom(sitting),
       clockOffsetMs: Date.parse(sitting.now) - Date.now(),
     };
   }
 
   private update(change: Partial<DeskState>): void {
-    this.state = { ...this.state, ...change, waiting: this.outbox.all.length };
+    this.state = { ...this.state, ...change, waiting: this.outbox.size };
     for (const listener of this.listeners) listener();
   }
 }
@@ -213,8 +231,10 @@ function stoppedFrom({ state, readOnly }: SittingView): Stopped {
 }
 
 /** The server understood and refused: sending the same again would change nothing. */
-function isFinal(error: unknown): boolean {
+function isFinal(error: unknown): error is ProblemError {
   if (!(error instanceof ProblemError)) return false;
   const { status } = error.problem;
   return status === 404 || status === 422;
 }
+
+const isSilence = (error: unknown) => error instanceof ProblemError && error.problem.status === 0;

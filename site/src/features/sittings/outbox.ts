@@ -1,55 +1,66 @@
 import { type Sending } from './queries.ts';
 
-const nameOf = (sittingId: string) => `ferrule.waiting.${sittingId}`;
+const prefixOf = (sittingId: string) => `ferrule.waiting.${sittingId}.`;
+const placeOf = ({ item, part }: Pick<Sending, 'item' | 'part'>) => `${item} ${part}`;
 
-/** Answers that the server has not confirmed yet: they outlive a reload and a closed browser. */
+/**
+ * Answers that the server has not confirmed yet, one for each part: they outlive a reload and a
+ * closed browser. Each has its own entry in storage, so that two pages do not wipe out each other's.
+ */
 export class Outbox {
-  private readonly name: string;
-  private waiting: Sending[];
+  private readonly prefix: string;
+  private readonly waiting: Map<string, Sending>;
 
   constructor(sittingId: string) {
-    this.name = nameOf(sittingId);
-    this.waiting = readWaiting(this.name);
+    this.prefix = prefixOf(sittingId);
+    this.waiting = readWaiting(this.prefix);
   }
 
   get all(): readonly Sending[] {
-    return this.waiting;
+    return [...this.waiting.values()];
+  }
+
+  get size(): number {
+    return this.waiting.size;
   }
 
   /** A later answer to the same part takes the place of one that still waits. */
   put(sending: Sending): void {
-    this.waiting = [...this.waiting.filter((one) => !isSamePlace(one, sending)), sending];
-    this.keep();
-  }
-
-  /** Removes that very answer; a later one to the same part stays. */
-  remove({ idempotencyKey }: Sending): void {
-    this.waiting = this.waiting.filter((one) => one.idempotencyKey !== idempotencyKey);
-    this.keep();
-  }
-
-  empty(): void {
-    this.waiting = [];
-    this.keep();
-  }
-
-  private keep(): void {
+    const place = placeOf(sending);
+    this.waiting.set(place, sending);
     try {
-      if (this.waiting.length === 0) localStorage.removeItem(this.name);
-      else localStorage.setItem(this.name, JSON.stringify(this.waiting));
+      localStorage.setItem(this.prefix + place, JSON.stringify(sending));
     } catch {
       // Without storage the answers still wait in memory; the page says how many.
     }
   }
+
+  /** Removes that very answer; a later one to the same part stays. */
+  remove(sending: Sending): void {
+    const place = placeOf(sending);
+    if (this.waiting.get(place)?.idempotencyKey !== sending.idempotencyKey) return;
+    this.waiting.delete(place);
+    try {
+      localStorage.removeItem(this.prefix + place);
+    } catch {
+      // Nothing was kept there.
+    }
+  }
+
+  empty(): void {
+    for (const sending of this.all) this.remove(sending);
+  }
 }
 
-const isSamePlace = (one: Sending, other: Sending) =>
-  one.item === other.item && one.part === other.part;
-
-function readWaiting(name: string): Sending[] {
+function readWaiting(prefix: string): Map<string, Sending> {
+  const waiting = new Map<string, Sending>();
   try {
-    return JSON.parse(localStorage.getItem(name) ?? '[]') as Sending[];
+    for (const name of Object.keys(localStorage).filter((key) => key.startsWith(prefix))) {
+      const sending = JSON.parse(localStorage.getItem(name) ?? '') as Sending;
+      waiting.set(placeOf(sending), sending);
+    }
   } catch {
-    return [];
+    // No storage, or nothing of ours in it.
   }
+  return waiting;
 }

@@ -15,7 +15,6 @@ export const sittingQuery = (id: string) =>
       answerOf(api.GET('/api/sittings/{id}', { params: { path: { id } }, signal })),
     // The desk on the page holds what was typed since: a refetch behind its back would undo it.
     staleTime: Infinity,
-    gcTime: 0,
   });
 
 /** An answer on its way to the server, or waiting for the signal to come back. */

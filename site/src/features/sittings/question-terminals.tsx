@@ -5,13 +5,13 @@ import { standingOf, type Standing } from '../../ui/question/views.ts';
 import { type DeskState } from './answer-desk.ts';
 import { type SittingItem } from './queries.ts';
 
-export const standingWords: Record<Standing, string> = {
+const standingWords: Record<Standing, string> = {
   answered: 'Answered',
   part: 'Part answered',
   not: 'Not answered',
 };
 
-const terminalOf = { answered: 'done', part: 'begun', not: 'open' } as const;
+export const terminalOf = { answered: 'done', part: 'begun', not: 'open' } as const;
 
 /** How far each question is, from what stands on this device. */
 export function standingsOf(items: readonly SittingItem[], { answers }: DeskState): Standing[] {

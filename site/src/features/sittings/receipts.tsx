@@ -1,10 +1,12 @@
 import { sayTimeOfDay } from '../../ui/dates.ts';
+import { OpenRingSign } from '../../ui/symbols/signs.tsx';
 import { type DeskState } from './answer-desk.ts';
 
-const mostShown = 6;
+const mostShown = 4;
 
 /** What was kept, when, and the receipt to quote. */
 export function Receipts({ state }: { state: DeskState }) {
+  const isWaiting = state.cut !== null && state.waiting > 0;
   return (
     <section className="receipts">
       <div>
@@ -14,6 +16,7 @@ export function Receipts({ state }: { state: DeskState }) {
         </p>
       </div>
       <table>
+        <caption className="visually-hidden">The latest receipts</caption>
         <thead>
           <tr>
             <th scope="col">Written</th>
@@ -22,11 +25,15 @@ export function Receipts({ state }: { state: DeskState }) {
           </tr>
         </thead>
         <tbody>
-          {state.waiting > 0 && (
+          {isWaiting && (
             <tr>
               <td>–</td>
-              <td>{state.waiting} on this device</td>
-              <td>waiting</td>
+              <td>
+                {state.waiting} {state.waiting === 1 ? 'answer' : 'answers'}
+              </td>
+              <td className="pen">
+                <OpenRingSign /> waiting
+              </td>
             </tr>
           )}
           {state.receipts.slice(0, mostShown).map((receipt) => (
@@ -38,7 +45,7 @@ export function Receipts({ state }: { state: DeskState }) {
               <td className="mono">{receipt.receipt}</td>
             </tr>
           ))}
-          {state.waiting === 0 && state.receipts.length === 0 && (
+          {!isWaiting && state.receipts.length === 0 && (
             <tr>
               <td colSpan={3}>Nothing written yet.</td>
             </tr>

@@ -5,6 +5,11 @@ const warnings = [
   { secondsLeft: 60, says: 'One minute left.' },
 ];
 
+const shortOfTimeSeconds = 300;
+
+/** Under five minutes the clock is shown, hidden or not. */
+export const isShortOfTime = (secondsLeft: number) => secondsLeft <= shortOfTimeSeconds;
+
 /** Whole seconds until the server closes the sitting, by the server's clock. */
 export function useSecondsLeft(closesAt: string, clockOffsetMs: number): number {
   const [now, setNow] = useState(() => Date.now());
@@ -19,7 +24,7 @@ export function useSecondsLeft(closesAt: string, clockOffsetMs: number): number 
 export function sayClock(seconds: number): string {
   const two = (value: number) => String(value).padStart(2, '0');
   const [hours, minutes] = [Math.floor(seconds / 3600), Math.floor(seconds / 60) % 60];
-  const rest = `${two(minutes)}:${two(seconds % 60)}`;
+  const rest = `${hours > 0 ? two(minutes) : minutes}:${two(seconds % 60)}`;
   return hours > 0 ? `${hours}:${rest}` : rest;
 }
 

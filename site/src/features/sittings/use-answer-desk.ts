@@ -2,7 +2,7 @@ import { useEffect, useState, useSyncExternalStore } from 'react';
 import { AnswerDesk } from './answer-desk.ts';
 import { sendAnswer, type SittingView } from './queries.ts';
 
-/** The desk of one sitting for as long as its page is open. */
+/** The desk of one sitting for as long as its pages are open. */
 export function useAnswerDesk(sitting: SittingView) {
   const [desk] = useState(
     () => new AnswerDesk(sitting, (sending) => sendAnswer(sitting.id, sending)),
@@ -14,8 +14,7 @@ export function useAnswerDesk(sitting: SittingView) {
     window.addEventListener('online', online);
     document.addEventListener('visibilitychange', flush);
     return () => {
-      flush();
-      desk.stop();
+      desk.leave();
       window.removeEventListener('online', online);
       document.removeEventListener('visibilitychange', flush);
     };

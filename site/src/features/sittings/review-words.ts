@@ -1,0 +1,42 @@
+import { isAnswered, type Standing } from '../../ui/question/views.ts';
+import { type DeskState } from './answer-desk.ts';
+import { type SittingItem } from './queries.ts';
+
+const words = 'No One Two Three Four Five Six Seven Eight Nine Ten Eleven Twelve'.split(' ');
+const sayNumber = (count: number) => words[count] ?? String(count);
+const lower = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);
+const are = (count: number) => (count === 1 ? 'is' : 'are');
+
+/** "Ten questions are answered, one is part answered and one is blank." */
+export function sayStandings(standings: readonly Standing[]): string {
+  const count = (standing: Standing) => standings.filter((one) => one === standing).length;
+  const [answered, part, not] = [count('answered'), count('part'), count('not')];
+  if (answered === standings.length) return 'Every question is answered.';
+  const clauses = [
+    `${sayNumber(answered)} ${answered === 1 ? 'question is' : 'questions are'} answered`,
+    ...(part > 0 ? [`${lower(sayNumber(part))} ${are(part)} part answered`] : []),
+    ...(not > 0 ? [`${lower(sayNumber(not))} ${are(not)} blank`] : []),
+  ];
+  const last = clauses.pop() ?? '';
+  return `${clauses.join(', ')} and ${last}. A blank loses its marks; a wrong answer loses no more than that.`;
+}
+
+/** "Part answered, (b) is blank" */
+export function sayStanding(item: SittingItem, standing: Standing, state: DeskState): string {
+  if (standing === 'answered') return 'Answered';
+  if (standing === 'not') return 'Not answered';
+  const answers = state.answers[item.key] ?? {};
+  const blank = item.question.parts.filter((part) => !isAnswered(part, answers[part.id]));
+  return `Part answered, ${joinAnd(blank.map(({ id }) => `(${id})`))} ${are(blank.length)} blank`;
+}
+
+/** "Two to come back to: 4 and 7." Empty when there is none. */
+export function sayComeBack(items: readonly SittingItem[], pennants: Record<string, boolean>) {
+  const marked = items.filter(({ key }) => pennants[key]).map(({ number }) => String(number));
+  if (marked.length === 0) return '';
+  return `${sayNumber(marked.length)} to come back to: ${joinAnd(marked)}.`;
+}
+
+function joinAnd(parts: string[]): string {
+  return [parts.slice(0, -1).join(', '), parts.at(-1)].filter(Boolean).join(' and ');
+}
