@@ -58,9 +58,13 @@ export function presentLesson({ lesson, unit, previous, next }: PlacedLesson): L
 
 /** Changes with anything the view shows. */
 export function etagOf({ lesson, course, previous, next }: PlacedLesson): string {
-  const parts = [lesson, course, previous, next].map((item) => item?.hash ?? '-');
+  const parts = [lesson, course, previous, next].map((item) => item?.id ?? '-');
   const hash = createHash('sha256')
     .update([VIEW_VERSION, ...parts].join('|'))
     .digest('base64url');
   return `"${hash.slice(0, 22)}"`;
 }
+
+/** Whether a browser's If-None-Match holds the tag; a proxy may have weakened it on the way. */
+export const holdsTag = (ifNoneMatch: string | undefined, etag: string): boolean =>
+  (ifNoneMatch ?? '').split(',').some((tag) => tag.trim().replace(/^W\//, '') === etag);

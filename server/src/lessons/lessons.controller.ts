@@ -14,6 +14,7 @@ import {
   type MarkDone,
   type ReadTo,
 } from './lessons.schemas.ts';
+import { holdsTag } from './lesson.presenter.ts';
 import { LessonsService } from './lessons.service.ts';
 
 @Controller('api/lessons/:number')
@@ -31,7 +32,7 @@ export class LessonsController {
   ): Promise<void> {
     const { etag, view } = await this.lessons.read(number);
     void reply.header('etag', etag).header('cache-control', 'private, no-cache');
-    if (request.headers['if-none-match'] === etag) return void reply.status(304).send();
+    if (holdsTag(request.headers['if-none-match'], etag)) return void reply.status(304).send();
     void reply.send(lessonViewSchema.parse(view));
   }
 

@@ -3,6 +3,7 @@ import type { QuestionView } from '../questions/question-view.ts';
 
 /** What was drawn and what was shown of it. */
 export interface KeptDraw {
+  readonly slug: string;
   readonly drawn: DrawnQuestion;
   readonly view: QuestionView;
 }

@@ -10,5 +10,6 @@ import { PracticeService } from './practice.service.ts';
   imports: [QuestionsModule, SequelizeModule.forFeature([PracticeAttemptModel])],
   controllers: [PracticeController],
   providers: [PracticeService, PracticeRepository],
+  exports: [PracticeService],
 })
 export class PracticeModule {}

@@ -3,7 +3,9 @@ import { InjectModel } from '@nestjs/sequelize';
 import type { MarkedQuestion } from '@ferrule/assessments';
 import type { Answers } from '../questions/question-view.ts';
 import { PracticeAttemptModel } from './models/practice-attempt.model.ts';
-import type { PracticeAttempt } from './practice-attempt.ts';
+import type { KeptDraw, PracticeAttempt } from './practice-attempt.ts';
+
+const MOST_LATEST = 200;
 
 @Injectable()
 export class PracticeRepository {
@@ -21,6 +23,16 @@ export class PracticeRepository {
     if (!row) return null;
     const { questionRevisionId, drawn: kept, handedInAt } = row;
     return Object.freeze({ id, accountId, questionRevisionId, kept, handedInAt });
+  }
+
+  async latest(accountId: string): Promise<KeptDraw[]> {
+    const rows = await this.attempts.findAll({
+      attributes: ['drawn'],
+      where: { accountId },
+      order: [['startedAt', 'DESC']],
+      limit: MOST_LATEST,
+    });
+    return rows.map(({ drawn }) => drawn);
   }
 
   /** False when it was marked in the meantime. */

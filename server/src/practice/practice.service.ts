@@ -7,6 +7,7 @@ import { AnswerUnclear } from '../questions/answers.errors.ts';
 import type { Answers } from '../questions/question-view.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
 import { requireKnownParts, unclearParts } from '../questions/read-answers.ts';
+import type { KeptDraw } from './practice-attempt.ts';
 import { PracticeAnswered } from './practice.errors.ts';
 import { PracticeRepository } from './practice.repository.ts';
 import type { PracticeMarked, PracticeView } from './practice.schemas.ts';
@@ -29,11 +30,16 @@ export class PracticeService {
       id,
       accountId,
       questionRevisionId: revisionId,
-      kept: { drawn, view },
+      kept: { slug, drawn, view },
       startedAt: this.clock.now(),
       handedInAt: null,
     });
     return { id, question: view };
+  }
+
+  /** What the person was shown of late, question by question. */
+  shownTo(accountId: string): Promise<Pick<KeptDraw, 'slug' | 'view'>[]> {
+    return this.repository.latest(accountId);
   }
 
   /**

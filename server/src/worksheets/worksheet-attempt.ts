@@ -62,9 +62,11 @@ export function variantOf(attemptId: string): string {
   return `${LETTERS[letter % LETTERS.length] ?? 'A'}${digit % 10}-${String(number).padStart(3, '0')}`;
 }
 
+type Figures = Pick<QuestionView, 'given' | 'curve'>;
+
 /** What a trainee would recognise: the same figures drawn again are the same. */
-export const figuresOf = ({ given, curve }: QuestionView): string =>
-  JSON.stringify([given.map(({ label, value, unit }) => [label, value, unit]), curve]);
+export const figuresOf = (slug: string, { given, curve }: Figures): string =>
+  JSON.stringify([slug, given.map(({ label, value, unit }) => [label, value, unit]), curve]);
 
 export const marksOf = (marked: MarkedByItem): number =>
   Object.values(marked).reduce((sum, { marks }) => sum + marks, 0);

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { randomUUID } from 'node:crypto';
 import { Clock } from '../clock/clock.ts';
+import { PracticeService } from '../practice/practice.service.ts';
 import type { Published } from '../publishing/content.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
 import { QuestionsService, type Draw } from '../questions/questions.service.ts';
@@ -9,7 +10,7 @@ import type { PlacedWorksheet } from './worksheet.presenter.ts';
 import { WorksheetsRepository } from './worksheets.repository.ts';
 
 /** How often figures are drawn anew when the person has seen them before. */
-const MOST_DRAWS = 25;
+const MOST_DRAWS = 60;
 
 interface Wanted {
   readonly accountId: string;
@@ -23,6 +24,7 @@ export class WorksheetDrawing {
   constructor(
     private readonly questions: QuestionsService,
     private readonly content: PublishedContentService,
+    private readonly practice: PracticeService,
     private readonly repository: WorksheetsRepository,
     private readonly clock: Clock,
   ) {}
@@ -30,9 +32,10 @@ export class WorksheetDrawing {
   async draw({ accountId, course, placed }: Wanted): Promise<NewAttempt> {
     const { worksheet } = placed;
     const id = randomUUID();
-    const earlier = await this.repository.earlierItems(accountId, worksheet.number);
-    const seen = new Set(earlier.map(({ slug, view }) => slug + figuresOf(view)));
-    const titles = await this.sheetTitles();
+    const lessons = await this.content.all('lesson');
+    const titles = new Map(lessons.map(({ content }) => [content.number, content.title]));
+    const seen = await this.figuresSeen(accountId, worksheet.number);
+    for (const lesson of lessons) for (const figures of workedIn(lesson)) seen.add(figures);
     const items: KeptItem[] = [];
     for (const [at, slug] of worksheet.questions.entries()) {
       const draw = await this.drawUnseen(`worksheet:${id}`, slug, seen);
@@ -50,25 +53,32 @@ export class WorksheetDrawing {
     };
   }
 
-  /** Figures the person has not had on this worksheet, as long as the question has any left. */
+  /** What the person had before, on this worksheet and in try blocks. */
+  private async figuresSeen(accountId: string, worksheet: string): Promise<Set<string>> {
+    const earlier = await this.repository.earlierItems(accountId, worksheet);
+    const tried = await this.practice.shownTo(accountId);
+    return new Set([...earlier, ...tried].map(({ slug, view }) => figuresOf(slug, view)));
+  }
+
+  /** Figures not seen before, as long as chance finds any. */
   private async drawUnseen(
     purpose: string,
     slug: string,
     seen: ReadonlySet<string>,
   ): Promise<Draw> {
     const published = await this.questions.practice(slug);
+    const isSeen = ({ view }: Draw) => seen.has(figuresOf(slug, view));
     let draw = this.questions.drawFor(purpose, published);
-    for (let again = 1; again < MOST_DRAWS && seen.has(slug + figuresOf(draw.view)); again += 1) {
+    for (let again = 1; again < MOST_DRAWS && isSeen(draw); again += 1) {
       draw = this.questions.drawFor(`${purpose}:${again}`, published);
     }
     return draw;
   }
-
-  private async sheetTitles(): Promise<Map<string, string>> {
-    const lessons = await this.content.all('lesson');
-    return new Map(lessons.map(({ content }) => [content.number, content.title]));
-  }
 }
+
+/** Figures whose worked answer stands in a lesson. */
+const workedIn = ({ content }: Published<'lesson'>) =>
+  Object.entries(content.worked).map(([key, worked]) => figuresOf(key.split('#')[0] ?? '', worked));
 
 function keptItem(
   key: string,

@@ -262,8 +262,8 @@ describe('before marking', () => {
   });
 });
 
-describe('a kept attempt', () => {
-  it('opens again exactly as it was, though its question has been revised since', async () => {
+describe('when questions are revised', () => {
+  it('a kept attempt opens again exactly as it was', async () => {
     const marked = await workWorksheet(trainee, 'slip');
     const lamp = practiceSheet({ id: 'vd-lamp', lesson: '1.2', revision: 'B' });
     await publishFiles(test, {
@@ -274,6 +274,19 @@ describe('a kept attempt', () => {
     expect(again.body).toEqual(marked);
     const fresh = await startWorksheet(trainee);
     expect(fresh.items[1]?.question.title).toBe('Loss on the feed vd-lamp');
+  });
+
+  it('a question with few figures repeats none as long as there are others', async () => {
+    const few = practiceSheet({ id: 'vd-lamp', lesson: '1.2', revision: 'C' })
+      .replace('from: 5 A, to: 19.5 A, step: 0.5 A', 'one of: [5 A, 6 A]')
+      .replace('[17 mΩ, 23 mΩ, 41 mΩ]', '[17 mΩ, 23 mΩ]');
+    await publishFiles(test, { ...goodFiles(), 'assessments/bank/drop/vd-lamp.md': few });
+    const seen = new Set<string>();
+    for (let attempt = 0; attempt < 4; attempt += 1) {
+      const { items } = await workWorksheet(trainee);
+      seen.add(JSON.stringify(items[1]?.question.given));
+    }
+    expect(seen.size).toBe(4);
   });
 });
 

@@ -1,6 +1,7 @@
 import { Module } from '@nestjs/common';
 import { SequelizeModule } from '@nestjs/sequelize';
 import { ClassesModule } from '../classes/classes.module.ts';
+import { PracticeModule } from '../practice/practice.module.ts';
 import { PublishingModule } from '../publishing/publishing.module.ts';
 import { QuestionsModule } from '../questions/questions.module.ts';
 import { WorksheetAttemptModel } from './models/worksheet-attempt.model.ts';
@@ -14,6 +15,7 @@ import { WorksheetsService } from './worksheets.service.ts';
 @Module({
   imports: [
     ClassesModule,
+    PracticeModule,
     PublishingModule,
     QuestionsModule,
     SequelizeModule.forFeature([WorksheetAttemptModel]),
