@@ -5,11 +5,13 @@ import { readDemonstrationPeople } from './people.mjs';
 import { fromRoot, root } from './paths.mjs';
 import { askedPort, nextFreePort } from './ports.mjs';
 import { readJson, writePrivateJson } from './private-files.mjs';
-import { runOrFail } from './processes.mjs';
+import { runOrFail, StepFailed } from './processes.mjs';
 import { ensurePassphrases, ensureSecrets, passphrasesFile } from './secrets.mjs';
 import { startService } from './services.mjs';
 
 const usualPort = 4780;
+const freshHint =
+  'If the data of this demonstration may go, npm start -- --fresh begins again without it.';
 
 /** What any program of ours may know of the terminal it was started from. */
 function plainEnvironment() {
@@ -72,7 +74,11 @@ async function prepareDatabase({ folder, env, progress, signal }) {
     ['Demonstration school', 'seed'],
   ];
   for (const [title, name] of steps) {
-    await progress.step(title, () => runCommand(name, env, signal));
+    await progress
+      .step(title, () => runCommand(name, env, signal))
+      .catch((error) => {
+        throw new StepFailed(`${error.message}\n\n${freshHint}`);
+      });
   }
   writePrivateJson(path, { content });
 }
