@@ -84,8 +84,7 @@ export async function embedFonts(
   document.registerFontkit(fontkit);
   const cut = {} as Record<Face, CutFont>;
   for (const face of faces) {
-    // The A, because a font cut down to no letter at all cannot be read.
-    const bytes = await subsetFont(Buffer.from(files[face]), `A${text}`, { targetFormat: 'sfnt' });
+    const bytes = await cutFont(files[face], text);
     cut[face] = {
       loaded: fontkit.create(bytes),
       embedded: await document.embedFont(bytes, { subset: true, features }),
@@ -111,6 +110,16 @@ export async function embedFonts(
     },
     fontRefs: () => faces.map((face) => [face, cut[face].embedded.ref]),
   };
+}
+
+// A space has no outline, and fontkit reads the head of one all the same: past the end of the file
+// where the space comes last, so that many names of plain letters could not be measured.
+const outlineHead = Buffer.alloc(10);
+
+async function cutFont(file: Uint8Array, text: string): Promise<Buffer> {
+  // The A, because a font cut down to no letter at all cannot be read.
+  const cut = await subsetFont(Buffer.from(file), `A${text}`, { targetFormat: 'sfnt' });
+  return Buffer.concat([cut, outlineHead]);
 }
 
 // By whole characters with their accents: a mark is never taken from another face than its letter.

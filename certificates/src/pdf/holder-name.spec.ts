@@ -7,6 +7,9 @@ describe('a name its holder confirms', () => {
     ['Zoë Nguyễn-Łukasiewicz', 'Zoë Nguyễn-Łukasiewicz'],
     ['  Ema  ', 'Ema'],
     ['Ελένη', 'Ελένη'],
+    // Their space comes last in the cut font.
+    ['Ifeoma Castellano', 'Ifeoma Castellano'],
+    ['Gwilym Asante', 'Gwilym Asante'],
     ['Tawhiri'.replace('a', 'a\u0304'), 'Tāwhiri'],
   ])('is taken as it will be printed: %s', async (typed, name) => {
     expect(await checkHolderName(typed, fonts)).toEqual({ ok: true, name });
