@@ -1,0 +1,54 @@
+import { Link } from 'react-router-dom';
+import { CurveReader } from '../../ui/question/curve-reader.tsx';
+import { MarkedQuestion } from '../../ui/question/marked-question.tsx';
+import { QuestionFacts } from '../../ui/question/question-card.tsx';
+import { ItemHead } from './item-head.tsx';
+import { type WorksheetItem, type WorksheetView } from './queries.ts';
+
+/** A marked worksheet, question by question, with its total. */
+export function MarkedSheet({ attempt }: { attempt: WorksheetView }) {
+  return (
+    <>
+      {attempt.items.map((item, index) => (
+        <MarkedItem key={item.key} item={item} place={[index + 1, attempt.items.length]} />
+      ))}
+      <div className="marked-total">
+        <p>Total</p>
+        <p>To pass: {marksToPass(attempt)}</p>
+        <p>
+          <span className="visually-hidden">Marks: </span>
+          {attempt.marks}
+          <i>/{attempt.outOf}</i>
+        </p>
+      </div>
+    </>
+  );
+}
+
+/** The lowest whole mark that reaches the pass mark. */
+export function marksToPass({ passPercent, outOf }: WorksheetView): number {
+  return Math.ceil((passPercent * outOf) / 100);
+}
+
+function MarkedItem({ item, place }: { item: WorksheetItem; place: [number, number] }) {
+  const { question, marked, readAgain } = item;
+  if (!marked) return null;
+  return (
+    <section aria-labelledby={`${item.key}-title`}>
+      <ItemHead item={item} place={place} says={marked.summary}>
+        {readAgain && (
+          <p>
+            <Link to={`/sheets/${readAgain.sheet}`}>
+              Read {readAgain.sheet}, {readAgain.title}
+            </Link>
+          </p>
+        )}
+      </ItemHead>
+      <MarkedQuestion marked={marked} />
+      <div className="marked-facts">
+        <QuestionFacts question={question} />
+        {question.curve && <CurveReader curve={question.curve} />}
+      </div>
+    </section>
+  );
+}
