@@ -72,7 +72,7 @@ function isEntry(element: Element): element is HTMLInputElement {
 function sayWhatIsWrong(field: HTMLInputElement): string {
   if (field.validity.valueMissing) return field.dataset['missing'] ?? 'Fill this in.';
   if (field.validity.typeMismatch && field.type === 'email') {
-    return 'That is not an e-mail address. It needs a name, an @ and a domain.';
+    return 'That is not an email address. It needs a name, an @ and a domain.';
   }
   return field.dataset['wrong'] ?? field.validationMessage;
 }

@@ -58,7 +58,8 @@ function termsOf(tokens: readonly Token[]): Term[] {
 }
 
 function clings(before: Token | undefined, token: Token): boolean {
-  if (token.kind === 'unit' || token.text === ')' || before?.text === '(') return true;
+  if (token.kind === 'unit' || before?.text === '(') return true;
+  if (token.text === ')' || token.text === ',') return true;
   return before?.kind === 'number' && token.kind === 'symbol';
 }
 

@@ -1,6 +1,6 @@
 import { answerOf, api } from '../../api/client.ts';
-import { isProblem } from '../../api/problem.ts';
 import { type Answer } from '../../api/views.ts';
+import { readUnclear } from '../../ui/question/unclear.ts';
 import { type Answers } from '../../ui/question/views.ts';
 
 export type PracticeView = Answer<'Practice_start'>;
@@ -15,19 +15,8 @@ export function answerPractice(id: string, answers: Answers) {
   );
 }
 
-interface Unclear {
-  part: string;
-  ask: string;
-}
-
-function isUnclear(item: unknown): item is Unclear {
-  return typeof item === 'object' && item !== null && 'part' in item && 'ask' in item;
-}
-
 /** What is asked back, by part; null when the refusal is another one. */
 export function unclearParts(error: unknown): Record<string, string> | null {
-  if (!isProblem(error, 'answer-unclear')) return null;
-  const { unclear } = error.problem;
-  const parts = Array.isArray(unclear) ? unclear.filter(isUnclear) : [];
-  return Object.fromEntries(parts.map(({ part, ask }) => [part, ask]));
+  const unclear = readUnclear(error);
+  return unclear && Object.fromEntries(unclear.map(({ part, ask }) => [part, ask]));
 }

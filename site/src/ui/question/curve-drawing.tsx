@@ -1,58 +1,75 @@
+import { type PointerEvent } from 'react';
 import { type CurveLayout, placeCurve, type PlacedCurve, type Reading } from './curve-scales.ts';
 import { type CurveView } from './views.ts';
+
+type Interval = CurveView['intervals'][number];
 
 interface CurveDrawingProps {
   curve: CurveView;
   cursor: Reading;
+  /** The interval the cursor stands in. */
+  within: Interval | undefined;
   layout: CurveLayout;
   className: string;
+  /** A finger or the mouse moves the cursor; the slider below does it for the keyboard. */
+  onMove: (hours: number) => void;
 }
 
 /** Voltage over current on one time axis, with the marked intervals and the cursor. */
-export function CurveDrawing({ curve, cursor, layout, className }: CurveDrawingProps) {
+export function CurveDrawing({ curve, layout, className, ...props }: CurveDrawingProps) {
   const placed = placeCurve(curve, layout);
-  const cursorX = placed.x(cursor.hours);
+  const move = (event: PointerEvent<SVGSVGElement>) => {
+    if (event.type === 'pointerdown') event.currentTarget.setPointerCapture(event.pointerId);
+    else if (event.buttons === 0) return;
+    const box = event.currentTarget.getBoundingClientRect();
+    props.onMove(placed.x.invert(((event.clientX - box.left) / box.width) * layout.width));
+  };
   return (
     <svg
       className={`drawing ${className}`}
       viewBox={`0 0 ${layout.width} ${layout.height}`}
       aria-hidden="true"
+      onPointerDown={move}
+      onPointerMove={move}
     >
+      {curve.intervals.map((interval) => (
+        <Bracket
+          key={interval.label}
+          interval={interval}
+          placed={placed}
+          isCurrent={interval === props.within}
+        />
+      ))}
       <Axes placed={placed} layout={layout} />
       <path className="curve-volts" d={placed.voltsPath} />
       <path className="curve-amps" d={placed.ampsPath} />
-      {curve.intervals.map((interval) => (
-        <Bracket key={interval.label} interval={interval} placed={placed} />
-      ))}
-      <path className="cursor" d={`M${cursorX} ${placed.bracketTop + 10}V${placed.ampsFoot}`} />
-      <circle className="part" cx={cursorX} cy={placed.volts(cursor.volts)} r="4.5" />
-      <circle className="part" cx={cursorX} cy={placed.amps(cursor.amps)} r="4.5" />
+      <text className="bold pen direct" {...placed.voltsLabel}>
+        Voltage, V
+      </text>
+      <text className="bold direct" {...placed.ampsLabel}>
+        Current, A
+      </text>
+      <Cursor cursor={props.cursor} placed={placed} />
     </svg>
   );
 }
 
 function Axes({ placed, layout }: { placed: PlacedCurve; layout: CurveLayout }) {
   const edge = layout.width - layout.right;
+  const figure = (tick: number, y: number) => (
+    <g key={tick}>
+      <path className="rule" d={`M${layout.left} ${y}H${edge}`} />
+      <text className="second" x={layout.left - 8} y={y + 5} textAnchor="end">
+        {tick}
+      </text>
+    </g>
+  );
   return (
     <>
-      {placed.voltTicks.map((tick) => (
-        <g key={`volts ${tick}`}>
-          <path className="rule" d={`M${layout.left} ${placed.volts(tick)}H${edge}`} />
-          <text className="second" x={layout.left - 8} y={placed.volts(tick) + 5} textAnchor="end">
-            {tick}
-          </text>
-        </g>
-      ))}
-      {placed.ampTicks.map((tick) => (
-        <g key={`amps ${tick}`}>
-          <path className="rule" d={`M${layout.left} ${placed.amps(tick)}H${edge}`} />
-          <text className="second" x={layout.left - 8} y={placed.amps(tick) + 5} textAnchor="end">
-            {tick}
-          </text>
-        </g>
-      ))}
+      <g>{placed.voltTicks.map((tick) => figure(tick, placed.volts(tick)))}</g>
+      <g>{placed.ampTicks.map((tick) => figure(tick, placed.amps(tick)))}</g>
       {placed.hourTicks.map((tick) => (
-        <g key={`hours ${tick}`}>
+        <g key={tick}>
           <path className="conductor" d={`M${placed.x(tick)} ${placed.ampsFoot}v5`} />
           <text className="second" x={placed.x(tick)} y={placed.ampsFoot + 20} textAnchor="middle">
             {tick}
@@ -65,34 +82,45 @@ function Axes({ placed, layout }: { placed: PlacedCurve; layout: CurveLayout }) 
       />
       <path
         className="conductor"
-        d={`M${layout.left} ${placed.bracketTop + 16}V${placed.voltsFoot}H${edge}`}
+        d={`M${layout.left} ${placed.voltsTop}V${placed.voltsFoot}H${edge}`}
       />
-      <text className="second" x={edge} y={layout.height - 4} textAnchor="end">
+      <text className="second" x={edge} y={layout.height - 2} textAnchor="end">
         Time, h
-      </text>
-      <text className="bold pen" x={layout.left + 8} y={placed.bracketTop + 12}>
-        Voltage, V
-      </text>
-      <text className="bold" x={edge} y={placed.ampsTop - 6} textAnchor="end">
-        Current, A
       </text>
     </>
   );
 }
 
-interface BracketProps {
-  interval: CurveView['intervals'][number];
-  placed: PlacedCurve;
+function Cursor({ cursor, placed }: { cursor: Reading; placed: PlacedCurve }) {
+  const x = placed.x(cursor.hours);
+  const grip = (placed.voltsFoot + placed.ampsTop) / 2;
+  return (
+    <>
+      <path className="cursor" d={`M${x} ${placed.voltsTop - 8}V${placed.ampsFoot}`} />
+      <circle className="part at-volts" cx={x} cy={placed.volts(cursor.volts)} r="5" />
+      <circle className="part" cx={x} cy={placed.amps(cursor.amps)} r="5" />
+      <rect className="grip" x={x - 10} y={grip - 13} width="20" height="26" />
+      <path className="grip-bars" d={`M${x - 3} ${grip - 6}v12M${x + 3} ${grip - 6}v12`} />
+    </>
+  );
 }
 
-function Bracket({ interval, placed }: BracketProps) {
+interface BracketProps {
+  interval: Interval;
+  placed: PlacedCurve;
+  isCurrent: boolean;
+}
+
+function Bracket({ interval, placed, isCurrent }: BracketProps) {
   const from = placed.x(interval.fromH);
   const to = placed.x(interval.toH);
+  const { bracketTop: top, ampsFoot: foot } = placed;
   return (
-    <g>
-      <path className="dash" d={`M${from} 24V${placed.ampsFoot}M${to} 24V${placed.ampsFoot}`} />
-      <path className="dimension" d={`M${from} 30V22H${to}V30`} />
-      <text className="bold" x={(from + to) / 2} y="16" textAnchor="middle">
+    <g className={isCurrent ? 'interval current' : 'interval'}>
+      <rect className="span" x={from} y={top} width={to - from} height={foot - top} />
+      <path className="bracket" d={`M${from} ${top + 8}V${top}H${to}V${top + 8}`} />
+      <path className="edge" d={`M${from} ${top + 12}V${foot}M${to} ${top + 12}V${foot}`} />
+      <text className="interval-letter" x={(from + to) / 2} y={top - 8} textAnchor="middle">
         {interval.label}
       </text>
     </g>

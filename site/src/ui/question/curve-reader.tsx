@@ -5,8 +5,8 @@ import './curve.css';
 import { type CurveLayout, readAt, type Reading, readingsOf } from './curve-scales.ts';
 import { type CurveView } from './views.ts';
 
-const wide: CurveLayout = { width: 840, height: 430, left: 46, right: 14 };
-const narrow: CurveLayout = { width: 350, height: 400, left: 34, right: 8 };
+const wide: CurveLayout = { width: 840, height: 450, left: 46, right: 14 };
+const narrow: CurveLayout = { width: 350, height: 410, left: 34, right: 8 };
 
 const step = 0.1;
 const leap = 1;
@@ -21,15 +21,16 @@ export function CurveReader({ curve }: { curve: CurveView }) {
   const end = curve.hours.at(-1) ?? 0;
   const [hours, setHours] = useState(() => Math.round(end * 5) / 10);
   const cursor = readAt(curve, hours);
-  const move = (by: number) =>
-    setHours((at) => Math.min(end, Math.max(0, Math.round((at + by) * 10) / 10)));
+  const put = (at: number) => setHours(Math.min(end, Math.max(0, Math.round(at * 10) / 10)));
+  const within = curve.intervals.find(({ fromH, toH }) => fromH <= hours && hours <= toH);
+  const drawn = { curve, cursor, within, onMove: put };
   return (
     <section className="curve" aria-label="Charge curve">
-      <CurveDrawing curve={curve} cursor={cursor} layout={wide} className="only-wide" />
-      <CurveDrawing curve={curve} cursor={cursor} layout={narrow} className="only-narrow" />
+      <CurveDrawing {...drawn} layout={wide} className="only-wide" />
+      <CurveDrawing {...drawn} layout={narrow} className="only-narrow" />
       <p className="visually-hidden">{sayIntervals(curve)}</p>
-      <CursorControls cursor={cursor} end={end} onMove={move} onSet={setHours} />
-      <ReadingsTable curve={curve} />
+      <CursorControls cursor={cursor} end={end} onPut={put} />
+      <ReadingsTable curve={curve} within={within} />
     </section>
   );
 }
@@ -46,11 +47,10 @@ function sayIntervals({ intervals }: CurveView): string {
 interface CursorControlsProps {
   cursor: Reading;
   end: number;
-  onMove: (byHours: number) => void;
-  onSet: (hours: number) => void;
+  onPut: (hours: number) => void;
 }
 
-function CursorControls({ cursor, end, onMove, onSet }: CursorControlsProps) {
+function CursorControls({ cursor, end, onPut }: CursorControlsProps) {
   const id = useId();
   return (
     <div className="curve-cursor">
@@ -64,12 +64,12 @@ function CursorControls({ cursor, end, onMove, onSet }: CursorControlsProps) {
           step={step}
           value={cursor.hours}
           aria-valuetext={sayReading(cursor)}
-          onChange={(event) => onSet(Number(event.target.value))}
+          onChange={(event) => onPut(Number(event.target.value))}
           onKeyDown={(event) => {
             const by = { PageUp: leap, PageDown: -leap }[event.key];
             if (by === undefined) return;
             event.preventDefault();
-            onMove(by);
+            onPut(cursor.hours + by);
           }}
         />
       </label>
@@ -94,10 +94,18 @@ function CursorControls({ cursor, end, onMove, onSet }: CursorControlsProps) {
         </div>
       </dl>
       <p className="curve-steps not-printed">
-        <button type="button" onClick={() => onMove(-step)} aria-label="Cursor back 0.1 hours">
+        <button
+          type="button"
+          onClick={() => onPut(cursor.hours - step)}
+          aria-label="Cursor back 0.1 hours"
+        >
           ‹
         </button>
-        <button type="button" onClick={() => onMove(step)} aria-label="Cursor on 0.1 hours">
+        <button
+          type="button"
+          onClick={() => onPut(cursor.hours + step)}
+          aria-label="Cursor on 0.1 hours"
+        >
           ›
         </button>
       </p>
@@ -105,8 +113,16 @@ function CursorControls({ cursor, end, onMove, onSet }: CursorControlsProps) {
   );
 }
 
-function ReadingsTable({ curve }: { curve: CurveView }) {
+interface ReadingsTableProps {
+  curve: CurveView;
+  within: CurveView['intervals'][number] | undefined;
+}
+
+function ReadingsTable({ curve, within }: ReadingsTableProps) {
   const readings = readingsOf(curve);
+  const isWithin = readings.map(
+    ({ hours }) => within !== undefined && within.fromH <= hours && hours <= within.toH,
+  );
   const rows = [
     { name: 'Time, h', figures: readings.map(({ hours }) => String(Number(hours.toFixed(2)))) },
     { name: 'Voltage, V', figures: readings.map(({ volts }) => volts.toFixed(2)) },
@@ -123,7 +139,7 @@ function ReadingsTable({ curve }: { curve: CurveView }) {
             <tr key={name}>
               <th scope="row">{name}</th>
               {figures.map((figure, index) => (
-                <td key={index} className="number">
+                <td key={index} className={isWithin[index] ? 'number within' : 'number'}>
                   {figure}
                 </td>
               ))}

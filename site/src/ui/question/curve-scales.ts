@@ -16,9 +16,12 @@ export interface Reading {
   amps: number;
 }
 
-const bracketTop = 34;
-const gap = 36;
+const bracketTop = 30;
+const voltsTop = 52;
+const gap = 44;
 const foot = 40;
+/** Where along the time axis the curves are named. */
+const labelAt = 0.6;
 
 /** Volts at that time, between the samples by a straight line; likewise amps. */
 export function readAt(curve: CurveView, hours: number): Reading {
@@ -45,30 +48,27 @@ export function readingsOf(curve: CurveView): Reading[] {
 /** Everything the drawing needs to place a curve: scales, ticks and paths. */
 export function placeCurve(curve: CurveView, layout: CurveLayout) {
   const end = curve.hours.at(-1) ?? 1;
-  const plot = layout.height - bracketTop - gap - foot;
-  const voltsFoot = bracketTop + plot * 0.56;
+  const plot = layout.height - voltsTop - gap - foot;
+  const voltsFoot = voltsTop + plot * 0.58;
   const ampsTop = voltsFoot + gap;
   const ampsFoot = layout.height - foot;
-  const x = scaleLinear([0, end], [layout.left, layout.width - layout.right]);
+  const x = scaleLinear([0, end], [layout.left, layout.width - layout.right]).clamp(true);
   const lowest = Math.floor(Math.min(...curve.volts));
   const highest = Math.ceil(Math.max(...curve.volts) + 0.2);
-  const volts = scaleLinear([lowest, highest], [voltsFoot, bracketTop + 16]);
+  const volts = scaleLinear([lowest, highest], [voltsFoot, voltsTop]);
   const amps = scaleLinear([0, Math.max(...curve.amps) * 1.15], [ampsFoot, ampsTop]).nice(3);
   const path = (values: number[], y: (value: number) => number) =>
     line<number>(
       (_, index) => x(curve.hours[index] ?? 0),
       (value) => y(value),
     )(values) ?? '';
+  const named = readAt(curve, end * labelAt);
   return {
-    x,
-    volts,
-    amps,
-    voltsFoot,
-    ampsTop,
-    ampsFoot,
-    bracketTop,
+    ...{ x, volts, amps, bracketTop, voltsTop, voltsFoot, ampsTop, ampsFoot },
     voltsPath: path(curve.volts, volts),
     ampsPath: path(curve.amps, amps),
+    voltsLabel: { x: x(named.hours), y: volts(named.volts) - 10 },
+    ampsLabel: { x: x(named.hours), y: amps(named.amps) - 10 },
     hourTicks: x.ticks(Math.min(10, Math.max(4, Math.round(layout.width / 70)))),
     voltTicks: volts.ticks(Math.min(5, highest - lowest)),
     ampTicks: amps.ticks(3),

@@ -1,3 +1,4 @@
+import { type CSSProperties } from 'react';
 import { Line } from '../line.tsx';
 import { PenCross, PenTick } from '../symbols/signs.tsx';
 import { InlineMarkdown } from './inline-markdown.tsx';
@@ -16,16 +17,29 @@ export function MarkedQuestion({ marked }: { marked: MarkedQuestionView }) {
         <span>Worked</span>
         <span>Marker</span>
       </div>
-      {marked.parts.map((part) => (
-        <MarkedPart key={part.id} part={part} />
+      {marked.parts.map((part, index) => (
+        <MarkedPart key={part.id} part={part} strokesBefore={countStrokes(marked, index)} />
       ))}
     </div>
   );
 }
 
-function MarkedPart({ part }: { part: MarkedPartView }) {
+/** Strokes of the pen in the parts before this one: they are drawn one after the other. */
+function countStrokes({ parts }: MarkedQuestionView, before: number): number {
+  const remarks = parts.slice(0, before).flatMap((part) => part.remarks);
+  return remarks.filter(({ sign }) => sign !== 'note').length;
+}
+
+interface MarkedPartProps {
+  part: MarkedPartView;
+  strokesBefore: number;
+}
+
+function MarkedPart({ part, strokesBefore }: MarkedPartProps) {
+  const lines = Math.max(part.yours.length, part.worked.length, 1);
+  const vars = { '--lines': lines } as CSSProperties;
   return (
-    <section className="marked-part" aria-label={`Part ${part.id}`}>
+    <section className="marked-part" aria-label={`Part ${part.id}`} style={vars}>
       <h3>
         <b>({part.id})</b> <InlineMarkdown>{part.prompt}</InlineMarkdown>
       </h3>
@@ -34,11 +48,12 @@ function MarkedPart({ part }: { part: MarkedPartView }) {
       <div className="marker">
         <div>
           {part.remarks.map((remark, index) => (
-            <RemarkLine key={index} remark={remark} />
+            <RemarkLine key={index} remark={remark} stroke={strokesBefore + index} />
           ))}
         </div>
         <p className="part-mark">
           {part.marks}
+          <span className="visually-hidden"> of </span>
           <i>/{part.outOf}</i>
         </p>
       </div>
@@ -68,9 +83,15 @@ function WorkingColumn({ className, heading, lines }: WorkingColumnProps) {
 
 const signSaid = { gained: 'Mark gained: ', lost: 'Mark lost: ', note: '' } as const;
 
-function RemarkLine({ remark }: { remark: Remark }) {
+interface RemarkLineProps {
+  remark: Remark;
+  /** Which stroke of the pen it is, from the top of the paper. */
+  stroke: number;
+}
+
+function RemarkLine({ remark, stroke }: RemarkLineProps) {
   return (
-    <p className="remark">
+    <p className="remark" style={{ '--stroke': stroke } as CSSProperties}>
       {remark.sign === 'gained' && <PenTick />}
       {remark.sign === 'lost' && <PenCross />}
       <span>

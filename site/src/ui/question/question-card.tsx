@@ -1,5 +1,6 @@
 import { type ReactNode } from 'react';
 import Markdown from 'react-markdown';
+import remarkGfm from 'remark-gfm';
 import { Hazard } from '../hazard.tsx';
 import { GivenTable } from './given-table.tsx';
 import { PartEntry } from './part-entry.tsx';
@@ -48,7 +49,7 @@ export function QuestionFacts({ question }: { question: QuestionView }) {
     <div className="question-facts">
       {question.body && (
         <div className="question-text">
-          <Markdown>{question.body}</Markdown>
+          <Markdown remarkPlugins={[remarkGfm]}>{question.body}</Markdown>
         </div>
       )}
       {question.given.length > 0 && <GivenTable given={question.given} />}
