@@ -8,16 +8,24 @@ const largestLogBytes = 5_000_000;
 const readySeconds = 60;
 const stopSeconds = 12;
 const lastLines = 25;
+const longestLine = 400;
 
+const sizeOf = (path) => (existsSync(path) ? statSync(path).size : 0);
+
+/** Appends to a log; its last words are those of this run alone. */
 function openLog(path) {
-  if (existsSync(path) && statSync(path).size > largestLogBytes) rmSync(path);
-  return createWriteStream(path, { flags: 'a', mode: 0o600 });
+  if (sizeOf(path) > largestLogBytes) rmSync(path);
+  const start = sizeOf(path);
+  const lastWords = () => {
+    if (!existsSync(path)) return '';
+    const lines = readFileSync(path).subarray(start).toString().trimEnd().split('\n');
+    return lines
+      .slice(-lastLines)
+      .map((line) => line.slice(0, longestLine))
+      .join('\n');
+  };
+  return { log: createWriteStream(path, { flags: 'a', mode: 0o600 }), lastWords };
 }
-
-const lastWords = (logFile) => {
-  const lines = existsSync(logFile) ? readFileSync(logFile, 'utf8').trimEnd().split('\n') : [];
-  return lines.slice(-lastLines).join('\n');
-};
 
 function signalGroup(child, signal) {
   try {
@@ -35,9 +43,9 @@ async function stopService(child, hasEnded) {
   clearTimeout(impatience);
 }
 
-function waitUntilReady({ name, child, hasEnded, logFile, signal }) {
+function waitUntilReady({ name, child, hasEnded, lastWords, signal }) {
   return new Promise((resolve, reject) => {
-    const fail = (what) => reject(new StepFailed(`The ${name} ${what}.\n${lastWords(logFile)}`));
+    const fail = (what) => reject(new StepFailed(`The ${name} ${what}.\n${lastWords()}`));
     const tooLong = setTimeout(
       () => fail(`was not ready in ${readySeconds} s`),
       readySeconds * 1000,
@@ -68,19 +76,19 @@ export async function startService({ name, script, env, logFile, signal }) {
     detached: true,
     stdio: ['ignore', 'pipe', 'pipe'],
   });
-  const log = openLog(logFile);
+  const { log, lastWords } = openLog(logFile);
   child.stdout.pipe(log, { end: false });
   child.stderr.pipe(log, { end: false });
   const hasEnded = new Promise((resolve) => {
     child.once('error', (error) => resolve(error.message));
-    child.once('close', (code, signal) => {
-      log.end(() => resolve(signal ? `signal ${signal}` : `exit ${code}`));
+    child.once('close', (code, endedBy) => {
+      log.end(() => resolve(endedBy ? `signal ${endedBy}` : `exit ${code}`));
     });
   });
   const stop = () => stopService(child, hasEnded);
   try {
-    const addresses = await waitUntilReady({ name, child, hasEnded, logFile, signal });
-    return { name, pid: child.pid, addresses, hasEnded, stop, lastWords: () => lastWords(logFile) };
+    const addresses = await waitUntilReady({ name, child, hasEnded, lastWords, signal });
+    return { name, pid: child.pid, addresses, hasEnded, stop, lastWords };
   } catch (error) {
     await stop();
     throw error;
