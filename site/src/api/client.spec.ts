@@ -37,9 +37,9 @@ it('hands field errors to their fields', () => {
     type: '/problems/invalid-request',
     title: 'The request is not in order',
     status: 422,
-    errors: [{ pointer: '#/email', detail: 'That is not an e-mail address.' }],
+    errors: [{ pointer: '#/email', detail: 'That is not an email address.' }],
   });
-  expect(fieldProblems(error)).toEqual({ email: 'That is not an e-mail address.' });
+  expect(fieldProblems(error)).toEqual({ email: 'That is not an email address.' });
 });
 
 it('goes back only to paths of this site', () => {

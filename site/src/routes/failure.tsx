@@ -1,12 +1,18 @@
 import { Button } from '@radix-ui/themes';
 import { Link, useRouteError } from 'react-router-dom';
-import { isProblem, ProblemError, sayProblem } from '../api/problem.ts';
+import { isProblem, noAnswerProblem, ProblemError, sayProblem } from '../api/problem.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 
+/** A page's own code that cannot be fetched fails as a TypeError: that is silence, not a fault. */
+function readFailure(error: unknown): unknown {
+  const isSilence = error instanceof TypeError && /fetch|import|load/i.test(error.message);
+  return isSilence ? noAnswerProblem() : error;
+}
+
 /** A page whose loader or drawing failed. */
 export function Failure() {
-  const error = useRouteError();
+  const error = readFailure(useRouteError());
   const said = sayProblem(error);
   const isMissing = isProblem(error, 'not-found');
   const title = isMissing ? 'There is no such sheet' : said.title;
