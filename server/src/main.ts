@@ -3,6 +3,7 @@ import { NestFactory } from '@nestjs/core';
 import type { NestFastifyApplication } from '@nestjs/platform-fastify';
 import { AppModule } from './app.module.ts';
 import { createAdapter, setUpApp } from './app.setup.ts';
+import { NoSigningKey } from './certificates/keys/key-folder.ts';
 import { ConfigInvalid, readConfig, type Config } from './config/config.schema.ts';
 import { serveSite } from './http/serve-site.ts';
 
@@ -24,5 +25,9 @@ const app = await NestFactory.create<NestFastifyApplication>(
 );
 await setUpApp(app, config);
 if (config.SITE_FOLDER !== '') await serveSite(app, config.SITE_FOLDER);
-await app.listen(config.PORT, config.HOST);
+await app.listen(config.PORT, config.HOST).catch((error: unknown) => {
+  if (!(error instanceof NoSigningKey)) throw error;
+  console.error(error.message);
+  process.exit(1);
+});
 console.log(`ready ${await app.getUrl()}`);

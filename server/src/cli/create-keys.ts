@@ -23,7 +23,8 @@ async function ensureKey(folder: string): Promise<string> {
   try {
     return `Key ${(await readKey(folder)).keyId} is in use.`;
   } catch (error) {
-    if (!(error instanceof NoSigningKey)) throw error;
+    // A damaged key is never replaced unasked.
+    if (!(error instanceof NoSigningKey && error.isEmpty)) throw error;
     const key = await makeKey(folder, {
       organisation: demonstrationSchool.name,
       validFrom: DEMONSTRATION_FROM,
@@ -32,8 +33,21 @@ async function ensureKey(folder: string): Promise<string> {
   }
 }
 
-const client = new pg.Client({ connectionString: given('MIGRATION_DATABASE_URL') });
-await client.connect();
-await client.query('SELECT pg_advisory_lock($1)', [LOCK]);
-console.log(await ensureKey(given('KEYS_FOLDER')));
-await client.end();
+/** One process at a time makes keys; the connection's end gives the lock back. */
+async function ensureOnce(): Promise<string> {
+  const client = new pg.Client({ connectionString: given('MIGRATION_DATABASE_URL') });
+  await client.connect();
+  try {
+    await client.query('SELECT pg_advisory_lock($1)', [LOCK]);
+    return await ensureKey(given('KEYS_FOLDER'));
+  } finally {
+    await client.end();
+  }
+}
+
+try {
+  console.log(await ensureOnce());
+} catch (error) {
+  console.error(error instanceof Error ? error.message : error);
+  process.exitCode = 1;
+}

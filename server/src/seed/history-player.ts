@@ -4,6 +4,9 @@ import { keyAnswers, type DrawnQuestion } from '@ferrule/assessments';
 import { randomUUID } from 'node:crypto';
 import { QueryTypes, type Sequelize } from 'sequelize';
 import type { SignedInAccount } from '../accounts/account.ts';
+import type { CertificateAct } from '../certificates/certificate-act.ts';
+import { CertificateViewsService } from '../certificates/certificate-views.service.ts';
+import { WithdrawalsService } from '../certificates/withdrawals.service.ts';
 import { ClassesService } from '../classes/classes.service.ts';
 import { JobsService } from '../jobs/jobs.service.ts';
 import { LessonsService } from '../lessons/lessons.service.ts';
@@ -58,7 +61,28 @@ export class HistoryPlayer {
         return;
       case 'paper':
         await this.sit(accountId, happening);
+        return;
+      case 'lose certificate':
+        await this.withdraw(accountId, happening);
     }
+  }
+
+  private async withdraw(
+    accountId: string,
+    { who, by, reason }: Extract<Happening, { does: 'lose certificate' }>,
+  ): Promise<void> {
+    const { certificates } = await this.service(CertificateViewsService).ofAccount(accountId);
+    const [certificate] = certificates;
+    const [actor] = await this.rows<CertificateAct['actor']>(
+      `SELECT id, given_name AS "givenName", family_name AS "familyName"
+         FROM accounts WHERE email = $1`,
+      [by],
+    );
+    if (!certificate || !actor) throw new Error(`${by} cannot withdraw what ${who} holds.`);
+    await this.service(WithdrawalsService).withdraw({
+      ...{ actor, reason, certificateId: certificate.id },
+      address: '',
+    });
   }
 
   private async finish(accountId: string, sheet: string): Promise<void> {

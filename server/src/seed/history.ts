@@ -12,6 +12,8 @@ export type Happening = {
   | { readonly does: 'worksheet'; readonly number: string; readonly slipped: readonly string[][] }
   /** `slipped`: whole questions answered wrongly, by their place on the paper from the end. */
   | { readonly does: 'paper'; readonly wrongFromEnd: number }
+  /** What somebody of the school, by e-mail, does to the person's certificate. */
+  | { readonly does: 'lose certificate'; readonly by: string; readonly reason: string }
 );
 
 const home = (name: string) => `${name}@people.example`;
@@ -55,6 +57,13 @@ const oneWay = [['a', 'd'], [], []];
 const happenings: Happening[] = [
   paper('2023-10-14T09:00:00Z', 'anselm.tau', 0),
   paper('2026-02-10T10:00:00Z', 'emrys.quillfeather', 1),
+  {
+    at: '2026-05-22T09:30:00Z',
+    who: home('emrys.quillfeather'),
+    does: 'lose certificate',
+    by: 'desmond.feaver@harrow-quay.example',
+    reason: 'The paper was sat by somebody else, as both have told the school.',
+  },
   ...[
     'ifeoma.castellan',
     'hemi.tawhiri-boyd',
@@ -103,7 +112,7 @@ const happenings: Happening[] = [
   finish('2026-11-25T18:30:00Z', 'oluwaseun.brack', '1.4'),
   paper('2026-10-27T10:00:00Z', 'bartholomew.quist', 1),
   paper('2026-10-27T10:05:00Z', 'priya.vandermeer', 0),
-  paper('2026-11-24T10:00:00Z', 'zoe.nguyen-lukasiewicz', 4),
+  paper('2026-11-24T10:00:00Z', 'zoe.nguyen-lukasiewicz', 3),
 ];
 
 export const history: readonly Happening[] = happenings.toSorted((a, b) =>

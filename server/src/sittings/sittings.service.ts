@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { SignedInAccount } from '../accounts/account.ts';
+import { requirePrintableName } from '../certificates/printable-name.ts';
 import { Transactions } from '../database/transactions.ts';
 import { NotFound } from '../problems/common.errors.ts';
 import { ClosingService } from './closing.service.ts';
@@ -35,6 +36,7 @@ export class SittingsService {
   }
 
   async start(account: SignedInAccount, input: StartSitting): Promise<SittingView> {
+    await requirePrintableName(input.givenName, input.familyName);
     return this.view(account, await this.starting.start(account, input));
   }
 
