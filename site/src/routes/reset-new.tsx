@@ -61,7 +61,7 @@ function ChoosePassphrase() {
   }
   return (
     <Form
-      label="New passphrase"
+      label="Choose the new passphrase"
       problem={reset.error}
       onSubmit={({ password = '' }) => reset.mutate(password)}
     >
