@@ -27,6 +27,8 @@ export default {
     '.': { entry: [], ignoreDependencies: ['dependency-cruiser'] },
     assessments: {
       entry: ['src/**/*.spec.ts', 'test/**/*.spec.ts'],
+      // GNU units, a package of the operating system.
+      ignoreBinaries: ['units'],
       project: ['src/**/*.ts', 'test/**/*.ts'],
     },
     certificates: {

@@ -8,7 +8,9 @@ import {
 } from '../src/questions/compiled.ts';
 import { drawQuestion } from '../src/questions/draw.ts';
 import { markQuestion } from '../src/questions/mark.ts';
+import { fillIn } from '../src/questions/placeholders.ts';
 import { isTooNear } from '../src/questions/tolerance.ts';
+import { type Answers } from '../src/questions/types.ts';
 import { fromSi } from '../src/questions/units.ts';
 import { answerRight, choose, typeSi } from './answering.ts';
 import { openBank, seedNumber } from './bank-files.ts';
@@ -73,15 +75,30 @@ function marksAsWritten(question: Compiled, drawn: Drawn): void {
   expect(marked.marks).toBe(question.meta.marks);
   expect(marked.parts.map((part) => part.verdict)).toEqual(question.parts.map(() => 'right'));
   for (const part of question.parts) {
-    const held = drawn.parts[part.id];
-    for (const made of held?.slips ?? []) {
+    const slips = drawn.parts[part.id]?.slips ?? [];
+    const says = slips.map(({ slip }) => question.slips[slip]?.say ?? '');
+    for (const made of slips) {
       const answer = 'id' in made ? choose(made.id) : typeSi(question, part, made.value);
-      const slipped = markQuestion(question, drawn, { ...right, [part.id]: answer });
-      const found = slipped.parts.find(({ id }) => id === part.id);
-      expect(found?.verdict, `${part.id} slip ${made.slip + 1}`).toBe('slip');
-      expect(found?.remarks.length).toBeGreaterThan(0);
+      const words = wordsOn(question, drawn, { part, answers: { ...right, [part.id]: answer } });
+      // Two slips may come to one value; the words of either teach.
+      const fitting = says.map((say) => fillIn(say, question.givens, drawn.values));
+      expect(
+        fitting.some((say) => words.includes(say)),
+        `${part.id}: ${words.join()}`,
+      ).toBe(true);
     }
   }
+}
+
+/** What the marker writes beside a part that was taken for a slip. */
+function wordsOn(
+  question: Compiled,
+  drawn: Drawn,
+  { part, answers }: { part: Part; answers: Answers },
+): string[] {
+  const marked = markQuestion(question, drawn, answers).parts.find(({ id }) => id === part.id);
+  expect(marked?.verdict).toBe('slip');
+  return (marked?.remarks ?? []).map(({ text }) => text);
 }
 
 describe.each(bank.map((question) => [question.meta.slug, question] as const))(

@@ -154,6 +154,19 @@ describe('rating', () => {
 });
 
 describe('stock', () => {
+  it('has the blade and bolt-down fuses in one row', () => {
+    const ratings = readTable('fuse-ratings.csv').flatMap(({ ratings: row }) =>
+      (row ?? '').split(' ').map(Number),
+    );
+    expect(FUSE_RATINGS_A).toEqual([...new Set(ratings)].sort((a, b) => a - b));
+  });
+
+  it.each(readTable('fuse-choice.csv'))('fuses a continuous $load_A A at $next_A A', (row) => {
+    const least = numberIn(row, 'load_A') / 0.8;
+    expect(least).toBeCloseTo(numberIn(row, 'over_0_8_A'), 9);
+    expect(nextSize(least, FUSE_RATINGS_A)).toBe(numberIn(row, 'next_A'));
+  });
+
   it('goes up to the next size and stays on one that fits', () => {
     expect(nextSize(7.02, CABLE_AREAS_MM2)).toBe(10);
     expect(nextSize(10, CABLE_AREAS_MM2)).toBe(10);

@@ -122,6 +122,22 @@ describe('the marker’s order', () => {
     expect(partA('481')).toMatchObject({ verdict: 'power-of-ten' });
   });
 
+  it('knows a key that was rounded too early on the way', () => {
+    for (let n = 0; n < 300; n += 1) {
+      const paper = drawQuestion(chart, seedNumber(n)) as Drawn;
+      const { load = 0, pair = 0 } = paper.values;
+      const rounded = Number(pair.toPrecision(2)) * load;
+      if (Math.abs(rounded / (pair * load) - 1) < 0.015) continue;
+      const answer = typed(String(Number(rounded.toPrecision(4))), 'V');
+      const marked = markQuestion(chart, paper, { b: answer });
+      expect(marked.parts[1]).toMatchObject({ verdict: 'slip', marks: 1 });
+      expect(marked.trace[1]?.rule).toBe('rounded-early');
+      expect(marked.summary).toContain('You rounded too early.');
+      return;
+    }
+    throw new Error('No draw shows it.');
+  });
+
   it('carries a value on in the unit it was given in', () => {
     const marked = mark({ a: typed('48.1', 'Ω'), b: typed('673.4', 'V') });
     expect(marked.parts.map((part) => part.verdict).slice(0, 2)).toEqual([
@@ -314,7 +330,7 @@ describe('a draw', () => {
     const ranks = new Map<number, number>();
     const ids = new Set<string>();
     for (let n = 0; n < 400; n += 1) {
-      const held = (drawQuestion(question, seedNumber(n)) as Drawn).parts.e;
+      const held = (drawQuestion(question, seedNumber(n)) as Drawn).parts.f;
       if (held?.kind !== 'options') throw new Error('not a choice');
       const place = held.options.findIndex(({ id }) => id === held.right);
       const rank = held.options.filter(({ id }) => id < held.right).length;

@@ -3,9 +3,6 @@ import { OutOfRange, within } from './out-of-range.ts';
 /** Annealed copper at 20 °C, Ω·mm²/m: the 1/58 of IEC 60028 (from memory). */
 export const COPPER_OHM_MM2_PER_M = 1 / 58;
 
-/** The rule of thumb of the course, 1/58 rounded up, Ω·mm²/m (common practice, no source). */
-export const COPPER_RULE_OF_THUMB_OHM_MM2_PER_M = 0.0175;
-
 /** Temperature coefficient of copper's resistance at 20 °C, 1/K (IEC 60028, from memory). */
 const COPPER_ALPHA_PER_K = 0.00393;
 

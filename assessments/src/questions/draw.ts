@@ -21,7 +21,7 @@ import { type CompiledQuestion, type CurveView, type DrawnQuestion } from './typ
 import { toSi } from './units.ts';
 
 /** A question that gives no draw; the message names the question and what is wrong. */
-export class DrawFailed extends Error {
+class DrawFailed extends Error {
   constructor(slug: string, why: string) {
     super(`Question ${slug} cannot be drawn: ${why}`);
     this.name = 'DrawFailed';

@@ -79,10 +79,10 @@ describe('options', () => {
 
   it('each have their reason when they are wrong', () => {
     for (const [id, text] of [
-      ['e', 'The battery is faulty'],
-      ['e', 'The charger is too small'],
-      ['f', 'Raise the tail'],
-      ['b', 'Float'],
+      ['f', 'The battery is faulty'],
+      ['f', 'The charger is too small'],
+      ['g', 'Raise the tail'],
+      ['c', 'Float'],
     ] as const) {
       const marked = markQuestion(question, drawn, { [id]: choose(pick(id, text)) });
       const part = marked.parts.find((one) => one.id === id);

@@ -108,7 +108,9 @@ function ownFormula(page: Page, { finding, part }: Judged, step: Step): Expr | n
     const slip = page.question.slips[finding.slip];
     return slip?.makes.find((made) => made.step === part.step)?.expr ?? null;
   }
-  if (finding.verdict === 'wrong' || step.how.kind !== 'sum') return null;
+  // With rounded steps in between, own figures are not known.
+  const isUnknown = finding.verdict === 'wrong' || finding.rule === 'rounded-early';
+  if (isUnknown || step.how.kind !== 'sum') return null;
   return step.how.expr;
 }
 

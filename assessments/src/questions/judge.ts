@@ -1,7 +1,7 @@
 import { type Compiled, type DrawnPart, type QuantityPart } from './compiled.ts';
 import { toShortFigures } from './format.ts';
 import { type TypedQuantity } from './read-answer.ts';
-import { slipValues } from './predictions.ts';
+import { slipValues, workRounded } from './predictions.ts';
 import { isTooNear, isWithin, keyOf, rangeOf, slipRangeOf } from './tolerance.ts';
 import { type Verdict } from './types.ts';
 import { toSi, type Unit } from './units.ts';
@@ -28,6 +28,8 @@ export interface QuantityCase {
   typed: TypedQuantity;
   /** All values recomputed on the trainee's own earlier ones; null when there are none. */
   own: Map<string, number> | null;
+  /** All values as drawn, SI. */
+  values: Readonly<Record<string, number>>;
   /** Whether one of those earlier answers was itself not right. */
   ownIsOff: boolean;
 }
@@ -35,7 +37,7 @@ export interface QuantityCase {
 type Rule = (it: QuantityCase) => Finding | null;
 
 /** The marker's order. The first rule that applies decides. */
-const RULES: readonly Rule[] = [right, carried, slipped, wrongUnit, powerOfTen];
+const RULES: readonly Rule[] = [right, carried, slipped, roundedEarly, wrongUnit, powerOfTen];
 
 export function judgeQuantity(it: QuantityCase): Finding {
   for (const rule of RULES) {
@@ -105,6 +107,22 @@ function slipped(it: QuantityCase): Finding | null {
     rule: 'slip',
     slip: found.slip,
     detail: `${figures(it)} is what slip ${found.slip + 1} gives (${toShortFigures(found.value, 6)} SI)`,
+  };
+}
+
+/** Figures left after rounding too early. */
+const TOO_FEW = 2;
+
+/** The key as it comes out when every step before it was rounded to two figures. */
+function roundedEarly(it: QuantityCase): Finding | null {
+  const { question, part } = it;
+  const value = workRounded(question, part.step, { values: it.values, figures: TOO_FEW });
+  if (value === null || !isWithin(valueOf(it), slipRangeOf(part, value))) return null;
+  return {
+    verdict: 'slip',
+    marks: half(part),
+    rule: 'rounded-early',
+    detail: `${figures(it)} is what steps rounded to ${TOO_FEW} figures give`,
   };
 }
 

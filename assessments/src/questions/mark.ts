@@ -119,6 +119,7 @@ function markQuantity(
     part,
     drawn: held,
     typed,
+    values: desk.drawn.values,
     own: own?.values ?? null,
     ownIsOff: own?.isOff ?? false,
   });

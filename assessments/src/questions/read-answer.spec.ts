@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import * as forms from '../../test/typed-forms.ts';
+import { workingTimeMs } from '../../test/working-time.ts';
 import { readAnswer } from './read-answer.ts';
 import { type PartView, type RawAnswer } from './types.ts';
 
@@ -125,9 +126,9 @@ describe('reading an answer', () => {
       '\u0000',
       '1e-99999',
     ]) {
-      const started = performance.now();
-      expect(readAnswer(part('V'), typed(text)).state).not.toBe('understood');
-      expect(performance.now() - started).toBeLessThan(50);
+      const readIt = (): void =>
+        expect(readAnswer(part('V'), typed(text)).state).not.toBe('understood');
+      expect(workingTimeMs(readIt)).toBeLessThan(50);
     }
   });
 });

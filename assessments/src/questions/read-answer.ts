@@ -33,7 +33,7 @@ export function readAnswer(part: PartView, answer: RawAnswer): Reading {
 }
 
 /** A typed quantity as it is shown back: "48.1 mΩ". */
-export function showTyped({ figure, unit }: TypedQuantity): string {
+function showTyped({ figure, unit }: TypedQuantity): string {
   const shown = toShortFigures(figure, SHOWN_FIGURES);
   return unit.symbol === '' ? shown : `${shown} ${unit.symbol}`;
 }

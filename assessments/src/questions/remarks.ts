@@ -52,9 +52,11 @@ function partsUsed({ own }: Judged): string {
   return (own?.parts ?? []).map((id) => `(${id})`).join(' and ');
 }
 
+const ROUNDED_EARLY = 'rounded too early: carry three figures or more until the last line';
+
 function onSlip({ question }: Page, { finding, part }: Judged): Remark[] {
   const slip = question.slips[finding.slip ?? -1];
-  if (!slip) return [];
+  if (!slip) return withHalf(finding.marks, part, lost(null, ROUNDED_EARLY));
   const remarks = [lost(null, slip.say)];
   // A size that is unsafe says so, whichever way it was reached.
   if (part.carry === 'never') remarks.push(note(part.because));

@@ -10,13 +10,15 @@ export function summarise(question: Compiled, judged: readonly Judged[]): string
   if (count('right') === judged.length) return 'All right, every part of it.';
   if (count('blank') === judged.length) return 'Nothing was answered.';
   const slips = [...new Set(judged.flatMap(({ finding }) => finding.slip ?? []))];
+  const isRounded = judged.some(({ finding }) => finding.rule === 'rounded-early');
   const carriedOn = count('carried-forward') > 0 || count('not-carried') > 0;
   const off = judged.filter(({ finding }) =>
     ['wrong', 'wrong-unit', 'power-of-ten', 'not-understood'].includes(finding.verdict),
   ).length;
   return [
-    headline({ slips: slips.length, off, carriedOn, blank: count('blank') }),
+    headline({ slips: slips.length + Number(isRounded), off, carriedOn, blank: count('blank') }),
     ...slips.slice(0, 2).map((slip) => question.slips[slip]?.is ?? ''),
+    isRounded ? 'You rounded too early.' : '',
     off === 0 && carriedOn ? 'Your method after that was sound.' : '',
   ]
     .filter((sentence) => sentence !== '')

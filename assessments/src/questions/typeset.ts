@@ -27,7 +27,7 @@ export const words = (text: string): Token => ({ kind: 'text', text });
 const EQUALS = operator('=');
 
 /** Figure and unit of a value; a negative one stands in brackets inside a sum. */
-export function quantityTokens(si: number, unit: Unit, figures: number): Token[] {
+function quantityTokens(si: number, unit: Unit, figures: number): Token[] {
   const number: Token = { kind: 'number', text: toShortFigures(fromSi(si, unit), figures) };
   return unit.symbol === '' ? [number] : [number, { kind: 'unit', text: unit.symbol }];
 }

@@ -1,7 +1,7 @@
 import { type Dimension, NO_DIMENSION, type Unit, unitsSpelt } from './units.ts';
 
 /** A spelling that is no unit of the table. */
-export class UnknownUnit extends Error {
+class UnknownUnit extends Error {
   constructor(spelling: string) {
     super(`"${spelling}" is not a unit of the table; write it as in mΩ, mm², Ah, °C, Ω·mm²/m.`);
     this.name = 'UnknownUnit';
