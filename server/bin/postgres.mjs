@@ -33,7 +33,7 @@ async function stopCluster({ programs, account, folder, dataFolder, throwaway })
   const mode = throwaway ? 'immediate' : 'fast';
   const args = ['stop', '-D', dataFolder, '-m', mode, '-w', '-t', '60'];
   if (findPostmaster(dataFolder)) {
-    await run(join(programs, 'pg_ctl'), args, { ...account, cwd: '/' });
+    await run(join(programs, 'pg_ctl'), args, { ...account, cwd: '/', detached: true });
   }
   if (throwaway) rmSync(folder, { recursive: true, force: true });
 }

@@ -35,7 +35,7 @@ async function aptGet(administrator, args) {
   const [command, ...rest] = [...administrator, ...environment, 'apt-get', ...lockWait, ...args];
   const deadline = Date.now() + lockWaitSeconds * 1000;
   for (;;) {
-    const result = await run(command, rest, { cwd: '/' });
+    const result = await run(command, rest, { cwd: '/', detached: true });
     if (result.code === 0) return;
     if (!listsLocked.test(result.stderr) || Date.now() > deadline) {
       throw new StepFailed(`apt-get ${args.join(' ')} failed:\n${result.stderr || result.stdout}`);

@@ -43,7 +43,11 @@ export async function initialiseCluster({ programs, account, clusterFolder, pass
     ...(throwaway ? ['--no-sync'] : []),
   ];
   try {
-    await runOrFail(join(programs, 'initdb'), [...args, ...locale], { ...account, cwd: '/' });
+    await runOrFail(join(programs, 'initdb'), [...args, ...locale], {
+      ...account,
+      cwd: '/',
+      detached: true,
+    });
   } finally {
     rmSync(passwordFile, { force: true });
   }
@@ -106,9 +110,11 @@ export async function startPostmaster({
     const { code } = await run(join(programs, 'pg_ctl'), ['start', '-D', dataFolder, ...options], {
       ...account,
       cwd: '/',
-      detach: true,
+      detached: true,
+      withoutPipes: true,
     });
     if (code === 0) return port;
+    if (findPostmaster(dataFolder)) break;
     // Somebody may have taken the port between the look and the start.
     remembered = undefined;
   }

@@ -7,13 +7,16 @@ export class StepFailed extends Error {}
 /**
  * Runs a program to its end and gives back what it wrote.
  *
- * @param options - `input` goes to its standard input; `detach` gives it no pipes at all,
- *   for programs that leave a daemon behind which would hold them open.
+ * @param options - `input` goes to its standard input; `withoutPipes` is for programs that
+ *   leave a daemon behind, which would hold the pipes open. The rest is what `spawn` takes:
+ *   `detached` keeps Ctrl-C in the terminal away from what must not be cut short.
  */
 export function run(command, args, options = {}) {
-  const { input, detach = false, ...spawnOptions } = options;
+  const { input, withoutPipes = false, ...spawnOptions } = options;
   return new Promise((resolve) => {
-    const stdio = detach ? 'ignore' : [input === undefined ? 'ignore' : 'pipe', 'pipe', 'pipe'];
+    const stdio = withoutPipes
+      ? 'ignore'
+      : [input === undefined ? 'ignore' : 'pipe', 'pipe', 'pipe'];
     const child = spawn(command, args, { ...spawnOptions, stdio });
     let stdout = '';
     let stderr = '';
