@@ -18,6 +18,7 @@ import { createTestDatabase, type TestDatabase } from '../../test/test-database.
 import { compileContent } from './compile-content.ts';
 import type { CompiledLesson } from './compiled-lesson.ts';
 import { ProblemList } from './problem-list.ts';
+import { publish } from './publish.ts';
 import { readSources } from './read-sources.ts';
 
 const LESSON = 'lessons/hq-dc2/runs/01-the-run.md';
@@ -355,6 +356,13 @@ describe('publishing', () => {
     );
     const { rows } = await client.query('SELECT slug, revision, valid_years FROM schemes');
     expect(rows).toEqual([{ slug: 'dc-installer', revision: 'A', valid_years: 3 }]);
+  });
+
+  it('says which folder is not there', async () => {
+    const folders = { lessons: '/nonexistent/lessons', assessments: '/nonexistent' };
+    await expect(publish(database.ownerUrl, folders)).rejects.toThrow(
+      '/nonexistent/lessons:1: there is no such folder',
+    );
   });
 
   it('comes to one result when two run at once', async () => {

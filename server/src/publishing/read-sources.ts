@@ -1,5 +1,6 @@
 import { readdir, readFile } from 'node:fs/promises';
 import { dirname, join, relative } from 'node:path';
+import { ContentNotInOrder } from './problem-list.ts';
 
 export interface SourceFile {
   /** As an author would type it, relative to where publishing was started. */
@@ -28,7 +29,12 @@ export interface SourceFolders {
 }
 
 async function filesUnder(folder: string): Promise<string[]> {
-  const entries = await readdir(folder, { recursive: true, withFileTypes: true });
+  const entries = await readdir(folder, { recursive: true, withFileTypes: true }).catch(
+    (error: unknown) => {
+      if ((error as { code?: unknown }).code !== 'ENOENT') throw error;
+      throw new ContentNotInOrder([{ path: folder, line: 1, message: 'there is no such folder' }]);
+    },
+  );
   return entries
     .filter((entry) => entry.isFile())
     .map((entry) => join(entry.parentPath, entry.name))
@@ -54,7 +60,7 @@ export async function readSources(folders: SourceFolders): Promise<Sources> {
   const lessonFiles = (await filesUnder(folders.lessons)).filter((file) => file.endsWith('.md'));
   const isCourse = (file: string) => file.endsWith('course.md');
   const sheets = async (folder: string) => {
-    const files = await filesUnder(join(folders.assessments, folder)).catch(() => []);
+    const files = await filesUnder(join(folders.assessments, folder));
     return Promise.all(files.filter((file) => file.endsWith('.md')).map(read));
   };
   return {

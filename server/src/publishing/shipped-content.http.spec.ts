@@ -1,0 +1,93 @@
+import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
+import { keyAnswers } from '@ferrule/assessments';
+import { fileURLToPath } from 'node:url';
+import { createAccount } from '../../test/factories/account.ts';
+import { saveItem, startWorksheet, handInWorksheet } from '../../test/factories/worksheet.ts';
+import { signIn } from '../../test/sign-in.ts';
+import { createTestApp, type TestApp } from '../../test/test-app.ts';
+import type { CourseMap } from '../courses/courses.schemas.ts';
+import { QuestionsService } from '../questions/questions.service.ts';
+import type { KeptItem } from '../worksheets/worksheet-attempt.ts';
+import type { CompiledCourse } from './compiled-course.ts';
+import type { CompiledLesson } from './compiled-lesson.ts';
+import { publish } from './publish.ts';
+import { PublishedContentService } from './published-content.service.ts';
+
+const inCheckout = (folder: string) =>
+  fileURLToPath(new URL(`../../../${folder}`, import.meta.url));
+const folders = { lessons: inCheckout('lessons'), assessments: inCheckout('assessments') };
+
+let test: TestApp;
+let lessons: CompiledLesson[];
+let course: CompiledCourse | undefined;
+beforeAll(async () => {
+  test = await createTestApp();
+  await publish(test.database.ownerUrl, folders);
+  const content = test.app.get(PublishedContentService, { strict: false });
+  lessons = (await content.all('lesson')).map((lesson) => lesson.content);
+  course = (await content.all('course'))[0]?.content;
+});
+afterAll(() => test.close());
+
+describe('the lessons and questions that come with the product', () => {
+  it('are in order, and publishing them again changes nothing', async () => {
+    expect((await publish(test.database.ownerUrl, folders)).published).toEqual([]);
+  });
+
+  it('cover the five sheets of the course', () => {
+    const numbers = lessons.map(({ number }) => number).sort();
+    expect(numbers).toEqual(['1.4', '3.4', '4.1', '5.6', '6.7']);
+    expect(course?.units.flatMap(({ sheets }) => sheets).sort()).toEqual(numbers);
+  });
+
+  it('give each sheet a drawing, a worked example, a question to try and its cautions', () => {
+    for (const lesson of lessons) {
+      const holds = {
+        drawing: Object.keys(lesson.figures).length > 0,
+        worked: Object.keys(lesson.worked).length > 0,
+        tries: lesson.tries.length > 0,
+        cautions: lesson.cautions.length > 0 && lesson.body.includes(':::hazard'),
+        localCode: lesson.body.includes(':::local'),
+      };
+      expect({ number: lesson.number, ...holds }).toEqual({
+        number: lesson.number,
+        ...{ drawing: true, worked: true, tries: true, cautions: true, localCode: true },
+      });
+    }
+  });
+
+  it('draw each figure for a narrow screen as well', () => {
+    const wideOnly = lessons.flatMap(({ number, figures }) =>
+      Object.entries(figures)
+        .filter(([, { narrow }]) => narrow === null)
+        .map(([name]) => `${number} ${name}`),
+    );
+    expect(wideOnly).toEqual([]);
+  });
+
+  it('light every lamp of the map when each worksheet is answered right', async () => {
+    const trainee = await signIn(test.app, (await createAccount(test.app)).id);
+    const numbers = course?.units.flatMap(({ worksheet }) => worksheet?.number ?? []) ?? [];
+    expect(numbers.length).toBeGreaterThan(0);
+    for (const number of numbers) {
+      const { id } = await startWorksheet(trainee, number);
+      const [row] = await test.query<{ items: KeptItem[] }>(
+        'SELECT items FROM worksheet_attempts WHERE id = $1',
+        [id],
+      );
+      for (const { key, revisionId, drawn } of row?.items ?? []) {
+        const { question } = await test.app
+          .get(QuestionsService, { strict: false })
+          .byRevision(revisionId);
+        await saveItem(trainee, { id, key }, keyAnswers(question, drawn, []));
+      }
+      const { status, body } = await handInWorksheet(trainee, id);
+      expect({ number, status, percent: body.percent }).toEqual({
+        ...{ number, status: 200, percent: 100 },
+      });
+    }
+    const map = (await trainee.call('GET', '/api/course')).body as CourseMap;
+    const lamps = map.units.flatMap(({ worksheet }) => worksheet?.lit ?? []);
+    expect(lamps).toEqual(numbers.map(() => true));
+  });
+});
