@@ -30,12 +30,12 @@ export function Component() {
       <PageTitle>{`Certificate ${certificate.number}`}</PageTitle>
       <Sheet width="wide" flat>
         <SheetHead
-          kicker={certificate.scheme.title}
-          title={
+          kicker={
             <>
-              Certificate <span className="mono">{certificate.number}</span>
+              Certificate <b className="mono">{certificate.number}</b>
             </>
           }
+          title={certificate.scheme.title}
         />
         <div className="own-certificate">
           <div>

@@ -5,6 +5,7 @@ import { cacheOf, type LoaderArgs, requireSession, sessionQuery } from '../api/s
 import '../features/papers/papers.css';
 import { paperQuery, type PaperView } from '../features/papers/queries.ts';
 import { StartForm } from '../features/papers/start-form.tsx';
+import { upperFirst } from '../features/sittings/review-words.ts';
 import { sayDate, sayMoment } from '../ui/dates.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
@@ -29,8 +30,8 @@ export function Component() {
           standfirst={`Passing it certifies you as ${paper.scheme.title}, for ${paper.scheme.validYears} years.`}
           titleBlock={<PaperBlock paper={paper} />}
         />
-        <div className="columns two">
-          <section className="section">
+        <div className="columns two paper-columns">
+          <section>
             <Standing paper={paper} />
             {paper.standing.state === 'open' && session && (
               <StartForm
@@ -40,7 +41,7 @@ export function Component() {
               />
             )}
           </section>
-          <section className="section">
+          <section>
             <PaperFacts paper={paper} />
           </section>
         </div>
@@ -55,11 +56,11 @@ function PaperBlock({ paper }: { paper: PaperView }) {
       cells={[
         { label: 'Paper no.', value: paper.number, span: 2, kind: 'strong' },
         { label: 'Questions', value: String(paper.questions), span: 2 },
-        { label: 'Minutes', value: String(paper.minutes), span: 2, kind: 'strong' },
+        { label: 'Minutes', value: String(Math.ceil(paper.minutes)), span: 2, kind: 'strong' },
         { label: 'Marks', value: paper.marks === null ? 'varies' : String(paper.marks), span: 2 },
         { label: 'To pass', value: `${paper.passPercent} %`, span: 2 },
         { label: 'Wait between sittings', value: `${paper.waitDays} days`, span: 2 },
-        { label: 'How it is sat', value: paper.sat, span: 6 },
+        { label: 'How it is sat', value: upperFirst(paper.sat), span: 6 },
       ]}
     />
   );
@@ -146,7 +147,7 @@ function PaperFacts({ paper }: { paper: PaperView }) {
         ))}
       </ul>
       {paper.extraTimePercent > 0 && (
-        <p>Your {paper.minutes} minutes include the extra time approved for you.</p>
+        <p>Your {Math.ceil(paper.minutes)} minutes include the extra time approved for you.</p>
       )}
       <h2>If you do not agree with the result</h2>
       <p>{paper.appeal}</p>

@@ -65,7 +65,7 @@ function Result({ result }: { result: ResultView }) {
   return (
     <>
       <PageTitle>{result.passed ? 'Passed' : 'Not passed'}</PageTitle>
-      <Sheet>
+      <Sheet className="result-page">
         <LateAnswers />
         <ResultVerdict result={result} />
         <ResultFacts result={result} />

@@ -3,7 +3,7 @@ import { HandIn } from '../features/sittings/hand-in.tsx';
 import { PaperBar } from '../features/sittings/paper-bar.tsx';
 import { type SittingView } from '../features/sittings/queries.ts';
 import { ReviewTable } from '../features/sittings/review-table.tsx';
-import { sayStandings } from '../features/sittings/review-words.ts';
+import { sayStandings, upperFirst } from '../features/sittings/review-words.ts';
 import { useSittingDesk } from '../features/sittings/sitting-desk.ts';
 import { BareHead } from '../features/sittings/sitting-head.tsx';
 import { sayMoment, sayTimeOfDay } from '../ui/dates.ts';
@@ -62,7 +62,7 @@ function ReviewBlock({ sitting }: { sitting: SittingView }) {
         { label: 'Paper no.', value: sitting.paper.number, span: 2, kind: 'strong' },
         { label: 'Questions', value: String(sitting.items.length), span: 2 },
         { label: 'Marks', value: String(sitting.marks), span: 2, kind: 'strong' },
-        { label: 'How it is sat', value: sitting.paper.sat, span: 4 },
+        { label: 'How it is sat', value: upperFirst(sitting.paper.sat), span: 4 },
         {
           label: 'Time allowed',
           value: <Quantity value={Math.ceil(sitting.minutes)} unit="min" />,

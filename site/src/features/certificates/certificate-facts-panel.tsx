@@ -4,6 +4,7 @@ import { sayDate, sayDateInFull, sayMoment } from '../../ui/dates.ts';
 
 /** What the register says of the certificate, how to take it along, and what has happened to it. */
 export function CertificateFactsPanel({ certificate }: { certificate: CertificateView }) {
+  const isValid = certificate.state === 'valid';
   return (
     <aside aria-label="About this certificate">
       <section>
@@ -15,11 +16,18 @@ export function CertificateFactsPanel({ certificate }: { certificate: Certificat
         <Download certificate={certificate} />
       </section>
       <section>
-        <h2>Show it to an employer</h2>
-        <p>
-          Give them the PDF, or the number with your family name. Either is checked at{' '}
-          <a href={certificate.registerUrl}>its register page</a>, without an account.
-        </p>
+        <h2>{isValid ? 'Show it to an employer' : 'What an employer sees'}</h2>
+        {isValid ? (
+          <p>
+            Give them the PDF, or the number with your family name. Either is checked at{' '}
+            <a href={certificate.registerUrl}>its register page</a>, without an account.
+          </p>
+        ) : (
+          <p>
+            The check of the file and of the number says the same as here:{' '}
+            <a href={certificate.registerUrl}>its register page</a>.
+          </p>
+        )}
       </section>
       {certificate.history.length > 0 && <History history={certificate.history} />}
     </aside>
@@ -65,7 +73,7 @@ function Download({ certificate }: { certificate: CertificateView }) {
   return (
     <>
       <div className="actions">
-        <Button size="3" asChild>
+        <Button size="3" variant={certificate.state === 'valid' ? 'solid' : 'outline'} asChild>
           <a href={`/api/certificates/${certificate.id}/file`} download>
             Download the PDF
           </a>

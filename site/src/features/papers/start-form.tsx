@@ -61,12 +61,12 @@ export function StartForm({ paper, ...account }: StartFormProps) {
       />
       <div className="actions">
         <Button size="3" type="submit" disabled={!agreed || starting.isPending}>
-          Start the paper: {paper.minutes} minutes
+          Start the paper: {Math.ceil(paper.minutes)} minutes
         </Button>
       </div>
       <p className="fine">
-        The clock starts at once and runs on the school’s server. Each answer is kept as you give
-        it.
+        {!agreed && 'The paper can be started once you have agreed. '}The clock starts at once and
+        runs on the school’s server. Each answer is kept as you give it.
       </p>
     </Form>
   );

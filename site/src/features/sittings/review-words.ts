@@ -4,6 +4,9 @@ import { type SittingItem } from './queries.ts';
 
 const words = 'No One Two Three Four Five Six Seven Eight Nine Ten Eleven Twelve'.split(' ');
 const sayNumber = (count: number) => words[count] ?? String(count);
+/** "Unsupervised, ...": begins a cell or a sentence. */
+export const upperFirst = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
+
 const lower = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);
 const are = (count: number) => (count === 1 ? 'is' : 'are');
 
