@@ -5,7 +5,12 @@ import { parseUnit } from './unit-expression.ts';
 import { type Dimension, sameDimension, type Unit } from './units.ts';
 
 /** A trainee's own answer to a step, and whether it was anything but right. */
-export type OwnValues = Map<string, { value: number; part: string; isOff: boolean }>;
+interface OwnValue {
+  value: number;
+  part: string;
+  isOff: boolean;
+}
+export type OwnValues = Map<string, OwnValue>;
 
 /** Everything recomputed on a trainee's own earlier values. */
 export interface OwnAccount {
@@ -53,8 +58,6 @@ function usedOwn(question: Compiled, { step, options, own }: Wanted): [string, O
   const needed = leansOn(question, step === undefined ? conditions : [step], stop);
   return [...own].filter(([name]) => needed.has(name) && name !== step);
 }
-
-type OwnValue = { value: number; part: string; isOff: boolean };
 
 /** A value a million times out could not be meant. */
 const FURTHEST = 1e6;
