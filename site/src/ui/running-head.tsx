@@ -1,6 +1,5 @@
 import { type ReactNode, useState } from 'react';
 import { NavLink, useLocation } from 'react-router-dom';
-import { TickSign } from './symbols/signs.tsx';
 import { Wordmark } from './wordmark.tsx';
 
 interface RunningHeadProps {
@@ -45,14 +44,5 @@ export function RunningHead({ links = [], end, own }: RunningHeadProps) {
         )}
       </div>
     </header>
-  );
-}
-
-export function SavedState({ children = 'Saved' }: { children?: string }) {
-  return (
-    <span className="saved-state">
-      <TickSign />
-      <span>{children}</span>
-    </span>
   );
 }

@@ -13,10 +13,6 @@ export function Conductor({ d, live = false }: { d: string; live?: boolean }) {
   return <path className={live ? 'live' : 'conductor'} d={d} />;
 }
 
-export function Joint({ x, y }: At) {
-  return <circle className="solid" cx={x} cy={y} r="3.4" />;
-}
-
 export function TerminalPoint({ x, y }: At) {
   return <circle className="part" cx={x} cy={y} r="4" />;
 }
@@ -64,17 +60,6 @@ export function Battery({ x, y, upright = false }: At & Upright) {
     <g transform={`translate(${x} ${y})${upright ? '' : ' rotate(-90)'}`}>
       <path className="conductor" d="M-16 -9H16M-16 5H16" />
       <path className="heavy" d="M-8 -2H8M-8 12H8" />
-    </g>
-  );
-}
-
-/** A switch that isolates; the blade stands open or lies closed. */
-export function Isolator({ x, y, open }: At & { open: boolean }) {
-  return (
-    <g transform={`translate(${x} ${y})`}>
-      <path className="conductor" d={open ? 'M-20 0 18 -16.8' : 'M-20 0H20'} />
-      <circle className="part" cx="-20" r="4" />
-      <circle className="part" cx="20" r="4" />
     </g>
   );
 }
