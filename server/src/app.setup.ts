@@ -85,7 +85,9 @@ export async function setUpApp(app: NestFastifyApplication, config: Config): Pro
   fastify.addHook('onRequest', async (request, reply) => {
     refuseCrossSite(request, config.PUBLIC_URL);
     refuseOtherMedia(request);
-    if (request.url.startsWith('/api/')) void reply.header('cache-control', 'no-store');
+    if (request.url.startsWith('/api/')) {
+      void reply.header('cache-control', 'no-store').header('x-robots-tag', 'noindex, nofollow');
+    }
   });
   fastify.addHook('preValidation', async (request) => refuseNullCharacters(request));
   app.useGlobalPipes(new StandardSchemaValidationPipe({ exceptionFactory: invalid }));

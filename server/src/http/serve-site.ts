@@ -30,6 +30,8 @@ export async function serveSite(app: NestFastifyApplication, folder: string): Pr
     if (SERVER_PATHS.test(path)) return sendProblem(new NotFound(), request, reply);
     const name = path.slice(1);
     void reply.header('cache-control', 'no-cache');
+    // The code on a certificate leads to its holder's name: no search engine keeps that page.
+    if (path.startsWith('/check/')) void reply.header('x-robots-tag', 'noindex, nofollow');
     return reply.sendFile(files.has(name) ? name : 'index.html', folder, { cacheControl: false });
   });
 }

@@ -1,7 +1,7 @@
 import { CertificatesService } from '../../src/certificates/certificates.service.ts';
 import type { CertificateView } from '../../src/certificates/certificates.schemas.ts';
 import type { FileAnswer, RegisterAnswer } from '../../src/register/register.schemas.ts';
-import { signIn, stranger, type Caller, type Reply } from '../sign-in.ts';
+import { signIn, stranger, type Caller } from '../sign-in.ts';
 import type { TestApp } from '../test-app.ts';
 import { createAccount, type TestAccount } from './account.ts';
 import { PAPER } from './paper.ts';
@@ -64,8 +64,23 @@ export async function fileOf({ caller, certificate }: Certified): Promise<Buffer
   return reply.raw;
 }
 
-export const checkByNumber = (test: TestApp, number: string, familyName: string): Promise<Reply> =>
-  stranger(test.app).call('POST', '/api/register/checks', { number, familyName });
+/** A typed check, from an address of its own where that matters. */
+export async function checkByNumber(
+  test: TestApp,
+  check: { number: string; familyName: string },
+  remoteAddress = '127.0.0.1',
+) {
+  const response = await test.app.inject({
+    ...{ method: 'POST', url: '/api/register/checks', remoteAddress, payload: check },
+    headers: { 'sec-fetch-site': 'same-origin' },
+  });
+  return {
+    status: response.statusCode,
+    headers: response.headers,
+    text: response.body,
+    body: response.json<RegisterAnswer>(),
+  };
+}
 
 interface SentFile {
   readonly content: Buffer;
@@ -110,10 +125,11 @@ export async function askEverywhere(
   const { certificate, familyName, file, sha256 } = asked;
   const code = certificate.registerUrl.split('/').at(-1) ?? '';
   const anyone = stranger(test.app);
-  const typed = await checkByNumber(test, certificate.number, familyName);
+  const typed = await checkByNumber(test, { number: certificate.number, familyName });
   const linked = await anyone.call('GET', `/api/register/links/${code}`);
   const hashed = await anyone.call('GET', `/api/register/files/${sha256}`);
   const uploaded = await checkFile(test, file);
-  const { signedAt: _, ...byHash } = hashed.body as RegisterAnswer & { signedAt: string };
-  return [typed.body, linked.body, byHash, uploaded.register] as RegisterAnswer[];
+  const { answer, checkedAt, certificate: found } = hashed.body as RegisterAnswer;
+  const byHash = { answer, checkedAt, certificate: found };
+  return [typed.body, linked.body as RegisterAnswer, byHash, uploaded.register];
 }
