@@ -2,6 +2,7 @@ import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { startThrowawayCluster } from '../postgres.mjs';
 import { startDemonstration } from '../steps/demonstration.mjs';
+import { freePort } from '../steps/ports.mjs';
 import { createProgress } from '../steps/progress.mjs';
 import { passphrasesFile } from '../steps/secrets.mjs';
 import { fromRoot } from '../steps/paths.mjs';
@@ -52,6 +53,7 @@ export async function runEndToEnd({ signal }) {
     const demonstration = await startDemonstration({
       folder: cluster.folder,
       cluster,
+      firstPort: await freePort(),
       progress: silent,
       lifetime,
       onService: () => {},

@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { hashContent } from './builds.mjs';
 import { readDemonstrationPeople } from './people.mjs';
 import { fromRoot, root } from './paths.mjs';
-import { askedPort, nextFreePort } from './ports.mjs';
+import { askedPort, holdPort, nextFreePort } from './ports.mjs';
 import { readJson, writePrivateJson } from './private-files.mjs';
 import { runOrFail, StepFailed } from './processes.mjs';
 import { ensurePassphrases, ensureSecrets, passphrasesFile } from './secrets.mjs';
@@ -22,10 +22,10 @@ function plainEnvironment() {
 }
 
 /** The wanted port or the next free one for the site, the mail page and the mail itself. */
-async function choosePorts(folder) {
+async function choosePorts(folder, firstPort) {
   const path = join(folder, 'ports.json');
   const kept = readJson(path) ?? {};
-  const site = await nextFreePort(askedPort() ?? kept.site ?? usualPort);
+  const site = await nextFreePort(askedPort() ?? kept.site ?? firstPort);
   const mailPage = await nextFreePort(Math.max(kept.mailPage ?? 0, site + 1));
   const mail = await nextFreePort(Math.max(kept.mail ?? 0, mailPage + 1));
   const ports = { site, mailPage, mail };
@@ -107,10 +107,19 @@ const serverService = (folder, env) => ({
  *
  * @param options - `onService` is told of each program that stays.
  */
-export async function startDemonstration({ folder, cluster, progress, lifetime, onService }) {
+export async function startDemonstration({
+  folder,
+  cluster,
+  firstPort = usualPort,
+  progress,
+  lifetime,
+  onService,
+}) {
   const { signal } = lifetime;
   mkdirSync(join(folder, 'keys'), { recursive: true, mode: 0o700 });
-  const ports = await choosePorts(folder);
+  const ports = await choosePorts(folder, firstPort);
+  const releaseSitePort = await holdPort(ports.site);
+  lifetime.onEnd(releaseSitePort);
   const env = settings({ folder, cluster, ports });
   const { people, classToJoin } = await readDemonstrationPeople();
   const passphrases = ensurePassphrases(
@@ -122,7 +131,6 @@ export async function startDemonstration({ folder, cluster, progress, lifetime, 
     MIGRATION_DATABASE_URL: cluster.ownerUrl,
     DEMO_PASSPHRASES_FILE: passphrasesFile(folder),
   };
-  await prepareDatabase({ folder, env: ownerEnv, progress, signal });
   const start = async (title, service) => {
     signal.throwIfAborted();
     const started = await progress.step(title, () => startService({ ...service, signal }));
@@ -131,6 +139,8 @@ export async function startDemonstration({ folder, cluster, progress, lifetime, 
     return started;
   };
   const sink = await start('Mail sink', sinkService(folder, ports));
+  await prepareDatabase({ folder, env: ownerEnv, progress, signal });
+  await releaseSitePort();
   const server = await start('Server', serverService(folder, env));
   return {
     siteUrl: env.PUBLIC_URL,

@@ -36,6 +36,17 @@ export async function nextFreePort(wanted) {
   throw new StepFailed(`Ports ${wanted} to ${wanted + 99} on 127.0.0.1 are all taken.`);
 }
 
+/** Keeps a port for a server that starts later: between the look and the start others look too. */
+export function holdPort(port) {
+  return new Promise((resolve, reject) => {
+    const holder = createServer((socket) => socket.destroy());
+    holder.once('error', reject);
+    holder.listen(port, '127.0.0.1', () => {
+      resolve(() => new Promise((released) => holder.close(released)));
+    });
+  });
+}
+
 /** The port named in the environment, if any. */
 export function askedPort() {
   const asked = process.env.PORT;
