@@ -67,8 +67,7 @@ export function Segments({ name, label, segments, chosen, onChoose }: SegmentsPr
             onChange={() => onChoose(segment.id)}
           />
           <span>
-            {segment.label}
-            {segment.count !== undefined && <i>{segment.count}</i>}
+            {segment.label} {segment.count !== undefined && <i>{segment.count}</i>}
           </span>
         </label>
       ))}

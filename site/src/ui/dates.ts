@@ -58,3 +58,10 @@ const timeOfDay = new Intl.DateTimeFormat('en-GB', {
 export function sayTimeOfDay(instant: string): string {
   return timeOfDay.format(new Date(instant));
 }
+
+const dayAndMonth = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'short' });
+
+/** "3 Nov", where the year goes without saying. */
+export function sayDayAndMonth(date: string): string {
+  return dayAndMonth.format(readDate(date)).replace('Sept', 'Sep');
+}
