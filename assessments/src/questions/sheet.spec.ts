@@ -102,7 +102,8 @@ describe('a question sheet', () => {
     ['makes: { fall', 'makes: { path', 22, 'No part asks for path'],
     ['path * load / 2', 'path / load', 22, 'does not come out in V'],
     ['## a', '## b', 20, 'has no text'],
-    ['{load}', '{path2}', 1, '{path2} names no shown value'],
+    ['{load}', '{path2}', 24, '{path2} names no shown value'],
+    ['Find the drop.', 'Find {it}.', 29, '{it} names no shown value'],
   ])('with %j as %j names line %d', (...change) => {
     const [from, to, line, message] = change;
     const issues = afterChange(from, to);

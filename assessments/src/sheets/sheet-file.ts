@@ -9,6 +9,7 @@ export interface SheetFile<T> {
   front: T;
   /** Text before the first `## ` heading. */
   intro: string;
+  introLine: number;
   sections: { heading: string; text: string; line: number }[];
   /** Line of a front matter field, counted from the top of the file. */
   lineOf(path: readonly PropertyKey[]): number;
@@ -42,7 +43,7 @@ export function openSheet<T>(source: string, path: string, schema: z.ZodType<T>)
       })),
     );
   }
-  return { front: checked.data, ...sectionsOf(text, textLine), lineOf };
+  return { front: checked.data, ...sectionsOf(text, textLine), introLine: textLine, lineOf };
 }
 
 interface FieldIssue {
