@@ -29,7 +29,7 @@ export function isReadyToSit({ units, paper }: MemberView): boolean {
   return paper === 'not-sat' && lamps.length > 0 && lamps.every(({ lamp }) => lamp === 'lit');
 }
 
-export function isAway({ lastSeenOn }: MemberView, now: Date): boolean {
+function isAway({ lastSeenOn }: MemberView, now: Date): boolean {
   return lastSeenOn === null || now.getTime() - Date.parse(lastSeenOn) >= week * dayMs;
 }
 

@@ -3,8 +3,6 @@ import { answerOf, api } from '../../api/client.ts';
 import { type Answer } from '../../api/views.ts';
 
 export type LessonView = Answer<'Lessons_read'>;
-export type FigureView = LessonView['figures'][string];
-export type WorkedView = LessonView['worked'][string];
 export type ProgressView = Answer<'Lessons_progress'>;
 
 export const lessonQuery = (number: string) =>
