@@ -1,4 +1,4 @@
-import { presentQuestion } from '@ferrule/assessments';
+import { presentQuestion, SUBJECTS } from '@ferrule/assessments';
 import { localDay } from '../clock/local-day.ts';
 import type { RecordedLook } from './looks.repository.ts';
 import type { OpenedItems } from './papers.schemas.ts';
@@ -29,7 +29,7 @@ export function presentOpenedItems(sitting: Sitting, result: Result, opened: Ope
       if (!marking) return [];
       return {
         number: item.number,
-        subject: item.subject,
+        subject: SUBJECTS[item.subject] ?? item.subject,
         question: presentQuestion(question, item.drawn),
         answers: toAnswers(counted.get(item.key)),
         marked: marking,

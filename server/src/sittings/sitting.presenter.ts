@@ -1,4 +1,4 @@
-import { presentQuestion, type CompiledQuestion } from '@ferrule/assessments';
+import { presentQuestion, SUBJECTS, type CompiledQuestion } from '@ferrule/assessments';
 import { answersThatCount, minutesAllowed, type SavedAnswer, type Sitting } from './sitting.ts';
 import type { SittingItem, SittingNow } from './sittings.repository.ts';
 import type { SittingView } from './sittings.schemas.ts';
@@ -28,7 +28,7 @@ function presentItems({ items, saved, pennants }: Shown): SittingView['items'] {
   return items.map(({ item, question }) => ({
     key: item.key,
     number: item.number,
-    subject: item.subject,
+    subject: SUBJECTS[item.subject] ?? item.subject,
     question: presentQuestion(question, item.drawn),
     answers: Object.fromEntries(
       [...(counted.get(item.key) ?? [])].map(([part, { answer, receipt, sequence, savedAt }]) => [

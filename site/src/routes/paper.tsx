@@ -5,11 +5,11 @@ import { cacheOf, type LoaderArgs, requireSession, sessionQuery } from '../api/s
 import '../features/papers/papers.css';
 import { paperQuery, type PaperView } from '../features/papers/queries.ts';
 import { StartForm } from '../features/papers/start-form.tsx';
-import { upperFirst } from '../features/sittings/review-words.ts';
 import { sayDate, sayMoment } from '../ui/dates.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { TitleBlock } from '../ui/title-block.tsx';
+import { upperFirst } from '../ui/words.ts';
 
 export async function loader(args: LoaderArgs) {
   await requireSession(args);
@@ -119,6 +119,7 @@ function EarlierSittings({ paper }: { paper: PaperView }) {
       {paper.standing.sittings.map((sitting) => (
         <li key={sitting.id}>
           <Link to={`/sittings/${sitting.id}/result`}>Sat on {sayDate(sitting.startedAt)}</Link>
+          {sitting.passed === false && ', not passed: what to practise'}
         </li>
       ))}
     </ul>

@@ -3,7 +3,7 @@ import { HandIn } from '../features/sittings/hand-in.tsx';
 import { PaperBar } from '../features/sittings/paper-bar.tsx';
 import { type SittingView } from '../features/sittings/queries.ts';
 import { ReviewTable } from '../features/sittings/review-table.tsx';
-import { sayStandings, upperFirst } from '../features/sittings/review-words.ts';
+import { sayStandings } from '../features/sittings/review-words.ts';
 import { useSittingDesk } from '../features/sittings/sitting-desk.ts';
 import { BareHead } from '../features/sittings/sitting-head.tsx';
 import { sayMoment, sayTimeOfDay } from '../ui/dates.ts';
@@ -11,6 +11,7 @@ import { PageTitle } from '../ui/page-title.tsx';
 import { Quantity } from '../ui/quantity.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { TitleBlock } from '../ui/title-block.tsx';
+import { upperFirst } from '../ui/words.ts';
 
 export function Component() {
   const shared = useSittingDesk();

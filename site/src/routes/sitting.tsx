@@ -17,6 +17,7 @@ import { QuestionCard } from '../ui/question/question-card.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { FootStrip } from '../ui/thumb-index.tsx';
 import { TitleBlock } from '../ui/title-block.tsx';
+import { upperFirst } from '../ui/words.ts';
 
 const pageOf = (sittingId: string, number: number) => `/sittings/${sittingId}?q=${number}`;
 const reviewOf = (sittingId: string) => `/sittings/${sittingId}/review`;
@@ -82,7 +83,7 @@ function SittingHead({ sitting, item }: { sitting: SittingView; item: SittingIte
             { label: 'Paper no.', value: paper.number, span: 2, kind: 'strong' },
             { label: 'Question', value: `${item.number} of ${items.length}`, span: 2 },
             { label: 'Marks', value: String(item.question.marks), span: 2, kind: 'strong' },
-            { label: 'Subject', value: item.subject, span: 4 },
+            { label: 'Subject', value: upperFirst(item.subject), span: 4 },
             {
               label: 'Time allowed',
               value: <Quantity value={Math.ceil(sitting.minutes)} unit="min" />,

@@ -1,3 +1,4 @@
+import { upperFirst } from '../../ui/words.ts';
 import { MarkCells } from './mark-cells.tsx';
 import { type ResultView } from './queries.ts';
 import { sayWhereLost } from './say-marks.ts';
@@ -24,7 +25,7 @@ export function MarksTable({ result }: { result: ResultView }) {
         <tbody>
           {result.bySubject.map(({ subject, name, marks, outOf }) => (
             <tr key={subject}>
-              <th scope="row">{name}</th>
+              <th scope="row">{upperFirst(name)}</th>
               <td className="cells">
                 <MarkCells marks={marks} outOf={outOf} />
               </td>

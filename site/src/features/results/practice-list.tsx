@@ -1,4 +1,5 @@
 import { Link } from 'react-router-dom';
+import { upperFirst } from '../../ui/words.ts';
 import { type ResultView, type SubjectMarks } from './queries.ts';
 
 type ToPractise = SubjectMarks & { practise: NonNullable<SubjectMarks['practise']> };
@@ -27,7 +28,7 @@ export function PracticeList({ result }: { result: ResultView }) {
               </Link>
             </b>
             <span>
-              {name}: {marks} of {outOf}.{' '}
+              {upperFirst(name)}: {marks} of {outOf}.{' '}
               {practise.worksheet && (
                 <Link to={`/worksheets/${practise.worksheet}`}>
                   Worksheet {practise.worksheet}, fresh figures

@@ -1,13 +1,8 @@
 import { isAnswered, type Standing } from '../../ui/question/views.ts';
+import { joinAnd, sayNumber, upperFirst } from '../../ui/words.ts';
 import { type DeskState } from './answer-desk.ts';
 import { type SittingItem } from './queries.ts';
 
-const words = 'No One Two Three Four Five Six Seven Eight Nine Ten Eleven Twelve'.split(' ');
-const sayNumber = (count: number) => words[count] ?? String(count);
-/** "Unsupervised, ...": begins a cell or a sentence. */
-export const upperFirst = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
-
-const lower = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);
 const are = (count: number) => (count === 1 ? 'is' : 'are');
 
 /** "Ten questions are answered, one is part answered and one is blank." */
@@ -16,9 +11,9 @@ export function sayStandings(standings: readonly Standing[]): string {
   const [answered, part, not] = [count('answered'), count('part'), count('not')];
   if (answered === standings.length) return 'Every question is answered.';
   const clauses = [
-    `${sayNumber(answered)} ${answered === 1 ? 'question is' : 'questions are'} answered`,
-    ...(part > 0 ? [`${lower(sayNumber(part))} ${are(part)} part answered`] : []),
-    ...(not > 0 ? [`${lower(sayNumber(not))} ${are(not)} blank`] : []),
+    `${upperFirst(sayNumber(answered))} ${answered === 1 ? 'question is' : 'questions are'} answered`,
+    ...(part > 0 ? [`${sayNumber(part)} ${are(part)} part answered`] : []),
+    ...(not > 0 ? [`${sayNumber(not)} ${are(not)} blank`] : []),
   ];
   const last = clauses.pop() ?? '';
   return `${clauses.join(', ')} and ${last}. A blank loses its marks; a wrong answer loses no more than that.`;
@@ -37,9 +32,5 @@ export function sayStanding(item: SittingItem, standing: Standing, state: DeskSt
 export function sayComeBack(items: readonly SittingItem[], pennants: Record<string, boolean>) {
   const marked = items.filter(({ key }) => pennants[key]).map(({ number }) => String(number));
   if (marked.length === 0) return '';
-  return `${sayNumber(marked.length)} to come back to: ${joinAnd(marked)}.`;
-}
-
-function joinAnd(parts: string[]): string {
-  return [parts.slice(0, -1).join(', '), parts.at(-1)].filter(Boolean).join(' and ');
+  return `${upperFirst(sayNumber(marked.length))} to come back to: ${joinAnd(marked)}.`;
 }
