@@ -5,8 +5,14 @@ import { parseQuestion } from '../src/questions/sheet.ts';
 
 const BANK = fileURLToPath(new URL('../bank/', import.meta.url));
 
-/** Every question sheet of the bank, read and checked. */
+let opened: Compiled[] | undefined;
+
+/** Every question sheet of the bank, read and checked once. */
 export function openBank(): Compiled[] {
+  return (opened ??= readBank());
+}
+
+function readBank(): Compiled[] {
   return readdirSync(BANK, { recursive: true, encoding: 'utf8' })
     .filter((path) => path.endsWith('.md'))
     .sort()

@@ -77,13 +77,13 @@ function readParts(desk: Desk, givens: readonly Given[], steps: readonly Step[])
 
 function checkWords(desk: Desk, givens: readonly Given[]): void {
   const names = new Set(givens.filter((given) => given.isShown).map((given) => given.name));
-  const { intro, introLine, sections, lineOf } = desk.file;
+  const { intro, introLine, sections } = desk.file;
   const words: [number, unknown][] = [
     [introLine, intro],
     ...sections.map(({ line, text }): [number, string] => [line, text]),
-    [lineOf(['ask']), desk.sheet.ask],
-    [lineOf(['slips']), desk.sheet.slips],
-    [lineOf(['diagram']), desk.sheet.diagram],
+    [desk.file.lineOf(['ask']), desk.sheet.ask],
+    [desk.file.lineOf(['slips']), desk.sheet.slips],
+    [desk.file.lineOf(['diagram']), desk.sheet.diagram],
   ];
   for (const [line, texts] of words) {
     for (const name of misnamedIn(texts, names)) {
