@@ -1,8 +1,18 @@
 import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
+import fc from 'fast-check';
 import { randomBytes } from 'node:crypto';
-import { certify, checkFile, createCertified, fileOf } from '../../test/factories/certificate.ts';
+import {
+  askEverywhere,
+  certify,
+  checkFile,
+  createCertified,
+  fileOf,
+  type Certified,
+} from '../../test/factories/certificate.ts';
 import { publishPaper } from '../../test/factories/paper.ts';
+import { signIn } from '../../test/sign-in.ts';
 import { createTestApp, type TestApp } from '../../test/test-app.ts';
+import type { CertificateView } from './certificates.schemas.ts';
 import { CertificatesService } from './certificates.service.ts';
 import { DrawingService } from './drawing.service.ts';
 import { makeKey } from './keys/key-folder.ts';
@@ -212,5 +222,84 @@ describe('the end of a certificate', () => {
       familyName: 'Castellano',
     });
     expect((await service(CertificatesService).ofSitting(sittingId))?.id).toBe(corrected);
+  });
+});
+
+type Happening = 'withdraw' | 'correct' | 'wait two years';
+const happenings = fc.array(fc.constantFrom<Happening>('withdraw', 'correct', 'wait two years'), {
+  minLength: 1,
+  maxLength: 4,
+});
+
+/** One certificate and those that replaced it, with what each must say. */
+class Line {
+  readonly held: { certified: Certified; file: Buffer; state: string }[] = [];
+  private years = 0;
+
+  async begin(): Promise<void> {
+    test.clock.set('2026-12-01T10:00:00Z');
+    const certified = await createCertified(test);
+    this.held.push({ certified, file: await fileOf(certified), state: 'valid' });
+  }
+
+  async let(happening: Happening): Promise<void> {
+    const last = this.held.at(-1);
+    if (!last) return;
+    if (happening === 'wait two years') return this.wait();
+    const attempt = this.attempt(happening, last.certified.certificate.id);
+    if (last.state === 'withdrawn') return expect(attempt).rejects.toThrow('for good');
+    const replacement = await attempt;
+    const { state } = last;
+    last.state = replacement ? 'superseded' : 'withdrawn';
+    if (replacement) this.held.push({ ...replacement, state });
+  }
+
+  private wait(): void {
+    if (this.years >= 4) return;
+    this.years += 2;
+    test.clock.set(`${2026 + this.years}-12-01T10:00:00Z`);
+    if (this.years < 4) return;
+    for (const one of this.held) if (one.state === 'valid') one.state = 'expired';
+  }
+
+  private async attempt(happening: 'withdraw' | 'correct', id: string) {
+    if (happening === 'withdraw') return service(WithdrawalsService).withdraw(act(id));
+    const givenName = `Ifeoma ${'I'.repeat(this.held.length)}`;
+    const name = { givenName, familyName: 'Castellan' };
+    const correctedId = await service(NameCorrectionsService).correct(act(id), name);
+    await test.runJobs();
+    const { account } = this.held[0]?.certified ?? (await createCertified(test));
+    const caller = await signIn(test.app, account.id);
+    const { body } = await caller.call('GET', `/api/certificates/${correctedId}`);
+    const certified = { account, caller, certificate: body as CertificateView };
+    return { certified, file: await fileOf(certified) };
+  }
+}
+
+describe('whatever happens to a certificate', () => {
+  it('its holder, the register and the check of its file say the same', async () => {
+    let address = 0;
+    await fc.assert(
+      fc.asyncProperty(happenings, async (events) => {
+        const line = new Line();
+        await line.begin();
+        for (const event of events) {
+          await line.let(event);
+          address += 1;
+          for (const { certified, file, state } of line.held) {
+            const { account, certificate } = certified;
+            const caller = await signIn(test.app, account.id);
+            const own = await caller.call('GET', `/api/certificates/${certificate.id}`);
+            const answers = await askEverywhere(test, {
+              ...{ certificate, file, familyName: 'Castellan', address: `192.0.2.${address}` },
+            });
+            expect([own.body.state, ...answers.map(({ answer }) => answer)]).toEqual(
+              Array(5).fill(state),
+            );
+          }
+        }
+      }),
+      { numRuns: 6 },
+    );
   });
 });

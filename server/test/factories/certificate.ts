@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import { CertificatesService } from '../../src/certificates/certificates.service.ts';
 import type { CertificateView } from '../../src/certificates/certificates.schemas.ts';
 import type { FileAnswer, RegisterAnswer } from '../../src/register/register.schemas.ts';
@@ -111,24 +112,33 @@ export async function sendFile(test: TestApp, sent: SentFile) {
   return { status: response.statusCode, body: response.json<FileAnswer>() };
 }
 
-export async function checkFile(test: TestApp, content: Buffer): Promise<FileAnswer> {
-  const { status, body } = await sendFile(test, { content });
+export async function checkFile(
+  test: TestApp,
+  content: Buffer,
+  address?: string,
+): Promise<FileAnswer> {
+  const { status, body } = await sendFile(test, { content, ...(address && { address }) });
   if (status !== 200) throw new Error(JSON.stringify(body));
   return body;
 }
 
+interface Asked {
+  readonly certificate: CertificateView;
+  readonly familyName: string;
+  readonly file: Buffer;
+  readonly address?: string;
+}
+
 /** What each of the register's four ways in says of one certificate. */
-export async function askEverywhere(
-  test: TestApp,
-  asked: { certificate: CertificateView; familyName: string; file: Buffer; sha256: string },
-): Promise<RegisterAnswer[]> {
-  const { certificate, familyName, file, sha256 } = asked;
+export async function askEverywhere(test: TestApp, asked: Asked): Promise<RegisterAnswer[]> {
+  const { certificate, familyName, file, address } = asked;
+  const sha256 = createHash('sha256').update(file).digest('hex');
   const code = certificate.registerUrl.split('/').at(-1) ?? '';
   const anyone = stranger(test.app);
-  const typed = await checkByNumber(test, { number: certificate.number, familyName });
+  const typed = await checkByNumber(test, { number: certificate.number, familyName }, address);
   const linked = await anyone.call('GET', `/api/register/links/${code}`);
   const hashed = await anyone.call('GET', `/api/register/files/${sha256}`);
-  const uploaded = await checkFile(test, file);
+  const uploaded = await checkFile(test, file, address);
   const { answer, checkedAt, certificate: found } = hashed.body as RegisterAnswer;
   const byHash = { answer, checkedAt, certificate: found };
   return [typed.body, linked.body as RegisterAnswer, byHash, uploaded.register];
