@@ -27,18 +27,23 @@ it('tells a common passphrase apart before it is sent', async () => {
   expect(await screen.findByText(/on a list of common passphrases/)).toBeVisible();
 });
 
-it('puts the server’s refusal beside the field and moves there', async () => {
+it('puts the server’s refusal beside the field, moves there, and takes it back on typing', async () => {
   serveWith('post', '/api/accounts', () =>
     problemReply(422, 'invalid-request', {
       errors: [{ pointer: '#/password', detail: 'It contains your name.' }],
     }),
   );
+  serve('post', '/api/password-checks', { lengthShort: 0, common: false, reason: null });
   const { user } = await fillIn('wilf dragomir');
   await user.click(screen.getByRole('button', { name: 'Open account' }));
   const field = await screen.findByLabelText('Passphrase');
   await expect.poll(() => document.activeElement).toBe(field);
   expect(field).toHaveAccessibleDescription(/It contains your name\./);
   expect(field).toHaveValue('wilf dragomir');
+
+  await user.type(field, ' kettle');
+  expect(screen.queryByText('It contains your name.')).toBeNull();
+  expect(field).toHaveFocus();
 });
 
 it('shows where the link went, also for one-name people', async () => {

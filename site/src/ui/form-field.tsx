@@ -84,6 +84,7 @@ export function PassphraseField({ name, label, isNew = false, ...props }: Passph
   const [value, setValue] = useState('');
   const [shown, setShown] = useState(false);
   const ruleId = useId();
+  const isRefused = use(FormContext)[name] !== undefined;
   const characters = [...value.normalize('NFC')].length;
   return (
     <>
@@ -116,7 +117,7 @@ export function PassphraseField({ name, label, isNew = false, ...props }: Passph
           </button>
         </TextField.Slot>
       </FormField>
-      {isNew && <PassRule length={characters} id={ruleId} refusal={props.refusal} />}
+      {isNew && !isRefused && <PassRule length={characters} id={ruleId} refusal={props.refusal} />}
     </>
   );
 }

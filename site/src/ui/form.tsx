@@ -19,25 +19,38 @@ interface FormProps {
 export function Form({ children, onSubmit, problem, className, label }: FormProps) {
   const form = useRef<HTMLFormElement>(null);
   const [missing, setMissing] = useState<FieldErrors>({});
+  const [edited, setEdited] = useState<readonly string[]>([]);
   const refused = fieldProblems(problem);
-  const errors = { ...refused, ...missing };
-  const errorKey = JSON.stringify(errors);
+  // What is said of a field holds until somebody types in it again.
+  const errors = Object.fromEntries(
+    Object.entries({ ...refused, ...missing }).filter(([name]) => !edited.includes(name)),
+  );
 
   useEffect(() => {
     form.current?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus();
-  }, [errorKey]);
+  }, [missing, problem]);
 
   const submit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();
     const wrong = findWrongFields(event.currentTarget);
     setMissing(wrong);
+    setEdited([]);
     if (Object.keys(wrong).length > 0) return;
     onSubmit(readFields(event.currentTarget));
   };
 
   const isFieldProblem = problem instanceof ProblemError && Object.keys(refused).length > 0;
   return (
-    <form ref={form} noValidate onSubmit={submit} className={className} aria-label={label}>
+    <form
+      ref={form}
+      noValidate
+      onSubmit={submit}
+      onInput={({ target }) => {
+        if (target instanceof Element && isEntry(target)) setEdited([...edited, target.name]);
+      }}
+      className={className}
+      aria-label={label}
+    >
       {!isFieldProblem && <ProblemCallout error={problem} />}
       <FormContext value={errors}>{children}</FormContext>
     </form>

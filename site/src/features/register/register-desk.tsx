@@ -90,7 +90,14 @@ export function WholeAnswer({ answer, typedNumber, veryFile = false }: WholeAnsw
 
 function AskTheServer({ desk, file }: { desk: RegisterDesk; file: File }) {
   const { asked, looked } = desk;
-  if (asked.isSuccess || looked.data?.finding === 'too-large') return null;
+  if (looked.data?.finding === 'too-large') return null;
+  if (asked.isSuccess) {
+    return (
+      <p className="todo" role="status">
+        <b>The school’s server has looked at it too</b> and says the same.
+      </p>
+    );
+  }
   return (
     <div className="actions not-printed">
       <ProblemCallout error={asked.error} />

@@ -48,5 +48,5 @@ export function sayVerdict({ answer, certificate }: RegisterAnswer): VerdictWord
 /** Longer words are set smaller, so that none of them breaks. */
 export function sizeOfWord(word: string): string {
   if (word.length > 12) return 'long';
-  return word.length > 7 ? 'wide-word' : '';
+  return word.length > 6 ? 'wide-word' : '';
 }
