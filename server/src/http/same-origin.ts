@@ -1,4 +1,5 @@
 import type { FastifyRequest } from 'fastify';
+import { log } from './log.ts';
 import { CrossSiteRequest } from '../problems/common.errors.ts';
 
 const SAFE = new Set(['GET', 'HEAD', 'OPTIONS']);
@@ -16,5 +17,6 @@ export function refuseCrossSite(request: FastifyRequest, publicUrl: string): voi
   if (site === 'same-origin') return;
   const { origin } = request.headers;
   if (site === undefined && origin === new URL(publicUrl).origin) return;
+  log.warn({ method: request.method, address: request.ip, site }, 'refused another site');
   throw new CrossSiteRequest();
 }

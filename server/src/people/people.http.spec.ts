@@ -122,7 +122,9 @@ describe('the people page', () => {
     const { email, password } = person;
     const signInAgain = () => stranger(test.app).call('POST', '/api/sessions', { email, password });
     const path = `/api/people/${person.id}/suspension`;
-    expect((await office.call('PUT', path, { reason: '  ' })).status).toBe(422);
+    for (const reason of ['  ', 'Left\u0000', 'x'.repeat(501)]) {
+      expect((await office.call('PUT', path, { reason })).status).toBe(422);
+    }
     const suspended = await office.call('PUT', path, { reason: 'Left the school' });
     expect(suspended.body.suspended).toEqual({
       at: test.clock.now().toISOString(),

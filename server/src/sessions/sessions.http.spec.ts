@@ -184,15 +184,60 @@ describe('guessing', () => {
   });
 
   it('is counted at the address it comes from, whatever a header claims', async () => {
-    const statuses: number[] = [];
-    for (let n = 0; n < 61; n += 1) {
+    await test.query(
+      `INSERT INTO failed_tries (kind, subject_hash, at)
+       SELECT 'sign-in-address', sha256(convert_to('127.0.0.1', 'UTF8')), $1 FROM generate_series(1, 59) RETURNING id`,
+      [test.clock.now()],
+    );
+    const statuses = [];
+    for (const claimed of ['203.0.113.1', '203.0.113.2', '203.0.113.3']) {
       const body = { email: `${randomUUID()}@people.example`, password: 'x' };
-      const reply = await post('/api/sessions', body, { 'x-forwarded-for': `203.0.113.${n}` });
+      const reply = await post('/api/sessions', body, { 'x-forwarded-for': claimed });
       statuses.push(reply.status);
     }
-    expect(statuses.slice(0, 60).every((status) => status === 401)).toBe(true);
-    expect(statuses[60]).toBe(429);
+    expect(statuses).toEqual([401, 429, 429]);
   });
+});
+
+it('asks the database the same for a known and an unknown address', async () => {
+  const { email } = account;
+  const nobody = `${randomUUID()}@people.example`;
+  const [known, unknown] = [
+    await test.countQueries(() => tryToSignIn('not the passphrase', '', email)),
+    await test.countQueries(() => tryToSignIn('not the passphrase', '', nobody)),
+  ];
+  expect(known).toBe(unknown);
+  const asks = (to: string) =>
+    test.countQueries(async () => {
+      await post('/api/password-resets', { email: to });
+      await post('/api/email-confirmations/again', { email: to });
+      await post('/api/accounts', {
+        givenName: 'A',
+        familyName: 'B',
+        email: to,
+        password: account.password,
+      });
+    });
+  expect(await asks(email)).toBe(await asks(nobody));
+});
+
+it('records who came in, who was refused, held back and went out, without what they typed', async () => {
+  await tryToSignIn(account.password);
+  for (let n = 0; n < 6; n += 1) await tryToSignIn(`guess ${n}`);
+  const browser = await signIn(test.app, account.id);
+  await browser.call('POST', '/api/session/confirmation', { password: account.password });
+  await browser.call('DELETE', '/api/session');
+  const events = await test.query<{ kind: string }>(
+    'SELECT kind, address, detail FROM security_events WHERE account_id = $1 ORDER BY id',
+    [account.id],
+  );
+  expect(events.map(({ kind }) => kind)).toEqual([
+    ...['account-opened', 'email-confirmed', 'sign-in'],
+    ...Array.from({ length: 5 }, () => 'sign-in-refused'),
+    ...['sign-in-held-back', 'password-confirmed', 'sign-out'],
+  ]);
+  expect(JSON.stringify(events)).not.toMatch(/guess|kettle/);
+  expect(events[3]).toMatchObject({ address: '127.0.0.1', detail: { why: 'wrong passphrase' } });
 });
 
 describe('a session', () => {
