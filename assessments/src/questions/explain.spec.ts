@@ -69,6 +69,22 @@ describe('worked lines', () => {
   });
 });
 
+describe('a figure read off a curve', () => {
+  it('stands alone in own lines, and is sent back to the curve when it is wrong', () => {
+    const question = openSheetNamed('cc-read-agm');
+    const drawn = drawQuestion(question, seedNumber(4)) as Drawn;
+    const typed = (text: string, unit: string): typeof BLANK => ({ ...BLANK, text, unit });
+    const slip = String(drawn.values.limit);
+    const marked = markQuestion(question, drawn, { d: typed('0.2', 'h'), f: typed(slip, 'A') });
+    const [d, f] = ['d', 'f'].map((id) => marked.parts.find((part) => part.id === id));
+    expect(read(d?.yours)).toEqual(['t_1 = 0.2 h']);
+    expect(d?.remarks[0]?.text).toContain('read it again: Bulk ends where the voltage reaches');
+    expect(f?.verdict).toBe('slip');
+    expect(read(f?.yours)).toEqual([`I_r = ${slip} A`]);
+    expect(f?.worked[0]?.some((token) => token.differs)).toBe(false);
+  });
+});
+
 describe('options', () => {
   const question = openSheetNamed('cc-never-ends');
   const drawn = drawQuestion(question, seedNumber(3)) as Drawn;

@@ -16,7 +16,7 @@ export function explainPart(page: Page, judged: Judged): MarkedPart {
   const { part, view, finding } = judged;
   const worked = workedLines(page, part);
   const yours = ownLines(page, judged);
-  const isOff = finding.verdict !== 'right' && yours.length > 0;
+  const isOff = !['right', 'not-understood'].includes(finding.verdict) && yours.length > 0;
   const [own, flagged] = isOff ? flagDifferences(yours, worked) : [yours, worked];
   return {
     id: part.id,
@@ -104,14 +104,12 @@ function typedLines(
 
 /** The formula a trainee must have used: the slip's own where one was recognised. */
 function ownFormula(page: Page, { finding, part }: Judged, step: Step): Expr | null {
-  if (finding.slip !== undefined && part.kind === 'quantity') {
-    const slip = page.question.slips[finding.slip];
-    return slip?.makes.find((made) => made.step === part.step)?.expr ?? null;
-  }
-  // With rounded steps in between, own figures are not known.
+  // A figure read off a curve has no formula; with rounded steps in between, it is not known.
   const isUnknown = finding.verdict === 'wrong' || finding.rule === 'rounded-early';
   if (isUnknown || step.how.kind !== 'sum') return null;
-  return step.how.expr;
+  if (finding.slip === undefined || part.kind !== 'quantity') return step.how.expr;
+  const slip = page.question.slips[finding.slip];
+  return slip?.makes.find((made) => made.step === part.step)?.expr ?? null;
 }
 
 function chosenLine({ question, drawn }: Page, { part, answer }: Judged): Line[] {

@@ -1,4 +1,4 @@
-import { type Drawn, type Part, type SizePart } from './compiled.ts';
+import { type ChoicePart, type Drawn, type Part, type SizePart } from './compiled.ts';
 import { type Judged, type Page } from './judged.ts';
 import { fillIn } from './placeholders.ts';
 import { type RawAnswer, type Remark } from './types.ts';
@@ -83,16 +83,23 @@ function withHalf(marks: number, part: Part, remark: Remark): Remark[] {
   return marks > 0 ? [gained(null, `sum right: ${marks} of ${part.marks} kept`), remark] : [remark];
 }
 
-function onWrong({ drawn }: Page, { part, answer }: Judged): Remark[] {
+function onWrong(page: Page, judged: Judged): Remark[] {
+  const { part, answer } = judged;
+  if (part.kind === 'choice') return [lost(null, optionWords(page, part, answer))];
+  if (part.kind === 'size') return [lost(null, sizeWords(page.drawn, { part, answer }))];
+  const step = page.question.steps.find(({ name }) => name === part.step);
+  const why =
+    step?.how.kind === 'read'
+      ? `read it again: ${step.how.because}`
+      : 'no slip we know leads here: put your lines beside the worked ones';
+  return part.carry === 'never' ? [lost(null, why), note(part.because)] : [lost(null, why)];
+}
+
+function optionWords({ drawn }: Page, part: ChoicePart, answer: RawAnswer): string {
   const held = drawn.parts[part.id];
-  if (part.kind === 'choice' && held?.kind === 'options') {
-    const chosen = held.options.find(({ id }) => id === answer.option);
-    const say = chosen && part.options[chosen.index]?.say;
-    return say ? [lost(null, say)] : [lost(null, 'not this one')];
-  }
-  const why = 'no slip we know leads here: put your lines beside the worked ones';
-  const remark = lost(null, part.kind === 'size' ? sizeWords(drawn, { part, answer }) : why);
-  return part.carry === 'never' && part.kind !== 'size' ? [remark, note(part.because)] : [remark];
+  const chosen =
+    held?.kind === 'options' ? held.options.find(({ id }) => id === answer.option) : undefined;
+  return part.options[chosen?.index ?? -1]?.say ?? 'not this one';
 }
 
 function sizeWords(drawn: Drawn, { part, answer }: { part: SizePart; answer: RawAnswer }): string {
