@@ -1,27 +1,11 @@
+import { sayNumber, upperFirst } from './words.ts';
+
 const divisions = 15;
-const words = [
-  'None',
-  'One',
-  'Two',
-  'Three',
-  'Four',
-  'Five',
-  'Six',
-  'Seven',
-  'Eight',
-  'Nine',
-  'Ten',
-  'Eleven',
-  'Twelve',
-  'Thirteen',
-  'Fourteen',
-  'Fifteen',
-];
 
 /** "11 of 15. Four more to go." */
 export function sayLength(length: number): string {
   if (length >= divisions) return `${length} characters: long enough.`;
-  return `${length} of ${divisions}. ${words[divisions - length] ?? ''} more to go.`;
+  return `${length} of ${divisions}. ${upperFirst(sayNumber(divisions - length))} more to go.`;
 }
 
 interface PassRuleProps {

@@ -1,7 +1,7 @@
 import { type CertificateView } from '../../api/views.ts';
 import { sayDate, sayMoment } from '../../ui/dates.ts';
 import { ValidityState } from '../../ui/validity-state.tsx';
-import { beginSentence } from '../../ui/sentence.ts';
+import { upperFirst } from '../../ui/words.ts';
 import { StrandMark } from '../../ui/strand-mark.tsx';
 import { CorrectName } from './correct-name.tsx';
 import { Withdraw } from './withdraw.tsx';
@@ -47,7 +47,7 @@ export function CertificatePanel({ certificate, mayAct }: CertificatePanelProps)
       <section>
         <dl className="fact-rows">
           <Row label="Scheme revision" value={certificate.scheme.revision} />
-          <Row label="How it was sat" value={beginSentence(certificate.howSat)} />
+          <Row label="How it was sat" value={upperFirst(certificate.howSat)} />
           <Row label="Issued" value={sayDate(certificate.issuedOn)} />
           <Row label="Expires" value={sayDate(certificate.expiresOn)} />
           {certificate.withdrawn && (

@@ -1,6 +1,6 @@
 import { type RegisterAnswer } from '../../api/views.ts';
 import { sayDate } from '../../ui/dates.ts';
-import { beginSentence } from '../../ui/sentence.ts';
+import { upperFirst } from '../../ui/words.ts';
 import { Facts } from '../../ui/title-block.tsx';
 
 type Certificate = NonNullable<RegisterAnswer['certificate']>;
@@ -20,7 +20,7 @@ function listFacts(certificate: Certificate): FactCell[] {
       span: holderName ? 3 : 6,
       kind: 'strong',
     },
-    { label: 'How it was sat', value: beginSentence(certificate.howSat), span: 3 },
+    { label: 'How it was sat', value: upperFirst(certificate.howSat), span: 3 },
     { label: 'Issued', value: sayDate(certificate.issuedOn), span: 1 },
     { label: 'Expires', value: sayDate(certificate.expiresOn), span: 1 },
     { label: 'Revision', value: certificate.scheme.revision, span: 1 },
