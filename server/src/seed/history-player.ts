@@ -46,6 +46,7 @@ export class HistoryPlayer {
   async play(happening: Happening): Promise<void> {
     this.clock.travelTo(happening.at);
     const accountId = await this.books.accountId(happening.who);
+    await this.books.noteSeen(accountId, happening.at);
     switch (happening.does) {
       case 'join':
         await this.service(ClassesService).join(accountId, demonstrationClass.joinCode);

@@ -69,6 +69,13 @@ export class SchoolBooks {
     return row.id;
   }
 
+  async noteSeen(accountId: string, at: string): Promise<void> {
+    await this.rows('UPDATE accounts SET last_seen_at = $2 WHERE id = $1 RETURNING id', [
+      accountId,
+      at,
+    ]);
+  }
+
   private async enter(person: SeededPerson, passwordHash: string | null): Promise<void> {
     const { email, givenName, familyName, roles } = person;
     await this.rows(
