@@ -180,8 +180,10 @@ describe('refusals', () => {
     }
     const desk = openDesk(server);
     desk.write('k1', 'a', typed('4'));
+    desk.flush();
+    desk.write('k1', 'a', typed('45'));
     await pass(900);
-    expect(server.textOf('k1', 'a')).toBe('4');
+    expect(server.textOf('k1', 'a')).toBe('45');
     expect(desk.snapshot().waiting).toBe(0);
   });
 
