@@ -21,8 +21,8 @@ const nameSchema = z
   .max(100)
   .regex(/^[^\p{Cc}\p{Zl}\p{Zp}<>]*$/u, 'Use letters, spaces and signs of a name only.')
   .normalize('NFC');
-export const givenNameSchema = nameSchema.min(1, 'Give a name.');
-export const familyNameSchema = nameSchema;
+const givenNameSchema = nameSchema.min(1, 'Give a name.');
+const familyNameSchema = nameSchema;
 
 const emailSchema = z.string().trim().max(254).toLowerCase().pipe(z.email());
 const tokenSchema = z.string().min(1).max(200);

@@ -7,11 +7,10 @@ export interface RequestSource {
   readonly userAgent: string;
 }
 
-export const sourceOf = (request: FastifyRequest): RequestSource => ({
-  address: request.ip,
-  userAgent: (request.headers['user-agent'] ?? '').slice(0, 400),
-});
-
-export const CurrentSource = createParamDecorator((_: unknown, context: ExecutionContext) =>
-  sourceOf(context.switchToHttp().getRequest<FastifyRequest>()),
+export const CurrentSource = createParamDecorator(
+  (_: unknown, context: ExecutionContext): RequestSource => {
+    const request = context.switchToHttp().getRequest<FastifyRequest>();
+    const userAgent = (request.headers['user-agent'] ?? '').slice(0, 400);
+    return { address: request.ip, userAgent };
+  },
 );

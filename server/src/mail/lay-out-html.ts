@@ -19,10 +19,17 @@ const escape = (text: string) =>
 const styles = `:root{color-scheme:light dark;supported-color-schemes:light dark}
 body{margin:0;padding:0}img{border:0;display:block}a{color:#85401D}
 @media (max-width:620px){.wrap{width:100%!important}.pad{padding-left:18px!important;padding-right:18px!important}.h1{font-size:30px!important;line-height:36px!important}.out{padding:0!important}.tc{display:block!important;width:auto!important;border-left:0!important;border-top:1px solid #231F1A!important}.tc0{border-top:0!important}}
-@media (prefers-color-scheme:dark){.bg{background:#12110F!important}.sh{background:#1B1916!important}.in{background:#24211D!important}.tx{color:#F0EADF!important}.t2{color:#C6BDAE!important}.t3{color:#A89E8E!important}.fr,.tc,.ln{border-color:#9F9585!important}.hr{border-color:#37322C!important}.vd{color:#82D2BE!important}.bt{background:#D18A5A!important}.btx{color:#1B1009!important}a{color:#EAAF86}}`;
+@media (prefers-color-scheme:dark){.bg{background:#12110F!important}.sh{background:#1B1916!important}.in{background:#24211D!important}.tx{color:#F0EADF!important}.t2{color:#C6BDAE!important}.t3{color:#A89E8E!important}.fr,.tc,.ln{border-color:#9F9585!important}.hr{border-color:#37322C!important}.vd{color:#82D2BE!important}.bt{background:#D18A5A!important}.btx{color:#1B1009!important}a{color:#EAAF86}.lnk{color:#EAAF86!important}}`;
+
+/** Addresses in the text, made to lead there. */
+const linked = (text: string) =>
+  escape(text).replaceAll(
+    /https?:\/\/[^\s<>]+[^\s<>.,;:]/g,
+    (url) => `<a href="${url}" style="color:#85401D" class="lnk">${url}</a>`,
+  );
 
 const paragraph = (text: string) =>
-  `<p style="margin:0 0 14px;${sans};font-size:17px;line-height:26px;color:#231F1A" class="tx">${escape(text)}</p>`;
+  `<p style="margin:0 0 14px;${sans};font-size:17px;line-height:26px;color:#231F1A" class="tx">${linked(text)}</p>`;
 
 const masthead = (school: string) =>
   `<tr><td class="pad ln" style="padding:16px 32px 14px;border-bottom:1px solid #231F1A"><table ${table}><tr><td width="52"><img src="cid:${MARK_ID}" width="40" height="18" alt="" style="width:40px;height:18px"></td><td style="${serif};font-weight:bold;font-size:20px;line-height:24px;color:#231F1A" class="tx">Ferrule</td><td align="right" style="${sans};font-size:14px;line-height:20px;color:#675E50" class="t3">${escape(school)}</td></tr></table></td></tr>`;
@@ -53,12 +60,21 @@ function titleRow({ facts }: WrittenLetter): string {
 const button = ({ label, url }: WrittenLetter['button']) =>
   `<table role="presentation" cellpadding="0" cellspacing="0" border="0" style="margin:6px 0 18px"><tr><td bgcolor="#9C4F26" class="bt" style="border-radius:2px;background:#9C4F26"><a href="${escape(url)}" style="display:inline-block;padding:13px 22px;${sans};font-size:17px;line-height:20px;font-weight:bold;color:#FFFFFF;text-decoration:none" class="btx">${escape(label)}</a></td></tr></table>`;
 
-const row = ([label, value]: readonly [string, string]) =>
-  `<tr><td style="padding:9px 12px 9px 0;border-bottom:1px solid #D0C7B5;${sans};font-size:16px;line-height:22px;color:#544C40" class="t2 hr">${escape(label)}</td><td align="right" style="padding:9px 0;border-bottom:1px solid #D0C7B5;${sans};font-size:16px;line-height:22px;font-weight:bold;color:#231F1A;white-space:nowrap" class="tx hr">${escape(value)}</td></tr>`;
+type Row = readonly [label: string, value: string];
+
+function row([label, value]: Row, look: 'line' | 'total'): string {
+  const rule = look === 'line' ? '#D0C7B5' : '#231F1A';
+  const words =
+    look === 'line'
+      ? 'color:#544C40" class="t2 hr'
+      : 'font-weight:bold;color:#231F1A" class="tx ln';
+  return `<tr><td style="padding:9px 12px 9px 0;border-bottom:1px solid ${rule};${sans};font-size:16px;line-height:22px;${words}">${escape(label)}</td><td align="right" style="padding:9px 0;border-bottom:1px solid ${rule};${sans};font-size:16px;line-height:22px;font-weight:bold;color:#231F1A;white-space:nowrap" class="tx ${look === 'line' ? 'hr' : 'ln'}">${escape(value)}</td></tr>`;
+}
 
 function rows(lines: WrittenLetter['table']): string {
   if (!lines) return '';
-  return `<h2 style="margin:0 0 8px;${serif};font-weight:bold;font-size:19px;line-height:26px;color:#231F1A" class="tx">${escape(lines.title)}</h2><table ${table} style="border-collapse:collapse;margin:0 0 20px;border-top:2px solid #231F1A" class="ln">${lines.rows.map(row).join('')}</table>`;
+  const body = [...lines.rows.map((one) => row(one, 'line')), row(lines.total, 'total')].join('');
+  return `<h2 style="margin:0 0 8px;${serif};font-weight:bold;font-size:19px;line-height:26px;color:#231F1A" class="tx">${escape(lines.title)}</h2><table ${table} style="border-collapse:collapse;margin:0 0 20px;border-top:2px solid #231F1A" class="ln">${body}</table>`;
 }
 
 const foot = (letter: WrittenLetter) =>

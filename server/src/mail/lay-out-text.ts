@@ -13,7 +13,9 @@ export const sender = (school: string): string =>
 /** The letter as plain text, with the same facts as the HTML. */
 export function layOutText(letter: WrittenLetter): string {
   const facts = letter.facts.map(([label, value]) => `${label}: ${value}`);
-  const table = letter.table ? [letter.table.title, ...columns(letter.table.rows)] : [];
+  const table = letter.table
+    ? [letter.table.title, ...columns([...letter.table.rows, letter.table.total])]
+    : [];
   const blocks = [
     [letter.kicker, letter.heading],
     facts,

@@ -41,8 +41,12 @@ export interface LetterTemplate {
   readonly facts: ReadonlyArray<readonly [label: string, value: string]>;
   readonly before: readonly string[];
   readonly button: { readonly label: string; readonly url: string };
-  /** Title of a table, and the value that holds its lines as `label<tab>value`. */
-  readonly table?: { readonly title: string; readonly lines: string };
+  /** Title of a table, the value that holds its lines as `label<tab>value`, and its last line. */
+  readonly table?: {
+    readonly title: string;
+    readonly lines: string;
+    readonly total: readonly [label: string, value: string];
+  };
   readonly after: readonly string[];
   readonly reason: string;
   /** The text opens something: it is not kept once the mail has left. */
@@ -62,6 +66,7 @@ export interface WrittenLetter {
   readonly table: {
     readonly title: string;
     readonly rows: ReadonlyArray<readonly [label: string, value: string]>;
+    readonly total: readonly [label: string, value: string];
   } | null;
   readonly after: readonly string[];
   readonly reason: string;

@@ -31,6 +31,23 @@ export const oneLine = (text: string): string =>
 
 const isFilled = (text: string) => text !== '';
 
+type Put = (text: string) => string;
+
+function writeTable(
+  table: LetterTemplate['table'],
+  values: Readonly<Record<string, string>>,
+  put: Put,
+): WrittenLetter['table'] {
+  const lines = (table ? values[table.lines] : undefined) ?? '';
+  if (!table || lines === '') return null;
+  const rows = lines.split('\n').map((line) => {
+    const [label = '', value = ''] = line.split('\t');
+    return [oneLine(label), oneLine(value)] as const;
+  });
+  const [label, value] = table.total;
+  return { title: put(table.title), rows, total: [put(label), put(value)] };
+}
+
 /**
  * Puts the values into the words of a letter.
  *
@@ -43,15 +60,7 @@ export function writeLetter(
 ): WrittenLetter {
   const missing = template.needs.filter((name) => !(name in values));
   if (missing.length > 0) throw new Error(`The letter lacks ${missing.join(', ')}.`);
-  const put = (text: string) => oneLine(String(engine.parseAndRenderSync(text, values)));
-  const lines = (template.table ? values[template.table.lines] : undefined) ?? '';
-  const rows = lines
-    .split('\n')
-    .filter(isFilled)
-    .map((line) => {
-      const [label = '', value = ''] = line.split('\t');
-      return [oneLine(label), oneLine(value)] as const;
-    });
+  const put: Put = (text) => oneLine(String(engine.parseAndRenderSync(text, values)));
   return {
     subject: put(template.subject),
     preview: put(template.preview),
@@ -63,7 +72,7 @@ export function writeLetter(
       .filter(([, value]) => isFilled(value)),
     before: template.before.map(put).filter(isFilled),
     button: { label: put(template.button.label), url: put(template.button.url) },
-    table: template.table && rows.length > 0 ? { title: put(template.table.title), rows } : null,
+    table: writeTable(template.table, values, put),
     after: template.after.map(put).filter(isFilled),
     reason: put(template.reason),
     school,

@@ -19,7 +19,11 @@ const sat = {
     ['Sat', '{{ satOn }}'],
     ['Pass mark', '{{ passPercent }} %'],
   ],
-  table: { title: 'Where the marks went', lines: 'bySubject' },
+  table: {
+    title: 'Where the marks went',
+    lines: 'bySubject',
+    total: ['In all', '{{ marks }} of {{ outOf }}'],
+  },
   reason: 'You get this mail because you sat a paper.',
   holdsKey: false,
 } as const;
