@@ -11,8 +11,11 @@ test('a trainer sees how the class is doing and opens a marked worksheet', async
   await expect(page.getByRole('heading', { level: 1 })).toContainText('Autumn class 2026');
   await expect(page.getByText('QUAY-2026')).toBeVisible();
   await expect(page.getByText('Hemi Tāwhiri-Boyd').first()).toBeVisible();
-  await expect(page.getByRole('heading', { name: /wrong values/i })).toBeVisible();
-  await page.getByRole('link', { name: /W3/ }).first().click();
+  await expect(page.getByRole('heading', { name: 'Commonest slips' })).toBeVisible();
+  await page
+    .getByRole('link', { name: /Castellan W3/ })
+    .first()
+    .click();
   await expect(page.getByText('Worksheet, marked')).toBeVisible();
   await expect(page.getByRole('button', { name: /fresh figures/i })).toHaveCount(0);
 });

@@ -67,9 +67,13 @@ async function type(question: Page | Locator, part: string, si: number): Promise
   await question.getByLabel(`Answer to (${part})`).fill(typed.figure);
 }
 
-/** A stored key as a person types it: in a unit of those offered, with a comma for the point. */
+/**
+ * A stored key as a person types it: in a unit of those offered, with a comma for the point,
+ * save where three places after it could be read as thousands.
+ */
 export function asTyped(si: number, offered: string[]): { unit: string; figure: string } {
   const unit = offered.find((text) => inSi[text] !== undefined) ?? '';
   const figure = si / (inSi[unit] ?? 1);
-  return { unit, figure: String(Number(figure.toPrecision(6))).replace('.', ',') };
+  const text = String(Number(figure.toPrecision(6)));
+  return { unit, figure: /\.\d{3}$/.test(text) ? text : text.replace('.', ',') };
 }
