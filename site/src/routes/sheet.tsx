@@ -60,7 +60,7 @@ function LessonSheet({ number }: { number: string }) {
         <SeatStrip
           lesson={lesson}
           progress={progress}
-          next={<WhereNext lesson={lesson} map={map} />}
+          next={(isDone) => <WhereNext lesson={lesson} map={map} isDone={isDone} />}
         />
       </Sheet>
       <FootStrip label="Neighbouring sheets" links={neighbours(lesson)} />
@@ -98,14 +98,20 @@ function NextSheet({ lesson: { next } }: { lesson: LessonView }) {
   return next ? <Link to={`/sheets/${next.number}`}>{next.number}</Link> : 'the last';
 }
 
+interface WhereNextProps {
+  lesson: LessonView;
+  map: CourseMapView;
+  isDone: boolean;
+}
+
 /** After the sheet: its worksheet, then its neighbours. */
-function WhereNext({ lesson, map }: { lesson: LessonView; map: CourseMapView }) {
+function WhereNext({ lesson, map, isDone }: WhereNextProps) {
   const unit = map.units.find(({ number }) => number === lesson.unit.number);
   const { previous, next } = lesson;
   return (
     <>
       {unit?.worksheet && (
-        <Button asChild size="3" variant="outline">
+        <Button asChild size="3" variant={isDone ? 'solid' : 'outline'}>
           <Link to={`/worksheets/${unit.worksheet.number}`}>Worksheet {unit.worksheet.number}</Link>
         </Button>
       )}

@@ -14,8 +14,8 @@ import {
 interface SeatStripProps {
   lesson: LessonView;
   progress: ProgressView;
-  /** The worksheet of the unit and the next sheet, as buttons and links. */
-  next: ReactNode;
+  /** The worksheet of the unit and the neighbours; once done, they hold the solid button. */
+  next: (isDone: boolean) => ReactNode;
 }
 
 /** At the end of the sheet: marking it done seats its ferrule. */
@@ -45,7 +45,7 @@ export function SeatStrip({ lesson, progress, next }: SeatStripProps) {
               Mark sheet done
             </Button>
           )}
-          {next}
+          {next(isDone)}
           {isDone && (
             <button
               type="button"
