@@ -23,7 +23,7 @@ export function requireMayEnd(certificate: CertificateRecord, { actor }: Certifi
 }
 
 /** @throws {CertificateWithdrawn | CertificateReplaced} */
-export function requireNotEnded({ state, replacedBy }: CertificateRecord): void {
+function requireNotEnded({ state, replacedBy }: CertificateRecord): void {
   if (state === 'withdrawn') throw new CertificateWithdrawn();
   if (state === 'superseded') throw new CertificateReplaced(replacedBy);
 }

@@ -91,7 +91,7 @@ export interface CertificateEvent {
 }
 
 /** The holder's whole name, composed the one way it is printed. */
-export function holderName(givenName: string, familyName: string): string {
+function holderName(givenName: string, familyName: string): string {
   return `${givenName} ${familyName}`.trim().normalize('NFC');
 }
 

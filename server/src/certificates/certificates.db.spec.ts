@@ -9,9 +9,16 @@ import {
   fileOf,
   type Certified,
 } from '../../test/factories/certificate.ts';
+import { countQueries } from '../../test/count-queries.ts';
 import { publishPaper } from '../../test/factories/paper.ts';
 import { signIn } from '../../test/sign-in.ts';
 import { createTestApp, type TestApp } from '../../test/test-app.ts';
+import {
+  CertificateRecordsRepository,
+  type CertificatePlace,
+} from './certificate-records.repository.ts';
+import type { CertificateRecord } from './certificate.ts';
+import { CertificateViewsService } from './certificate-views.service.ts';
 import type { CertificateView } from './certificates.schemas.ts';
 import { CertificatesService } from './certificates.service.ts';
 import { DrawingService } from './drawing.service.ts';
@@ -222,6 +229,36 @@ describe('the end of a certificate', () => {
       familyName: 'Castellano',
     });
     expect((await service(CertificatesService).ofSitting(sittingId))?.id).toBe(corrected);
+  });
+});
+
+describe('the list at the desk', () => {
+  it('shows every certificate once, page after page, the newest first', async () => {
+    const records = service(CertificateRecordsRepository);
+    const now = test.clock.now();
+    const wanted = { numberPart: '', namePart: '', nameFold: '' };
+    const whole = await records.page({ ...wanted, after: null, most: 1_000 }, now);
+    const paged: string[] = [];
+    let after: CertificatePlace | null = null;
+    do {
+      const page: CertificateRecord[] = await records.page({ ...wanted, after, most: 3 }, now);
+      paged.push(...page.map(({ id }) => id));
+      after = page.at(-1) ?? null;
+    } while (after);
+    expect(paged).toEqual(whole.map(({ id }) => id));
+    expect(whole.length).toBeGreaterThan(5);
+    const times = whole.map(({ issuedAt }) => issuedAt.getTime());
+    expect(times).toEqual(times.toSorted((a, b) => b - a));
+  });
+
+  it('takes as many statements for many certificates as for one', async () => {
+    const views = service(CertificateViewsService);
+    const many = await countQueries(test, () => views.page({ find: '', cursor: '' }));
+    const [newest] = (await views.page({ find: '', cursor: '' })).certificates;
+    const one = await countQueries(test, () =>
+      views.page({ find: newest?.number ?? '', cursor: '' }),
+    );
+    expect([many, one]).toEqual([2, 2]);
   });
 });
 

@@ -175,6 +175,23 @@ describe('the code behind the link', () => {
   });
 });
 
+describe('the addresses that are only read', () => {
+  it('answer one visitor no more than so often in a minute', async () => {
+    const follow = async (remoteAddress: string) =>
+      test.app.inject({ url: `/api/register/links/${codeOf(zoe)}`, remoteAddress });
+    for (let index = 0; index < 120; index += 1) {
+      expect((await follow('203.0.113.77')).statusCode).toBe(200);
+    }
+    const refused = await follow('203.0.113.77');
+    expect([refused.statusCode, refused.json<{ type: string }>().type]).toEqual([
+      429,
+      '/problems/too-many-attempts',
+    ]);
+    expect(Number(refused.headers['retry-after'])).toBeGreaterThan(0);
+    expect((await follow('203.0.113.78')).statusCode).toBe(200);
+  });
+});
+
 describe('the list of issuers', () => {
   it('holds public certificates and no private key', async () => {
     const { body } = await stranger(test.app).call('GET', '/api/register/issuers');

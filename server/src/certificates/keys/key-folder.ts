@@ -23,6 +23,8 @@ const CURRENT = 'current.json';
 const privateKeyFile = (keyId: string) => `${keyId}.key.pem`;
 const certificateFile = (keyId: string) => `${keyId}.crt.pem`;
 
+const putBack = `Put back ${CURRENT} with the key and the certificates it names.`;
+
 /** The folder of the signing keys holds none that can be used. */
 export class NoSigningKey extends Error {
   constructor(
@@ -31,10 +33,7 @@ export class NoSigningKey extends Error {
     /** There has never been a key here. */
     readonly isEmpty = false,
   ) {
-    super(
-      `KEYS_FOLDER ${folder} holds no usable signing key: ${why} Put back ${CURRENT} with the key ` +
-        'and the certificates it names.',
-    );
+    super(`KEYS_FOLDER ${folder} holds no usable signing key: ${why}`);
     this.name = 'NoSigningKey';
   }
 }
@@ -49,7 +48,9 @@ export async function readKey(folder: string): Promise<HeldKey> {
   try {
     return await readParts(folder, current);
   } catch (error) {
-    throw new NoSigningKey(folder, error instanceof Error ? error.message : String(error));
+    if (error instanceof NoSigningKey) throw error;
+    const why = error instanceof Error ? error.message : String(error);
+    throw new NoSigningKey(folder, `${why.replace(/\.$/, '')}. ${putBack}`);
   }
 }
 
@@ -60,15 +61,15 @@ async function readCurrent(folder: string): Promise<CurrentKey> {
     if (isNamed(current.keyId) && isNamed(current.rootKeyId)) return current;
   } catch (error) {
     if ((error as NodeJS.ErrnoException).code === 'ENOENT') {
-      throw new NoSigningKey(folder, `it has no ${CURRENT}.`, true);
+      throw new NoSigningKey(folder, `it has no ${CURRENT}. ${putBack}`, true);
     }
   }
-  throw new NoSigningKey(folder, `its ${CURRENT} does not name a key and its root.`);
+  throw new NoSigningKey(folder, `its ${CURRENT} does not name a key and its root. ${putBack}`);
 }
 
 async function readParts(folder: string, { keyId, rootKeyId }: CurrentKey): Promise<HeldKey> {
   const keyPath = join(folder, privateKeyFile(keyId));
-  await requirePrivate(keyPath);
+  await requirePrivate(folder, keyPath);
   const [privateKeyPem, certificatePem, rootPem] = await Promise.all([
     readFile(keyPath, 'utf8'),
     readFile(join(folder, certificateFile(keyId)), 'utf8'),
@@ -96,9 +97,10 @@ function insist(isSo: boolean, otherwise: string): void {
   if (!isSo) throw new Error(otherwise);
 }
 
-async function requirePrivate(path: string): Promise<void> {
+async function requirePrivate(folder: string, path: string): Promise<void> {
   const { mode } = await stat(path);
-  insist((mode & 0o077) === 0, `others may read ${path}; give it to its owner alone (chmod 600).`);
+  if ((mode & 0o077) === 0) return;
+  throw new NoSigningKey(folder, `others may read ${path}. Give it to its owner alone: chmod 600.`);
 }
 
 export interface NewKey {
