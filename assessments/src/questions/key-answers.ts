@@ -1,4 +1,5 @@
-import { openQuestion, type Drawn, type DrawnPart, type Part } from './compiled.ts';
+import { type Compiled, type Drawn, type DrawnPart, openQuestion, type Part } from './compiled.ts';
+import { ownFor, type OwnValues } from './own-values.ts';
 import {
   type Answers,
   type CompiledQuestion,
@@ -8,38 +9,66 @@ import {
 import { fromSi } from './units.ts';
 
 const blank: RawAnswer = { text: '', unit: null, option: null, working: '' };
+const FIGURES = 5;
 
 function typed(part: Part, si: number): RawAnswer {
   const unit = part.kind === 'quantity' ? part.units[0] : undefined;
   const figure = unit ? fromSi(si, unit) : si;
-  return { ...blank, text: String(Number(figure.toPrecision(8))), unit: unit?.symbol ?? null };
+  return {
+    ...blank,
+    text: String(Number(figure.toPrecision(FIGURES))),
+    unit: unit?.symbol ?? null,
+  };
 }
 
-function answerOf(part: Part, held: DrawnPart, isSlipped: boolean): RawAnswer {
-  if (held.kind === 'quantity') {
-    const slipped = isSlipped ? held.slips[0]?.value : undefined;
-    return typed(part, slipped ?? held.key);
-  }
+function choice(held: Extract<DrawnPart, { kind: 'options' }>, isSlipped: boolean): RawAnswer {
   const other = held.slips[0]?.id ?? held.options.find(({ id }) => id !== held.right)?.id;
   return { ...blank, option: isSlipped ? (other ?? held.right) : held.right };
 }
 
+interface Table {
+  question: Compiled;
+  drawn: Drawn;
+  /** What was answered so far; later parts are worked on it, as a trainee would. */
+  own: OwnValues;
+}
+
+function quantity(
+  part: Extract<Part, { kind: 'quantity' }>,
+  held: Extract<DrawnPart, { kind: 'quantity' }>,
+  { table, isSlipped }: { table: Table; isSlipped: boolean },
+): RawAnswer {
+  const { question, drawn, own } = table;
+  const worked = ownFor(question, drawn, { step: part.step, own })?.values.get(part.step);
+  const slipped = isSlipped ? held.slips[0]?.value : undefined;
+  const value = slipped ?? worked ?? held.key;
+  const isOff = value < held.low || value > held.high;
+  own.set(part.step, { value, part: part.id, isOff });
+  return typed(part, value);
+}
+
 /**
- * Answers that the key accepts, save in the parts named, which get the first predicted slip.
+ * Answers that the key accepts, save in the parts named: those get the first predicted slip, and
+ * what follows is worked on with it.
  * It knows the key: for demonstrations and tests, never for anything that is sent before marking.
  *
  * @throws {Error} when the question was compiled by another format version.
  */
 export function keyAnswers(
-  question: CompiledQuestion,
-  drawn: DrawnQuestion,
+  stored: CompiledQuestion,
+  drawnQuestion: DrawnQuestion,
   slippedParts: readonly string[] = [],
 ): Answers {
-  const { parts } = drawn as unknown as Drawn;
-  return Object.fromEntries(
-    openQuestion(question).parts.flatMap((part) => {
-      const held = parts[part.id];
-      return held ? [[part.id, answerOf(part, held, slippedParts.includes(part.id))]] : [];
-    }),
-  );
+  const question = openQuestion(stored);
+  const drawn = drawnQuestion as unknown as Drawn;
+  const table: Table = { question, drawn, own: new Map() };
+  const answers: Answers = {};
+  for (const part of question.parts) {
+    const held = drawn.parts[part.id];
+    const isSlipped = slippedParts.includes(part.id);
+    if (held?.kind === 'options') answers[part.id] = choice(held, isSlipped);
+    if (held?.kind !== 'quantity' || part.kind !== 'quantity') continue;
+    answers[part.id] = quantity(part, held, { table, isSlipped });
+  }
+  return answers;
 }
