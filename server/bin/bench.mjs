@@ -1,0 +1,30 @@
+import { buildServer } from './steps/builds.mjs';
+import { installDependencies } from './steps/dependencies.mjs';
+import { createLifetime } from './steps/lifetime.mjs';
+import { checkNodeVersion } from './steps/node-version.mjs';
+import { createProgress } from './steps/progress.mjs';
+import { StepFailed } from './steps/processes.mjs';
+
+async function main(lifetime) {
+  const { signal } = lifetime;
+  const progress = createProgress();
+  await progress.step('Node.js', async (report) => checkNodeVersion(report));
+  await progress.step('Dependencies', (report) => installDependencies({ report, signal }));
+  await progress.step('Server and libraries', () => buildServer(signal));
+  signal.throwIfAborted();
+  // What it measures is there only now.
+  const { measureAll } = await import('./bench/measure-all.mjs');
+  const { drawTable } = await import('./bench/table.mjs');
+  console.log(`\n${drawTable(await measureAll({ lifetime, progress }))}`);
+}
+
+const lifetime = createLifetime();
+try {
+  await main(lifetime);
+} catch (error) {
+  const why = lifetime.signal.aborted ? 'Stopped before the end.' : undefined;
+  console.error(`\n${why ?? (error instanceof StepFailed ? error.message : error.stack)}`);
+  process.exitCode = 1;
+}
+await lifetime.end();
+process.exit();
