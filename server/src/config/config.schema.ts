@@ -4,6 +4,11 @@ const secret = z
   .string()
   .regex(/^[0-9a-f]{64,}$/, 'must be at least 32 random bytes in hexadecimal');
 
+const SECRETS = ['SESSION_SECRET', 'DRAW_SECRET', 'SECOND_FACTOR_KEY'] as const;
+
+/** Thirty-two random bytes hold some thirty different ones; a sample written by hand holds few. */
+const looksRandom = (hex: string) => new Set(hex.match(/../g)).size >= 12;
+
 /** What the environment must hold; the boot stops at the first thing missing. */
 export const configSchema = z
   .object({
@@ -35,6 +40,18 @@ export const configSchema = z
       path: ['PUBLIC_URL'],
       message: 'must be https; plain http serves only the demonstration on this machine',
     });
+  })
+  .superRefine((env, context) => {
+    if (env.NODE_ENV === 'test') return;
+    for (const name of SECRETS) {
+      const isShared = SECRETS.some((other) => other !== name && env[other] === env[name]);
+      if (looksRandom(env[name]) && !isShared) continue;
+      context.addIssue({
+        code: 'custom',
+        path: [name],
+        message: 'must be random and used for nothing else: run openssl rand -hex 32',
+      });
+    }
   });
 
 export type Config = z.infer<typeof configSchema>;

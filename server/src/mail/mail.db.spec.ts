@@ -6,6 +6,7 @@ import PostalMime from 'postal-mime';
 import { QueryTypes, type Sequelize } from 'sequelize';
 import { createTestApp, type TestApp } from '../../test/test-app.ts';
 import { Transactions } from '../database/transactions.ts';
+import { JobsService } from '../jobs/jobs.service.ts';
 import { MailService } from './mail.service.ts';
 import type { Letter } from './letter.ts';
 
@@ -82,6 +83,16 @@ describe('the outbox', () => {
       state: 'queued',
       tries: 1,
       last_error: 'connect ECONNREFUSED',
+    });
+    test.mails.failure = null;
+    await test.app.get(JobsService).enqueue('send-mail', {
+      messageId: String((await row(written.dedupeKey))?.['id']),
+    });
+    await test.runJobs();
+    expect(await row(written.dedupeKey)).toMatchObject({
+      state: 'sent',
+      tries: 1,
+      last_error: null,
     });
   });
 
