@@ -1,7 +1,8 @@
 import { Link } from 'react-router-dom';
+import { type Answer } from '../../api/views.ts';
 import { sayDate, sayMoment } from '../../ui/dates.ts';
-import { type PaperView } from '../papers/queries.ts';
 
+type PaperView = Answer<'Papers_paper'>;
 type SittingOfRecord = PaperView['standing']['sittings'][number];
 
 /** Every sitting of the paper, the open one first. */

@@ -1,16 +1,17 @@
 import { Link } from 'react-router-dom';
+import { type Answer } from '../../api/views.ts';
 import { sayDate } from '../../ui/dates.ts';
-import { type CourseMapView, type WorksheetOfUnit } from '../course/queries.ts';
 
-type Worked = WorksheetOfUnit & { unit: number };
+type CourseMap = Answer<'Courses_course'>;
+type Worked = NonNullable<CourseMap['units'][number]['worksheet']> & { unit: number };
 
-const workedOf = ({ units }: CourseMapView): Worked[] =>
+const workedOf = ({ units }: CourseMap): Worked[] =>
   units.flatMap(({ number, worksheet }) =>
     worksheet && worksheet.attempts > 0 ? [{ ...worksheet, unit: number }] : [],
   );
 
 /** Worksheets one has begun, with the best mark; each opens with all its attempts. */
-export function RecordWorksheets({ map }: { map: CourseMapView }) {
+export function RecordWorksheets({ map }: { map: CourseMap }) {
   const worksheets = workedOf(map);
   if (worksheets.length === 0) {
     return (
