@@ -16,7 +16,7 @@ import { InvalidRequest, TooManyAttempts } from './problems/common.errors.ts';
 import { ProblemFilter, sendProblem } from './problems/problem.filter.ts';
 
 const MAX_BODY_BYTES = 100_000;
-export const MAX_UPLOAD_BYTES = 5_000_000;
+const MAX_UPLOAD_BYTES = 5_000_000;
 
 const isHttps = (config: Config) => config.PUBLIC_URL.startsWith('https:');
 

@@ -7,7 +7,7 @@ export const typed = (text: string, unit: string | null = null) => ({
 });
 
 /** The drop, worked out from what the trainee sees of a practice question. */
-export function dropOf({ given }: QuestionView): number {
+function dropOf({ given }: QuestionView): number {
   const value = (symbol: string) =>
     Number(given.find((one) => one.symbol === symbol)?.value ?? NaN);
   return (value('I') * value('R')) / 1_000;
