@@ -8,6 +8,7 @@ import {
   type RegisterDesk,
   useRegisterDesk,
 } from '../features/register/register-desk.tsx';
+import { focusOnHeading } from '../ui/focus-on-heading.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 
@@ -52,8 +53,6 @@ function useFocusOnAnswer({ typed, looked, asked }: RegisterDesk) {
   const answered = typed.data ?? asked.data ?? looked.data;
   useEffect(() => {
     if (!answered) return;
-    const word = document.querySelector<HTMLElement>('main h1');
-    word?.setAttribute('tabindex', '-1');
-    word?.focus();
+    focusOnHeading();
   }, [answered]);
 }

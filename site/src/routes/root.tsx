@@ -2,6 +2,7 @@ import { Theme } from '@radix-ui/themes';
 import { useEffect, useRef } from 'react';
 import { Outlet, ScrollRestoration, useLocation, useNavigation } from 'react-router-dom';
 import { useAppearance } from '../ui/color-scheme.ts';
+import { focusOnHeading } from '../ui/focus-on-heading.ts';
 import { Strip, useSignal } from '../ui/strip.tsx';
 
 /** What every page shares: theme, skip link, signal, and where the focus goes on arrival. */
@@ -51,8 +52,6 @@ function useFocusOnArrival() {
       isFirst.current = false;
       return;
     }
-    const heading = document.querySelector<HTMLElement>('main h1');
-    heading?.setAttribute('tabindex', '-1');
-    heading?.focus({ preventScroll: true });
+    focusOnHeading({ preventScroll: true });
   }, [pathname]);
 }

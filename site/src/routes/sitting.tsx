@@ -10,6 +10,7 @@ import { type SittingDesk, useSittingDesk } from '../features/sittings/sitting-d
 import { BareHead } from '../features/sittings/sitting-head.tsx';
 import { TickBox } from '../ui/choice-row.tsx';
 import { sayMoment, sayTimeOfDay } from '../ui/dates.ts';
+import { focusOnHeading } from '../ui/focus-on-heading.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Quantity } from '../ui/quantity.tsx';
 import { CurveReader } from '../ui/question/curve-reader.tsx';
@@ -64,9 +65,7 @@ function useFocusOnQuestion(at: number) {
   useEffect(() => {
     if (before.current === at) return;
     before.current = at;
-    const heading = document.querySelector<HTMLElement>('main h1');
-    heading?.setAttribute('tabindex', '-1');
-    heading?.focus({ preventScroll: true });
+    focusOnHeading({ preventScroll: true });
   }, [at]);
 }
 

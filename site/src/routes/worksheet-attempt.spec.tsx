@@ -99,7 +99,7 @@ it('asks once about blank parts, then hands in and shows the marked paper', asyn
   await user.click(await screen.findByRole('button', { name: 'Hand in for marking' }));
   expect(screen.getByText('2 parts are blank.')).toBeVisible();
   await user.click(screen.getByRole('button', { name: 'Hand in for marking' }));
-  const part = await screen.findByRole('region', { name: 'Part a' });
+  const part = await screen.findByRole('group', { name: 'Part a' });
   expect(within(part).getByText(/out and back/)).toBeVisible();
   expect(screen.getByRole('heading', { level: 1 })).toHaveFocus();
   expect(screen.getByText(/1 of 4 marks, 25\s%. Not passed, 3 marks short/)).toBeVisible();

@@ -12,6 +12,7 @@ import { ReadOnlySheet } from '../features/worksheets/read-only-sheet.tsx';
 import { sayResult } from '../features/worksheets/say-result.ts';
 import { StartAttempt } from '../features/worksheets/start-attempt.tsx';
 import { sayDate } from '../ui/dates.ts';
+import { focusOnHeading } from '../ui/focus-on-heading.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { FootStrip, ThumbIndex } from '../ui/thumb-index.tsx';
@@ -70,9 +71,7 @@ function useFocusWhenMarked(isMarked: boolean): boolean {
   const [wasOpen] = useState(!isMarked);
   useEffect(() => {
     if (!isMarked || !wasOpen) return;
-    const heading = document.querySelector<HTMLElement>('main h1');
-    heading?.setAttribute('tabindex', '-1');
-    heading?.focus();
+    focusOnHeading();
     window.scrollTo(0, 0);
   }, [isMarked, wasOpen]);
   return isMarked && wasOpen;

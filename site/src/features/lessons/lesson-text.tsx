@@ -4,6 +4,7 @@ import remarkDirective from 'remark-directive';
 import remarkGfm from 'remark-gfm';
 import remarkMath from 'remark-math';
 import { Hazard, type HazardLevel } from '../../ui/hazard.tsx';
+import { ScrollTable } from '../../ui/scroll-table.tsx';
 import { layOutSheet } from './lay-out-sheet.ts';
 import { LessonContext } from './lesson-context.ts';
 import { LessonFigure } from './lesson-figure.tsx';
@@ -63,16 +64,6 @@ function LocalCode({ children }: { children?: ReactNode }) {
   );
 }
 
-function SheetTable({ children }: { children?: ReactNode }) {
-  return (
-    // A wide table scrolls sideways on a phone, so the keyboard must reach it.
-    // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex
-    <div className="table-scroll" role="region" aria-label="Table" tabIndex={0}>
-      <table>{children}</table>
-    </div>
-  );
-}
-
 const components = {
   'sheet-row': SheetRow,
   'sheet-formula': SheetFormula,
@@ -82,7 +73,7 @@ const components = {
   'sheet-figure': LessonFigure,
   'sheet-worked': WorkedExample,
   'sheet-try': TryQuestion,
-  table: SheetTable,
+  table: ScrollTable,
 } as Components;
 
 /** The text of a sheet. Raw HTML is never drawn; formulas and figures come with the lesson. */

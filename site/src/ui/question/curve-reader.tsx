@@ -25,13 +25,13 @@ export function CurveReader({ curve }: { curve: CurveView }) {
   const within = curve.intervals.find(({ fromH, toH }) => fromH <= hours && hours <= toH);
   const drawn = { curve, cursor, within, onMove: put };
   return (
-    <section className="curve" aria-label="Charge curve">
+    <div className="curve" role="group" aria-label="Charge curve">
       <CurveDrawing {...drawn} layout={wide} className="only-wide" />
       <CurveDrawing {...drawn} layout={narrow} className="only-narrow" />
       <p className="visually-hidden">{sayIntervals(curve)}</p>
       <CursorControls cursor={cursor} end={end} onPut={put} />
       <ReadingsTable curve={curve} within={within} />
-    </section>
+    </div>
   );
 }
 
@@ -131,7 +131,7 @@ function ReadingsTable({ curve, within }: ReadingsTableProps) {
   return (
     // The table scrolls sideways on a phone, so the keyboard must reach it.
     // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex
-    <div className="table-scroll" role="region" aria-label="Table of readings" tabIndex={0}>
+    <div className="table-scroll" role="group" aria-label="Table of readings" tabIndex={0}>
       <table className="readings">
         <caption>Table of readings</caption>
         <tbody>

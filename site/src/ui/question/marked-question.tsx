@@ -39,7 +39,7 @@ function MarkedPart({ part, strokesBefore }: MarkedPartProps) {
   const lines = Math.max(part.yours.length, part.worked.length, 1);
   const vars = { '--lines': lines } as CSSProperties;
   return (
-    <section className="marked-part" aria-label={`Part ${part.id}`} style={vars}>
+    <div className="marked-part" role="group" aria-label={`Part ${part.id}`} style={vars}>
       <h3>
         <b>({part.id})</b> <InlineMarkdown>{part.prompt}</InlineMarkdown>
       </h3>
@@ -57,7 +57,7 @@ function MarkedPart({ part, strokesBefore }: MarkedPartProps) {
           <i>/{part.outOf}</i>
         </p>
       </div>
-    </section>
+    </div>
   );
 }
 

@@ -2,6 +2,7 @@ import { type ReactNode } from 'react';
 import Markdown from 'react-markdown';
 import remarkGfm from 'remark-gfm';
 import { Hazard } from '../hazard.tsx';
+import { ScrollTable } from '../scroll-table.tsx';
 import { GivenTable } from './given-table.tsx';
 import { PartEntry } from './part-entry.tsx';
 import './question.css';
@@ -49,7 +50,9 @@ export function QuestionFacts({ question }: { question: QuestionView }) {
     <div className="question-facts">
       {question.body && (
         <div className="question-text">
-          <Markdown remarkPlugins={[remarkGfm]}>{question.body}</Markdown>
+          <Markdown remarkPlugins={[remarkGfm]} components={{ table: ScrollTable }}>
+            {question.body}
+          </Markdown>
         </div>
       )}
       {question.given.length > 0 && <GivenTable given={question.given} />}
