@@ -82,7 +82,7 @@ async function wrongByAxe(page: Page, { scheme, width }: Look): Promise<string[]
   // Our pages hold no frames, so the legacy mode sees all and spares a blank page each time.
   const { violations } = await new AxeBuilder({ page })
     .setLegacyMode()
-    .options({ rules: { 'target-size': { enabled: true } } })
+    .options({ resultTypes: ['violations'], rules: { 'target-size': { enabled: true } } })
     .analyze();
   return violations.flatMap(({ id, nodes }) =>
     nodes.map(({ target, failureSummary = '' }) => {
