@@ -91,13 +91,20 @@ describe('where one stands', () => {
       ],
     });
     expect(
-      await screen.findByRole('heading', { name: /You may sit again from 15 Dec/ }),
+      await screen.findByRole('heading', { name: 'You may sit again from 15 December 2026' }),
     ).toBeVisible();
-    expect(screen.getByText('Fourteen days lie between two sittings.')).toBeVisible();
+    expect(screen.getByText(/^14 days lie between two sittings/)).toBeVisible();
     expect(screen.getByRole('link', { name: 'Sat on 1 Dec 2026' })).toHaveAttribute(
       'href',
       `/sittings/${sittingId}/result`,
     );
+  });
+
+  it('says that the last sitting is being marked', async () => {
+    open({ state: 'waiting', reasons: ['Your paper is being marked.'] });
+    expect(
+      await screen.findByRole('heading', { name: 'Your paper is being marked.' }),
+    ).toBeVisible();
   });
 
   it('leads to the certificate once it is passed', async () => {

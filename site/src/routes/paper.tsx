@@ -5,7 +5,7 @@ import { cacheOf, type LoaderArgs, requireSession, sessionQuery } from '../api/s
 import '../features/papers/papers.css';
 import { paperQuery, type PaperView } from '../features/papers/queries.ts';
 import { StartForm } from '../features/papers/start-form.tsx';
-import { sayDate, sayMoment } from '../ui/dates.ts';
+import { sayDate, sayDateInFull } from '../ui/dates.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { TitleBlock } from '../ui/title-block.tsx';
@@ -96,21 +96,25 @@ function Standing({ paper }: { paper: PaperView }) {
       </>
     );
   }
-  if (standing.state === 'waiting') {
-    return (
-      <>
-        <h2>
-          You may sit again{' '}
-          {standing.mayStartAt ? `from ${sayMoment(standing.mayStartAt)}` : 'later'}
-        </h2>
-        {standing.reasons.map((reason) => (
-          <p key={reason}>{reason}</p>
-        ))}
-        <EarlierSittings paper={paper} />
-      </>
-    );
-  }
+  if (standing.state === 'waiting') return <Waiting paper={paper} />;
   return null;
+}
+
+function Waiting({ paper }: { paper: PaperView }) {
+  const { mayStartAt, reasons } = paper.standing;
+  return (
+    <>
+      <h2>
+        {mayStartAt ? `You may sit again from ${sayDateInFull(mayStartAt)}` : reasons.join(' ')}
+      </h2>
+      <p>
+        {mayStartAt
+          ? `${paper.waitDays} days lie between two sittings, so that there is time to practise. Other questions and fresh figures come then.`
+          : 'The result opens in your record within a minute, and comes to you by e-mail.'}
+      </p>
+      <EarlierSittings paper={paper} />
+    </>
+  );
 }
 
 function EarlierSittings({ paper }: { paper: PaperView }) {

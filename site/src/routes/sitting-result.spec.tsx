@@ -24,7 +24,7 @@ it('says what is missing, where it was lost, what to practise and when to sit ag
     'href',
     '/worksheets/W5',
   );
-  expect(screen.getByText('15 December 2026')).toBeVisible();
+  expect(screen.getAllByText('15 December 2026')).toHaveLength(2);
   expect(screen.getByText('Appeal within ten working days.')).toBeVisible();
 });
 

@@ -166,7 +166,7 @@ function Again({ result }: { result: ResultView }) {
       <p>
         {result.maySitAgainAt ? (
           <>
-            From <b>{sayDateInFull(result.maySitAgainAt)}</b>, with other questions and fresh
+            From <b>{sayDateInFull(result.maySitAgainAt)}</b>, drawn anew by the same plan, with fresh
             figures by the same plan.
           </>
         ) : (

@@ -1,6 +1,6 @@
 import { Link } from 'react-router-dom';
 import { type Answer } from '../../api/views.ts';
-import { sayDate, sayMoment } from '../../ui/dates.ts';
+import { sayDate } from '../../ui/dates.ts';
 
 type PaperView = Answer<'Papers_paper'>;
 type SittingOfRecord = PaperView['standing']['sittings'][number];
@@ -42,7 +42,7 @@ export function RecordSittings({ paper }: { paper: PaperView }) {
       </table>
       {standing.state === 'waiting' && standing.mayStartAt && (
         <p className="fine">
-          You may sit again from {sayMoment(standing.mayStartAt)}.{' '}
+          You may sit again from {sayDate(standing.mayStartAt)}.{' '}
           <Link to={`/papers/${paper.slug}`}>The paper’s page</Link>
         </p>
       )}
