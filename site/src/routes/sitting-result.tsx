@@ -166,8 +166,8 @@ function Again({ result }: { result: ResultView }) {
       <p>
         {result.maySitAgainAt ? (
           <>
-            From <b>{sayDateInFull(result.maySitAgainAt)}</b>, drawn anew by the same plan, with fresh
-            figures by the same plan.
+            From <b>{sayDateInFull(result.maySitAgainAt)}</b>, drawn anew from the same plan, with
+            fresh figures.
           </>
         ) : (
           'You may sit again now, drawn anew from the same plan, with fresh figures.'
