@@ -14,8 +14,14 @@ if (!ownerUrl) {
 const [lessons = checkout('lessons'), assessments = checkout('assessments')] =
   process.argv.slice(2);
 try {
-  const report = await publish(ownerUrl, { lessons, assessments });
+  const withPaperPool = process.env['DEMONSTRATION'] === '1';
+  const report = await publish(ownerUrl, { lessons, assessments, withPaperPool });
   for (const name of report.published) console.log(`Published ${name}.`);
+  if (report.leftOut > 0) {
+    console.log(
+      `Left out ${report.leftOut} sample paper questions: a school keeps its paper pool in its database only.`,
+    );
+  }
   console.log(`${report.published.length} published, ${report.unchanged} unchanged.`);
 } catch (error) {
   if (!(error instanceof ContentNotInOrder)) throw error;

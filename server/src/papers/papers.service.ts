@@ -61,6 +61,11 @@ export class PapersService {
     }
   }
 
+  /** @throws {PaperNotReady} when no paper could be put together now. */
+  async requirePool(paper: Paper): Promise<void> {
+    await this.assemble(paper, 'look');
+  }
+
   /** Where the course of a paper practises lessons, by lesson number. */
   async practice(courseSlug: string): Promise<Map<string, Practice>> {
     const [course, lessons] = await Promise.all([

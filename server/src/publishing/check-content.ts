@@ -40,15 +40,21 @@ function checkPlace(
   );
 }
 
-function checkPapers(content: ReadContent, problems: ProblemList): void {
-  const { blueprints, courses, questions, unread } = content;
+function checkPapers({ blueprints, courses }: ReadContent, problems: ProblemList): void {
+  for (const { file, value: blueprint } of blueprints) {
+    if (courses.some(({ compiled }) => compiled.slug === blueprint.course)) continue;
+    problems.add(file.path, 1, `there is no course "${blueprint.course}"`);
+  }
+}
+
+/** Whether the paper questions among the sheets are enough for each paper. */
+export function checkPaperPool(content: ReadContent, problems: ProblemList): void {
+  const { blueprints, questions, unread } = content;
+  if (unread.questions.length > 0) return;
   const pool = questions.flatMap(({ value: { meta } }) => (meta.pool === 'paper' ? [meta] : []));
   for (const { file, value: blueprint } of blueprints) {
-    if (!courses.some(({ compiled }) => compiled.slug === blueprint.course)) {
-      problems.add(file.path, 1, `there is no course "${blueprint.course}"`);
-    }
     try {
-      if (unread.questions.length === 0) assemblePaper(blueprint, pool, '00'.repeat(32));
+      assemblePaper(blueprint, pool, '00'.repeat(32));
     } catch (error) {
       if (!(error instanceof PoolTooSmall)) throw error;
       problems.add(file.path, 1, error.message);

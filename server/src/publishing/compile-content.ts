@@ -1,6 +1,6 @@
 import type { Blueprint, CompiledQuestion } from '@ferrule/assessments';
 import { createHash } from 'node:crypto';
-import { checkContent } from './check-content.ts';
+import { checkContent, checkPaperPool } from './check-content.ts';
 import type { CompiledLesson } from './compiled-lesson.ts';
 import { compileLesson, type LessonReferences } from './compile-lesson.ts';
 import type { ContentKind } from './content.ts';
@@ -96,12 +96,20 @@ const pick = ({
 
 const sourceOf = ({ path, text }: SourceFile) => ({ path, source: text, hash: sha256(text) });
 
-/** Checks and compiles everything; each thing wrong goes to the list of problems. */
-export function compileContent(sources: Sources, problems: ProblemList): CompiledContent {
+/**
+ * Checks and compiles everything; each thing wrong goes to the list of problems. A paper pool
+ * that is kept elsewhere need not be among the sheets.
+ */
+export function compileContent(
+  sources: Sources,
+  problems: ProblemList,
+  withPaperPool = true,
+): CompiledContent {
   const content = readContent(sources, problems);
   const { courses, lessons, questions, blueprints } = content;
   const shared = referencesOf(content);
   checkContent(content, shared, problems);
+  if (withPaperPool) checkPaperPool(content, problems);
   const references: LessonReferences = {
     ...shared,
     questions: new Map(questions.map(({ value }) => [value.meta.slug, value])),

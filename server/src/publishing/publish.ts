@@ -1,5 +1,5 @@
 import pg from 'pg';
-import { compileContent } from './compile-content.ts';
+import { compileContent, type CompiledContent } from './compile-content.ts';
 import { ContentNotInOrder, ProblemList } from './problem-list.ts';
 import { readSources, type SourceFolders } from './read-sources.ts';
 import { storeContent, type PublishingReport } from './store-content.ts';
@@ -26,6 +26,20 @@ async function inTransaction<T>(
   }
 }
 
+/** Where publishing reads, and what of it a school may use. */
+export interface PublishingOptions extends SourceFolders {
+  /**
+   * Whether paper questions are published too. Whoever reads the files knows them: they serve
+   * demonstrations and tests, while a school keeps its own paper pool in its database only.
+   */
+  readonly withPaperPool: boolean;
+}
+
+export interface PublishingOutcome extends PublishingReport {
+  /** How many paper questions were left out. */
+  readonly leftOut: number;
+}
+
 /**
  * Publishes lessons, questions, courses, papers and schemes: all of it or nothing. What is
  * published already stays as it is.
@@ -33,16 +47,25 @@ async function inTransaction<T>(
  * @param ownerUrl - the database with the owner's role.
  * @throws {ContentNotInOrder} naming file and line of everything that is wrong.
  */
-export async function publish(ownerUrl: string, folders: SourceFolders): Promise<PublishingReport> {
+export async function publish(
+  ownerUrl: string,
+  { withPaperPool, ...folders }: PublishingOptions,
+): Promise<PublishingOutcome> {
   const problems = new ProblemList();
-  const content = compileContent(await readSources(folders), problems);
+  const compiled = compileContent(await readSources(folders), problems, withPaperPool);
   refuseIfAny(problems);
+  const content = withPaperPool ? compiled : withoutPaperPool(compiled);
   return inTransaction(ownerUrl, async (client) => {
     const report = await storeContent(client, content, problems);
     refuseIfAny(problems);
-    return report;
+    return { ...report, leftOut: compiled.revisions.length - content.revisions.length };
   });
 }
+
+const withoutPaperPool = ({ revisions, schemes }: CompiledContent): CompiledContent => ({
+  revisions: revisions.filter(({ pool }) => pool !== 'paper'),
+  schemes,
+});
 
 function refuseIfAny(problems: ProblemList): void {
   if (!problems.isEmpty) throw new ContentNotInOrder(problems.sorted());

@@ -271,7 +271,7 @@ describe('publishing', () => {
   });
 
   it('stores each thing once with its source, hash and compiled form', async () => {
-    expect(await publishChanged({})).toEqual({ published: [], unchanged: 9 });
+    expect(await publishChanged({})).toEqual({ published: [], unchanged: 9, leftOut: 0 });
     const { rows } = await client.query<{
       source: string;
       hash: Buffer;
@@ -360,7 +360,7 @@ describe('publishing', () => {
 
   it('says which folder is not there', async () => {
     const folders = { lessons: '/nonexistent/lessons', assessments: '/nonexistent' };
-    await expect(publish(database.ownerUrl, folders)).rejects.toThrow(
+    await expect(publish(database.ownerUrl, { ...folders, withPaperPool: true })).rejects.toThrow(
       '/nonexistent/lessons:1: there is no such folder',
     );
   });

@@ -15,7 +15,11 @@ import { PublishedContentService } from './published-content.service.ts';
 
 const inCheckout = (folder: string) =>
   fileURLToPath(new URL(`../../../${folder}`, import.meta.url));
-const folders = { lessons: inCheckout('lessons'), assessments: inCheckout('assessments') };
+const folders = {
+  lessons: inCheckout('lessons'),
+  assessments: inCheckout('assessments'),
+  withPaperPool: true,
+};
 
 let test: TestApp;
 let lessons: CompiledLesson[];

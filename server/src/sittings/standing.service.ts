@@ -56,8 +56,11 @@ export class StandingService {
   async paper(accountId: string, slug: string): Promise<PaperView> {
     const paper = await this.papers.current(slug);
     await this.closing.closeDueOf(accountId);
+    const standing = await this.decide(accountId, paper);
+    // Who sat it before still sees what became of it.
+    if (standing.sittings.length === 0) await this.papers.requirePool(paper);
     return presentPaper(paper, {
-      standing: await this.decide(accountId, paper),
+      standing,
       marks: await this.papers.marks(paper),
       extraTimePercent: await this.allowances.percentFor(accountId),
     });

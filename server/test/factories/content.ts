@@ -1,8 +1,7 @@
 import { mkdir, mkdtemp, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
-import { publish } from '../../src/publishing/publish.ts';
-import type { PublishingReport } from '../../src/publishing/store-content.ts';
+import { publish, type PublishingOutcome } from '../../src/publishing/publish.ts';
 import { blueprintSheet, questionSheet } from './paper.ts';
 
 /** Files by path, as they lie under `lessons/` and `assessments/`. */
@@ -222,10 +221,12 @@ export async function inFolder<T>(files: Files, work: (folder: string) => Promis
 export const publishFiles = (
   { database }: { database: { ownerUrl: string } },
   files: Files,
-): Promise<PublishingReport> =>
+  withPaperPool = true,
+): Promise<PublishingOutcome> =>
   inFolder(files, (folder) =>
     publish(database.ownerUrl, {
       lessons: join(folder, 'lessons'),
       assessments: join(folder, 'assessments'),
+      withPaperPool,
     }),
   );
