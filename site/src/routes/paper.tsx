@@ -109,7 +109,7 @@ function Waiting({ paper }: { paper: PaperView }) {
       </h2>
       <p>
         {mayStartAt
-          ? `${paper.waitDays} days lie between two sittings, so that there is time to practise. Other questions and fresh figures come then.`
+          ? `${paper.waitDays} days lie between two sittings, so that there is time to practise. The next is drawn anew from the same plan, with fresh figures.`
           : 'The result opens in your record within a minute, and comes to you by e-mail.'}
       </p>
       <EarlierSittings paper={paper} />
