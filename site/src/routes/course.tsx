@@ -82,6 +82,11 @@ function NextAction({ step, isFirst }: { step: NextStep; isFirst: boolean }) {
   );
 }
 
+/** "O. Marchetti" stays on one line. */
+function keepInitials(names: string): string {
+  return names.replaceAll('. ', '.\u00a0');
+}
+
 function CourseTitleBlock({ map }: { map: CourseMapView }) {
   const { data: session } = useSuspenseQuery(sessionQuery);
   const account = session?.account;
@@ -92,7 +97,7 @@ function CourseTitleBlock({ map }: { map: CourseMapView }) {
         { label: 'Revision', value: map.revision },
         { label: 'Issued', value: sayDate(map.issued) },
         { label: 'Legal owner', value: map.owner, span: 4 },
-        { label: 'Trainer', value: map.trainer ?? 'none yet' },
+        { label: 'Trainer', value: map.trainer ? keepInitials(map.trainer) : 'none yet' },
         { label: 'Trainee', value: account ? `${account.givenName} ${account.familyName}` : '' },
         { label: 'Class', value: map.class?.name ?? 'none yet' },
         { label: 'Enrolled', value: map.enrolledOn ? sayDate(map.enrolledOn) : 'not yet' },

@@ -36,7 +36,7 @@ function Source({ map }: { map: CourseMapView }) {
       <Conductor d="M32 20V34M24 34H40M28 39H36M31 44H33M32 20H62" />
       <Battery x={72} y={20} />
       <Conductor d={`M84 20H150${isClosed ? 'M158 20H186' : 'M157 17.5L184 5'}`} />
-      <Conductor live d="M194 20H268V84" />
+      <Conductor live d="M194 20H344V84" />
       <TerminalPoint x={154} y={20} />
       <TerminalPoint x={190} y={20} />
       <text className="second" x="52" y="62">

@@ -36,7 +36,7 @@ export function lastLiveSheet(unit: UnitView): number {
 export function sayWorksheet(worksheet: WorksheetOfUnit): { percent: number | null; word: string } {
   const percent = worksheet.best?.percent ?? null;
   if (worksheet.lit) return { percent, word: 'passed' };
-  if (worksheet.openAttemptId) return { percent: null, word: 'open, not handed in' };
+  if (worksheet.openAttemptId) return { percent: null, word: 'open' };
   return { percent, word: percent === null ? 'not worked yet' : 'not passed' };
 }
 

@@ -5,21 +5,22 @@ import { type ProgressView, progressQuery, saveParagraph } from './queries.ts';
 const restMs = 4000;
 
 /**
- * Keeps the furthest paragraph that was in sight. Sent at most every four seconds, and once more
- * when the page is left.
+ * Keeps the furthest paragraph that was read: one in sight when four seconds are over, or when the
+ * page is left. What only flies past does not count.
  */
 export function useReadingProgress(number: string, progress: ProgressView): void {
   const queryClient = useQueryClient();
   // What was known when the sheet was opened; the page itself moves it on.
   const [known] = useState(progress.state === 'not-begun' ? 0 : progress.paragraph);
   useEffect(() => {
-    let furthest = known;
+    const inSight = new Set<number>();
     let sent = known;
     let timer: ReturnType<typeof setTimeout> | undefined;
     const send = () => {
       clearTimeout(timer);
       timer = undefined;
-      if (furthest <= sent) return;
+      const furthest = Math.max(sent, ...inSight);
+      if (furthest === sent) return;
       sent = furthest;
       saveParagraph(number, furthest).then(
         (kept) => {
@@ -36,7 +37,8 @@ export function useReadingProgress(number: string, progress: ProgressView): void
       (entries) => {
         for (const { isIntersecting, target } of entries) {
           const paragraph = Number((target as HTMLElement).dataset['paragraph']);
-          if (isIntersecting) furthest = Math.max(furthest, paragraph);
+          if (isIntersecting) inSight.add(paragraph);
+          else inSight.delete(paragraph);
         }
         timer ??= setTimeout(send, restMs);
       },
