@@ -41,6 +41,7 @@ export default {
         'src/cli/*.ts',
         'src/**/*.spec.ts',
         'bin/{start,test,bench,postgres}.mjs',
+        'bin/bench/bare-server.mjs',
         'bin/**/*.spec.mjs',
         'fakes/**/*.spec.mjs',
         'fakes/mail/sink.mjs',

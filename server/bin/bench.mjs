@@ -18,12 +18,17 @@ async function main(lifetime) {
   console.log(`\n${drawTable(await measureAll({ lifetime, progress }))}`);
 }
 
+function reasonOf(error) {
+  if (lifetime.signal.aborted) return 'Stopped before the end.';
+  if (error.name === 'TimeoutError') return 'Measuring took too long; try on a calmer machine.';
+  return error instanceof StepFailed ? error.message : error.stack;
+}
+
 const lifetime = createLifetime();
 try {
   await main(lifetime);
 } catch (error) {
-  const why = lifetime.signal.aborted ? 'Stopped before the end.' : undefined;
-  console.error(`\n${why ?? (error instanceof StepFailed ? error.message : error.stack)}`);
+  console.error(`\n${reasonOf(error)}`);
   process.exitCode = 1;
 }
 await lifetime.end();

@@ -7,7 +7,7 @@ const mostRequests = 1000;
 const ticksPerSecond = Number(execFileSync('getconf', ['CLK_TCK'], { encoding: 'utf8' }));
 
 /** Sends a request and resolves to status, headers and text. */
-export function send({ url, method = 'GET', headers = {}, body, agent }) {
+function send({ url, method = 'GET', headers = {}, body, agent }) {
   const payload = body === undefined ? undefined : JSON.stringify(body);
   const described = payload && {
     'content-type': 'application/json',

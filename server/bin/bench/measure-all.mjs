@@ -2,8 +2,12 @@ import { measureMarking } from './marking.mjs';
 import { measureServing } from './serving.mjs';
 import { measureSigning } from './signing.mjs';
 
+const limitMilliseconds = 175_000;
+
 /** Every comparison, one after the other, so that none disturbs another. */
-export async function measureAll({ lifetime, progress }) {
+export async function measureAll({ lifetime: { signal: asked, onEnd }, progress }) {
+  const signal = AbortSignal.any([asked, AbortSignal.timeout(limitMilliseconds)]);
+  const lifetime = { signal, onEnd };
   const rows = [];
   const measure = (title, work) =>
     progress.step(title, async () => {

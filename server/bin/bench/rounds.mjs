@@ -1,3 +1,6 @@
+/** Thrown away: the compiler is still at work on what runs for the first time. */
+const warmingRounds = 2;
+
 const sorted = (numbers) => [...numbers].sort((a, b) => a - b);
 
 /** The value below which this share of the numbers lies. */
@@ -21,16 +24,16 @@ function compareFigure(rounds, name) {
  * whatever else the machine does falls on both.
  *
  * @param sides - `ours` and `bare` each resolve to figures by name, in milliseconds.
- * @returns for each figure the medians and the middle half of the rounds' ratios.
+ * @returns for each figure the medians, and the middle half of the rounds' ratios.
  */
 export async function compare({ rounds, ours, bare, signal }) {
   const measured = [];
-  for (let round = 0; round < rounds; round += 1) {
+  for (let round = 0; round < warmingRounds + rounds; round += 1) {
     signal.throwIfAborted();
     const sides = round % 2 === 0 ? { ours, bare } : { bare, ours };
     const figures = {};
     for (const [side, measure] of Object.entries(sides)) figures[side] = await measure(round);
-    measured.push(figures);
+    if (round >= warmingRounds) measured.push(figures);
   }
   const names = Object.keys(measured[0].ours);
   return Object.fromEntries(names.map((name) => [name, compareFigure(measured, name)]));

@@ -32,7 +32,7 @@ export function drawTable(rows) {
   return [
     ...drawn,
     '',
-    `Figures are ratios of one run on this machine (${cpus().length} processors, load ${loadavg()[0].toFixed(1)});`,
-    'medians of alternating rounds, with the middle half of the rounds’ ratios. Times mean nothing elsewhere.',
+    `Figures are ratios of one run on this machine (processors: ${cpus().length}, load: ${loadavg()[0].toFixed(1)}):`,
+    'medians of alternating rounds and the middle half of their ratios; times mean nothing elsewhere.',
   ].join('\n');
 }
