@@ -1,5 +1,6 @@
 import { Button } from '@radix-ui/themes';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { focusOnHeading } from '../../ui/focus-on-heading.ts';
 import { Form } from '../../ui/form.tsx';
 import { FormField } from '../../ui/form-field.tsx';
 import { courseQuery, joinClass } from './queries.ts';
@@ -9,7 +10,10 @@ export function JoinClass() {
   const queryClient = useQueryClient();
   const join = useMutation({
     mutationFn: joinClass,
-    onSuccess: () => queryClient.invalidateQueries({ queryKey: courseQuery.queryKey }),
+    onSuccess: async () => {
+      await queryClient.invalidateQueries({ queryKey: courseQuery.queryKey });
+      focusOnHeading();
+    },
   });
   return (
     <section className="join-class" aria-labelledby="join-title">

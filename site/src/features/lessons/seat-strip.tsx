@@ -1,6 +1,6 @@
 import { Button } from '@radix-ui/themes';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { type ReactNode } from 'react';
+import { type ReactNode, useRef } from 'react';
 import { ProblemCallout } from '../../ui/problem-callout.tsx';
 import { Ferrule } from '../../ui/symbols/ferrule.tsx';
 import {
@@ -20,14 +20,15 @@ interface SeatStripProps {
 
 /** At the end of the sheet: marking it done seats its ferrule. */
 export function SeatStrip({ lesson, progress, next }: SeatStripProps) {
-  const change = useProgressChange(lesson);
+  const said = useRef<HTMLParagraphElement>(null);
+  const change = useProgressChange(lesson, () => said.current?.focus());
   const isRevised = progress.revisionRead !== null && progress.revisionRead !== progress.current;
   const isDone = progress.state === 'done' && !isRevised;
   return (
     <div className={isDone ? 'seat-strip seated' : 'seat-strip'}>
       <SeatDrawing />
       <div>
-        <p role="status">
+        <p role="status" ref={said} tabIndex={-1}>
           {isDone ? (
             <>
               <b>Done.</b> The ferrule of sheet {lesson.number} is seated on the course map.
@@ -62,7 +63,8 @@ export function SeatStrip({ lesson, progress, next }: SeatStripProps) {
   );
 }
 
-function useProgressChange({ number, revision }: LessonView) {
+/** The pressed button gives way to another: the focus goes to what is said instead. */
+function useProgressChange({ number, revision }: LessonView, onChanged: () => void) {
   const queryClient = useQueryClient();
   return useMutation({
     mutationFn: (to: 'done' | 'undo') =>
@@ -70,6 +72,7 @@ function useProgressChange({ number, revision }: LessonView) {
     onSuccess: (kept) => {
       queryClient.setQueryData(progressQuery(number).queryKey, kept);
       void queryClient.invalidateQueries({ queryKey: ['course'] });
+      onChanged();
     },
   });
 }

@@ -1,6 +1,6 @@
 import { Button } from '@radix-ui/themes';
 import { useMutation } from '@tanstack/react-query';
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import Markdown from 'react-markdown';
 import { ProblemCallout } from '../../ui/problem-callout.tsx';
 import { CurveReader } from '../../ui/question/curve-reader.tsx';
@@ -47,6 +47,7 @@ function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
   const { question } = practice;
   const [answers, setAnswers] = useState<Answers>({});
   const mark = useMutation({ mutationFn: () => answerPractice(practice.id, answers) });
+  const heading = useFocusOnTurn(mark.data !== undefined);
   const unclear = unclearParts(mark.error);
   const curve = question.curve && <CurveReader curve={question.curve} />;
   const again = (
@@ -58,7 +59,9 @@ function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
     <>
       <header className="try-head">
         <p className="kicker">{mark.data ? 'Try it, marked' : 'Try it'}</p>
-        <h2>{question.title}</h2>
+        <h2 ref={heading} tabIndex={-1}>
+          {question.title}
+        </h2>
         <Markdown>{mark.data ? mark.data.marked.summary : question.lead}</Markdown>
       </header>
       {mark.data ? (
@@ -103,4 +106,11 @@ function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
       )}
     </>
   );
+}
+
+/** The button that was pressed is gone, so the focus goes to the heading of what took its place. */
+function useFocusOnTurn(isMarked: boolean) {
+  const heading = useRef<HTMLHeadingElement>(null);
+  useEffect(() => heading.current?.focus(), [isMarked]);
+  return heading;
 }

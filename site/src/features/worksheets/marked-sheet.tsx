@@ -10,7 +10,12 @@ export function MarkedSheet({ attempt }: { attempt: WorksheetView }) {
   return (
     <>
       {attempt.items.map((item, index) => (
-        <MarkedItem key={item.key} item={item} place={[index + 1, attempt.items.length]} />
+        <MarkedItem
+          key={item.key}
+          item={item}
+          place={[index + 1, attempt.items.length]}
+          {...(!attempt.mine && { whose: attempt.trainee.givenName })}
+        />
       ))}
       <div className="marked-total">
         <p>Total</p>
@@ -30,7 +35,13 @@ export function marksToPass({ passPercent, outOf }: WorksheetView): number {
   return Math.ceil((passPercent * outOf) / 100);
 }
 
-function MarkedItem({ item, place }: { item: WorksheetItem; place: [number, number] }) {
+interface MarkedItemProps {
+  item: WorksheetItem;
+  place: [number, number];
+  whose?: string;
+}
+
+function MarkedItem({ item, place, whose }: MarkedItemProps) {
   const { question, marked, readAgain } = item;
   if (!marked) return null;
   return (
@@ -44,7 +55,7 @@ function MarkedItem({ item, place }: { item: WorksheetItem; place: [number, numb
           </p>
         )}
       </ItemHead>
-      <MarkedQuestion marked={marked} />
+      <MarkedQuestion marked={marked} {...(whose && { whose })} />
       <div className="marked-facts">
         <QuestionFacts question={question} />
         {question.curve && <CurveReader curve={question.curve} />}

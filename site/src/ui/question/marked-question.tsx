@@ -8,17 +8,28 @@ import { type MarkedPartView, type MarkedQuestionView } from './views.ts';
 type Lines = MarkedPartView['yours'];
 type Remark = MarkedPartView['remarks'][number];
 
+interface MarkedQuestionProps {
+  marked: MarkedQuestionView;
+  /** Whose answers they are, when they are not the reader's. */
+  whose?: string;
+}
+
 /** A marked question, part by part: yours, worked, marker. */
-export function MarkedQuestion({ marked }: { marked: MarkedQuestionView }) {
+export function MarkedQuestion({ marked, whose = 'Yours' }: MarkedQuestionProps) {
   return (
     <div className="marked">
       <div className="marked-head" aria-hidden="true">
-        <span>Yours</span>
+        <span>{whose}</span>
         <span>Worked</span>
         <span>Marker</span>
       </div>
       {marked.parts.map((part, index) => (
-        <MarkedPart key={part.id} part={part} strokesBefore={countStrokes(marked, index)} />
+        <MarkedPart
+          key={part.id}
+          part={part}
+          whose={whose}
+          strokesBefore={countStrokes(marked, index)}
+        />
       ))}
     </div>
   );
@@ -32,10 +43,11 @@ function countStrokes({ parts }: MarkedQuestionView, before: number): number {
 
 interface MarkedPartProps {
   part: MarkedPartView;
+  whose: string;
   strokesBefore: number;
 }
 
-function MarkedPart({ part, strokesBefore }: MarkedPartProps) {
+function MarkedPart({ part, whose, strokesBefore }: MarkedPartProps) {
   const lines = Math.max(part.yours.length, part.worked.length, 1);
   const vars = { '--lines': lines } as CSSProperties;
   return (
@@ -43,7 +55,7 @@ function MarkedPart({ part, strokesBefore }: MarkedPartProps) {
       <h3>
         <b>({part.id})</b> <InlineMarkdown>{part.prompt}</InlineMarkdown>
       </h3>
-      <WorkingColumn className="yours" heading="Yours" lines={part.yours} />
+      <WorkingColumn className="yours" heading={whose} lines={part.yours} />
       <WorkingColumn className="worked" heading="Worked" lines={part.worked} />
       <div className="marker">
         <div>
