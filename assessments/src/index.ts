@@ -8,6 +8,7 @@ export { readAnswer } from './questions/read-answer.ts';
 export { markQuestion } from './questions/mark.ts';
 export { keyAnswers } from './questions/key-answers.ts';
 export { workQuestion } from './questions/work.ts';
+export { hintFor } from './questions/hint.ts';
 export { slipWords } from './questions/slip-words.ts';
 export { parseBlueprint } from './papers/blueprint.ts';
 export { assemblePaper } from './papers/assemble.ts';

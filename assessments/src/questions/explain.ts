@@ -32,13 +32,9 @@ export function explainPart(page: Page, judged: Judged): MarkedPart {
 
 /** The worked answer of a part, line by line; steps printed for an earlier part are not repeated. */
 export function workedLines(page: Page, part: Part): Line[] {
-  const { question, drawn, shown } = page;
+  const { question, drawn } = page;
   const values = new Map(Object.entries(drawn.values));
-  const needed = leansOn(question, part.kind === 'choice' ? namesInOptions(part) : [part.step]);
-  const lines = question.steps
-    .filter((step) => needed.has(step.name) && !shown.has(step.name))
-    .flatMap((step) => stepLines(question, step, values));
-  needed.forEach((name) => shown.add(name));
+  const lines = takeSteps(page, part).flatMap((step) => stepLines(question, step, values));
   const held = drawn.parts[part.id];
   if (part.kind === 'choice' && held?.kind === 'options') {
     const right = held.options.find(({ id }) => id === held.right);
@@ -46,6 +42,14 @@ export function workedLines(page: Page, part: Part): Line[] {
     return [...lines, [words(fillIn(text, question.givens, drawn.values))]];
   }
   return part.kind === 'quantity' ? withRounding(page, part, lines) : lines;
+}
+
+/** The steps a part leans on that stand on no earlier part; from now on they count as shown. */
+export function takeSteps({ question, shown }: Page, part: Part): Step[] {
+  const needed = leansOn(question, part.kind === 'choice' ? namesInOptions(part) : [part.step]);
+  const steps = question.steps.filter(({ name }) => needed.has(name) && !shown.has(name));
+  needed.forEach((name) => shown.add(name));
+  return steps;
 }
 
 function namesInOptions(part: Extract<Part, { kind: 'choice' }>): string[] {
