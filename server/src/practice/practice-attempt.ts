@@ -13,5 +13,7 @@ export interface PracticeAttempt {
   readonly accountId: string;
   readonly questionRevisionId: string;
   readonly kept: KeptDraw;
+  /** Parts a hint was given for, in the order they were asked. */
+  readonly hints: readonly string[];
   readonly handedInAt: Date | null;
 }

@@ -6,10 +6,14 @@ import { CurrentAccount } from '../http/current-account.decorator.ts';
 import { Responds } from '../http/responds.decorator.ts';
 import {
   answerPracticeSchema,
+  askHintSchema,
+  hintSchema,
   practiceMarkedSchema,
   practiceViewSchema,
   startPracticeSchema,
   type AnswerPractice,
+  type AskHint,
+  type Hint,
   type PracticeMarked,
   type PracticeView,
   type StartPractice,
@@ -28,6 +32,17 @@ export class PracticeController {
     @Body({ schema: startPracticeSchema }) input: StartPractice,
   ): Promise<PracticeView> {
     return this.practice.start(account.id, input.question);
+  }
+
+  @Post(':id/hints')
+  @Allow('signed-in')
+  @Responds(200, hintSchema)
+  hint(
+    @CurrentAccount() account: SignedInAccount,
+    @Param('id', { schema: z.uuid() }) id: string,
+    @Body({ schema: askHintSchema }) input: AskHint,
+  ): Promise<Hint> {
+    return this.practice.hint(account.id, id, input.part);
   }
 
   @Post(':id/answers')

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
-import { InjectModel } from '@nestjs/sequelize';
+import { InjectConnection, InjectModel } from '@nestjs/sequelize';
 import type { MarkedQuestion } from '@ferrule/assessments';
+import { QueryTypes, Sequelize } from 'sequelize';
 import type { Answers } from '../questions/question-view.ts';
 import { PracticeAttemptModel } from './models/practice-attempt.model.ts';
 import type { KeptDraw, PracticeAttempt } from './practice-attempt.ts';
@@ -11,6 +12,7 @@ const MOST_LATEST = 200;
 export class PracticeRepository {
   constructor(
     @InjectModel(PracticeAttemptModel) private readonly attempts: typeof PracticeAttemptModel,
+    @InjectConnection() private readonly sequelize: Sequelize,
   ) {}
 
   async add(attempt: PracticeAttempt & { startedAt: Date }): Promise<void> {
@@ -21,8 +23,8 @@ export class PracticeRepository {
   async findOwned(id: string, accountId: string): Promise<PracticeAttempt | null> {
     const row = await this.attempts.findOne({ where: { id, accountId } });
     if (!row) return null;
-    const { questionRevisionId, drawn: kept, handedInAt } = row;
-    return Object.freeze({ id, accountId, questionRevisionId, kept, handedInAt });
+    const { questionRevisionId, drawn: kept, hints, handedInAt } = row;
+    return Object.freeze({ id, accountId, questionRevisionId, kept, hints, handedInAt });
   }
 
   async latest(accountId: string): Promise<KeptDraw[]> {
@@ -33,6 +35,17 @@ export class PracticeRepository {
       limit: MOST_LATEST,
     });
     return rows.map(({ drawn }) => drawn);
+  }
+
+  /** False when it was marked in the meantime. A part asked for twice is kept once. */
+  async keepHint(id: string, part: string): Promise<boolean> {
+    const rows = await this.sequelize.query(
+      `UPDATE practice_attempts
+          SET hints = CASE WHEN $2 = ANY (hints) THEN hints ELSE array_append(hints, $2) END
+        WHERE id = $1 AND handed_in_at IS NULL RETURNING id`,
+      { bind: [id, part], type: QueryTypes.SELECT },
+    );
+    return rows.length === 1;
   }
 
   /** False when it was marked in the meantime. */

@@ -1,4 +1,4 @@
-import { markQuestion } from '@ferrule/assessments';
+import { hintFor, markQuestion } from '@ferrule/assessments';
 import { Injectable } from '@nestjs/common';
 import { randomUUID } from 'node:crypto';
 import { Clock } from '../clock/clock.ts';
@@ -6,11 +6,11 @@ import { NotFound } from '../problems/common.errors.ts';
 import { AnswerUnclear } from '../questions/answers.errors.ts';
 import type { Answers } from '../questions/question-view.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
-import { requireKnownParts, unclearParts } from '../questions/read-answers.ts';
-import type { KeptDraw } from './practice-attempt.ts';
+import { requireKnownPart, requireKnownParts, unclearParts } from '../questions/read-answers.ts';
+import type { KeptDraw, PracticeAttempt } from './practice-attempt.ts';
 import { PracticeAnswered } from './practice.errors.ts';
 import { PracticeRepository } from './practice.repository.ts';
-import type { PracticeMarked, PracticeView } from './practice.schemas.ts';
+import type { Hint, PracticeMarked, PracticeView } from './practice.schemas.ts';
 
 /** One question in the middle of a sheet, to be tried as often as one likes. */
 @Injectable()
@@ -33,6 +33,7 @@ export class PracticeService {
       kept: { slug, drawn, view },
       startedAt: this.clock.now(),
       handedInAt: null,
+      hints: [],
     });
     return { id, question: view };
   }
@@ -48,9 +49,7 @@ export class PracticeService {
    * @throws {AnswerUnclear} when an answer must be asked back; it may then be given again.
    */
   async answer(accountId: string, id: string, answers: Answers): Promise<PracticeMarked> {
-    const attempt = await this.repository.findOwned(id, accountId);
-    if (!attempt) throw new NotFound();
-    if (attempt.handedInAt) throw new PracticeAnswered();
+    const attempt = await this.unmarked(accountId, id);
     const { drawn, view } = attempt.kept;
     requireKnownParts(view, answers);
     const unclear = unclearParts(view, answers);
@@ -60,6 +59,23 @@ export class PracticeService {
     const handedInAt = this.clock.now();
     const isKept = await this.repository.keepMarked(id, { answers, marked, handedInAt });
     if (!isKept) throw new PracticeAnswered();
-    return { marked };
+    return { marked, hints: [...attempt.hints] };
+  }
+
+  /** The formula a part begins with; that it was asked for is kept with the attempt. */
+  async hint(accountId: string, id: string, part: string): Promise<Hint> {
+    const { kept, questionRevisionId } = await this.unmarked(accountId, id);
+    requireKnownPart(kept.view, part);
+    const { question } = await this.questions.byRevision(questionRevisionId);
+    const line = hintFor(question, kept.drawn, part);
+    if (line && !(await this.repository.keepHint(id, part))) throw new PracticeAnswered();
+    return { line };
+  }
+
+  private async unmarked(accountId: string, id: string): Promise<PracticeAttempt> {
+    const attempt = await this.repository.findOwned(id, accountId);
+    if (!attempt) throw new NotFound();
+    if (attempt.handedInAt) throw new PracticeAnswered();
+    return attempt;
   }
 }

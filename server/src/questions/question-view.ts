@@ -10,7 +10,7 @@ import { z } from 'zod';
 const text = z.string();
 const texts = z.array(text);
 
-const lineSchema = z
+export const lineSchema = z
   .array(
     z.object({
       kind: z.enum(['symbol', 'number', 'unit', 'operator', 'text']),

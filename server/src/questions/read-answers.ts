@@ -18,6 +18,14 @@ export function requireKnownParts(question: QuestionView, answers: Answers): voi
   );
 }
 
+/** @throws {InvalidRequest} when the question has no such part. */
+export function requireKnownPart({ parts }: QuestionView, part: string): void {
+  const known = parts.map(({ id }) => id);
+  if (known.includes(part)) return;
+  const detail = `There is no part ${part}; the parts are ${known.join(', ')}.`;
+  throw new InvalidRequest([{ pointer: '#/part', detail }]);
+}
+
 /** How each part's answer is understood. It is compared with nothing. */
 export function readAnswers(question: QuestionView, answers: Answers): Record<string, Reading> {
   return Object.fromEntries(

@@ -18,7 +18,7 @@ import {
 } from '../../test/factories/worksheet.ts';
 import { signIn, stranger, type Caller } from '../../test/sign-in.ts';
 import { createTestApp, type TestApp } from '../../test/test-app.ts';
-import type { PracticeView } from '../practice/practice.schemas.ts';
+import type { Hint, PracticeView } from '../practice/practice.schemas.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
 import type { WorksheetView } from './worksheets.schemas.ts';
 
@@ -210,6 +210,22 @@ describe('a question to try', () => {
     expect(unclear.status).toBe(422);
     expect(unclear.body.unclear).toMatchObject([{ part: 'a', readings: ['1.234', '1234'] }]);
     expect((await answer(id, answersTo(question))).status).toBe(200);
+  });
+
+  it('gives the formula of a part as a hint, and keeps that it did', async () => {
+    const { id, question } = await start();
+    const hint = (part: string, from = trainee) =>
+      from.call('POST', `/api/practice/${id}/hints`, { part });
+    const { status, body } = await hint('b');
+    const said = (body as Hint).line?.map(({ text }) => text).join(' ');
+    expect([status, said]).toEqual([200, 'U_p = U_d × 2']);
+    expect((await hint('b')).body).toEqual(body);
+    expect((await hint('c')).body).toEqual({ line: null });
+    const other = await signIn(test.app, (await createAccount(test.app)).id);
+    expect((await hint('b', other)).status).toBe(404);
+    expect((await hint('z')).status).toBe(422);
+    expect((await answer(id, answersTo(question))).body.hints).toEqual(['b']);
+    expect((await hint('a')).body.type).toBe('/problems/practice-answered');
   });
 
   it('is not for others, and there is none of the paper pool', async () => {

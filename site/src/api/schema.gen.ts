@@ -765,7 +765,7 @@ export interface paths {
         };
         get: operations["Classes_list"];
         put?: never;
-        post?: never;
+        post: operations["Classes_open"];
         delete?: never;
         options?: never;
         head?: never;
@@ -894,6 +894,22 @@ export interface paths {
         get?: never;
         put?: never;
         post: operations["Practice_start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/practice/{id}/hints": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Practice_hint"];
         delete?: never;
         options?: never;
         head?: never;
@@ -1484,6 +1500,8 @@ export interface operations {
                     email: string;
                     password: string;
                     token: string;
+                    schoolName: string;
+                    schoolAddress: string;
                 };
             };
         };
@@ -3232,6 +3250,42 @@ export interface operations {
             };
         };
     };
+    Classes_open: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    name: string;
+                    /** Format: date */
+                    startsOn: string;
+                    /** Format: date */
+                    endsOn: string;
+                    trainers: string[];
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        class: {
+                            id: string;
+                            name: string;
+                            joinCode: string;
+                        };
+                    };
+                };
+            };
+        };
+    };
     Classes_join: {
         parameters: {
             query?: never;
@@ -3369,6 +3423,7 @@ export interface operations {
                             name: string;
                             email: string;
                         }[];
+                        joinCode: string | null;
                     };
                 };
             };
@@ -3688,6 +3743,35 @@ export interface operations {
             };
         };
     };
+    Practice_hint: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    part: string;
+                };
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        line: components["schemas"]["Line"] | null;
+                    };
+                };
+            };
+        };
+    };
     Practice_answer: {
         parameters: {
             query?: never;
@@ -3714,6 +3798,7 @@ export interface operations {
                 content: {
                     "application/json": {
                         marked: components["schemas"]["MarkedQuestion"];
+                        hints: string[];
                     };
                 };
             };

@@ -96,11 +96,36 @@ it('tells a reader of revision B that C is out', async () => {
   expect(screen.getByRole('button', { name: 'Mark sheet done' })).toBeVisible();
 });
 
+it('gives the formula of a part as a hint, and says so when it is marked', async () => {
+  serve('post', '/api/practice', { id: 'p1', question: makeQuestion() });
+  let asked: unknown;
+  serveWith('post', '/api/practice/p1/hints', (sent) => {
+    asked = sent;
+    const line = [
+      { kind: 'symbol', text: 'R' },
+      { kind: 'operator', text: '=' },
+      { kind: 'symbol', text: 'ρ' },
+    ];
+    return HttpResponse.json({ line });
+  });
+  serve('post', '/api/practice/p1/answers', { marked: makeMarked(), hints: ['a'] });
+  const { user } = renderRoute('/sheets/3.4');
+  const block = await screen.findByRole('region', { name: 'Try it' });
+  await user.click(within(block).getByRole('button', { name: 'Draw my figures' }));
+  const button = await within(block).findByRole('button', { name: 'Hint for (a)' });
+  await user.click(button);
+  await expect.poll(() => button.parentElement?.textContent).toContain('R = ρ');
+  expect(asked).toEqual({ part: 'a' });
+  expect(button).toHaveFocus();
+  await user.click(within(block).getByRole('button', { name: 'Mark it' }));
+  expect(await within(block).findByText('1 of 2 marks, with a hint.')).toBeVisible();
+});
+
 it('marks a tried question in place and asks back what cannot be read', async () => {
   serve('post', '/api/practice', { id: 'p1', question: makeQuestion() });
   let asked = false;
   serveWith('post', '/api/practice/p1/answers', () => {
-    if (asked) return HttpResponse.json({ marked: makeMarked() });
+    if (asked) return HttpResponse.json({ marked: makeMarked(), hints: [] });
     asked = true;
     return problemReply(422, 'answer-unclear', {
       unclear: [{ part: 'a', ask: 'Is 1,234 one thousand or one point two?', readings: [] }],

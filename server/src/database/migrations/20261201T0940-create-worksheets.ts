@@ -40,6 +40,7 @@ CREATE TABLE practice_attempts (
   account_id uuid NOT NULL REFERENCES accounts (id),
   question_revision_id uuid NOT NULL REFERENCES content_revisions (id),
   drawn jsonb NOT NULL,
+  hints text[] NOT NULL DEFAULT '{}',
   started_at timestamptz NOT NULL DEFAULT now(),
   handed_in_at timestamptz,
   answers jsonb,

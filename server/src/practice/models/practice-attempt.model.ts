@@ -15,6 +15,9 @@ export class PracticeAttemptModel extends Model {
   @Column({ type: DataType.JSONB })
   declare drawn: KeptDraw;
 
+  @Column({ type: DataType.ARRAY(DataType.TEXT), defaultValue: [] })
+  declare hints: string[];
+
   @Column({ type: DataType.DATE })
   declare startedAt: Date;
 

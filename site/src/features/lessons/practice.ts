@@ -15,6 +15,12 @@ export function answerPractice(id: string, answers: Answers) {
   );
 }
 
+export function askHint(id: string, part: string) {
+  return answerOf(
+    api.POST('/api/practice/{id}/hints', { params: { path: { id } }, body: { part } }),
+  );
+}
+
 /** What is asked back, by part; null when the refusal is another one. */
 export function unclearParts(error: unknown): Record<string, string> | null {
   const unclear = readUnclear(error);

@@ -7,6 +7,7 @@ import { CurveReader } from '../../ui/question/curve-reader.tsx';
 import { MarkedQuestion } from '../../ui/question/marked-question.tsx';
 import { QuestionCard, QuestionFacts } from '../../ui/question/question-card.tsx';
 import { type Answers } from '../../ui/question/views.ts';
+import { TryHint } from './try-hint.tsx';
 import { answerPractice, type PracticeView, startPractice, unclearParts } from './practice.ts';
 
 /** One practice question in the middle of the sheet, marked where it stands. */
@@ -74,7 +75,8 @@ function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
           <div className="action-strip">
             <p role="status">
               <b>
-                {mark.data.marked.marks} of {mark.data.marked.outOf} marks.
+                {mark.data.marked.marks} of {mark.data.marked.outOf} marks
+                {sayHints(mark.data.hints)}.
               </b>{' '}
               Practice: it counts for nothing.
             </p>
@@ -88,6 +90,9 @@ function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
             answers={answers}
             unclear={unclear ?? {}}
             curve={curve}
+            aside={({ id, kind }) =>
+              kind === 'quantity' && <TryHint practiceId={practice.id} part={id} />
+            }
             onChange={(part, answer) => setAnswers((kept) => ({ ...kept, [part]: answer }))}
           />
           {!unclear && <ProblemCallout error={mark.error} />}
@@ -107,6 +112,9 @@ function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
     </>
   );
 }
+
+const sayHints = (hints: readonly string[]) =>
+  hints.length === 0 ? '' : hints.length === 1 ? ', with a hint' : ', with hints';
 
 /** The button that was pressed is gone, so the focus goes to the heading of what took its place. */
 function useFocusOnTurn(isMarked: boolean) {

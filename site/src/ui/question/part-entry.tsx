@@ -1,4 +1,4 @@
-import { useId } from 'react';
+import { type ReactNode, useId } from 'react';
 import { ChoiceRows } from '../choice-row.tsx';
 import { QuantitySymbol } from '../quantity.tsx';
 import { InlineMarkdown } from './inline-markdown.tsx';
@@ -10,6 +10,8 @@ interface PartEntryProps {
   /** Asked back because what was typed can be read in more than one way, or in none. */
   unclear?: string | undefined;
   readOnly?: boolean;
+  /** Stands under the prompt: a hint. */
+  aside?: ReactNode;
   onChange: (answer: RawAnswer) => void;
   /** The entry was left, or a choice made: worth keeping now. */
   onLeave?: () => void;
@@ -26,6 +28,7 @@ export function PartEntry({ part, answer = blankAnswer, unclear, ...props }: Par
           <InlineMarkdown>{part.prompt}</InlineMarkdown>
           {part.rounding && <span className="part-rounding"> Give it {part.rounding}.</span>}
         </p>
+        {props.aside}
         {part.kind === 'choice' ? (
           <ChoiceRows
             name={id}

@@ -7,7 +7,7 @@ import { GivenTable } from './given-table.tsx';
 import { PartEntry } from './part-entry.tsx';
 import './question.css';
 import { Schematic } from './schematic.tsx';
-import { type Answers, type QuestionView, type RawAnswer } from './views.ts';
+import { type Answers, type PartView, type QuestionView, type RawAnswer } from './views.ts';
 
 interface QuestionCardProps {
   question: QuestionView;
@@ -17,6 +17,8 @@ interface QuestionCardProps {
   readOnly?: boolean;
   /** Drawn between the given values and the parts: the curve of a curve reading. */
   curve?: ReactNode;
+  /** What stands under the prompt of a part. */
+  aside?: (part: PartView) => ReactNode;
   onChange: (part: string, answer: RawAnswer) => void;
   onLeave?: (part: string) => void;
 }
@@ -35,6 +37,7 @@ export function QuestionCard({ question, answers, unclear = {}, ...props }: Ques
             answer={answers[part.id]}
             unclear={unclear[part.id]}
             readOnly={props.readOnly ?? false}
+            aside={props.aside?.(part)}
             onChange={(answer) => props.onChange(part.id, answer)}
             onLeave={() => props.onLeave?.(part.id)}
           />
