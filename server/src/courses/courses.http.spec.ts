@@ -37,6 +37,8 @@ describe('the front page', () => {
       school: { name: 'Harrow Quay Technical School' },
       course: { number: 'HQ-DC2', sheets: 2, units: 2, questions: 2, minutesToRead: 24 },
     });
+    expect(body.joinCode).toBe('QUAY-2026');
+    expect(JSON.stringify(body)).not.toMatch(/pass(word|phrase)/i);
     expect(body.people).toContainEqual({
       role: 'Trainer',
       name: 'Odile Marchetti',

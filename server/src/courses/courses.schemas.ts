@@ -13,7 +13,10 @@ export const frontSchema = z.object({
       minutesToRead: z.number(),
     })
     .nullable(),
+  /** Whom to sign in as; only in the demonstration. */
   people: z.array(z.object({ role: z.string(), name: z.string(), email: z.string() })),
+  /** Opens the class of the demonstration to whoever signs up. */
+  joinCode: z.string().nullable(),
 });
 export type Front = z.infer<typeof frontSchema>;
 

@@ -4,7 +4,12 @@ import { CONFIG } from '../config/config.module.ts';
 import type { Config } from '../config/config.schema.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
-import { demonstrationPeople, roleNames, type SeededPerson } from '../seed/people.ts';
+import {
+  demonstrationClass,
+  demonstrationPeople,
+  roleNames,
+  type SeededPerson,
+} from '../seed/people.ts';
 import type { Front } from './courses.schemas.ts';
 
 /** What anyone sees before signing in. */
@@ -25,6 +30,7 @@ export class FrontService {
       school: school ?? { name: course?.owner ?? '', address: '' },
       course: course?.facts ?? null,
       people: isDemonstration ? demonstrationPeople.map(introduce) : [],
+      joinCode: isDemonstration ? demonstrationClass.joinCode : null,
     };
   }
 

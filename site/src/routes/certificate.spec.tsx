@@ -13,6 +13,7 @@ function open(more: Partial<CertificateView> = {}) {
     school: { name: 'Harrow Quay Technical School', address: '12 Basin Road' },
     course: null,
     people: [],
+    joinCode: null,
   });
   return renderRoute('/certificates/c1');
 }

@@ -45,6 +45,7 @@ it('carries a check over from the front page', async () => {
     school: { name: 'Harrow Quay Technical School', address: 'The Old Ropewalk' },
     course: null,
     people: [],
+    joinCode: null,
   });
   serve('post', '/api/register/checks', valid);
   const { user } = renderRoute('/');

@@ -18,6 +18,7 @@ const front: FrontView = {
   people: [
     { role: 'trainee', name: 'Ifeoma Castellan', email: 'ifeoma.castellan@harrowquay.example' },
   ],
+  joinCode: 'QUAY-2026',
 };
 
 it('counts the course from the server and says what in the demonstration is invented', async () => {
@@ -26,6 +27,7 @@ it('counts the course from the server and says what in the demonstration is inve
   const list = await screen.findByRole('table', { name: 'What the course holds' });
   expect(within(list).getByRole('row', { name: /Lesson sheets/ })).toHaveTextContent('5');
   expect(screen.getByText(/Nobody is qualified for work/)).toBeVisible();
+  expect(screen.getByText('QUAY-2026')).toBeVisible();
   expect(screen.getByRole('cell', { name: 'ifeoma.castellan@harrowquay.example' })).toBeVisible();
 });
 

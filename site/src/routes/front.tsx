@@ -47,7 +47,9 @@ export function Component() {
           code on the certificate. No account needed.
         </p>
       </div>
-      {front.data?.demonstration && <Demonstration people={front.data.people} />}
+      {front.data?.demonstration && (
+        <Demonstration people={front.data.people} joinCode={front.data.joinCode} />
+      )}
       <p className="local-code">
         Ferrule trains and examines. Your local code and licensed practice come first: prove a
         circuit dead before you touch it, and have work signed off where the law asks for it.

@@ -1,7 +1,7 @@
 import { type FrontView } from '../../api/views.ts';
 
 /** Who may be tried out, and that none of it is real. */
-export function Demonstration({ people }: { people: FrontView['people'] }) {
+export function Demonstration({ people, joinCode }: Pick<FrontView, 'people' | 'joinCode'>) {
   return (
     <section className="demonstration" aria-labelledby="demonstration-title">
       <h2 id="demonstration-title">This is a demonstration</h2>
@@ -29,6 +29,12 @@ export function Demonstration({ people }: { people: FrontView['people'] }) {
             ))}
           </tbody>
         </table>
+      )}
+      {joinCode && (
+        <p>
+          Or sign up as somebody new and join the class with the code{' '}
+          <b className="mono">{joinCode}</b>.
+        </p>
       )}
       <p className="fine">
         Their passphrases are made anew for each installation and shown where it was started.
