@@ -21,6 +21,7 @@ import { PasswordReplacementService } from './password-replacement.service.ts';
 import { PasswordResetsService } from './password-resets.service.ts';
 import { PasswordsController } from './passwords.controller.ts';
 
+import { SchoolsRepository } from './schools.repository.ts';
 import { SignUpController } from './sign-up.controller.ts';
 import { SignUpService } from './sign-up.service.ts';
 
@@ -43,6 +44,7 @@ import { SignUpService } from './sign-up.service.ts';
     AccountTokensRepository,
     AccountTokensService,
     AccountsRepository,
+    SchoolsRepository,
     AddressAsksService,
     AdministratorClaimsService,
     CredentialsService,

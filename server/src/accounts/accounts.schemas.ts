@@ -24,6 +24,14 @@ const nameSchema = z
 const givenNameSchema = nameSchema.min(1, 'Give a name.');
 const familyNameSchema = nameSchema;
 
+/** As certificates print it. */
+const schoolLineSchema = z
+  .string()
+  .trim()
+  .max(200)
+  .regex(/^[^\p{Cc}\p{Zl}\p{Zp}<>]*$/u, 'Use one line of letters, digits and signs.')
+  .normalize('NFC');
+
 const emailSchema = z.string().trim().max(254).toLowerCase().pipe(z.email());
 const tokenSchema = z.string().min(1).max(200);
 
@@ -75,5 +83,9 @@ export type ChangeEmail = z.infer<typeof changeEmailSchema>;
 export const addressNowSchema = z.strictObject({ email: z.string() });
 export type AddressNow = z.infer<typeof addressNowSchema>;
 
-export const claimAdministratorSchema = signUpSchema.extend({ token: tokenSchema });
+export const claimAdministratorSchema = signUpSchema.extend({
+  token: tokenSchema,
+  schoolName: schoolLineSchema.min(1, 'Give the school’s name.'),
+  schoolAddress: schoolLineSchema.min(1, 'Give the school’s address, in one line.'),
+});
 export type ClaimAdministrator = z.infer<typeof claimAdministratorSchema>;

@@ -8,14 +8,16 @@ import { AccountTokensService } from './account-tokens.service.ts';
 import { AdministratorExists } from './accounts.errors.ts';
 import { AccountsRepository } from './accounts.repository.ts';
 import type { Accepted, ClaimAdministrator } from './accounts.schemas.ts';
+import { SchoolsRepository } from './schools.repository.ts';
 import { requireGoodPassword } from './password-choice.ts';
 import { hashPassword } from './passwords/password-hash.ts';
 
-/** The first administrator of a new installation, by the link its start prints. */
+/** The first administrator and the school of a new installation, by the link its start prints. */
 @Injectable()
 export class AdministratorClaimsService {
   constructor(
     private readonly accounts: AccountsRepository,
+    private readonly schools: SchoolsRepository,
     private readonly tokens: AccountTokensService,
     private readonly events: SecurityEventsService,
     private readonly transactions: Transactions,
@@ -24,7 +26,7 @@ export class AdministratorClaimsService {
 
   /** @throws {LinkNotValid | AdministratorExists} */
   async claim(
-    { token, password, ...person }: ClaimAdministrator,
+    { token, password, schoolName, schoolAddress, ...person }: ClaimAdministrator,
     source: RequestSource,
   ): Promise<Accepted> {
     await this.tokens.look('claim-administrator', token);
@@ -37,6 +39,7 @@ export class AdministratorClaimsService {
       const account = { ...person, passwordHash };
       const accountId = await this.accounts.addAdministrator(account, this.clock.now());
       if (accountId === null) throw emailTaken();
+      await this.schools.addUnlessThere({ name: schoolName, address: schoolAddress });
       await this.events.record({
         kind: 'administrator-claimed',
         accountId,

@@ -7,21 +7,36 @@ import {
   classListSchema,
   joinClassSchema,
   joinedClassSchema,
+  openClassSchema,
+  openedClassSchema,
   type ClassList,
   type JoinClass,
   type JoinedClass,
+  type OpenClass,
+  type OpenedClass,
 } from './classes.schemas.ts';
 import { ClassesService } from './classes.service.ts';
+import { OpeningService } from './opening.service.ts';
 
 @Controller('api')
 export class ClassesController {
-  constructor(private readonly classes: ClassesService) {}
+  constructor(
+    private readonly classes: ClassesService,
+    private readonly opening: OpeningService,
+  ) {}
 
   @Get('classes')
   @Allow('signed-in')
   @Responds(200, classListSchema)
   list(@CurrentAccount() account: SignedInAccount): Promise<ClassList> {
     return this.classes.listFor(account);
+  }
+
+  @Post('classes')
+  @Allow('administrator')
+  @Responds(201, openedClassSchema)
+  open(@Body({ schema: openClassSchema }) input: OpenClass): Promise<OpenedClass> {
+    return this.opening.open(input);
   }
 
   @Post('class-memberships')

@@ -7,6 +7,14 @@ export class JoinCodeUnknown extends DomainError {
   }
 }
 
+/** A class is a school's and follows a course: without both there is nothing to open. */
+export class ClassNotPossible extends DomainError {
+  readonly code = 'class-not-possible';
+  constructor(missing: string) {
+    super(`No class can be opened yet: ${missing}`);
+  }
+}
+
 export class AlreadyInClass extends DomainError {
   readonly code = 'already-in-class';
   constructor(name: string) {

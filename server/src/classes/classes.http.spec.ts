@@ -86,6 +86,48 @@ describe('joining a class', () => {
   );
 });
 
+describe('opening a class', () => {
+  const spring = { name: 'Spring class', startsOn: '2027-01-11', endsOn: '2027-04-02' };
+  const open = (caller: Caller, more: object = {}) =>
+    caller.call('POST', '/api/classes', { ...spring, trainers: [trainerAccount.email], ...more });
+  const desk = async () =>
+    signIn(test.app, (await createAccount(test.app, { roles: ['administrator'] })).id);
+
+  it('gives a code that trainees join by, and the class to its trainers', async () => {
+    const administrator = await desk();
+    const { status, body } = await open(administrator);
+    expect(status).toBe(201);
+    expect(body.class).toMatchObject({ name: 'Spring class' });
+    expect(body.class.joinCode).toMatch(/^[A-HJ-NP-Z2-9]{4}-[A-HJ-NP-Z2-9]{4}$/);
+    expect((await join((await createCandidate(test)).caller, body.class.joinCode)).status).toBe(
+      201,
+    );
+    for (const caller of [trainer, administrator]) {
+      expect((await caller.call('GET', '/api/classes')).body.classes).toContainEqual(
+        expect.objectContaining({ ...spring, joinCode: body.class.joinCode, members: 1 }),
+      );
+    }
+  });
+
+  it('is for administrators only', async () => {
+    const { caller } = await createCandidate(test);
+    expect((await open(caller)).status).toBe(403);
+    expect((await open(trainer)).status).toBe(403);
+    expect((await open(stranger(test.app))).status).toBe(401);
+  });
+
+  it.each<[string, object, string]>([
+    ['an address of no trainer', { trainers: ['nobody@school.example'] }, '#/trainers'],
+    ['no trainer at all', { trainers: [] }, '#/trainers'],
+    ['an end before the beginning', { endsOn: '2026-12-31' }, '#/endsOn'],
+    ['a day that is none', { startsOn: '2027-02-30' }, '#/startsOn'],
+    ['a nameless class', { name: ' ' }, '#/name'],
+  ])('refuses %s', async (_what, more, pointer) => {
+    const { status, body } = await open(await desk(), more);
+    expect([status, body.errors[0].pointer]).toEqual([422, pointer]);
+  });
+});
+
 describe('the list of classes', () => {
   it('tells the join code to trainers only', async () => {
     const { caller } = await member();

@@ -22,6 +22,8 @@ describe('the first administrator', () => {
       familyName: 'Oyelaran',
       email: 'marit@school.example',
       password: PASSPHRASE,
+      schoolName: 'Tidewater College of Trades',
+      schoolAddress: '1 Slip Lane, Tidewater',
       ...more,
     });
 
@@ -32,6 +34,9 @@ describe('the first administrator', () => {
     expect(link).toMatch(/^http:\/\/127\.0\.0\.1:4780\/first-administrator#[\w-]{43}$/);
     expect((await claim(older ?? '')).status).toBe(410);
     expect((await claim(link ?? '', { password: 'short' })).status).toBe(422);
+    expect((await claim(link ?? '', { schoolName: ' ' })).body.errors[0].pointer).toBe(
+      '#/schoolName',
+    );
     const taken = await createAccount(test.app);
     expect((await claim(link ?? '', { email: taken.email })).body.errors[0].pointer).toBe(
       '#/email',
@@ -41,6 +46,10 @@ describe('the first administrator', () => {
       claim(link ?? '', { email: 'other@school.example' }),
     ]);
     expect(replies.map(({ status }) => status).sort()).toEqual([201, 410]);
+    const front = await stranger(test.app).call('GET', '/api/front');
+    expect(front.body.school).toEqual({
+      ...{ name: 'Tidewater College of Trades', address: '1 Slip Lane, Tidewater' },
+    });
     expect(await makeAdministratorLink(test.database.webUrl, PUBLIC_URL)).toBeNull();
     const held = await test.query(
       `SELECT a.given_name, r.role FROM account_roles r JOIN accounts a ON a.id = r.account_id WHERE r.role = 'administrator'`,

@@ -12,6 +12,7 @@ export const catalogue: Record<string, { status: number; title: string }> = {
   // classes, lessons, practice, worksheets
   'already-in-class': { status: 409, title: 'In this class already' },
   'answer-unclear': { status: 422, title: 'Some answers cannot be read' },
+  'class-not-possible': { status: 409, title: 'No class can be opened yet' },
   'join-code-unknown': { status: 404, title: 'No class has this code' },
   'lesson-revised': { status: 409, title: 'A newer revision is out' },
   'practice-answered': { status: 409, title: 'Marked already' },

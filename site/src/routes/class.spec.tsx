@@ -1,4 +1,5 @@
 import { screen, within } from '@testing-library/react';
+import { HttpResponse } from 'msw';
 import { beforeEach, expect, it } from 'vitest';
 import { problemReply, serve, serveWith, signInAs } from '../testing/api-server.ts';
 import { makeClass, makeMember } from '../testing/classes.ts';
@@ -107,4 +108,26 @@ it('says when there is no class, and offers to try again when the list fails', a
   serve('get', '/api/classes', { classes: [] });
   await user.click(screen.getByRole('button', { name: 'Try again' }));
   expect(await screen.findByText('No class yet')).toBeVisible();
+});
+
+it('opens a class for an administrator and tells its code', async () => {
+  signInAs(['administrator']);
+  serve('get', '/api/classes', { classes: [] });
+  let sent: unknown;
+  serveWith('post', '/api/classes', (body) => {
+    sent = body;
+    const opened = { id: 'c9', name: 'Spring class', joinCode: 'K7QM-X3RT' };
+    return HttpResponse.json({ class: opened }, { status: 201 });
+  });
+  const { user } = renderRoute('/classes');
+  await user.type(await screen.findByLabelText('Name of the class'), 'Spring class');
+  await user.type(screen.getByLabelText('First day'), '2027-01-11');
+  await user.type(screen.getByLabelText('Last day'), '2027-04-02');
+  await user.type(screen.getByLabelText('Emails of its trainers'), 'a@s.example, b@s.example');
+  await user.click(screen.getByRole('button', { name: 'Open the class' }));
+  expect(await screen.findByText('K7QM-X3RT')).toBeVisible();
+  expect(sent).toEqual({
+    ...{ name: 'Spring class', startsOn: '2027-01-11', endsOn: '2027-04-02' },
+    trainers: ['a@s.example', 'b@s.example'],
+  });
 });

@@ -2,6 +2,7 @@ import '../features/classes/classes.css';
 import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { type LoaderArgs, requireSession, sessionQuery } from '../api/session.ts';
 import { ClassList } from '../features/classes/class-list.tsx';
+import { OpenClass } from '../features/classes/open-class.tsx';
 import { classesQuery } from '../features/classes/queries.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
@@ -13,6 +14,8 @@ export async function loader(args: LoaderArgs) {
 }
 
 export function Component() {
+  const { data: session } = useSuspenseQuery(sessionQuery);
+  const opensAll = session?.account.roles.includes('administrator') ?? false;
   return (
     <Sheet width="wide" flat>
       <PageTitle>Classes</PageTitle>
@@ -20,23 +23,24 @@ export function Component() {
         title="Classes"
         standfirst="The classes you train. Give the code to your trainees: with it they join from their course map."
       />
-      <Classes />
+      <Classes opensAll={opensAll} />
+      {opensAll && <OpenClass />}
     </Sheet>
   );
 }
 
-function Classes() {
+function Classes({ opensAll }: { opensAll: boolean }) {
   const list = useQuery(classesQuery);
-  const { data: session } = useSuspenseQuery(sessionQuery);
   if (list.isPending) return <RuledLines what="the classes" />;
   if (list.isError) return <FailedState error={list.error} retry={() => void list.refetch()} />;
   if (list.data.classes.length === 0) {
     return (
       <EmptyState title="No class yet">
-        You train no class so far. The school sets classes up and names their trainers.
+        {opensAll
+          ? 'Open the first one below.'
+          : 'You train no class so far. The school sets classes up and names their trainers.'}
       </EmptyState>
     );
   }
-  const opensAll = session?.account.roles.includes('administrator') ?? false;
   return <ClassList classes={list.data.classes} opensAll={opensAll} />;
 }

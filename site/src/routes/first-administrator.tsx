@@ -40,6 +40,8 @@ export function Component() {
 }
 
 interface Claim {
+  schoolName: string;
+  schoolAddress: string;
   givenName: string;
   familyName: string;
   email: string;
@@ -76,9 +78,10 @@ function ClaimForm() {
     <Form
       label="The first administrator"
       problem={claim.error}
-      onSubmit={({ givenName = '', familyName = '', email = '', password = '' }) =>
-        claim.mutate({ givenName, familyName, email, password })
-      }
+      onSubmit={({ givenName = '', familyName = '', email = '', password = '', ...school }) => {
+        const { schoolName = '', schoolAddress = '' } = school;
+        claim.mutate({ givenName, familyName, email, password, schoolName, schoolAddress });
+      }}
     >
       <NameFields />
       <FormField
@@ -90,6 +93,24 @@ function ClaimForm() {
         missing="Type the address you will sign in with."
       />
       <NewPassphraseField />
+      <FormField
+        name="schoolName"
+        label="Name of the school"
+        autoComplete="organization"
+        maxLength={200}
+        hint="Certificates print it."
+        required
+        missing="Type the school’s name as certificates should print it."
+      />
+      <FormField
+        name="schoolAddress"
+        label="Address of the school"
+        autoComplete="street-address"
+        maxLength={200}
+        hint="In one line."
+        required
+        missing="Type the school’s address, in one line."
+      />
       <Button type="submit" size="3" disabled={claim.isPending}>
         {claim.isPending ? 'Opening the account' : 'Open the account'}
       </Button>

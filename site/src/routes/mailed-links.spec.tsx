@@ -30,7 +30,10 @@ it('makes the first administrator with the link of the first start', async () =>
   await user.type(screen.getByLabelText('Family name'), 'Oyelaran');
   await user.type(screen.getByLabelText('Email'), 'marit@harrowquay.example');
   await user.type(screen.getByLabelText('Passphrase'), 'tin kettle');
+  await user.type(screen.getByLabelText('Name of the school'), 'Tidewater College');
+  await user.type(screen.getByLabelText('Address of the school'), '1 Slip Lane');
   await user.click(screen.getByRole('button', { name: 'Open the account' }));
   expect(await screen.findByText('The account is open.')).toBeVisible();
-  expect(sent).toMatchObject({ token: 'start-token', givenName: 'Marit' });
+  const school = { schoolName: 'Tidewater College', schoolAddress: '1 Slip Lane' };
+  expect(sent).toMatchObject({ token: 'start-token', givenName: 'Marit', ...school });
 });

@@ -6,7 +6,7 @@ import { PassRule } from './pass-rule.tsx';
 interface FormFieldProps {
   name: string;
   label: ReactNode;
-  type?: 'text' | 'email' | 'password' | 'search';
+  type?: 'text' | 'email' | 'password' | 'search' | 'date';
   hint?: ReactNode;
   required?: boolean;
   /** Said when a required field is empty. */

@@ -11,6 +11,15 @@ export const classesQuery = queryOptions({
   queryFn: ({ signal }) => answerOf(api.GET('/api/classes', { signal })),
 });
 
+interface NewClass {
+  name: string;
+  startsOn: string;
+  endsOn: string;
+  trainers: string[];
+}
+
+export const openClass = (body: NewClass) => answerOf(api.POST('/api/classes', { body }));
+
 export const classQuery = (id: string) =>
   queryOptions({
     queryKey: ['class', id],

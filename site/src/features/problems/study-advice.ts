@@ -11,6 +11,11 @@ export const studyAdvice: Record<string, Advice> = {
     steps: ['Nothing more to do: the course map is yours.'],
     link: toMap,
   },
+  'class-not-possible': {
+    title: 'No class can be opened yet',
+    means: 'A class belongs to a school and follows a published course; one of them is missing.',
+    steps: ['Publish the lessons and enter the school where the server is run, then try again.'],
+  },
   'join-code-unknown': {
     title: 'No class has this code',
     means: 'The code may be mistyped, or the class is over.',
