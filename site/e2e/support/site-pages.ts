@@ -26,8 +26,7 @@ const dropForeignFile = (page: Page) =>
     buffer: Buffer.from('%PDF-1.7\n% Not a certificate.\n%%EOF\n'),
   });
 
-const link = (name: 'validLink' | 'expiredLink' | 'withdrawnLink') => (held: Held) =>
-  `check/${held[name]}`;
+const link = (name: 'expiredLink' | 'withdrawnLink') => (held: Held) => `check/${held[name]}`;
 
 export const visitorPages: SitePage[] = [
   { route: '', heading: /^The handbook for DC installers/ },
@@ -51,7 +50,6 @@ export const visitorPages: SitePage[] = [
   { route: 'check', heading: 'Check a certificate' },
   { route: 'check', heading: 'Not on the register', after: checkTyped },
   { route: 'check', heading: 'Not signed', after: dropForeignFile },
-  { route: 'check/:code', at: link('validLink'), heading: 'Valid' },
   { route: 'check/:code', at: link('expiredLink'), heading: 'Expired' },
   { route: 'check/:code', at: link('withdrawnLink'), heading: 'Withdrawn' },
   { route: 'check/:code', at: `check/${'A'.repeat(22)}`, heading: 'Not on the register' },
