@@ -17,12 +17,11 @@ try {
   const withPaperPool = process.env['DEMONSTRATION'] === '1';
   const report = await publish(ownerUrl, { lessons, assessments, withPaperPool });
   for (const name of report.published) console.log(`Published ${name}.`);
-  if (report.leftOut > 0) {
-    console.log(
-      `Left out ${report.leftOut} sample paper questions: a school keeps its paper pool in its database only.`,
-    );
-  }
-  console.log(`${report.published.length} published, ${report.unchanged} unchanged.`);
+  const leftOut =
+    report.leftOut > 0
+      ? ` ${report.leftOut} sample paper questions left out: a school keeps its paper pool in its database only.`
+      : '';
+  console.log(`${report.published.length} published, ${report.unchanged} unchanged.${leftOut}`);
 } catch (error) {
   if (!(error instanceof ContentNotInOrder)) throw error;
   console.error(error.message);
