@@ -24,14 +24,33 @@ test.describe.configure({ mode: 'parallel', timeout: 240_000 });
 async function examineAll(watch: Watch, pages: SitePage[]): Promise<string[]> {
   const held = await findHeld();
   const found: string[] = [];
-  for (const { route, at = route, heading, after } of pages) {
-    await watch.page.goto(`/${typeof at === 'string' ? at : at(held)}`);
+  for (const [index, { route, at = route, heading, after }] of pages.entries()) {
+    const path = `/${typeof at === 'string' ? at : at(held)}`;
+    if (index === 0) await watch.page.goto(path);
+    else await turnTo(watch, path);
     await watch.settle();
     await after?.(watch.page);
     await expect(watch.page.locator('main h1')).toHaveText(heading);
     found.push(...(await examine(watch)));
   }
   return [...found, ...watch.complaints];
+}
+
+/** As a link within the site does: another page is read from its heading. */
+async function turnTo(watch: Watch, path: string): Promise<void> {
+  const { page } = watch;
+  const isOther = await page.evaluate((to) => {
+    const { pathname } = location;
+    if (document.activeElement instanceof HTMLElement) document.activeElement.blur();
+    history.pushState(null, '', to);
+    dispatchEvent(new PopStateEvent('popstate'));
+    return location.pathname !== pathname;
+  }, path);
+  if (!isOther) return;
+  await expect.soft(page.locator('main h1'), path).toBeFocused();
+  await watch.settle();
+  // What was waited for may have brought another heading.
+  await expect.soft(page.locator('main h1'), path).toBeFocused();
 }
 
 async function tabOf(browser: Browser, email?: string): Promise<Watch> {

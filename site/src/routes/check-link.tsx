@@ -6,6 +6,7 @@ import { isProblem } from '../api/problem.ts';
 import { CheckFromHere } from '../features/register/number-form.tsx';
 import { linkQuery } from '../features/register/queries.ts';
 import { WholeAnswer } from '../features/register/register-desk.tsx';
+import { useFocusAfterWait } from '../ui/focus-on-heading.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { RuledLines } from '../ui/states.tsx';
@@ -14,6 +15,7 @@ import { RuledLines } from '../ui/states.tsx';
 export function Component() {
   const { code = '' } = useParams();
   const check = useQuery(linkQuery(code));
+  useFocusAfterWait(!check.isPending);
   return (
     <Sheet width="narrow" busy={check.isPending}>
       <PageTitle>Certificate check</PageTitle>

@@ -1,7 +1,6 @@
 import '../features/results/results.css';
 import { Button } from '@radix-ui/themes';
 import { useQuery } from '@tanstack/react-query';
-import { useEffect, useRef } from 'react';
 import { Link, redirect, useLocation, useParams } from 'react-router-dom';
 import { cacheOf, type LoaderArgs, requireSession } from '../api/session.ts';
 import { MarksTable } from '../features/results/marks-table.tsx';
@@ -11,7 +10,7 @@ import { ResultCertificate } from '../features/results/result-certificate.tsx';
 import { ResultVerdict } from '../features/results/result-verdict.tsx';
 import { sittingQuery } from '../features/sittings/queries.ts';
 import { sayDate, sayDateInFull, sayMoment } from '../ui/dates.ts';
-import { focusOnHeading } from '../ui/focus-on-heading.ts';
+import { useFocusAfterWait } from '../ui/focus-on-heading.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { FailedState } from '../ui/states.tsx';
@@ -33,7 +32,7 @@ export async function loader(args: LoaderArgs) {
 export function Component() {
   const { id = '' } = useParams();
   const { data: result, error, refetch } = useQuery(resultQuery(id));
-  useFocusOnMarks(Boolean(result));
+  useFocusAfterWait(Boolean(result));
   if (error && !result) {
     return (
       <Sheet>
@@ -44,16 +43,6 @@ export function Component() {
     );
   }
   return result ? <Result result={result} /> : <BeingMarked />;
-}
-
-/** The marks take the place of the heading that was waited at: whoever was there reads on from theirs. */
-function useFocusOnMarks(isMarked: boolean) {
-  const wasMarked = useRef(isMarked);
-  useEffect(() => {
-    if (!isMarked || wasMarked.current) return;
-    wasMarked.current = true;
-    if (document.activeElement === document.body) focusOnHeading();
-  }, [isMarked]);
 }
 
 /** The paper is in; the marks follow within seconds. */
