@@ -13,6 +13,13 @@ const bannedSyntax = [
   },
 ];
 
+/** Named constants may stand in a statement; values are bound. */
+const builtSql = {
+  selector:
+    'CallExpression[callee.property.name="query"] > TemplateLiteral.arguments > :not(Identifier[name=/^[A-Z][A-Z_]+$/]).expressions',
+  message: 'Bind values; never build SQL from strings.',
+};
+
 export default tseslint.config(
   {
     ignores: ['**/dist/**', '**/dist-types/**', '**/node_modules/**', '.data/**', '**/*.gen.ts'],
@@ -43,7 +50,10 @@ export default tseslint.config(
       'max-lines-per-function': ['error', { max: 50, skipBlankLines: true, skipComments: true }],
       'max-params': ['error', 3],
       complexity: ['error', 10],
-      'no-restricted-syntax': ['error', ...bannedSyntax],
+      'no-eval': 'error',
+      'no-new-func': 'error',
+      '@typescript-eslint/no-implied-eval': 'error',
+      'no-restricted-syntax': ['error', ...bannedSyntax, builtSql],
     },
   },
   {
@@ -77,6 +87,7 @@ export default tseslint.config(
       'max-lines-per-function': 'off',
       '@typescript-eslint/no-unsafe-assignment': 'off',
       '@typescript-eslint/no-unsafe-member-access': 'off',
+      'no-restricted-syntax': ['error', ...bannedSyntax],
     },
   },
 );

@@ -33,6 +33,8 @@ export interface Correction {
 }
 
 /** Writes decisions, certificates and what happens to them. Nothing here is ever changed. */
+const STATE_NOW = stateAt('$3');
+
 @Injectable()
 export class CertificatesRepository {
   constructor(
@@ -163,7 +165,7 @@ export class CertificatesRepository {
   async findHeld(accountId: string, schemeSlug: string, now: Date): Promise<string | null> {
     const rows = await this.sequelize.query<{ id: string }>(
       `SELECT c.id FROM certificates c JOIN schemes s ON s.id = c.scheme_id
-        WHERE c.account_id = $1 AND s.slug = $2 AND ${stateAt('$3')} = 'valid'
+        WHERE c.account_id = $1 AND s.slug = $2 AND ${STATE_NOW} = 'valid'
         ORDER BY c.expires_on DESC, c.issued_at DESC LIMIT 1`,
       { bind: [accountId, schemeSlug, now], type: QueryTypes.SELECT },
     );

@@ -144,8 +144,13 @@ describe('a candidate', () => {
     await markWaiting(test);
     await caller.call('GET', `/api/sittings/${paper.id}`);
     const result = await caller.call('GET', `/api/sittings/${paper.id}/result`);
-    expect(result.body.passed).toBe(true);
-    expect(result.body.marks).toBeLessThan(result.body.outOf);
+    const { passed, marks, outOf } = result.body as {
+      passed: boolean;
+      marks: number;
+      outOf: number;
+    };
+    expect(passed).toBe(true);
+    expect(marks).toBeLessThan(outOf);
     const letters = await test.query<{ subject: string; body_text: string; body_html: string }>(
       'SELECT subject, body_text, body_html FROM mail_messages WHERE account_id = $1',
       [person.account.id],
