@@ -1,5 +1,5 @@
 import AxeBuilder from '@axe-core/playwright';
-import { type Page, type Request } from '@playwright/test';
+import { expect, type Page, type Request } from '@playwright/test';
 
 const looks = [
   { scheme: 'light', width: 1440 },
@@ -35,9 +35,13 @@ export class Watch {
 
   /** Nothing is being fetched and no part of the page is busy. */
   async settle(): Promise<void> {
-    const isBusy = this.page.locator('[aria-busy="true"]');
-    for (let quiet = 0; quiet < 2;) {
-      quiet = this.underWay.size === 0 && (await isBusy.count()) === 0 ? quiet + 1 : 0;
+    const standing = async () => ({
+      busy: await this.page.locator('[aria-busy="true"]').count(),
+      awaited: [...this.underWay].map((request) => request.url()),
+    });
+    // Twice, since what has just come may ask for more.
+    for (let quiet = 0; quiet < 2; quiet += 1) {
+      await expect.poll(standing, { intervals: [20] }).toEqual({ busy: 0, awaited: [] });
       await this.page.waitForTimeout(20);
     }
     await this.page.evaluate(() => document.fonts.ready.then(() => undefined));
