@@ -3,6 +3,8 @@ import { query } from './stack.ts';
 /** Ids of what the demonstration holds, for the pages that have one in their address. */
 export interface Held {
   markedWorksheet: string;
+  /** With a curve of charge beside the marks. */
+  markedCurve: string;
   class: string;
   trainee: string;
   failedSitting: string;
@@ -16,14 +18,17 @@ export interface Held {
 }
 
 const heldSql = `
-WITH named AS (
+WITH marked AS (
+  SELECT w.id, w.worksheet, a.family_name AS worker
+    FROM worksheet_attempts w JOIN accounts a ON a.id = w.account_id
+   WHERE w.handed_in_at IS NOT NULL),
+named AS (
   SELECT c.id, c.link_code, c.holder_name AS holder, d.decided_at
     FROM certificates c JOIN decisions d ON d.id = c.decision_id),
 latest AS (SELECT * FROM named WHERE holder LIKE 'Priya V%' ORDER BY decided_at DESC LIMIT 1)
 SELECT
-  (SELECT w.id FROM worksheet_attempts w JOIN accounts a ON a.id = w.account_id
-    WHERE a.family_name = 'Castellan' AND w.worksheet = 'W3' AND w.handed_in_at IS NOT NULL
-    LIMIT 1) AS "markedWorksheet",
+  (SELECT id FROM marked WHERE worker = 'Castellan' AND worksheet = 'W3') AS "markedWorksheet",
+  (SELECT id FROM marked WHERE worker = 'Quist' AND worksheet = 'W5') AS "markedCurve",
   (SELECT id FROM classes WHERE join_code = 'QUAY-2026') AS "class",
   (SELECT id FROM accounts WHERE family_name = 'Castellan') AS trainee,
   (SELECT s.id FROM sittings s JOIN accounts a ON a.id = s.account_id

@@ -26,6 +26,17 @@ const dropForeignFile = (page: Page) =>
     buffer: Buffer.from('%PDF-1.7\n% Not a certificate.\n%%EOF\n'),
   });
 
+const drawFigures = async (page: Page) => {
+  await page.getByRole('button', { name: 'Draw my figures' }).click();
+  await page.getByLabel('Answer to (a)').waitFor();
+};
+
+const openItems = async (page: Page) => {
+  await page.getByLabel('Reason, kept with the look').fill('An appeal.');
+  await page.getByRole('button', { name: 'Open the items' }).click();
+  await page.locator('.marked').first().waitFor();
+};
+
 const link = (name: 'expiredLink' | 'withdrawnLink') => (held: Held) => `check/${held[name]}`;
 
 export const visitorPages: SitePage[] = [
@@ -61,6 +72,12 @@ export const traineePages: SitePage[] = [
   { route: 'course', heading: /^Auxiliary DC systems/ },
   { route: 'sheets/:number', at: 'sheets/1.4', heading: 'Isolate, lock, prove dead' },
   { route: 'sheets/:number', at: 'sheets/3.4', heading: 'The long run' },
+  {
+    route: 'sheets/:number',
+    at: 'sheets/3.4',
+    heading: 'The long run',
+    after: drawFigures,
+  },
   { route: 'sheets/:number', at: 'sheets/4.1', heading: 'What a conductor can carry' },
   { route: 'sheets/:number', at: 'sheets/5.6', heading: 'Reading a charge curve' },
   { route: 'sheets/:number', at: 'sheets/6.7', heading: 'Three meters, one current' },
@@ -97,6 +114,11 @@ export const holderPages: SitePage[] = [
     heading: 'Auxiliary DC systems installer',
   },
   { route: 'record', heading: 'My record' },
+  {
+    route: 'worksheet-attempts/:id',
+    at: ({ markedCurve }) => `worksheet-attempts/${markedCurve}`,
+    heading: 'Name the stage',
+  },
 ];
 
 export const trainerPages: SitePage[] = [
@@ -120,6 +142,12 @@ export const managerPages: SitePage[] = [
     route: 'results',
     at: ({ failedSitting }) => `results?sitting=${failedSitting}`,
     heading: 'Results',
+  },
+  {
+    route: 'results',
+    at: ({ failedSitting }) => `results?sitting=${failedSitting}`,
+    heading: 'Results',
+    after: openItems,
   },
 ];
 
