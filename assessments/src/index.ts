@@ -1,5 +1,6 @@
 export type * from './questions/types.ts';
 export type * from './papers/types.ts';
+export * as electrical from './electrical/index.ts';
 export { SheetInvalid } from './sheets/errors.ts';
 export { parseQuestion } from './questions/sheet.ts';
 export { drawQuestion } from './questions/draw.ts';

@@ -9,7 +9,8 @@ import {
   type Unit as MathUnit,
 } from 'mathjs';
 import { type Expr, ExpressionRefused, isComparison, type Operator } from './expression.ts';
-import { FUNCTIONS, type TradeFunction } from './functions.ts';
+import { FUNCTIONS } from './functions.ts';
+import { type TradeFunction } from './trade-function.ts';
 import { type Dimension, NO_DIMENSION, sameDimension } from './units.ts';
 
 /** What an expression gives: a quantity of a dimension, or a yes or no. */

@@ -22,7 +22,7 @@ const VALUES = new Map([
 ]);
 
 const read = (text: string): Expr => readExpression(text, NAMES);
-const work = (text: string): number => evaluate(read(text), VALUES);
+const work = (text: string): number => evaluate(read(text), VALUES, 'metric');
 
 describe('expressions', () => {
   it.each([
@@ -66,7 +66,7 @@ describe('expressions', () => {
         const js = text.replace(/[a-z]+/g, (name) => String(VALUES.get(name)));
         // The oracle: arithmetic spelled out as nested calls, worked on the same digits.
         const expected = workByHand(js);
-        const found = compile(read(text))(VALUES);
+        const found = compile(read(text), 'metric')(VALUES);
         if (Number.isFinite(expected)) expect(found).toBeCloseTo(expected, 9);
         else expect(Number.isFinite(found)).toBe(false);
       }),

@@ -14,7 +14,7 @@ export function slipValues(
       .filter((made) => made.step === step)
       .flatMap(({ expr }) => {
         try {
-          return [{ slip: index, value: evaluate(expr, values) }];
+          return [{ slip: index, value: evaluate(expr, values, question.profile) }];
         } catch {
           return [];
         }
@@ -47,11 +47,14 @@ export function workRounded(
   if (earlier.length === 0) return null;
   try {
     for (const { name, unit, how } of earlier) {
-      const value = how.kind === 'sum' ? evaluate(how.expr, values) : (values.get(name) ?? NaN);
+      const value =
+        how.kind === 'sum'
+          ? evaluate(how.expr, values, question.profile)
+          : (values.get(name) ?? NaN);
       values.set(name, toSi(Number(fromSi(value, unit).toPrecision(by.figures)), unit));
     }
     const step = question.steps.find(({ name }) => name === target);
-    return step?.how.kind === 'sum' ? evaluate(step.how.expr, values) : null;
+    return step?.how.kind === 'sum' ? evaluate(step.how.expr, values, question.profile) : null;
   } catch {
     return null;
   }

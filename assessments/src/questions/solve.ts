@@ -34,7 +34,7 @@ export function solve(
     if (values.has(step.name) || step.how.kind === 'read') continue;
     if (wanted && !wanted.has(step.name)) continue;
     try {
-      values.set(step.name, evaluate(step.how.expr, values));
+      values.set(step.name, evaluate(step.how.expr, values, question.profile));
     } catch (error) {
       throw error instanceof NotFinite ? new NotFinite(`Step ${step.name}`) : error;
     }
@@ -45,5 +45,5 @@ export function solve(
 /** Whether a condition holds; the steps it leans on are worked first. */
 export function holds(question: Compiled, condition: Expr, known: Map<string, number>): boolean {
   const values = solve(question, known, leansOn(question, namesIn(condition)));
-  return evaluate(condition, values) === 1;
+  return evaluate(condition, values, question.profile) === 1;
 }
