@@ -1,9 +1,11 @@
 import { CONDUCTOR_FUNCTIONS } from './functions-conductors.ts';
 import { CORE_FUNCTIONS } from './functions-core.ts';
+import { SOLAR_FUNCTIONS } from './functions-solar.ts';
 import { type TradeFunction } from './trade-function.ts';
 
 /** Functions a sheet may call, one list a topic. */
 export const FUNCTIONS: ReadonlyMap<string, TradeFunction> = new Map<string, TradeFunction>([
   ...CORE_FUNCTIONS,
   ...CONDUCTOR_FUNCTIONS,
+  ...SOLAR_FUNCTIONS,
 ]);
