@@ -43,15 +43,19 @@ function SignalStrip() {
 /** A paper being sat says itself what the signal means for it. */
 const isBeingSat = (pathname: string) => /^\/sittings\/[^/]+(\/review)?$/.test(pathname);
 
-/** A new page begins at its heading, for the keyboard and for a screen reader alike. */
+/**
+ * A new page begins at its heading, for the keyboard and for a screen reader alike; where the
+ * address names a paragraph, the page itself begins there.
+ */
 function useFocusOnArrival() {
-  const { pathname } = useLocation();
+  const { pathname, hash } = useLocation();
   const isFirst = useRef(true);
+  const namesParagraph = /^#p\d+$/.test(hash);
   useEffect(() => {
     if (isFirst.current) {
       isFirst.current = false;
       return;
     }
-    focusOnHeading({ preventScroll: true });
-  }, [pathname]);
+    if (!namesParagraph) focusOnHeading({ preventScroll: true });
+  }, [pathname, namesParagraph]);
 }

@@ -142,3 +142,16 @@ it('marks a tried question in place and asks back what cannot be read', async ()
   expect(await within(block).findByText('1 of 2 marks.')).toBeVisible();
   expect(within(block).getByText('Mark lost:', { exact: false })).toBeInTheDocument();
 });
+
+it('brings the paragraph that the address names into sight, marks it and reads from there', async () => {
+  const scrollIntoView = vi.fn();
+  Element.prototype.scrollIntoView = scrollIntoView;
+  renderRoute('/sheets/3.4#p2');
+  const row = (await screen.findByText('A conductor is a resistor.')).closest('.sheet-row');
+  expect(row).toHaveClass('named');
+  expect(row).toHaveFocus();
+  expect(scrollIntoView).toHaveBeenCalled();
+  expect(screen.getByText('Stand at the fuse board.').closest('.sheet-row')).not.toHaveClass(
+    'named',
+  );
+});

@@ -9,6 +9,7 @@ import { LessonAims, LessonEnd } from '../features/lessons/lesson-end.tsx';
 import { LessonText } from '../features/lessons/lesson-text.tsx';
 import { lessonQuery, type LessonView, progressQuery } from '../features/lessons/queries.ts';
 import { useReadingProgress } from '../features/lessons/reading-progress.ts';
+import { useNamedParagraph } from '../features/lessons/named-paragraph.ts';
 import { RevisionNotice } from '../features/lessons/revision-notice.tsx';
 import { SeatStrip } from '../features/lessons/seat-strip.tsx';
 import { sayDate } from '../ui/dates.ts';
@@ -41,6 +42,7 @@ function LessonSheet({ number }: { number: string }) {
   const { data: progress } = useSuspenseQuery(progressQuery(number));
   const { data: map } = useSuspenseQuery(courseQuery);
   useReadingProgress(number, progress);
+  const named = useNamedParagraph();
   return (
     <>
       <Sheet edge={<Units map={map} unit={lesson.unit.number} />}>
@@ -54,7 +56,7 @@ function LessonSheet({ number }: { number: string }) {
         <RevisionNotice progress={progress} />
         <LessonAims can={lesson.can} />
         <article className="lesson" lang={lesson.language} aria-label={lesson.title}>
-          <LessonText lesson={lesson} />
+          <LessonText lesson={lesson} named={named} />
         </article>
         <LessonEnd lesson={lesson} />
         <SeatStrip

@@ -20,9 +20,15 @@ interface RowProps {
 
 /** A numbered paragraph with what stands beside it; people quote the number. */
 function SheetRow({ paragraph, children }: RowProps) {
+  const { named } = use(LessonContext);
   if (!paragraph) return <div className="sheet-row">{children}</div>;
   return (
-    <div className="sheet-row" id={`p${paragraph}`} data-paragraph={paragraph}>
+    <div
+      className={paragraph === named ? 'sheet-row named' : 'sheet-row'}
+      id={`p${paragraph}`}
+      data-paragraph={paragraph}
+      tabIndex={-1}
+    >
       <p className="paragraph-number">
         <span className="visually-hidden">Paragraph </span>
         {paragraph}
@@ -76,10 +82,16 @@ const components = {
   table: ScrollTable,
 } as Components;
 
+interface LessonTextProps {
+  lesson: LessonView;
+  /** The paragraph the address names. */
+  named?: number | null;
+}
+
 /** The text of a sheet. Raw HTML is never drawn; formulas and figures come with the lesson. */
-export function LessonText({ lesson }: { lesson: LessonView }) {
+export function LessonText({ lesson, named = null }: LessonTextProps) {
   return (
-    <LessonContext value={lesson}>
+    <LessonContext value={{ ...lesson, named }}>
       <Markdown
         remarkPlugins={[
           remarkGfm,
