@@ -5,20 +5,20 @@ import {
   type Drawn,
   type DrawnPart,
   FORMAT_VERSION,
-  type Given,
   MARKER_VERSION,
   openQuestion,
   type QuantityPart,
   type SizePart,
 } from './compiled.ts';
 import { drawCurve, readOff, runCurve } from './curve.ts';
+import { type Expr } from './expression.ts';
 import { type Draws, drawsFrom } from './random.ts';
 import { isRightOption, slipValues } from './predictions.ts';
 import { holds, solve } from './solve.ts';
 import { sizeSi } from './sizes.ts';
 import { isTooNear, keyOf, rangeOf } from './tolerance.ts';
 import { type CompiledQuestion, type CurveView, type DrawnQuestion } from './types.ts';
-import { toSi } from './units.ts';
+import { placesOf, valueAt, workingsOf } from './workings.ts';
 
 /** A question that gives no draw; the message names the question and what is wrong. */
 class DrawFailed extends Error {
@@ -68,16 +68,33 @@ function drawValues(
   question: Compiled,
   draws: Draws,
 ): { values: Map<string, number>; curve: CurveView | null } {
+  const { plain, onCurve } = workingsOf(question);
   for (let tries = 0; tries < MOST_TRIES; tries += 1) {
-    const values = new Map(question.givens.map((given) => [given.name, drawGiven(given, draws)]));
+    const values = drawGivens(question, draws);
+    const isMet = (condition: Expr): boolean => holds(question, condition, values);
+    // A curve takes a hundred times as long as the rest: it is run only when the rest is right.
+    if (!plain.every(isMet)) continue;
     const log = question.curve ? runCurve(question.curve, values) : null;
     if (log) readInto(values, question, log);
-    if (question.require.every((condition) => holds(question, condition, values))) {
-      const curve = question.curve && log ? drawCurve(question.curve, log, values) : null;
-      return { values: solve(question, values), curve };
-    }
+    if (!onCurve.every(isMet)) continue;
+    const curve = question.curve && log ? drawCurve(question.curve, log, values) : null;
+    return { values: inOrder(question, solve(question, values)), curve };
   }
   throw new Error(`none of ${MOST_TRIES} draws meets its conditions; widen the given values.`);
+}
+
+function drawGivens(question: Compiled, draws: Draws): Map<string, number> {
+  const values = new Map<string, number>();
+  for (const given of question.givens) {
+    const place = given.source.kind === 'value' ? 0 : draws.below(placesOf(given));
+    values.set(given.name, valueAt(question, given, place));
+  }
+  return values;
+}
+
+/** Steps are worked as conditions ask for them; they are kept as they stand on the sheet. */
+function inOrder(question: Compiled, values: ReadonlyMap<string, number>): Map<string, number> {
+  return new Map(workingsOf(question).names.map((name) => [name, values.get(name) ?? NaN]));
 }
 
 /** Adds what is read off a curve to the values. */
@@ -85,17 +102,6 @@ function readInto(values: Map<string, number>, question: Compiled, log: ChargeLo
   for (const step of question.steps) {
     if (step.how.kind === 'read') values.set(step.name, readOff(log, step.how.read, values));
   }
-}
-
-function drawGiven({ source, unit }: Given, draws: Draws): number {
-  if (source.kind === 'value') return toSi(source.figure, unit);
-  if (source.kind === 'list') {
-    return toSi(source.figures[draws.below(source.figures.length)] ?? NaN, unit);
-  }
-  const count = Math.round((source.to - source.from) / source.step);
-  const figure = source.from + source.step * draws.below(count + 1);
-  // 8 + 0.1 × 13 is 9.3, not 9.300000000000001.
-  return toSi(Number(figure.toPrecision(12)), unit);
 }
 
 interface Table {

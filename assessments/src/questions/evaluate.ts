@@ -14,18 +14,19 @@ export class NotFinite extends Error {
   }
 }
 
-const OPERATIONS: Record<Operator, (left: number, right: number) => number> = {
-  '+': (left, right) => left + right,
-  '-': (left, right) => left - right,
-  '*': (left, right) => left * right,
-  '/': (left, right) => left / right,
-  '^': (left, right) => left ** right,
-  '<': (left, right) => Number(left < right),
-  '<=': (left, right) => Number(left <= right),
-  '>': (left, right) => Number(left > right),
-  '>=': (left, right) => Number(left >= right),
-  '==': (left, right) => Number(left === right),
-  '!=': (left, right) => Number(left !== right),
+/** One function each: a shared one would have to look the operator up at every turn. */
+const OPERATIONS: Record<Operator, (left: Formula, right: Formula) => Formula> = {
+  '+': (left, right) => (values) => left(values) + right(values),
+  '-': (left, right) => (values) => left(values) - right(values),
+  '*': (left, right) => (values) => left(values) * right(values),
+  '/': (left, right) => (values) => left(values) / right(values),
+  '^': (left, right) => (values) => left(values) ** right(values),
+  '<': (left, right) => (values) => Number(left(values) < right(values)),
+  '<=': (left, right) => (values) => Number(left(values) <= right(values)),
+  '>': (left, right) => (values) => Number(left(values) > right(values)),
+  '>=': (left, right) => (values) => Number(left(values) >= right(values)),
+  '==': (left, right) => (values) => Number(left(values) === right(values)),
+  '!=': (left, right) => (values) => Number(left(values) !== right(values)),
 };
 
 /**
@@ -42,12 +43,8 @@ export function compile(expr: Expr, practice: PracticeName): Formula {
       const of = compile(expr.of, practice);
       return (values) => -of(values);
     }
-    case 'op': {
-      const left = compile(expr.left, practice);
-      const right = compile(expr.right, practice);
-      const operate = OPERATIONS[expr.op];
-      return (values) => operate(left(values), right(values));
-    }
+    case 'op':
+      return OPERATIONS[expr.op](compile(expr.left, practice), compile(expr.right, practice));
     case 'if': {
       const [when, then, otherwise] = [expr.when, expr.then, expr.otherwise].map((branch) =>
         compile(branch, practice),
@@ -65,27 +62,23 @@ function compileCall(expr: Extract<Expr, { kind: 'call' }>, practice: PracticeNa
   if (!called) throw new Error(`Function ${expr.name} is not known to this version.`);
   const profile = PROFILES[practice];
   const args = expr.of.map((arg) => compile(arg, practice));
-  return (values) =>
-    called.run(
-      args.map((arg) => arg(values)),
-      profile,
-    );
+  const [first] = args;
+  // Most take one value; a list made by hand is quicker than a mapped one.
+  if (first && args.length === 1) return (values) => called.run([first(values)], profile);
+  return (values) => {
+    const worked: number[] = [];
+    for (const arg of args) worked.push(arg(values));
+    return called.run(worked, profile);
+  };
 }
 
-const compiled: Record<PracticeName, WeakMap<Expr, Formula>> = {
-  metric: new WeakMap(),
-  awg: new WeakMap(),
-};
-
 /**
- * Value of an expression; formulas are compiled once for each expression object and practice.
+ * Value of a formula.
  *
- * @throws {NotFinite} when it comes to no finite number.
+ * @throws {NotFinite} when it comes to no finite number; `what` names it.
  */
-export function evaluate(expr: Expr, values: Values, practice: PracticeName): number {
-  let formula = compiled[practice].get(expr);
-  if (!formula) compiled[practice].set(expr, (formula = compile(expr, practice)));
+export function evaluate(formula: Formula, values: Values, what: string): number {
   const value = formula(values);
   if (Number.isFinite(value)) return value;
-  throw new NotFinite('A step');
+  throw new NotFinite(what);
 }

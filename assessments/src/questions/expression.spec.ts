@@ -22,7 +22,7 @@ const VALUES = new Map([
 ]);
 
 const read = (text: string): Expr => readExpression(text, NAMES);
-const work = (text: string): number => evaluate(read(text), VALUES, 'metric');
+const work = (text: string): number => evaluate(compile(read(text), 'metric'), VALUES, text);
 
 describe('expressions', () => {
   it.each([

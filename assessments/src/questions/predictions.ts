@@ -1,25 +1,25 @@
 import { type ChoicePart, type Compiled } from './compiled.ts';
-import { evaluate } from './evaluate.ts';
-import { holds, leansOn } from './solve.ts';
+import { evaluate, type Values } from './evaluate.ts';
+import { holds } from './solve.ts';
 import { fromSi, toSi } from './units.ts';
+import { type StepWorking, workingsOf } from './workings.ts';
 
 /** Predicted wrong values; a slip whose sum cannot be worked on these figures is silent. */
 export function slipValues(
   question: Compiled,
   step: string,
-  values: Map<string, number>,
+  values: Values,
 ): { slip: number; value: number }[] {
-  return question.slips.flatMap((slip, index) =>
-    slip.makes
-      .filter((made) => made.step === step)
-      .flatMap(({ expr }) => {
-        try {
-          return [{ slip: index, value: evaluate(expr, values, question.profile) }];
-        } catch {
-          return [];
-        }
-      }),
-  );
+  const found: { slip: number; value: number }[] = [];
+  for (const { slip, formula } of workingsOf(question).slips.get(step) ?? []) {
+    try {
+      const value = formula(values);
+      if (Number.isFinite(value)) found.push({ slip, value });
+    } catch {
+      // Out of some table: nobody can have gone wrong this way here.
+    }
+  }
+  return found;
 }
 
 /** Whether an option is the right one on these values. */
@@ -41,21 +41,26 @@ export function workRounded(
   target: string,
   by: { values: Readonly<Record<string, number>>; figures: number },
 ): number | null {
-  const needed = leansOn(question, [target]);
+  const { steps } = workingsOf(question);
+  const worked = steps.get(target);
+  const earlier = [...steps.values()].filter(
+    ({ step: { name } }) => name !== target && worked?.leansOn.has(name),
+  );
+  if (!worked?.formula || earlier.length === 0) return null;
   const values = new Map(Object.entries(by.values));
-  const earlier = question.steps.filter(({ name }) => needed.has(name) && name !== target);
-  if (earlier.length === 0) return null;
   try {
-    for (const { name, unit, how } of earlier) {
-      const value =
-        how.kind === 'sum'
-          ? evaluate(how.expr, values, question.profile)
-          : (values.get(name) ?? NaN);
-      values.set(name, toSi(Number(fromSi(value, unit).toPrecision(by.figures)), unit));
-    }
-    const step = question.steps.find(({ name }) => name === target);
-    return step?.how.kind === 'sum' ? evaluate(step.how.expr, values, question.profile) : null;
+    for (const working of earlier) roundInto(values, working, by.figures);
+    return evaluate(worked.formula, values, target);
   } catch {
     return null;
   }
+}
+
+function roundInto(
+  values: Map<string, number>,
+  { step: { name, unit }, formula }: StepWorking,
+  figures: number,
+): void {
+  const value = formula ? evaluate(formula, values, name) : (values.get(name) ?? NaN);
+  values.set(name, toSi(Number(fromSi(value, unit).toPrecision(figures)), unit));
 }

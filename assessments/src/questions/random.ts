@@ -67,5 +67,7 @@ function shuffle<T>(things: readonly T[], below: (count: number) => number): T[]
 const MARK_LETTERS = '23456789abcdefghjkmnpqrstuvwxyz';
 
 function mark(below: (count: number) => number): string {
-  return Array.from({ length: 8 }, () => MARK_LETTERS[below(MARK_LETTERS.length)]).join('');
+  let letters = '';
+  while (letters.length < 8) letters += MARK_LETTERS.charAt(below(MARK_LETTERS.length));
+  return letters;
 }

@@ -1,6 +1,7 @@
 import { type Compiled } from './compiled.ts';
-import { evaluate, NotFinite } from './evaluate.ts';
-import { type Expr, namesIn } from './expression.ts';
+import { evaluate } from './evaluate.ts';
+import { type Expr } from './expression.ts';
+import { conditionOf, type StepWorking, workingsOf } from './workings.ts';
 
 /** Steps a set of names leans on, themselves included; the search goes no further than `stop`. */
 export function leansOn(
@@ -8,13 +9,14 @@ export function leansOn(
   names: Iterable<string>,
   stop?: ReadonlySet<string>,
 ): Set<string> {
+  const { steps } = workingsOf(question);
   const found = new Set<string>();
   const waiting = [...names];
   for (let name = waiting.pop(); name !== undefined; name = waiting.pop()) {
-    const step = question.steps.find((one) => one.name === name);
-    if (!step || found.has(name)) continue;
+    const working = steps.get(name);
+    if (!working || found.has(name)) continue;
     found.add(name);
-    if (step.how.kind === 'sum' && !stop?.has(name)) waiting.push(...namesIn(step.how.expr));
+    if (!stop?.has(name)) waiting.push(...working.names);
   }
   return found;
 }
@@ -24,26 +26,23 @@ export function leansOn(
  *
  * @throws {NotFinite} when a step comes to no finite number.
  */
-export function solve(
-  question: Compiled,
-  known: ReadonlyMap<string, number>,
-  wanted?: ReadonlySet<string>,
+export function solve(question: Compiled, known: ReadonlyMap<string, number>): Map<string, number> {
+  return workMissing(workingsOf(question).steps.values(), new Map(known));
+}
+
+function workMissing(
+  steps: Iterable<StepWorking>,
+  values: Map<string, number>,
 ): Map<string, number> {
-  const values = new Map(known);
-  for (const step of question.steps) {
-    if (values.has(step.name) || step.how.kind === 'read') continue;
-    if (wanted && !wanted.has(step.name)) continue;
-    try {
-      values.set(step.name, evaluate(step.how.expr, values, question.profile));
-    } catch (error) {
-      throw error instanceof NotFinite ? new NotFinite(`Step ${step.name}`) : error;
-    }
+  for (const { step, formula } of steps) {
+    if (formula === null || values.has(step.name)) continue;
+    values.set(step.name, evaluate(formula, values, `Step ${step.name}`));
   }
   return values;
 }
 
-/** Whether a condition holds; the steps it leans on are worked first. */
-export function holds(question: Compiled, condition: Expr, known: Map<string, number>): boolean {
-  const values = solve(question, known, leansOn(question, namesIn(condition)));
-  return evaluate(condition, values, question.profile) === 1;
+/** Whether a condition holds. Steps it leans on are worked first and added to the values. */
+export function holds(question: Compiled, condition: Expr, values: Map<string, number>): boolean {
+  const { formula, needs } = conditionOf(question, condition);
+  return evaluate(formula, workMissing(needs, values), 'A condition') === 1;
 }
