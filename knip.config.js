@@ -8,6 +8,7 @@ const packagesOfStyleSheet = (text) =>
 const programsFromOutside = [
   'certutil',
   'chromium',
+  'ngspice',
   'openssl',
   'pdfsig',
   'pdftoppm',
@@ -27,8 +28,8 @@ export default {
     '.': { entry: [], ignoreDependencies: ['dependency-cruiser'] },
     assessments: {
       entry: ['src/**/*.spec.ts', 'test/**/*.spec.ts'],
-      // GNU units, a package of the operating system.
-      ignoreBinaries: ['units'],
+      // GNU units and ngspice, packages of the operating system.
+      ignoreBinaries: ['units', 'ngspice'],
       project: ['src/**/*.ts', 'test/**/*.ts'],
     },
     certificates: {

@@ -7,6 +7,7 @@ const packageOf = {
   qpdf: 'qpdf',
   certutil: 'libnss3-tools',
   zbarimg: 'zbar-tools',
+  ngspice: 'ngspice',
   units: 'units',
   openssl: 'openssl',
 };
