@@ -34,13 +34,18 @@ const MOST_TRIES = 400;
  * Draws a question: values, keys, tolerances, order of options. The same seed gives the same draw.
  *
  * @param seed - hex of a keyed hash, at least 32 digits.
+ * @param onRejected - told of each set of values that did not meet the conditions.
  * @throws {DrawFailed} when no draw meets the conditions, or one has no single answer.
  */
-export function drawQuestion(stored: CompiledQuestion, seed: string): DrawnQuestion {
+export function drawQuestion(
+  stored: CompiledQuestion,
+  seed: string,
+  onRejected: () => void = () => undefined,
+): DrawnQuestion {
   const question = openQuestion(stored);
   const draws = drawsFrom(seed);
   try {
-    const { values, curve } = drawValues(question, draws);
+    const { values, curve } = drawValues(question, draws, onRejected);
     const parts = question.parts.map((part) => [
       part.id,
       drawPart(part, { question, values, draws }),
@@ -67,6 +72,7 @@ export function drawQuestion(stored: CompiledQuestion, seed: string): DrawnQuest
 function drawValues(
   question: Compiled,
   draws: Draws,
+  onRejected: () => void,
 ): { values: Map<string, number>; curve: CurveView | null } {
   const { plain, onCurve } = workingsOf(question);
   for (let tries = 0; tries < MOST_TRIES; tries += 1) {
