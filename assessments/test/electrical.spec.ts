@@ -1,17 +1,14 @@
 import { describe, expect, it } from 'vitest';
-import {
-  ambientFactor,
-  engineSpaceFactor,
-  groupingFactor,
-  ratingAmps,
-  sizeForCurrent,
-} from '../src/electrical/ampacity.ts';
+import { ambientFactor } from '../src/electrical/ambient.ts';
+import { engineSpaceFactor, sizeForCurrent } from '../src/electrical/ampacity.ts';
 import {
   classFiveOhmsPerKm,
   COPPER_OHM_MM2_PER_M,
   resistanceAt,
 } from '../src/electrical/conductors.ts';
+import { groupingFactor } from '../src/electrical/grouping.ts';
 import { OutOfRange } from '../src/electrical/out-of-range.ts';
+import { ratingAmps } from '../src/electrical/rating-table.ts';
 import { CABLE_AREAS_MM2, FUSE_RATINGS_A, nextSize } from '../src/electrical/stock.ts';
 import { areaForDrop, dropAlong, sizeForDrop } from '../src/electrical/voltage-drop.ts';
 import { numberIn, readTable } from './reference/read-table.ts';

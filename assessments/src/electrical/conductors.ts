@@ -1,29 +1,17 @@
-import { OutOfRange, within } from './out-of-range.ts';
+import { iecOhmsPerKm } from './iec-resistance.ts';
+import { within } from './out-of-range.ts';
 
 /** Annealed copper at 20 °C, Ω·mm²/m: the 1/58 of IEC 60028 (from memory). */
 export const COPPER_OHM_MM2_PER_M = 1 / 58;
 
-/** Temperature coefficient of copper's resistance at 20 °C, 1/K (IEC 60028, from memory). */
-const COPPER_ALPHA_PER_K = 0.00393;
+/** Hard-drawn aluminium at 20 °C, Ω·mm²/m: IEC 60889 (second-hand copy). */
+export const ALUMINIUM_OHM_MM2_PER_M = 0.028264;
 
-/** Greatest resistance of plain flexible copper at 20 °C, mm² to Ω/km (IEC 60228 class 5, from memory). */
-const CLASS_FIVE_OHMS_PER_KM: readonly (readonly [areaMm2: number, ohmsPerKm: number])[] = [
-  [0.5, 39],
-  [0.75, 26],
-  [1, 19.5],
-  [1.5, 13.3],
-  [2.5, 7.98],
-  [4, 4.95],
-  [6, 3.3],
-  [10, 1.91],
-  [16, 1.21],
-  [25, 0.78],
-  [35, 0.554],
-  [50, 0.386],
-  [70, 0.272],
-  [95, 0.206],
-  [120, 0.161],
-];
+/** Temperature coefficients of resistance at 20 °C, 1/K (IEC 60028 and IEC 60889, from memory). */
+const ALPHA_PER_K = { copper: 0.00393, aluminium: 0.00403 };
+
+/** A metal cable is made of. */
+export type Metal = keyof typeof ALPHA_PER_K;
 
 /**
  * Resistance of one flexible copper conductor by its table, at 20 °C, Ω/km.
@@ -34,21 +22,41 @@ const CLASS_FIVE_OHMS_PER_KM: readonly (readonly [areaMm2: number, ohmsPerKm: nu
  * @example classFiveOhmsPerKm(6) // 3.3
  */
 export function classFiveOhmsPerKm(areaMm2: number): number {
-  const row = CLASS_FIVE_OHMS_PER_KM.find(([size]) => Math.abs(size - areaMm2) < 1e-6);
-  if (row) return row[1];
-  const sizes = CLASS_FIVE_OHMS_PER_KM.map(([size]) => size).join(', ');
-  throw new OutOfRange(`Cable area ${areaMm2} mm² is not a stock size; use one of ${sizes}.`);
+  return iecOhmsPerKm(areaMm2, { strands: 'class 5', surface: 'plain' });
 }
 
 /**
- * Copper resistance carried from 20 °C to another conductor temperature, in the unit it came in.
+ * Resistance of a solid conductor by its copper or aluminium alone, at 20 °C, Ω/km. Cable of
+ * strands resists 4 to 16 % more.
  *
- * Source: IEC 60028 coefficient 0.00393 /K (from memory).
+ * @throws {OutOfRange} when the area is not above 0.
+ * @example ohmsPerKmOfArea(6, COPPER_OHM_MM2_PER_M) // 2.874
+ */
+export function ohmsPerKmOfArea(areaMm2: number, ohmMm2PerM: number): number {
+  within(areaMm2, {
+    what: 'Area',
+    unit: 'mm²',
+    least: 0.01,
+    most: 10_000,
+    remedy: 'give the cross-section of the metal',
+  });
+  return (1000 * ohmMm2PerM) / areaMm2;
+}
+
+/**
+ * Resistance carried from 20 °C to another conductor temperature, in the unit it came in.
+ *
+ * Source: coefficients 0.00393 /K of IEC 60028 for copper, 0.00403 /K of IEC 60889 for aluminium
+ * (from memory).
  *
  * @throws {OutOfRange} when the temperature is outside −40 to 200 °C.
  * @example resistanceAt(3.3, 60) // 3.81876
  */
-export function resistanceAt(resistanceAt20C: number, conductorC: number): number {
+export function resistanceAt(
+  resistanceAt20C: number,
+  conductorC: number,
+  metal: Metal = 'copper',
+): number {
   within(conductorC, {
     what: 'Conductor temperature',
     unit: '°C',
@@ -56,5 +64,5 @@ export function resistanceAt(resistanceAt20C: number, conductorC: number): numbe
     most: 200,
     remedy: 'the straight-line coefficient holds only there',
   });
-  return resistanceAt20C * (1 + COPPER_ALPHA_PER_K * (conductorC - 20));
+  return resistanceAt20C * (1 + ALPHA_PER_K[metal] * (conductorC - 20));
 }

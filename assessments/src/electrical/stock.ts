@@ -26,3 +26,40 @@ export function nextSize(value: number, series: readonly number[]): number {
     `No stock size fits ${value}: the series ends at ${largest}; shorten the run, share the load or use cables in parallel.`,
   );
 }
+
+/**
+ * Largest size that is not over the value, in the unit of the series.
+ *
+ * @throws {OutOfRange} when the value is under the smallest size or not a number.
+ * @example prevSize(38, FUSE_RATINGS_A) // 35
+ */
+export function prevSize(value: number, series: readonly number[]): number {
+  const size = series.findLast((member) => member <= value * (1 + SLACK));
+  if (size !== undefined && Number.isFinite(value)) return size;
+  throw new OutOfRange(`No size is as small as ${value}: the series starts at ${series[0]}.`);
+}
+
+/**
+ * Largest size strictly under the value: the one before, for a value that is itself a size.
+ *
+ * @throws {OutOfRange} when there is none.
+ * @example sizeUnder(10, CABLE_AREAS_MM2) // 6
+ */
+export function sizeUnder(value: number, series: readonly number[]): number {
+  return prevSize(value * (1 - 2 * SLACK), series);
+}
+
+/**
+ * Size nearest to the value by ratio; of two equally near, the larger.
+ *
+ * @throws {OutOfRange} when the value is not a positive number.
+ * @example nearestSize(5.26, CABLE_AREAS_MM2) // 6
+ */
+export function nearestSize(value: number, series: readonly number[]): number {
+  const [first, ...rest] = series;
+  if (first === undefined || !(value > 0 && Number.isFinite(value))) {
+    throw new OutOfRange(`No size is near ${value}; give a number above 0.`);
+  }
+  const distance = (size: number): number => Math.abs(Math.log(size / value));
+  return rest.reduce((near, size) => (distance(size) <= distance(near) ? size : near), first);
+}

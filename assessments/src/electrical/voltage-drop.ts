@@ -1,6 +1,8 @@
 import { classFiveOhmsPerKm } from './conductors.ts';
+import { gaugeOhmsPerKm } from './gauge-resistance.ts';
 import { OutOfRange, within } from './out-of-range.ts';
-import { CABLE_AREAS_MM2 } from './stock.ts';
+import { type PracticeProfile, PROFILES } from './practice-profile.ts';
+import { gaugeOfArea, stockAreasMm2 } from './size-systems.ts';
 
 const RUN = {
   what: 'One-way length',
@@ -50,15 +52,30 @@ export function areaForDrop(run: {
 }
 
 /**
- * Smallest stock cable whose table resistance keeps the drop within the limit, mm².
+ * Resistance of one conductor of a practice's stock cable by its table, Ω/km: class 5 at 20 °C
+ * for metric sizes, the gauge table's stranded copper at 75 °C for gauges.
+ *
+ * @throws {OutOfRange} when the area is no stock cable of the practice.
+ */
+export function stockOhmsPerKm(areaMm2: number, profile: Pick<PracticeProfile, 'sizes'>): number {
+  return profile.sizes === 'metric'
+    ? classFiveOhmsPerKm(areaMm2)
+    : gaugeOhmsPerKm(gaugeOfArea(areaMm2));
+}
+
+/**
+ * Smallest stock cable whose table resistance keeps the drop within the limit, by its copper, mm².
  *
  * @throws {OutOfRange} when no stock size does.
  * @example sizeForDrop({ lengthM: 5, amps: 20, limitV: 0.36 }) // 16
  */
-export function sizeForDrop(run: { lengthM: number; amps: number; limitV: number }): number {
+export function sizeForDrop(
+  run: { lengthM: number; amps: number; limitV: number },
+  profile: Pick<PracticeProfile, 'sizes'> = PROFILES.metric,
+): number {
   requireLimit(run.limitV);
-  const size = CABLE_AREAS_MM2.find((areaMm2) => {
-    const ohmsPerKm = classFiveOhmsPerKm(areaMm2);
+  const size = stockAreasMm2(profile).find((areaMm2) => {
+    const ohmsPerKm = stockOhmsPerKm(areaMm2, profile);
     return dropAlong({ lengthM: run.lengthM, ohmsPerKm, amps: run.amps }) <= run.limitV + 1e-12;
   });
   if (size !== undefined) return size;
