@@ -79,6 +79,7 @@ interface TickBoxProps {
   label: ReactNode;
   hint?: ReactNode;
   name?: string;
+  value?: string;
   checked?: boolean;
   defaultChecked?: boolean;
   disabled?: boolean;

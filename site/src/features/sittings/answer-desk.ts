@@ -221,8 +221,8 @@ export class AnswerDesk {
 }
 
 function typed(answer: RawAnswer): RawAnswer {
-  const { text, unit, option, working } = { ...blankAnswer, ...answer };
-  return { text, unit, option, working };
+  const { text, unit, option, options, working } = { ...blankAnswer, ...answer };
+  return { text, unit, option, working, ...(options && { options }) };
 }
 
 function stoppedFrom({ state, readOnly }: SittingView): Stopped {

@@ -1,4 +1,5 @@
 import { type PointerEvent } from 'react';
+import { headOf } from './curve-lines.ts';
 import { type CurveLayout, placeCurve, type PlacedCurve, type Reading } from './curve-scales.ts';
 import { type CurveView } from './views.ts';
 
@@ -41,14 +42,18 @@ export function CurveDrawing({ curve, layout, className, ...props }: CurveDrawin
         />
       ))}
       <Axes placed={placed} layout={layout} />
-      <path className="curve-volts" d={placed.voltsPath} />
-      <path className="curve-amps" d={placed.ampsPath} />
-      <text className="bold pen direct" {...placed.voltsLabel}>
-        Voltage, V
-      </text>
-      <text className="bold direct" {...placed.ampsLabel}>
-        Current, A
-      </text>
+      {placed.lines.map(({ key, pane, path, dashes }) => (
+        <path key={key} className={`curve-${pane}`} d={path} strokeDasharray={dashes} />
+      ))}
+      {placed.lines.map((line) => (
+        <text
+          key={line.key}
+          className={line.pane === 'volts' ? 'bold pen direct' : 'bold direct'}
+          {...line.label}
+        >
+          {headOf(line)}
+        </text>
+      ))}
       <Cursor cursor={props.cursor} placed={placed} />
     </svg>
   );
@@ -97,8 +102,15 @@ function Cursor({ cursor, placed }: { cursor: Reading; placed: PlacedCurve }) {
   return (
     <>
       <path className="cursor" d={`M${x} ${placed.voltsTop - 8}V${placed.ampsFoot}`} />
-      <circle className="part at-volts" cx={x} cy={placed.volts(cursor.volts)} r="5" />
-      <circle className="part" cx={x} cy={placed.amps(cursor.amps)} r="5" />
+      {placed.lines.map(({ key, pane, y }, index) => (
+        <circle
+          key={key}
+          className={`part at-${pane}`}
+          cx={x}
+          cy={y(cursor.values[index] ?? 0)}
+          r="5"
+        />
+      ))}
       <rect className="grip" x={x - 10} y={grip - 13} width="20" height="26" />
       <path className="grip-bars" d={`M${x - 3} ${grip - 6}v12M${x + 3} ${grip - 6}v12`} />
     </>

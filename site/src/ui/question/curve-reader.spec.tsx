@@ -11,9 +11,9 @@ const curve = {
 };
 
 it('reads between the samples along a straight line', () => {
-  expect(readAt(curve, 1)).toEqual({ hours: 1, volts: 13.2, amps: 40 });
-  expect(readAt(curve, 3)).toMatchObject({ volts: 14.4, amps: 25 });
-  expect(readAt(curve, 8)).toMatchObject({ volts: 13.5, amps: 2 });
+  expect(readAt(curve, 1)).toEqual({ hours: 1, values: [13.2, 40] });
+  expect(readAt(curve, 3)).toMatchObject({ values: [14.4, 25] });
+  expect(readAt(curve, 8)).toMatchObject({ values: [13.5, 2] });
 });
 
 it('moves by a tenth with the buttons and by an hour with the Page keys, and says the reading', () => {
@@ -35,4 +35,18 @@ it('gives the same data as a table, with the interval at the cursor marked', () 
   expect(volts.map((cell) => cell.textContent)).toHaveLength(17);
   expect(volts[4]).toHaveTextContent('14.40');
   expect(volts.filter((cell) => cell.className.includes('within'))).toHaveLength(3);
+});
+
+it('reads and lists a second voltage and a second current by their own names', () => {
+  render(
+    <CurveReader
+      curve={{ ...curve, batteryVolts: [12, 13.9, 14.2, 13.5], batteryAmps: [30, 30, 0, -8] }}
+    />,
+  );
+  expect(screen.getByRole('slider')).toHaveAttribute(
+    'aria-valuetext',
+    '4.0 hours, 14.40 volts, at the charger, 14.20 volts, at the battery, 10.0 amperes, charger, 0.0 amperes, into the battery',
+  );
+  const row = screen.getByRole('row', { name: /^Into the battery, A/ });
+  expect(within(row).getAllByRole('cell').at(-1)).toHaveTextContent('−8.0');
 });

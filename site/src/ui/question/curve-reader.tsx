@@ -1,6 +1,7 @@
 import { useId, useState } from 'react';
 import { Quantity } from '../quantity.tsx';
 import { CurveDrawing } from './curve-drawing.tsx';
+import { type CurveLine, figureOf, headOf, linesOf } from './curve-lines.ts';
 import './curve.css';
 import { type CurveLayout, readAt, type Reading, readingsOf } from './curve-scales.ts';
 import { type CurveView } from './views.ts';
@@ -12,8 +13,12 @@ const step = 0.1;
 const leap = 1;
 
 /** "3.6 hours, 14.40 volts, 14.9 amperes" */
-function sayReading({ hours, volts, amps }: Reading): string {
-  return `${hours.toFixed(1)} hours, ${volts.toFixed(2)} volts, ${amps.toFixed(1)} amperes`;
+function sayReading(lines: readonly CurveLine[], { hours, values }: Reading): string {
+  const said = lines.map((line, index) => {
+    const figure = figureOf(line, values[index] ?? 0).replace('\u2212', 'minus ');
+    return `${figure} ${line.said}`;
+  });
+  return [`${hours.toFixed(1)} hours`, ...said].join(', ');
 }
 
 /** A charge curve to read: a cursor moved by slider, keys or buttons, and the readings as a table. */
@@ -21,6 +26,7 @@ export function CurveReader({ curve }: { curve: CurveView }) {
   const end = curve.hours.at(-1) ?? 0;
   const [hours, setHours] = useState(() => Math.round(end * 5) / 10);
   const cursor = readAt(curve, hours);
+  const lines = linesOf(curve);
   const put = (at: number) => setHours(Math.min(end, Math.max(0, Math.round(at * 10) / 10)));
   const within = curve.intervals.find(({ fromH, toH }) => fromH <= hours && hours <= toH);
   const drawn = { curve, cursor, within, onMove: put };
@@ -29,7 +35,7 @@ export function CurveReader({ curve }: { curve: CurveView }) {
       <CurveDrawing {...drawn} layout={wide} className="only-wide" />
       <CurveDrawing {...drawn} layout={narrow} className="only-narrow" />
       <p className="visually-hidden">{sayIntervals(curve)}</p>
-      <CursorControls cursor={cursor} end={end} onPut={put} />
+      <CursorControls lines={lines} cursor={cursor} end={end} onPut={put} />
       <ReadingsTable curve={curve} within={within} />
     </div>
   );
@@ -45,12 +51,13 @@ function sayIntervals({ intervals }: CurveView): string {
 }
 
 interface CursorControlsProps {
+  lines: readonly CurveLine[];
   cursor: Reading;
   end: number;
   onPut: (hours: number) => void;
 }
 
-function CursorControls({ cursor, end, onPut }: CursorControlsProps) {
+function CursorControls({ lines, cursor, end, onPut }: CursorControlsProps) {
   const id = useId();
   return (
     <div className="curve-cursor">
@@ -63,7 +70,7 @@ function CursorControls({ cursor, end, onPut }: CursorControlsProps) {
           max={end}
           step={step}
           value={cursor.hours}
-          aria-valuetext={sayReading(cursor)}
+          aria-valuetext={sayReading(lines, cursor)}
           onChange={(event) => onPut(Number(event.target.value))}
           onKeyDown={(event) => {
             const by = { PageUp: leap, PageDown: -leap }[event.key];
@@ -80,18 +87,17 @@ function CursorControls({ cursor, end, onPut }: CursorControlsProps) {
             <Quantity value={cursor.hours.toFixed(1)} unit="h" />
           </dd>
         </div>
-        <div>
-          <dt>Voltage</dt>
-          <dd className="pen">
-            <Quantity value={cursor.volts.toFixed(2)} unit="V" />
-          </dd>
-        </div>
-        <div>
-          <dt>Current</dt>
-          <dd>
-            <Quantity value={cursor.amps.toFixed(1)} unit="A" />
-          </dd>
-        </div>
+        {lines.map((line, index) => (
+          <div key={line.key}>
+            <dt>
+              {line.name}
+              {lines.length > 2 && <LineSample line={line} />}
+            </dt>
+            <dd className={line.pane === 'volts' ? 'pen' : undefined}>
+              <Quantity value={figureOf(line, cursor.values[index] ?? 0)} unit={line.unit} />
+            </dd>
+          </div>
+        ))}
       </dl>
       <p className="curve-steps not-printed">
         <button
@@ -113,6 +119,15 @@ function CursorControls({ cursor, end, onPut }: CursorControlsProps) {
   );
 }
 
+/** How the line is drawn, beside its name. */
+function LineSample({ line }: { line: CurveLine }) {
+  return (
+    <svg className="line-sample" viewBox="0 0 30 6" width="30" height="6" aria-hidden="true">
+      <path className={`curve-${line.pane}`} d="M0 3H30" strokeDasharray={line.dashes} />
+    </svg>
+  );
+}
+
 interface ReadingsTableProps {
   curve: CurveView;
   within: CurveView['intervals'][number] | undefined;
@@ -125,8 +140,10 @@ function ReadingsTable({ curve, within }: ReadingsTableProps) {
   );
   const rows = [
     { name: 'Time, h', figures: readings.map(({ hours }) => String(Number(hours.toFixed(2)))) },
-    { name: 'Voltage, V', figures: readings.map(({ volts }) => volts.toFixed(2)) },
-    { name: 'Current, A', figures: readings.map(({ amps }) => amps.toFixed(1)) },
+    ...linesOf(curve).map((line, index) => ({
+      name: headOf(line),
+      figures: readings.map(({ values }) => figureOf(line, values[index] ?? 0)),
+    })),
   ];
   return (
     // The table scrolls sideways on a phone, so the keyboard must reach it.

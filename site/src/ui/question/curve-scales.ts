@@ -1,5 +1,6 @@
 import { scaleLinear } from 'd3-scale';
 import { line } from 'd3-shape';
+import { type CurveLine, linesOf } from './curve-lines.ts';
 import { type CurveView } from './views.ts';
 
 export interface CurveLayout {
@@ -12,32 +13,30 @@ export interface CurveLayout {
 
 export interface Reading {
   hours: number;
-  volts: number;
-  amps: number;
+  /** One for each line of the curve. */
+  values: number[];
 }
 
 const bracketTop = 30;
 const voltsTop = 52;
 const gap = 44;
 const foot = 40;
-/** Where along the time axis the curves are named. */
-const labelAt = 0.6;
 
-/** Volts at that time, between the samples by a straight line; likewise amps. */
+/** What each line reads at that time, between the samples by a straight line. */
 export function readAt(curve: CurveView, hours: number): Reading {
   const next = curve.hours.findIndex((sample) => sample >= hours);
   const after = next === -1 ? curve.hours.length - 1 : next;
   const before = Math.max(0, after - 1);
   const [from = 0, to = 0] = [curve.hours[before], curve.hours[after]];
   const share = to === from ? 1 : (hours - from) / (to - from);
-  const between = (values: number[]) => {
+  const between = ({ values }: CurveLine) => {
     const [start = 0, end = 0] = [values[before], values[after]];
     return start + (end - start) * share;
   };
-  return { hours, volts: between(curve.volts), amps: between(curve.amps) };
+  return { hours, values: linesOf(curve).map(between) };
 }
 
-/** Readings at even times, at most sixteen, for the table beside the drawing. */
+/** Readings at even times, at most some two dozen, for the table beside the drawing. */
 export function readingsOf(curve: CurveView): Reading[] {
   const end = curve.hours.at(-1) ?? 0;
   const step = end <= 4 ? 0.25 : end <= 8 ? 0.5 : 1;
@@ -52,23 +51,28 @@ export function placeCurve(curve: CurveView, layout: CurveLayout) {
   const voltsFoot = voltsTop + plot * 0.58;
   const ampsTop = voltsFoot + gap;
   const ampsFoot = layout.height - foot;
+  const lines = linesOf(curve);
+  const valuesIn = (pane: CurveLine['pane']) =>
+    lines.filter((one) => one.pane === pane).flatMap(({ values }) => values);
   const x = scaleLinear([0, end], [layout.left, layout.width - layout.right]).clamp(true);
-  const lowest = Math.floor(Math.min(...curve.volts));
-  const highest = Math.ceil(Math.max(...curve.volts) + 0.2);
+  const lowest = Math.floor(Math.min(...valuesIn('volts')));
+  const highest = Math.ceil(Math.max(...valuesIn('volts')) + 0.2);
   const volts = scaleLinear([lowest, highest], [voltsFoot, voltsTop]);
-  const amps = scaleLinear([0, Math.max(...curve.amps) * 1.15], [ampsFoot, ampsTop]).nice(3);
-  const path = (values: number[], y: (value: number) => number) =>
-    line<number>(
+  const leastAmps = Math.min(0, ...valuesIn('amps')) * 1.15;
+  const mostAmps = Math.max(...valuesIn('amps')) * 1.15;
+  const amps = scaleLinear([leastAmps, mostAmps], [ampsFoot, ampsTop]).nice(3);
+  const scales = { volts, amps };
+  const drawn = lines.map((one) => {
+    const y = scales[one.pane];
+    const path = line<number>(
       (_, index) => x(curve.hours[index] ?? 0),
       (value) => y(value),
-    )(values) ?? '';
-  const named = readAt(curve, end * labelAt);
+    )([...one.values]);
+    return { ...one, y, path: path ?? '' };
+  });
   return {
     ...{ x, volts, amps, bracketTop, voltsTop, voltsFoot, ampsTop, ampsFoot },
-    voltsPath: path(curve.volts, volts),
-    ampsPath: path(curve.amps, amps),
-    voltsLabel: { x: x(named.hours), y: volts(named.volts) - 10 },
-    ampsLabel: { x: x(named.hours), y: amps(named.amps) - 10 },
+    lines: drawn.map((one) => ({ ...one, label: placeLabel(one, drawn, { curve, x }) })),
     hourTicks: x.ticks(Math.min(10, Math.max(4, Math.round(layout.width / 70)))),
     voltTicks: volts.ticks(Math.min(5, highest - lowest)),
     ampTicks: amps.ticks(3),
@@ -76,3 +80,36 @@ export function placeCurve(curve: CurveView, layout: CurveLayout) {
 }
 
 export type PlacedCurve = ReturnType<typeof placeCurve>;
+
+interface Drawn extends CurveLine {
+  y: (value: number) => number;
+}
+
+interface Axis {
+  curve: CurveView;
+  x: (hours: number) => number;
+}
+
+/** Along the time axis, the likeliest place first. */
+const labelAt = [0.6, 0.5, 0.7, 0.4, 0.3, 0.2, 0.1];
+
+/** A line is named where it stands clearest of the others of its pane, on the side away from them. */
+function placeLabel(drawn: Drawn, all: readonly Drawn[], { curve, x }: Axis) {
+  const end = curve.hours.at(-1) ?? 1;
+  const own = all.indexOf(drawn);
+  const spots = labelAt.map((share) => {
+    const { hours, values } = readAt(curve, end * share);
+    const heights = all.map((one, index) => one.y(values[index] ?? 0));
+    const y = heights[own] ?? 0;
+    const others = heights.filter((_, index) => index !== own && all[index]?.pane === drawn.pane);
+    const nearest = others.sort((one, other) => Math.abs(one - y) - Math.abs(other - y))[0];
+    const clear = nearest === undefined ? Infinity : Math.abs(nearest - y);
+    return { x: x(hours), y, clear, isAbove: nearest === undefined || y <= nearest };
+  });
+  const [first] = spots;
+  const best = spots.reduce(
+    (kept, spot) => (spot.clear > kept.clear + 6 ? spot : kept),
+    first ?? { x: 0, y: 0, clear: 0, isAbove: true },
+  );
+  return { x: best.x, y: best.isAbove ? best.y - 10 : best.y + 20 };
+}

@@ -1,7 +1,11 @@
-import { type ReactNode, useId } from 'react';
+import { type FocusEvent, type ReactNode, useId } from 'react';
 import { ChoiceRows } from '../choice-row.tsx';
 import { QuantitySymbol } from '../quantity.tsx';
+import { ChooseAll } from './choose-all.tsx';
 import { InlineMarkdown } from './inline-markdown.tsx';
+import './kinds.css';
+import { MatchPairs } from './match-pairs.tsx';
+import { OrderSteps } from './order-steps.tsx';
 import { blankAnswer, type PartView, type RawAnswer } from './views.ts';
 
 interface PartEntryProps {
@@ -29,26 +33,7 @@ export function PartEntry({ part, answer = blankAnswer, unclear, ...props }: Par
           {part.rounding && <span className="part-rounding"> Give it {part.rounding}.</span>}
         </p>
         {props.aside}
-        {part.kind === 'choice' ? (
-          <ChoiceRows
-            name={id}
-            legend={`Choices for (${part.id})`}
-            hideLegend
-            layout={part.layout}
-            disabled={props.readOnly ?? false}
-            choices={part.options.map((option) => ({
-              id: option.id,
-              label: <InlineMarkdown>{option.text}</InlineMarkdown>,
-            }))}
-            chosen={answer.option}
-            onChoose={(option) => {
-              props.onChange({ ...answer, option });
-              props.onLeave?.();
-            }}
-          />
-        ) : (
-          <QuantityEntry id={id} part={part} answer={answer} unclear={unclear} {...props} />
-        )}
+        <Entry id={id} part={part} answer={answer} unclear={unclear} {...props} />
         {unclear && (
           <p className="field-error" id={`${id}-unclear`} role="alert">
             {unclear}
@@ -62,17 +47,59 @@ export function PartEntry({ part, answer = blankAnswer, unclear, ...props }: Par
   );
 }
 
-type QuantityEntryProps = Omit<PartEntryProps, 'answer'> & { id: string; answer: RawAnswer };
+type EntryProps = Omit<PartEntryProps, 'answer'> & { id: string; answer: RawAnswer };
 
-function QuantityEntry({
-  id,
-  part,
-  answer,
-  unclear,
-  readOnly,
-  onChange,
-  onLeave,
-}: QuantityEntryProps) {
+/** Where the answer goes, by the kind of the part. */
+function Entry(props: EntryProps) {
+  if (props.part.kind === 'quantity') return <QuantityEntry {...props} />;
+  if (props.part.kind === 'choice') return <ChoiceEntry {...props} />;
+  return <SeveralEntry {...props} />;
+}
+
+function ChoiceEntry({ id, part, answer, readOnly = false, onChange, onLeave }: EntryProps) {
+  return (
+    <ChoiceRows
+      name={id}
+      legend={`Choices for (${part.id})`}
+      hideLegend
+      layout={part.layout}
+      disabled={readOnly}
+      choices={part.options.map((option) => ({
+        id: option.id,
+        label: <InlineMarkdown>{option.text}</InlineMarkdown>,
+      }))}
+      chosen={answer.option}
+      onChoose={(option) => {
+        onChange({ ...answer, option });
+        onLeave?.();
+      }}
+    />
+  );
+}
+
+/** Several options make one answer: it is left when the focus leaves them all. */
+function SeveralEntry({ id, part, answer, readOnly = false, onChange, onLeave }: EntryProps) {
+  const leave = ({ currentTarget, relatedTarget }: FocusEvent) => {
+    if (!currentTarget.contains(relatedTarget)) onLeave?.();
+  };
+  const shared = {
+    part: part.id,
+    options: part.options,
+    chosen: answer.options ?? [],
+    disabled: readOnly,
+    describedBy: `${id}-prompt`,
+    onChange: (options: string[]) => onChange({ ...answer, options }),
+  };
+  return (
+    <div onBlur={leave}>
+      {part.kind === 'choices' && <ChooseAll {...shared} />}
+      {part.kind === 'order' && <OrderSteps {...shared} />}
+      {part.kind === 'match' && <MatchPairs {...shared} rows={part.rows ?? []} />}
+    </div>
+  );
+}
+
+function QuantityEntry({ id, part, answer, unclear, readOnly, onChange, onLeave }: EntryProps) {
   return (
     <div className="part-entry">
       <div className="part-working">
@@ -117,10 +144,7 @@ function QuantityEntry({
   );
 }
 
-type UnitChoiceProps = Pick<
-  QuantityEntryProps,
-  'part' | 'answer' | 'readOnly' | 'onChange' | 'onLeave'
->;
+type UnitChoiceProps = Pick<EntryProps, 'part' | 'answer' | 'readOnly' | 'onChange' | 'onLeave'>;
 
 function UnitChoice({ part, answer, readOnly, onChange, onLeave }: UnitChoiceProps) {
   return (

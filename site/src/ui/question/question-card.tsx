@@ -7,6 +7,7 @@ import { GivenTable } from './given-table.tsx';
 import { PartEntry } from './part-entry.tsx';
 import './question.css';
 import { Schematic } from './schematic.tsx';
+import { TableExtract } from './table-extract.tsx';
 import { type Answers, type PartView, type QuestionView, type RawAnswer } from './views.ts';
 
 interface QuestionCardProps {
@@ -60,6 +61,9 @@ export function QuestionFacts({ question }: { question: QuestionView }) {
       )}
       {question.given.length > 0 && <GivenTable given={question.given} />}
       {question.diagram && <Schematic diagram={question.diagram} />}
+      {question.tables?.map((table) => (
+        <TableExtract key={table.caption} table={table} />
+      ))}
       {question.cautions.map((caution) => (
         <Hazard key={caution.title} level={caution.level} title={caution.title}>
           <Markdown>{caution.text}</Markdown>
