@@ -76,6 +76,7 @@ function drawValues(
 ): { values: Map<string, number>; curve: CurveView | null } {
   const { plain, onCurve } = workingsOf(question);
   for (let tries = 0; tries < MOST_TRIES; tries += 1) {
+    if (tries > 0) onRejected();
     const values = drawGivens(question, draws);
     const isMet = (condition: Expr): boolean => holds(question, condition, values);
     // A curve takes a hundred times as long as the rest: it is run only when the rest is right.
