@@ -1,14 +1,18 @@
 import { Button } from '@radix-ui/themes';
 import { useMutation } from '@tanstack/react-query';
-import { useEffect, useRef, useState } from 'react';
 import Markdown from 'react-markdown';
 import { ProblemCallout } from '../../ui/problem-callout.tsx';
 import { CurveReader } from '../../ui/question/curve-reader.tsx';
 import { MarkedQuestion } from '../../ui/question/marked-question.tsx';
+import { PartHint } from '../../ui/question/part-hint.tsx';
+import {
+  type PracticeView,
+  sayHints,
+  startPractice,
+  useFocusOnTurn,
+  usePracticeAnswers,
+} from '../../ui/question/practice.ts';
 import { QuestionCard, QuestionFacts } from '../../ui/question/question-card.tsx';
-import { type Answers } from '../../ui/question/views.ts';
-import { TryHint } from './try-hint.tsx';
-import { answerPractice, type PracticeView, startPractice, unclearParts } from './practice.ts';
 
 /** One practice question in the middle of the sheet, marked where it stands. */
 export function TryQuestion({ question }: { question: string }) {
@@ -46,10 +50,8 @@ interface AttemptProps {
 
 function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
   const { question } = practice;
-  const [answers, setAnswers] = useState<Answers>({});
-  const mark = useMutation({ mutationFn: () => answerPractice(practice.id, answers) });
+  const { answers, change, mark, unclear } = usePracticeAnswers(practice.id);
   const heading = useFocusOnTurn(mark.data !== undefined);
-  const unclear = unclearParts(mark.error);
   const curve = question.curve && <CurveReader curve={question.curve} />;
   const again = (
     <Button variant="outline" disabled={isRenewing} onClick={onAgain}>
@@ -91,9 +93,9 @@ function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
             unclear={unclear ?? {}}
             curve={curve}
             aside={({ id, kind }) =>
-              kind === 'quantity' && <TryHint practiceId={practice.id} part={id} />
+              kind === 'quantity' && <PartHint practiceId={practice.id} part={id} />
             }
-            onChange={(part, answer) => setAnswers((kept) => ({ ...kept, [part]: answer }))}
+            onChange={change}
           />
           {!unclear && <ProblemCallout error={mark.error} />}
           <div className="action-strip">
@@ -111,14 +113,4 @@ function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
       )}
     </>
   );
-}
-
-const sayHints = (hints: readonly string[]) =>
-  hints.length === 0 ? '' : hints.length === 1 ? ', with a hint' : ', with hints';
-
-/** The button that was pressed is gone, so the focus goes to the heading of what took its place. */
-function useFocusOnTurn(isMarked: boolean) {
-  const heading = useRef<HTMLHeadingElement>(null);
-  useEffect(() => heading.current?.focus(), [isMarked]);
-  return heading;
 }

@@ -1,16 +1,16 @@
 import { useMutation } from '@tanstack/react-query';
 import { useState } from 'react';
-import { Line } from '../../ui/line.tsx';
-import { ProblemCallout } from '../../ui/problem-callout.tsx';
+import { Line } from '../line.tsx';
+import { ProblemCallout } from '../problem-callout.tsx';
 import { askHint } from './practice.ts';
 
-interface TryHintProps {
+interface PartHintProps {
   practiceId: string;
   part: string;
 }
 
 /** The formula a part begins with, for who asks; the marked question says that it was asked. */
-export function TryHint({ practiceId, part }: TryHintProps) {
+export function PartHint({ practiceId, part }: PartHintProps) {
   const [isOpen, setIsOpen] = useState(false);
   const hint = useMutation({ mutationFn: () => askHint(practiceId, part) });
   const turn = () => {
@@ -18,7 +18,7 @@ export function TryHint({ practiceId, part }: TryHintProps) {
     if (!isOpen && !hint.data) hint.mutate();
   };
   return (
-    <div className="try-hint not-printed">
+    <div className="part-hint not-printed">
       <button type="button" className="text-button" aria-expanded={isOpen} onClick={turn}>
         Hint for ({part})
       </button>
