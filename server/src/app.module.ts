@@ -16,6 +16,7 @@ import { PracticeModule } from './practice/practice.module.ts';
 import { MailModule } from './mail/mail.module.ts';
 import { PeopleModule } from './people/people.module.ts';
 import { RegisterModule } from './register/register.module.ts';
+import { SchoolModule } from './school/school.module.ts';
 import { SecondFactorsModule } from './second-factors/second-factors.module.ts';
 import { SessionsModule } from './sessions/sessions.module.ts';
 import { SignInModule } from './sessions/sign-in.module.ts';
@@ -42,6 +43,7 @@ export class AppModule {
         SignInModule,
         PeopleModule,
         RegisterModule,
+        SchoolModule,
         SittingsModule,
         ClassesModule,
         ClassViewModule,

@@ -20,6 +20,7 @@ const words: Readonly<Record<string, string>> = {
   'password-refused': 'gave a wrong passphrase while signed in',
   'password-reset': 'chose a new passphrase by mail',
   'password-reset-started': 'was sent a link for a new passphrase',
+  'practice-profile-chosen': 'chose the practice profile of the school',
   'recovery-code-used': 'used a recovery code',
   reinstated: 'was reinstated',
   'role-given': 'was made',

@@ -6,6 +6,8 @@ import { createWorksheets } from './20261201T0940-create-worksheets.ts';
 import { createSittings } from './20261201T0950-create-sittings.ts';
 import { createCertificates } from './20261201T1000-create-certificates.ts';
 import { endCertificatesOnce } from './20261201T1010-end-certificates-once.ts';
+import { fadePractice } from './20261201T1700-fade-practice.ts';
+import { choosePracticeProfile } from './20261201T1710-choose-practice-profile.ts';
 
 /** One step of the schema's history. Never edited once it has landed. */
 export interface Migration {
@@ -22,4 +24,6 @@ export const migrations: readonly Migration[] = [
   createSittings,
   createCertificates,
   endCertificatesOnce,
+  fadePractice,
+  choosePracticeProfile,
 ];
