@@ -14,4 +14,6 @@ export { slipWords } from './questions/slip-words.ts';
 export { parseBlueprint } from './papers/blueprint.ts';
 export { assemblePaper } from './papers/assemble.ts';
 export { PoolTooSmall } from './papers/pool-too-small.ts';
+export { auditQuestion } from './audit/audit-question.ts';
+export { breachesOf } from './audit/bounds.ts';
 export { SUBJECTS } from './subjects.ts';
