@@ -1,4 +1,5 @@
 import { assemblePaper, PoolTooSmall } from '@ferrule/assessments';
+import { checkReadings } from './check-readings.ts';
 import { checkCourse, type Pools, type ReadCourse } from './course-sheet.ts';
 import type { ProblemList } from './problem-list.ts';
 import type { Read, ReadContent, ReadLesson } from './read-content.ts';
@@ -102,4 +103,5 @@ export function checkContent(
   checkCourses(content, references, problems);
   for (const lesson of lessons) checkPlace(lesson, courses, problems);
   checkPapers(content, problems);
+  checkReadings(content, problems);
 }

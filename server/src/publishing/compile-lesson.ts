@@ -6,6 +6,7 @@ import { readDrawing } from './drawings.ts';
 import { typesetFormulas } from './formulas.ts';
 import type { Sheet } from './front-matter.ts';
 import { readBlocks, type FigureBlock, type LessonBlocks } from './lesson-blocks.ts';
+import { headingsIn } from './lesson-headings.ts';
 import type { LessonFrontMatter } from './lesson-front-matter.ts';
 import { isFormula, nodesOf, parseText, sourceOf, type TextNode } from './markdown.ts';
 import type { ProblemList } from './problem-list.ts';
@@ -136,13 +137,15 @@ export function compileLesson(
   const blocks = readBlocks(root, complain);
   const paragraphs = (root.children ?? []).filter(({ type }) => type === 'paragraph');
   const { words, ...front } = sheet.front;
+  const body = withFormulaBlocks(sheet.body, alone).trim();
   return {
     hash: hashOf(work, blocks),
     compiled: {
       ...front,
       words: Object.entries(words).map(([term, meaning]) => ({ term, meaning })),
-      body: withFormulaBlocks(sheet.body, alone).trim(),
+      body,
       paragraphs: paragraphs.length - alone.length,
+      headings: headingsIn(body),
       formulas: typesetFormulas(root, alone, complain),
       figures: compileFigures(work, blocks),
       worked: compileWorked(work, blocks),

@@ -14,6 +14,12 @@ export interface CompiledFigure {
   readonly long: string;
 }
 
+export interface LessonHeading {
+  readonly text: string;
+  /** Number of the first paragraph under it. */
+  readonly paragraph: number;
+}
+
 /** A lesson sheet as published: all that is drawn from it, nothing left to look up. */
 export interface CompiledLesson {
   readonly number: string;
@@ -38,6 +44,8 @@ export interface CompiledLesson {
   /** Markdown. */
   readonly body: string;
   readonly paragraphs: number;
+  /** Missing in lessons stored before it was kept. */
+  readonly headings?: readonly LessonHeading[];
   readonly formulas: Readonly<Record<string, Tree>>;
   readonly figures: Readonly<Record<string, CompiledFigure>>;
   readonly worked: Readonly<Record<string, WorkedAnswer>>;

@@ -291,6 +291,7 @@ describe('publishing', () => {
     );
     const [{ compiled } = fail('the lesson is not stored')] = rows;
     expect(compiled.paragraphs).toBe(2);
+    expect(compiled.headings).toEqual([{ text: 'The run', paragraph: 2 }]);
     expect(Object.keys(compiled.formulas)).toEqual(
       expect.arrayContaining(['L', 'R = \\rho \\cdot L']),
     );
