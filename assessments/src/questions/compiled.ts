@@ -1,5 +1,4 @@
-import { type BatteryKind } from '../electrical/battery.ts';
-import { type Stage } from '../electrical/charging.ts';
+import { type CurvePlan, type CurveRead } from './curve-plan.ts';
 import { type Expr } from './expression.ts';
 import {
   type CautionView,
@@ -31,19 +30,21 @@ export interface Given {
   figures: number | null;
 }
 
-/** What is read off a drawn charge curve. Times in `at` are names of givens. */
-export type CurveRead =
-  | { kind: 'bulk ends' }
-  | { kind: 'float starts' }
-  | { kind: 'absorption lasts' }
-  | { kind: 'amps before float' }
-  | { kind: 'amps at'; at: string }
-  | { kind: 'volts at'; at: string }
-  | { kind: 'battery amps at'; at: string };
+/** An extract of a printed table; figures stand in the unit of their column. */
+export interface Table {
+  name: string;
+  caption: string;
+  source: string;
+  columns: { name: string; label: string; unit: Unit }[];
+  /** An empty cell is null. */
+  rows: (number | null)[][];
+}
 
 export interface Step {
   name: string;
   symbol: string;
+  /** Words for the step, or null. */
+  says: string | null;
   unit: Unit;
   figures: number;
   how: { kind: 'sum'; expr: Expr } | { kind: 'read'; read: CurveRead; because: string };
@@ -60,6 +61,8 @@ interface PartBase {
   carry: Carry;
   /** Why nothing is carried; empty unless carry is `never`. */
   because: string;
+  /** Heading of the lesson paragraph to read after a wrong answer; null takes the question's. */
+  read: string | null;
 }
 export interface QuantityPart extends PartBase {
   kind: 'quantity';
@@ -87,7 +90,30 @@ export interface ChoicePart extends PartBase {
   kind: 'choice';
   options: Option[];
 }
-export type Part = QuantityPart | SizePart | ChoicePart;
+/** All that apply; judged on the true values. */
+export interface ChoicesPart extends PartBase {
+  kind: 'choices';
+  options: Option[];
+}
+/** Items stand in the right order; the numbers below are places in it. */
+export interface OrderPart extends PartBase {
+  kind: 'order';
+  items: string[];
+  /** Words for `first` standing before `then` though it belongs after. */
+  misplaced: { first: number; then: number; say: string }[];
+}
+export interface MatchPart extends PartBase {
+  kind: 'match';
+  /** Each left-hand item with the place of its right-hand text. */
+  rows: { text: string; right: number }[];
+  options: string[];
+  mixed: { row: number; option: number; say: string }[];
+}
+export type Part = QuantityPart | SizePart | ChoicePart | ChoicesPart | OrderPart | MatchPart;
+/** A part without what every part has. */
+export type BarePart<P extends Part> = Omit<P, keyof PartBase>;
+/** Parts that are asked for by the name of a step. */
+export type StepPart = QuantityPart | SizePart;
 
 export interface Slip {
   /** Sentence for the summary, "You counted the cable out but not back." */
@@ -96,22 +122,6 @@ export interface Slip {
   /** What was right all the same, or null. */
   credit: string | null;
   makes: { step: string; expr: Expr; keep: number }[];
-}
-
-export interface CurvePlan {
-  battery: { kind: BatteryKind; capacity: string; charge: string; blocks: number };
-  charger: {
-    limit: string;
-    absorption: string;
-    float: string;
-    tail: string;
-    /** h; null for no limit. */
-    longestAbsorption: string | null;
-  };
-  load: { amps: string; from: string | null } | null;
-  hours: number;
-  /** An interval may be kept before or after the time a given names. */
-  intervals: { label: string; stage: Stage; before: string | null; after: string | null }[];
 }
 
 /** A question as it is kept: everything checked, nothing left to parse. */
@@ -123,12 +133,15 @@ export interface Compiled extends CompiledQuestion {
   lead: string;
   body: string;
   givens: Given[];
+  tables: Table[];
   steps: Step[];
   require: Expr[];
   parts: Part[];
   slips: Slip[];
   diagram: DiagramView | null;
   curve: CurvePlan | null;
+  /** Heading of the lesson paragraph to read, for parts that name none of their own. */
+  read: string | null;
 }
 
 export interface DrawnOption {
@@ -149,7 +162,13 @@ export type DrawnPart =
       options: DrawnOption[];
       right: string;
       slips: { slip: number; id: string }[];
-    };
+    }
+  /** `right`: ids of all that apply, in no order. */
+  | { kind: 'choices'; options: DrawnOption[]; right: string[] }
+  /** `right`: ids in the right order. */
+  | { kind: 'order'; options: DrawnOption[]; right: string[] }
+  /** `right`: the option for each row, in the order of the drawn rows. */
+  | { kind: 'match'; rows: DrawnOption[]; options: DrawnOption[]; right: string[] };
 
 export interface Drawn extends DrawnQuestion {
   slug: string;
@@ -160,16 +179,42 @@ export interface Drawn extends DrawnQuestion {
   curve: CurveView | null;
 }
 
+/** What a question stored by an earlier version may lack. */
+type Earlier = Omit<Compiled, 'tables' | 'read' | 'steps' | 'parts'> & {
+  tables?: Table[];
+  read?: string | null;
+  steps: (Omit<Step, 'says'> & { says?: string | null })[];
+  parts: (Part & { read?: string | null })[];
+};
+
+/** Completed once: what is found out about a question is kept by the question itself. */
+const completed = new WeakMap<CompiledQuestion, Compiled>();
+
+function complete(stored: Earlier): Compiled {
+  return {
+    ...stored,
+    tables: stored.tables ?? [],
+    read: stored.read ?? null,
+    steps: stored.steps.map((step) => ({ ...step, says: step.says ?? null })),
+    parts: stored.parts.map((part) => ({ ...part, read: part.read ?? null })),
+  } as Compiled;
+}
+
 /**
- * Opens a stored question.
+ * Opens a stored question; what an earlier version did not keep is filled in.
  *
  * @throws {Error} when it was compiled by another format version.
  */
 export function openQuestion(question: CompiledQuestion): Compiled {
-  if (question.formatVersion === FORMAT_VERSION) return question as Compiled;
-  throw new Error(
-    `Question ${question.meta.slug} has format ${question.formatVersion}, this library reads ${FORMAT_VERSION}; publish it again.`,
-  );
+  if (question.formatVersion !== FORMAT_VERSION) {
+    throw new Error(
+      `Question ${question.meta.slug} has format ${question.formatVersion}, this library reads ${FORMAT_VERSION}; publish it again.`,
+    );
+  }
+  if ('tables' in question && 'read' in question) return question as Compiled;
+  let whole = completed.get(question);
+  if (!whole) completed.set(question, (whole = complete(question as unknown as Earlier)));
+  return whole;
 }
 
 /**

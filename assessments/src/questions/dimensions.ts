@@ -38,6 +38,8 @@ export function outcomeOf(expr: Expr, scope: ReadonlyMap<string, Dimension>): Ou
       return conditional(expr, scope);
     case 'call':
       return quantity(callResult(expr, scope));
+    case 'look':
+      return quantity(expr.unit.dimension);
   }
 }
 

@@ -12,10 +12,11 @@ import {
 } from './compiled.ts';
 import { drawCurve, readOff, runCurve } from './curve.ts';
 import { type Expr } from './expression.ts';
-import { type Draws, drawsFrom } from './random.ts';
+import { drawChoices, drawMatch, drawOrder } from './draw-listed.ts';
+import { type Draws, drawsFrom, opaqueIds } from './random.ts';
 import { isRightOption, slipValues } from './predictions.ts';
 import { holds, solve } from './solve.ts';
-import { sizeSi } from './sizes.ts';
+import { isSameSize, sizeSi } from './sizes.ts';
 import { isTooNear, keyOf, rangeOf } from './tolerance.ts';
 import { type CompiledQuestion, type CurveView, type DrawnQuestion } from './types.ts';
 import { placesOf, valueAt, workingsOf } from './workings.ts';
@@ -118,8 +119,21 @@ interface Table {
 }
 
 function drawPart(part: Compiled['parts'][number], table: Table): DrawnPart {
-  if (part.kind === 'quantity') return drawQuantity(part, table);
-  return part.kind === 'size' ? drawSizes(part, table) : drawOptions(part, table);
+  const { question, values, draws } = table;
+  switch (part.kind) {
+    case 'quantity':
+      return drawQuantity(part, table);
+    case 'size':
+      return drawSizes(part, table);
+    case 'choice':
+      return drawOptions(part, table);
+    case 'choices':
+      return drawChoices(part, draws, (index) => isRightOption(question, part, { index, values }));
+    case 'order':
+      return drawOrder(part, draws);
+    case 'match':
+      return drawMatch(part, draws);
+  }
 }
 
 function drawQuantity(part: QuantityPart, { question, values }: Table): DrawnPart {
@@ -134,9 +148,9 @@ function drawQuantity(part: QuantityPart, { question, values }: Table): DrawnPar
 }
 
 function drawSizes(part: SizePart, { question, values, draws }: Table): DrawnPart {
-  const ids = marks(part.sizes.length, draws);
+  const ids = opaqueIds(part.sizes.length, draws);
   const idOf = (si: number | undefined): string | undefined =>
-    ids.find((_, index) => Math.abs(sizeSi(part, index) / (si ?? NaN) - 1) < 1e-9);
+    ids.find((_, index) => isSameSize(sizeSi(part, index), si ?? NaN));
   const right = idOf(values.get(part.step));
   if (right === undefined) {
     const given = part.sizes.join(', ');
@@ -150,7 +164,7 @@ function drawSizes(part: SizePart, { question, values, draws }: Table): DrawnPar
 }
 
 function drawOptions(part: ChoicePart, { question, values, draws }: Table): DrawnPart {
-  const ids = marks(part.options.length, draws);
+  const ids = opaqueIds(part.options.length, draws);
   const options = draws.shuffled(ids.map((id, index) => ({ id, index })));
   const right = options.filter(({ index }) => isRightOption(question, part, { index, values }));
   const [only] = right;
@@ -158,10 +172,4 @@ function drawOptions(part: ChoicePart, { question, values, draws }: Table): Draw
     throw new Error(`part ${part.id} has ${right.length} right options; exactly one must hold.`);
   }
   return { kind: 'options', options, right: only.id, slips: [] };
-}
-
-function marks(count: number, draws: Draws): string[] {
-  const found = new Set<string>();
-  while (found.size < count) found.add(draws.mark());
-  return [...found];
 }

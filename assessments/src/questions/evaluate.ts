@@ -1,6 +1,7 @@
 import { type PracticeName, PROFILES } from '../electrical/practice-profile.ts';
 import { type Expr, type Operator } from './expression.ts';
 import { FUNCTIONS } from './functions.ts';
+import { lookUp } from './look-up.ts';
 
 /** Values by declared name, plain SI numbers. */
 export type Values = ReadonlyMap<string, number>;
@@ -54,6 +55,10 @@ export function compile(expr: Expr, practice: PracticeName): Formula {
     }
     case 'call':
       return compileCall(expr, practice);
+    case 'look': {
+      const of = compile(expr.of, practice);
+      return (values) => lookUp(expr, of(values));
+    }
   }
 }
 

@@ -1,10 +1,9 @@
 import { type Compiled, type Part, type Step } from './compiled.ts';
 import { flagDifferences } from './differences.ts';
 import { type Expr, namesIn } from './expression.ts';
-import { toShortFigures } from './format.ts';
+import { figureText } from './format.ts';
 import { type Judged, type Page } from './judged.ts';
-import { fillIn } from './placeholders.ts';
-import { optionText } from './present.ts';
+import { chosenLines, rightLines } from './listed-lines.ts';
 import { remarksOn } from './remarks.ts';
 import { leansOn } from './solve.ts';
 import { type TypedQuantity } from './read-answer.ts';
@@ -16,6 +15,7 @@ export function explainPart(page: Page, judged: Judged): MarkedPart {
   const { part, view, finding } = judged;
   const worked = workedLines(page, part);
   const yours = ownLines(page, judged);
+  const isLost = finding.marks < part.marks;
   const isOff = !['right', 'not-understood'].includes(finding.verdict) && yours.length > 0;
   const [own, flagged] = isOff ? flagDifferences(yours, worked) : [yours, worked];
   return {
@@ -27,7 +27,17 @@ export function explainPart(page: Page, judged: Judged): MarkedPart {
     yours: own,
     worked: flagged,
     remarks: remarksOn(page, judged),
+    wrongStep: isLost ? wrongStepOf(page.question, judged) : null,
+    read: isLost ? (part.read ?? page.question.read) : null,
   };
+}
+
+/** The step that went wrong: an earlier part's where the error began there, else the one asked for. */
+function wrongStepOf(question: Compiled, { part, finding, own }: Judged): MarkedPart['wrongStep'] {
+  const began = finding.verdict === 'not-carried' ? own?.parts[0] : undefined;
+  const from = question.parts.find(({ id }) => id === began) ?? part;
+  const step = 'step' in from && question.steps.find(({ name }) => name === from.step);
+  return step ? { symbol: step.symbol, says: step.says ?? '' } : null;
 }
 
 /** The worked answer of a part, line by line; steps printed for an earlier part are not repeated. */
@@ -35,24 +45,22 @@ export function workedLines(page: Page, part: Part): Line[] {
   const { question, drawn } = page;
   const values = new Map(Object.entries(drawn.values));
   const lines = takeSteps(page, part).flatMap((step) => stepLines(question, step, values));
-  const held = drawn.parts[part.id];
-  if (part.kind === 'choice' && held?.kind === 'options') {
-    const right = held.options.find(({ id }) => id === held.right);
-    const text = optionText(part, right?.index ?? 0);
-    return [...lines, [words(fillIn(text, question.givens, drawn.values))]];
-  }
-  return part.kind === 'quantity' ? withRounding(page, part, lines) : lines;
+  if (part.kind === 'quantity') return withRounding(page, part, lines);
+  return part.kind === 'size' ? lines : [...lines, ...rightLines(page, part)];
 }
 
 /** The steps a part leans on that stand on no earlier part; from now on they count as shown. */
 export function takeSteps({ question, shown }: Page, part: Part): Step[] {
-  const needed = leansOn(question, part.kind === 'choice' ? namesInOptions(part) : [part.step]);
+  const needed = leansOn(question, namesUsed(part));
   const steps = question.steps.filter(({ name }) => needed.has(name) && !shown.has(name));
   needed.forEach((name) => shown.add(name));
   return steps;
 }
 
-function namesInOptions(part: Extract<Part, { kind: 'choice' }>): string[] {
+/** Names a part is judged by. */
+function namesUsed(part: Part): string[] {
+  if ('step' in part) return [part.step];
+  if (part.kind === 'order' || part.kind === 'match') return [];
   return part.options.flatMap(({ right }) =>
     typeof right === 'boolean' ? [] : [...namesIn(right)],
   );
@@ -84,7 +92,7 @@ function withRounding(
 function ownLines(page: Page, judged: Judged): Line[] {
   const { part, answer, typed, finding } = judged;
   if (finding.verdict === 'blank') return [];
-  if (part.kind !== 'quantity') return chosenLine(page, judged);
+  if (part.kind !== 'quantity') return chosenLines(page, judged);
   if (!typed) return [[words(answer.text.trim().slice(0, 60))]];
   const step = page.question.steps.find((one) => one.name === part.step);
   return step ? typedLines(page, judged, { step, typed }) : [];
@@ -96,7 +104,7 @@ function typedLines(
   judged: Judged,
   { step, typed }: { step: Step; typed: TypedQuantity },
 ): Line[] {
-  const figure = toShortFigures(typed.figure, 10);
+  const figure = figureText(typed.figure, typed.unit, 10);
   const result: Line = [operator('='), { kind: 'number', text: figure }];
   if (typed.unit.symbol !== '') result.push({ kind: 'unit', text: typed.unit.symbol });
   const expr = ownFormula(page, judged, step);
@@ -114,19 +122,4 @@ function ownFormula(page: Page, { finding, part }: Judged, step: Step): Expr | n
   if (finding.slip === undefined || part.kind !== 'quantity') return step.how.expr;
   const slip = page.question.slips[finding.slip];
   return slip?.makes.find((made) => made.step === part.step)?.expr ?? null;
-}
-
-function chosenLine({ question, drawn }: Page, { part, answer }: Judged): Line[] {
-  const held = drawn.parts[part.id];
-  const chosen =
-    held?.kind === 'options' ? held.options.find(({ id }) => id === answer.option) : undefined;
-  if (!chosen) return [];
-  if (part.kind === 'size') {
-    const figure = toShortFigures(part.sizes[chosen.index] ?? NaN, 9);
-    return [
-      [operator('='), { kind: 'number', text: figure }, { kind: 'unit', text: part.unit.symbol }],
-    ];
-  }
-  const text = fillIn(optionText(part, chosen.index), question.givens, drawn.values);
-  return [[words(text)]];
 }

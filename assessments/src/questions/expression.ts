@@ -9,6 +9,7 @@ import {
   type SymbolNode,
 } from 'mathjs';
 import { FUNCTIONS } from './functions.ts';
+import { type Unit } from './units.ts';
 
 export type Operator = '+' | '-' | '*' | '/' | '^' | Comparison;
 export type Comparison = '<' | '<=' | '>' | '>=' | '==' | '!=';
@@ -20,7 +21,19 @@ export type Expr =
   | { kind: 'minus'; of: Expr }
   | { kind: 'op'; op: Operator; left: Expr; right: Expr }
   | { kind: 'if'; when: Expr; then: Expr; otherwise: Expr }
-  | { kind: 'call'; name: string; of: Expr[] };
+  | { kind: 'call'; name: string; of: Expr[] }
+  /** A printed table: what stands beside the key that `of` comes to, so many rows `off`; SI. */
+  | {
+      kind: 'look';
+      table: string;
+      caption: string;
+      column: string;
+      keys: (number | null)[];
+      results: (number | null)[];
+      unit: Unit;
+      of: Expr;
+      off: number;
+    };
 
 /** An expression that may not be published; the message names what, the rule and the remedy. */
 export class ExpressionRefused extends Error {
@@ -184,6 +197,7 @@ export function namesIn(expr: Expr): Set<string> {
 function children(expr: Expr): Expr[] {
   switch (expr.kind) {
     case 'minus':
+    case 'look':
       return [expr.of];
     case 'op':
       return [expr.left, expr.right];

@@ -1,3 +1,6 @@
+import { gaugeName } from '../electrical/gauge.ts';
+import { type Unit } from './units.ts';
+
 /** Longest run of noughts after the point before a figure is written with a power of ten. */
 const SMALLEST_PLAIN = 1e-5;
 const LARGEST_PLAIN = 1e7;
@@ -26,4 +29,10 @@ function withPower(value: number, figures: number): string {
 
 function signed(text: string): string {
   return text.replace('-', '\u2212');
+}
+
+/** A figure beside its unit, as short as it can be said; a gauge goes by its name, 1/0 for 0. */
+export function figureText(figure: number, unit: Unit, figures: number): string {
+  const isGauge = unit.symbol === 'AWG' && Number.isInteger(figure) && figure >= -3 && figure <= 40;
+  return isGauge ? gaugeName(figure) : toShortFigures(figure, figures);
 }

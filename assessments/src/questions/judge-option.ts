@@ -1,7 +1,7 @@
 import { type ChoicePart, type Compiled, type DrawnPart, type SizePart } from './compiled.ts';
 import { type Finding } from './judge.ts';
 import { isRightOption } from './predictions.ts';
-import { sizeSi } from './sizes.ts';
+import { isSameSize, sizeSi } from './sizes.ts';
 
 /** One chosen option and everything it is judged by. */
 export interface OptionCase {
@@ -57,8 +57,13 @@ function slipOrWrong(it: OptionCase, detail: string): Finding {
 
 function fitsOwn(it: OptionCase, own: Map<string, number>): boolean {
   if (it.part.kind === 'choice') {
-    return isRightOption(it.question, it.part, { index: it.chosen.index, values: own });
+    try {
+      return isRightOption(it.question, it.part, { index: it.chosen.index, values: own });
+    } catch {
+      // Own values may lead outside every table; then the option fits nothing.
+      return false;
+    }
   }
   const wanted = own.get(it.part.step) ?? NaN;
-  return Math.abs(sizeSi(it.part, it.chosen.index) / wanted - 1) < 1e-9;
+  return isSameSize(sizeSi(it.part, it.chosen.index), wanted);
 }

@@ -12,11 +12,13 @@ import {
 } from './compiled.ts';
 import { explainPart } from './explain.ts';
 import { type Finding, judgeQuantity } from './judge.ts';
+import { judgeChoices, judgeMatch, judgeOrder } from './judge-listed.ts';
 import { judgeOption } from './judge-option.ts';
 import { type Judged } from './judged.ts';
 import { isBeyondSense, type OwnValues, ownFor } from './own-values.ts';
 import { presentPart } from './present.ts';
 import { readAnswer, readTyped } from './read-answer.ts';
+import { chosenIn } from './read-chosen.ts';
 import { sizeSi } from './sizes.ts';
 import { summarise } from './summary.ts';
 import {
@@ -80,14 +82,27 @@ function markPart(desk: Desk, part: Part, answer: RawAnswer): void {
     own: null,
     typed: null,
   };
-  const judged =
-    base.finding.rule !== 'read' || !held
-      ? base
-      : part.kind === 'quantity'
-        ? markQuantity(desk, { ...base, part }, held)
-        : markOption(desk, { ...base, part }, held);
+  const judged = base.finding.rule === 'read' && held ? judgePart(desk, base, held) : base;
   desk.judged.push(judged);
   desk.trace.push({ part: part.id, rule: judged.finding.rule, detail: judged.finding.detail });
+}
+
+function judgePart(desk: Desk, base: Judged, held: DrawnPart): Judged {
+  const { part } = base;
+  const chosen = chosenIn(base.answer);
+  if (part.kind === 'quantity') return markQuantity(desk, { ...base, part }, held);
+  if (part.kind === 'choices' && held.kind === 'choices') {
+    return { ...base, finding: judgeChoices(part, held, chosen) };
+  }
+  if (part.kind === 'order' && held.kind === 'order') {
+    return { ...base, finding: judgeOrder(part, held, chosen) };
+  }
+  if (part.kind === 'match' && held.kind === 'match') {
+    return { ...base, finding: judgeMatch(part, held, chosen) };
+  }
+  return part.kind === 'size' || part.kind === 'choice'
+    ? markOption(desk, { ...base, part }, held)
+    : base;
 }
 
 /** What the reading alone decides; rule `read` lets the marker go on. */

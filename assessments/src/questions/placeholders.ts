@@ -1,5 +1,5 @@
 import { type Given } from './compiled.ts';
-import { toFigures, toShortFigures } from './format.ts';
+import { figureText, toFigures, toShortFigures } from './format.ts';
 import { fromSi } from './units.ts';
 
 const PLACEHOLDER = /\{([a-z][A-Za-z0-9]*)\}/g;
@@ -11,7 +11,7 @@ const WHOLE = 9;
 export function shownFigure(given: Given, si: number): string {
   const figure = fromSi(si, given.unit);
   return given.figures === null
-    ? toShortFigures(figure, WHOLE)
+    ? figureText(figure, given.unit, WHOLE)
     : longer(toFigures(figure, given.figures), toShortFigures(figure, WHOLE));
 }
 
@@ -32,7 +32,7 @@ export function fillIn(
     const given = givens.find((one) => one.name === name);
     const value = values[name];
     if (!given || value === undefined) return whole;
-    const figure = toShortFigures(fromSi(value, given.unit), WHOLE);
+    const figure = figureText(fromSi(value, given.unit), given.unit, WHOLE);
     return given.unit.symbol === '' ? figure : figure + NO_BREAK + given.unit.symbol;
   });
 }

@@ -1,4 +1,4 @@
-import { type ChoicePart, type Compiled } from './compiled.ts';
+import { type ChoicePart, type ChoicesPart, type Compiled } from './compiled.ts';
 import { evaluate, type Values } from './evaluate.ts';
 import { holds } from './solve.ts';
 import { fromSi, toSi } from './units.ts';
@@ -25,7 +25,7 @@ export function slipValues(
 /** Whether an option is the right one on these values. */
 export function isRightOption(
   question: Compiled,
-  part: ChoicePart,
+  part: ChoicePart | ChoicesPart,
   at: { index: number; values: Map<string, number> },
 ): boolean {
   const right = part.options[at.index]?.right ?? false;

@@ -1,5 +1,7 @@
+import { gaugeAreaMm2, gaugeNumber } from '../electrical/gauge.ts';
 import { readNumber } from './number-text.ts';
-import { type Dimension, sameDimension, type Unit, unitsSpelt } from './units.ts';
+import { parseUnit } from './unit-expression.ts';
+import { type Dimension, NO_DIMENSION, sameDimension, type Unit, unitsSpelt } from './units.ts';
 
 /** What a person typed, before it is looked at as an answer. */
 export type QuantityReading =
@@ -13,6 +15,7 @@ const LONGEST = 60;
 const HOURS_AND_MINUTES =
   /^(\d{1,3})\s*(?:h|hr|hrs|hour|hours|:)\s*(\d{1,2})\s*(?:m|min|mins|minutes)?$/i;
 const GAUGE = /^(?:#\s*(\d{1,2})|awg\s*(\d{1,2}|[1-4]\/0)|(\d{1,2}|[1-4]\/0)\s*(?:awg|ga|gauge))$/i;
+const BARE_NOUGHTS = /^([1-4]\/0)$/;
 
 /**
  * Reads a typed quantity: figure, and unit where one is typed. `wanted` only settles spellings
@@ -22,7 +25,7 @@ export function readQuantity(typed: string, wanted: Dimension | null): QuantityR
   const text = typed.trim();
   if (text === '') return { state: 'blank' };
   if (text.length > LONGEST) return { state: 'not-a-quantity' };
-  const special = readHoursAndMinutes(text) ?? readGauge(text);
+  const special = readHoursAndMinutes(text) ?? readGauge(text, wanted);
   if (special) return special;
   const bare = text.replace(/^(?:≈|~|=)\s*/, '');
   const number = readNumber(bare);
@@ -33,7 +36,7 @@ export function readQuantity(typed: string, wanted: Dimension | null): QuantityR
     return { state: 'ambiguous', readings: number.readings.map((r) => `${r} ${spelling}`.trim()) };
   }
   if (spelling === '') return { state: 'quantity', figure: number.value, unit: null };
-  const unit = chooseUnit(unitsSpelt(spelling), wanted);
+  const unit = chooseUnit(unitsSpelt(spelling), wanted) ?? compoundUnit(spelling);
   return unit
     ? { state: 'quantity', figure: number.value, unit }
     : { state: 'unknown-unit', spelling };
@@ -52,14 +55,26 @@ function readHoursAndMinutes(text: string): QuantityReading | null {
   return { state: 'quantity', figure: Number(found[1]) + minutes / 60, unit: hour };
 }
 
-/** AWG to its bare copper area, ASTM B258 (from memory): d = 0.127 mm × 92^((36 − n)/39). */
-function readGauge(text: string): QuantityReading | null {
-  const found = GAUGE.exec(text);
-  const gauge = found?.[1] ?? found?.[2] ?? found?.[3];
-  const mm2 = unitsSpelt('mm²')[0];
-  if (gauge === undefined || !mm2) return null;
-  const number = gauge.endsWith('/0') ? 1 - Number(gauge[0]) : Number(gauge);
-  if (number > 40) return null;
-  const diameterMm = 0.127 * 92 ** ((36 - number) / 39);
-  return { state: 'quantity', figure: (Math.PI / 4) * diameterMm ** 2, unit: mm2 };
+/** A gauge where a gauge is wanted, its copper area where anything else is. */
+function readGauge(text: string, wanted: Dimension | null): QuantityReading | null {
+  const isWanted = wanted !== null && sameDimension(wanted, NO_DIMENSION);
+  const found = GAUGE.exec(text) ?? (isWanted ? BARE_NOUGHTS.exec(text) : null);
+  const written = found?.slice(1).find((group) => group !== undefined);
+  const unit = unitsSpelt(isWanted ? 'AWG' : 'mm²')[0];
+  if (written === undefined || !unit) return null;
+  try {
+    const gauge = gaugeNumber(written);
+    return { state: 'quantity', figure: isWanted ? gauge : gaugeAreaMm2(gauge), unit };
+  } catch {
+    return null;
+  }
+}
+
+/** A unit that is not in the table and is made of some that are, such as "mΩ/m". */
+function compoundUnit(spelling: string): Unit | undefined {
+  try {
+    return parseUnit(spelling);
+  } catch {
+    return undefined;
+  }
 }

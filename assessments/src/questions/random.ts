@@ -71,3 +71,10 @@ function mark(below: (count: number) => number): string {
   while (letters.length < 8) letters += MARK_LETTERS.charAt(below(MARK_LETTERS.length));
   return letters;
 }
+
+/** So many marks, no two alike. */
+export function opaqueIds(count: number, draws: Draws): string[] {
+  const found = new Set<string>();
+  while (found.size < count) found.add(draws.mark());
+  return [...found];
+}

@@ -1,4 +1,5 @@
-import { toShortFigures } from './format.ts';
+import { figureText } from './format.ts';
+import { readChosen } from './read-chosen.ts';
 import { readQuantity } from './quantity.ts';
 import { type PartView, type RawAnswer, type Reading } from './types.ts';
 import { parseUnit } from './unit-expression.ts';
@@ -19,7 +20,7 @@ const SHOWN_FIGURES = 10;
 
 /** Reads what was typed or chosen; never compares it with a key. */
 export function readAnswer(part: PartView, answer: RawAnswer): Reading {
-  if (part.kind === 'choice') return readChoice(part, answer);
+  if (part.kind !== 'quantity') return readChosen(part, answer);
   const reading = readTyped(part, answer);
   if (reading.state !== 'typed') return reading;
   const { figure, unit, isOfKind } = reading.typed;
@@ -34,16 +35,8 @@ export function readAnswer(part: PartView, answer: RawAnswer): Reading {
 
 /** A typed quantity as it is shown back: "48.1 mΩ". */
 function showTyped({ figure, unit }: TypedQuantity): string {
-  const shown = toShortFigures(figure, SHOWN_FIGURES);
+  const shown = figureText(figure, unit, SHOWN_FIGURES);
   return unit.symbol === '' ? shown : `${shown} ${unit.symbol}`;
-}
-
-function readChoice(part: PartView, answer: RawAnswer): Reading {
-  if (answer.option === null || answer.option === '') return { state: 'blank' };
-  const chosen = part.options.find((option) => option.id === answer.option);
-  return chosen
-    ? { state: 'understood', value: null, shown: chosen.text }
-    : { state: 'not-understood', ask: 'That choice is not on this paper; choose again.' };
 }
 
 /** Figure and unit of a quantity answer; a typed unit goes before a chosen one. */

@@ -1,12 +1,17 @@
 import { type ChoicePart, type Drawn, type Part, type SizePart } from './compiled.ts';
 import { type Judged, type Page } from './judged.ts';
+import { remarksOnChoices, remarksOnMatch, remarksOnOrder } from './listed-remarks.ts';
 import { fillIn } from './placeholders.ts';
 import { type RawAnswer, type Remark } from './types.ts';
 
 /** What the marker writes beside a part. */
 export function remarksOn(page: Page, judged: Judged): Remark[] {
   const fill = (text: string): string => fillIn(text, page.question.givens, page.drawn.values);
-  return rawRemarks(page, judged).map((remark) => ({ ...remark, text: fill(remark.text) }));
+  return rawRemarks(page, judged).map(({ sign, heading, text }) => ({
+    sign,
+    heading: heading === null ? null : fill(heading),
+    text: fill(text),
+  }));
 }
 
 function rawRemarks(page: Page, judged: Judged): Remark[] {
@@ -29,6 +34,7 @@ function rawRemarks(page: Page, judged: Judged): Remark[] {
     case 'not-understood':
       return [lost('Not understood', finding.detail)];
     case 'wrong':
+    case 'partly-right':
       return onWrong(page, judged);
   }
 }
@@ -85,6 +91,9 @@ function withHalf(marks: number, part: Part, remark: Remark): Remark[] {
 
 function onWrong(page: Page, judged: Judged): Remark[] {
   const { part, answer } = judged;
+  if (part.kind === 'choices') return remarksOnChoices(page, part, judged);
+  if (part.kind === 'order') return remarksOnOrder(page, part, judged);
+  if (part.kind === 'match') return remarksOnMatch(page, part, judged);
   if (part.kind === 'choice') return [lost(null, optionWords(page, part, answer))];
   if (part.kind === 'size') return [lost(null, sizeWords(page.drawn, { part, answer }))];
   const step = page.question.steps.find(({ name }) => name === part.step);

@@ -1,7 +1,10 @@
+import { gaugeNumber } from '../electrical/gauge.ts';
 import { readAuthorFigure, readAuthorFigures } from './author-figure.ts';
-import { type Given, type Source } from './compiled.ts';
+import { type Given, type Source, type Table } from './compiled.ts';
 import { type SheetGiven } from './sheet-schema.ts';
-import { STOCK } from './stock-series.ts';
+import { figureText } from './format.ts';
+import { columnAt } from './sheet-tables.ts';
+import { STOCK, type StockName } from './stock-series.ts';
 import { parseUnit } from './unit-expression.ts';
 import { type Unit } from './units.ts';
 
@@ -10,10 +13,11 @@ const DEFAULT_FIGURES = 3;
 /**
  * Turns one entry of `given` into a checked parameter.
  *
+ * @param tables - of the sheet, for a value drawn from a column.
  * @throws {Error} when it mixes ways of giving a value, or a range is empty.
  */
-export function readGiven(name: string, given: SheetGiven): Given {
-  const [source, unit] = readSource(given);
+export function readGiven(name: string, given: SheetGiven, tables: readonly Table[]): Given {
+  const [source, unit] = readSource(given, tables);
   if (given.shown && given.symbol === undefined) {
     throw new Error('A value that is shown needs a symbol; add one or set shown: false.');
   }
@@ -30,19 +34,27 @@ export function readGiven(name: string, given: SheetGiven): Given {
 
 /** Counts and stock sizes are printed as they are named: 4 mm², 3 circuits. */
 function defaultFigures(given: SheetGiven, unit: Unit): number | null {
-  return given.stock !== undefined || unit.symbol === '' ? null : DEFAULT_FIGURES;
+  const isNamed = given.stock !== undefined || given.column !== undefined;
+  return isNamed || unit.symbol === '' || unit.symbol === 'AWG' ? null : DEFAULT_FIGURES;
 }
 
-function readSource(given: SheetGiven): [Source, Unit] {
-  const ways = [given.value, given['one of'], given.stock, given.stock ? undefined : given.from];
+function readSource(given: SheetGiven, tables: readonly Table[]): [Source, Unit] {
+  const { stock, column } = given;
+  const ways = [given.value, given['one of'], stock, column, stock ? undefined : given.from];
   if (ways.filter((way) => way !== undefined).length !== 1) {
-    throw new Error('Give one of: value; from, to and step; one of; stock with from and to.');
+    throw new Error(
+      'Give one of: value; from, to and step; one of; stock with from and to; column.',
+    );
   }
   if (given.value !== undefined) {
     const { figure, unit } = readAuthorFigure(given.value);
     return [{ kind: 'value', figure }, unit.symbol === '' ? parseUnit(given.unit ?? '') : unit];
   }
-  if (given.stock !== undefined) return readStock(given, given.stock);
+  if (stock !== undefined) return readStock(given, stock);
+  if (column !== undefined) {
+    const { figures, unit } = columnAt(column, tables);
+    return [{ kind: 'list', figures }, unit];
+  }
   if (given['one of'] !== undefined) {
     const [figures, unit] = readAuthorFigures(given['one of'], given.unit ?? '');
     return [{ kind: 'list', figures }, unit];
@@ -61,7 +73,7 @@ function readRange(given: SheetGiven): [Source, Unit] {
   return [{ kind: 'range', from: low, to: high, step: by }, unit];
 }
 
-function readStock(given: SheetGiven, series: 'cable' | 'fuse'): [Source, Unit] {
+function readStock(given: SheetGiven, series: StockName): [Source, Unit] {
   const { sizes, unit } = STOCK[series];
   const figures = sizesBetween(series, given.from ?? '', given.to ?? '');
   if (figures.length < 2)
@@ -70,13 +82,21 @@ function readStock(given: SheetGiven, series: 'cable' | 'fuse'): [Source, Unit] 
 }
 
 /** Stock sizes between two typed ones, both included. */
-export function sizesBetween(series: 'cable' | 'fuse', from: string, to: string): number[] {
+export function sizesBetween(series: StockName, from: string, to: string): number[] {
   const { sizes, unit } = STOCK[series];
-  const [[low = 0, high = 0]] = readAuthorFigures([from, to], unit.symbol);
-  for (const end of [low, high]) {
-    if (!sizes.includes(end)) {
-      throw new Error(`${end} ${unit.symbol} is no stock size; use ${sizes.join(', ')}.`);
-    }
-  }
-  return sizes.filter((size) => size >= low && size <= high);
+  const [low = -1, high = -1] = [from, to].map((text) => {
+    const figure = sizeFigure(text, unit);
+    const place = sizes.indexOf(figure);
+    if (place >= 0) return place;
+    const known = sizes.map((size) => figureText(size, unit, 9)).join(', ');
+    throw new Error(`"${text}" is no stock size; use ${known} ${unit.symbol}.`);
+  });
+  if (low > high) throw new Error(`From ${from} to ${to} runs downwards; give the smaller first.`);
+  return sizes.slice(low, high + 1);
+}
+
+function sizeFigure(text: string, unit: Unit): number {
+  if (unit.symbol === 'AWG') return gaugeNumber(text.replace(/\s*AWG$/, ''));
+  const [[figure = NaN]] = readAuthorFigures([text], unit.symbol);
+  return figure;
 }

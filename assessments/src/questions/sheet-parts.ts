@@ -1,5 +1,6 @@
 import { readAuthorFigure } from './author-figure.ts';
 import {
+  type BarePart,
   type ChoicePart,
   type Given,
   type Part,
@@ -8,8 +9,14 @@ import {
   type Step,
   type Tolerance,
 } from './compiled.ts';
-import { type Expr } from './expression.ts';
 import { sizesBetween } from './sheet-givens.ts';
+import {
+  type OptionScope,
+  readChoices,
+  readMatch,
+  readOptions,
+  readOrder,
+} from './sheet-listed-parts.ts';
 import { type Sheet, type SheetAsk } from './sheet-schema.ts';
 import { STAGES, stageOptions } from './stages.ts';
 import { STOCK } from './stock-series.ts';
@@ -17,12 +24,10 @@ import { parseUnit } from './unit-expression.ts';
 import { sameDimension, type Unit } from './units.ts';
 
 /** What a part may lean on. */
-export interface PartScope {
+interface PartScope extends OptionScope {
   givens: readonly Given[];
   steps: readonly Step[];
   curve: Sheet['curve'];
-  /** Reads a condition; throws when it is none. */
-  condition(text: string): Expr;
 }
 
 /**
@@ -40,19 +45,23 @@ export function readPart(
   if ((ask.carry === 'never') !== (ask.because !== undefined)) {
     throw new Error('carry: never needs the reason under because, and nothing else does.');
   }
-  const base = { id, prompt, marks: ask.marks, carry: ask.carry, because: ask.because ?? '' };
+  const { marks, carry, because = '', read = null } = ask;
+  const base = { id, prompt, marks, carry, because, read };
   if ('find' in ask) return { ...base, ...readQuantity(ask, scope) };
   if ('size' in ask) return { ...base, ...readSize(ask, scope) };
   if ('choose' in ask) return { ...base, ...readChoice(ask, scope) };
-  return { ...base, ...readStage(ask.stage, scope) };
+  if ('stage' in ask) return { ...base, ...readStage(ask.stage, scope) };
+  // What was worked out before is no excuse for a wrong order, pair or reason.
+  if (carry === 'own') throw new Error('carry: own fits find, size and choose only; leave it out.');
+  if ('order' in ask) return { ...base, ...readOrder(ask) };
+  if ('match' in ask) return { ...base, ...readMatch(ask) };
+  return { ...base, ...readChoices(ask['choose all'], scope) };
 }
-
-type Bare<P extends Part> = Omit<P, 'id' | 'prompt' | 'marks' | 'carry' | 'because'>;
 
 function readQuantity(
   ask: Extract<SheetAsk, { find: string }>,
   scope: PartScope,
-): Bare<QuantityPart> {
+): BarePart<QuantityPart> {
   const step = stepNamed(ask.find, scope);
   const units = ask.units.map(parseUnit);
   for (const unit of units) requireKind(unit, step.unit, ask.find);
@@ -87,7 +96,7 @@ function inUnit(text: string, unit: Unit): number {
   return read.unit.symbol === '' ? read.figure : (read.figure * read.unit.factor) / unit.factor;
 }
 
-function readSize(ask: Extract<SheetAsk, { size: string }>, scope: PartScope): Bare<SizePart> {
+function readSize(ask: Extract<SheetAsk, { size: string }>, scope: PartScope): BarePart<SizePart> {
   const step = stepNamed(ask.size, scope);
   const { unit } = STOCK[ask.stock];
   requireKind(unit, step.unit, ask.size);
@@ -99,21 +108,15 @@ function readSize(ask: Extract<SheetAsk, { size: string }>, scope: PartScope): B
 function readChoice(
   ask: Extract<SheetAsk, { choose: unknown }>,
   scope: PartScope,
-): Bare<ChoicePart> {
-  const options = ask.choose.map((option) => {
-    const right = typeof option.right === 'string' ? scope.condition(option.right) : option.right;
-    if (right !== true && option.say === undefined) {
-      throw new Error(`Option "${option.is}" can be wrong and has no say: write why it is.`);
-    }
-    return { text: option.is, right, say: option.say ?? null };
-  });
+): BarePart<ChoicePart> {
+  const options = readOptions(ask.choose, scope);
   const plain = options.filter((option) => option.right === true).length;
   const depends = options.some((option) => typeof option.right !== 'boolean');
   if (!depends && plain !== 1) throw new Error(`${plain} options are right; exactly one must be.`);
   return { kind: 'choice', options };
 }
 
-function readStage(label: string, scope: PartScope): Bare<ChoicePart> {
+function readStage(label: string, scope: PartScope): BarePart<ChoicePart> {
   const entry = scope.curve?.intervals[label];
   if (!entry) throw new Error(`No interval ${label} is marked on a curve; add it to the curve.`);
   const right = typeof entry === 'string' ? entry : entry.stage;

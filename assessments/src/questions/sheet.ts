@@ -8,6 +8,7 @@ import { attempt, type Desk, stopIfWrong } from './sheet-desk.ts';
 import { readPart } from './sheet-parts.ts';
 import { type Sheet, sheetSchema } from './sheet-schema.ts';
 import { readSlip } from './sheet-slips.ts';
+import { readTables } from './sheet-tables.ts';
 import { conditionIn, readGivens, readSteps } from './sheet-steps.ts';
 import { type CompiledQuestion, type DiagramView } from './types.ts';
 
@@ -23,15 +24,16 @@ const TRIAL_DRAWS = 12;
 export function parseQuestion(source: string, path: string): CompiledQuestion {
   const file = openSheet(source, path, sheetSchema);
   const desk: Desk = { path, sheet: file.front, file, issues: [], dimensions: new Map() };
-  const givens = readGivens(desk);
-  const steps = readSteps(desk, givens);
+  const tables = readTables(desk);
+  const givens = readGivens(desk, tables);
+  const steps = readSteps(desk, { givens, tables });
   const require = desk.sheet.require.flatMap((text, index) =>
     attempt(desk, ['require', index], () => conditionIn(text, desk.dimensions)),
   );
   const parts = readParts(desk, givens, steps);
   const slips = desk.sheet.slips.flatMap((slip, index) =>
     attempt(desk, ['slips', index], () =>
-      readSlip(slip, { parts, steps, dimensions: desk.dimensions }),
+      readSlip(slip, { parts, steps, tables, sheet: desk.sheet, dimensions: desk.dimensions }),
     ),
   );
   const [curve = null] = attempt(desk, ['curve'], () =>
@@ -47,12 +49,14 @@ export function parseQuestion(source: string, path: string): CompiledQuestion {
     cautions: desk.sheet.cautions,
     ...leadAndBody(file.intro),
     givens,
+    tables,
     steps,
     require,
     parts,
     slips,
     diagram: diagramOf(desk.sheet.diagram),
     curve,
+    read: desk.sheet.read ?? null,
   };
   attempt(desk, ['given'], () => tryDraws(question));
   stopIfWrong(desk);

@@ -13,7 +13,9 @@ export function summarise(question: Compiled, judged: readonly Judged[]): string
   const isRounded = judged.some(({ finding }) => finding.rule === 'rounded-early');
   const carriedOn = count('carried-forward') > 0 || count('not-carried') > 0;
   const off = judged.filter(({ finding }) =>
-    ['wrong', 'wrong-unit', 'power-of-ten', 'not-understood'].includes(finding.verdict),
+    ['wrong', 'partly-right', 'wrong-unit', 'power-of-ten', 'not-understood'].includes(
+      finding.verdict,
+    ),
   ).length;
   return [
     headline({ slips: slips.length + Number(isRounded), off, carriedOn, blank: count('blank') }),

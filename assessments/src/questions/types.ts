@@ -19,6 +19,14 @@ export interface GivenView {
   unit: string;
 }
 
+/** An extract of a printed table; figures formatted for display. */
+export interface TableView {
+  caption: string;
+  source: string;
+  columns: { label: string; unit: string }[];
+  rows: string[][];
+}
+
 export interface OptionView {
   /** Opaque: drawn anew for every attempt, says nothing about the option. */
   id: string;
@@ -27,7 +35,11 @@ export interface OptionView {
 
 export interface PartView {
   id: string;
-  kind: 'quantity' | 'choice';
+  /**
+   * `choice` takes one option, `choices` all that apply, `order` the options in the right order,
+   * `match` one option for each row.
+   */
+  kind: 'quantity' | 'choice' | 'choices' | 'order' | 'match';
   /** Inline Markdown. */
   prompt: string;
   marks: number;
@@ -36,14 +48,24 @@ export interface PartView {
   units: string[];
   rounding: string | null;
   options: OptionView[];
+  /** Left-hand items of a `match`; their ids are as opaque as an option's. */
+  rows: OptionView[];
   /** `sizes` is one ruled row of stock sizes. */
   layout: 'rows' | 'sizes';
 }
 
 export interface CurveView {
   hours: number[];
+  /** At the charger's posts; the battery's too where no lead is modelled between them. */
   volts: number[];
+  /** Out of the charger. */
   amps: number[];
+  /** At the battery's posts, where they are shown apart. */
+  batteryVolts?: number[];
+  /** At the charger's input, where it is shown. */
+  inputVolts?: number[];
+  /** Into the battery, where they are shown apart; under 0 out of it. */
+  batteryAmps?: number[];
   intervals: { label: string; fromH: number; toH: number }[];
 }
 
@@ -76,6 +98,7 @@ export interface QuestionView {
   marks: number;
   aids: string[];
   given: GivenView[];
+  tables: TableView[];
   diagram: DiagramView | null;
   curve: CurveView | null;
   cautions: CautionView[];
@@ -86,6 +109,11 @@ export interface RawAnswer {
   text: string;
   unit: string | null;
   option: string | null;
+  /**
+   * `choices`: ids chosen, in any order. `order`: every id, in the trainee's order. `match`: the id
+   * chosen for each row, in the order of the view's rows, '' where none is. Missing: none of these.
+   */
+  options?: string[];
   working: string;
 }
 /** By part id. */
@@ -128,6 +156,8 @@ export interface DrawnQuestion {
 
 export type Verdict =
   | 'right'
+  /** Some of what was chosen, put in order or matched is right. */
+  | 'partly-right'
   | 'carried-forward'
   | 'slip'
   | 'wrong-unit'
@@ -158,6 +188,10 @@ export interface MarkedPart {
   yours: Line[];
   worked: Line[];
   remarks: Remark[];
+  /** The step that went wrong, with the words for it ('' when it has none); null where none did. */
+  wrongStep: { symbol: string; says: string } | null;
+  /** Heading of the lesson paragraph to read after a wrong answer. */
+  read: string | null;
 }
 
 export interface MarkedQuestion {
@@ -174,7 +208,18 @@ export interface WorkedAnswer {
   title: string;
   lead: string;
   given: GivenView[];
+  tables: TableView[];
   diagram: DiagramView | null;
   curve: CurveView | null;
   parts: { id: string; prompt: string; lines: Line[] }[];
+}
+
+/** A question with all but the last steps worked, to be answered from there. */
+export interface FadedQuestion {
+  /** How many of the last steps are left to the trainee; 0 is fully worked. */
+  left: number;
+  /** Parts of which something is worked: whole, or the steps on the way to their answer. */
+  shown: { part: string; lines: Line[] }[];
+  /** Parts left to answer. */
+  asked: string[];
 }

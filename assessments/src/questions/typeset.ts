@@ -1,6 +1,6 @@
 import { type Compiled, type Step } from './compiled.ts';
 import { type Expr, type Operator } from './expression.ts';
-import { toShortFigures } from './format.ts';
+import { figureText, toShortFigures } from './format.ts';
 import { FUNCTIONS } from './functions.ts';
 import { type Line, type Token } from './types.ts';
 import { fromSi, type Unit } from './units.ts';
@@ -28,7 +28,7 @@ const EQUALS = operator('=');
 
 /** Figure and unit of a value; a negative one stands in brackets inside a sum. */
 function quantityTokens(si: number, unit: Unit, figures: number): Token[] {
-  const number: Token = { kind: 'number', text: toShortFigures(fromSi(si, unit), figures) };
+  const number: Token = { kind: 'number', text: figureText(fromSi(si, unit), unit, figures) };
   return unit.symbol === '' ? [number] : [number, { kind: 'unit', text: unit.symbol }];
 }
 
@@ -110,6 +110,8 @@ function typeset(expr: Expr, leaf: Leaf): Token[] {
       ];
     case 'call':
       return typesetCall(expr, leaf);
+    case 'look':
+      return typesetLookUp(expr, leaf);
   }
 }
 
@@ -139,6 +141,22 @@ function typesetCall(expr: Extract<Expr, { kind: 'call' }>, leaf: Leaf): Token[]
   const opening = says === '√' ? [operator('√')] : [words(says)];
   const isBare = says !== '√' && expr.of.every((arg) => arg.kind === 'name');
   return isBare ? [...opening, ...args] : [...opening, operator('('), ...args, operator(')')];
+}
+
+const ROWS_OFF: Readonly<Record<number, string>> = {
+  [-3]: 'three rows above',
+  [-2]: 'two rows above',
+  [-1]: 'the row above',
+  0: 'row',
+  1: 'the row below',
+  2: 'two rows below',
+  3: 'three rows below',
+};
+
+/** "row 10 mm², column 105 °C" */
+function typesetLookUp(expr: Extract<Expr, { kind: 'look' }>, leaf: Leaf): Token[] {
+  const row = words(ROWS_OFF[expr.off] ?? 'row');
+  return [row, ...typeset(expr.of, leaf), operator(','), words(`column ${expr.column}`)];
 }
 
 function bracketed(expr: Expr, least: number, leaf: Leaf): Token[] {

@@ -7,7 +7,7 @@ export interface Unit {
   dimension: Dimension;
   /** SI value of one of it. */
   factor: number;
-  /** SI value of its zero; not nought for °C alone. */
+  /** SI value of its zero; not nought for °C and °F alone. */
   offset: number;
 }
 
@@ -29,6 +29,8 @@ const LENGTH: Dimension = [0, 1, 0, 0, 0];
 const TIME: Dimension = [0, 0, 1, 0, 0];
 const CHARGE: Dimension = [0, 0, 1, 1, 0];
 const ENERGY: Dimension = [1, 2, -2, 0, 0];
+const FORCE: Dimension = [1, 1, -2, 0, 0];
+const MASS: Dimension = [1, 0, 0, 0, 0];
 const KELVIN: Dimension = [0, 0, 0, 0, 1];
 const FARAD: Dimension = [-1, -2, 4, 2, 0];
 
@@ -128,6 +130,7 @@ export const BASE_UNITS: readonly BaseUnit[] = [
     spellings: ['mins', 'Min', 'MIN'],
     words: ['minute', 'minutes'],
   }),
+  base('d', TIME, { factor: 86400, words: ['day', 'days'] }),
   base('s', TIME, {
     spellings: ['S', 'sec', 'secs', 'Sec'],
     words: ['second', 'seconds'],
@@ -138,7 +141,21 @@ export const BASE_UNITS: readonly BaseUnit[] = [
     spellings: ['℃', 'degC', 'deg C', 'oC', '° C', 'C', 'ºC'],
     words: ['degrees C', 'celsius', 'degrees celsius'],
   }),
+  base('°F', KELVIN, {
+    factor: 5 / 9,
+    offset: 459.67 * (5 / 9),
+    spellings: ['℉', 'degF', 'deg F', 'oF', '° F', 'ºF'],
+    words: ['degrees F', 'fahrenheit', 'degrees fahrenheit'],
+  }),
   base('K', KELVIN, { spellings: ['k'], words: ['kelvin'] }),
+  base('N', FORCE, { words: ['newton', 'newtons'], prefixes: 'k' }),
+  base('N·m', ENERGY, {
+    spellings: ['Nm', 'N m', 'N*m'],
+    words: ['newton metre', 'newton metres', 'newton meter', 'newton meters'],
+  }),
+  base('kg', MASS, { spellings: ['KG', 'Kg'], words: ['kilogram', 'kilograms', 'kilo', 'kilos'] }),
+  /** A gauge number: 10 is 10 AWG, 0 is 1/0, −1 is 2/0, −3 is 4/0. */
+  base('AWG', NO_DIMENSION, { spellings: ['awg', 'Awg'] }),
   base('%', NO_DIMENSION, {
     factor: 0.01,
     spellings: ['pc', 'pct'],

@@ -1,0 +1,92 @@
+import {
+  type BarePart,
+  type ChoicesPart,
+  type MatchPart,
+  type Option,
+  type OrderPart,
+} from './compiled.ts';
+import { type Expr } from './expression.ts';
+import { type SheetAsk } from './sheet-schema.ts';
+
+type SheetOptions = Extract<SheetAsk, { choose: unknown }>['choose'];
+
+export interface OptionScope {
+  /** Reads a condition; throws when it is none. */
+  condition(text: string): Expr;
+}
+
+/** Options to choose from, each that can be wrong with its reason. */
+export function readOptions(options: SheetOptions, scope: OptionScope): Option[] {
+  requireUnlike(options.map(({ is }) => is));
+  return options.map((option) => {
+    const right = typeof option.right === 'string' ? scope.condition(option.right) : option.right;
+    if (right !== true && option.say === undefined) {
+      throw new Error(`Option "${option.is}" can be wrong and has no say: write why it is.`);
+    }
+    return { text: option.is, right, say: option.say ?? null };
+  });
+}
+
+/**
+ * A part that takes all options that apply.
+ *
+ * @throws {Error} when all or none are right whatever is drawn.
+ */
+export function readChoices(options: SheetOptions, scope: OptionScope): BarePart<ChoicesPart> {
+  const read = readOptions(options, scope);
+  const isAll = (right: boolean): boolean => read.every((option) => option.right === right);
+  if (isAll(false)) throw new Error('No option is right; set right: true on those that apply.');
+  if (isAll(true)) throw new Error('Every option is right; add one that does not apply.');
+  return { kind: 'choices', options: read };
+}
+
+/**
+ * A part that asks for an order.
+ *
+ * @throws {Error} when words are written for a pair that stands the right way round, or for none.
+ */
+export function readOrder(ask: Extract<SheetAsk, { order: unknown }>): BarePart<OrderPart> {
+  const names = Object.keys(ask.order);
+  requireUnlike(Object.values(ask.order));
+  const placeOf = (name: string): number => placeIn(names, name, 'step of the order');
+  const misplaced = ask.misplaced.map(({ first, then, say }) => {
+    if (placeOf(first) > placeOf(then)) return { first: placeOf(first), then: placeOf(then), say };
+    throw new Error(
+      `${first} before ${then} is the right order; write words for the wrong one, ${then} before ${first}.`,
+    );
+  });
+  return { kind: 'order', items: Object.values(ask.order), misplaced };
+}
+
+/**
+ * A part that asks for pairs.
+ *
+ * @throws {Error} when words are written for a pair that is right, or is none.
+ */
+export function readMatch(ask: Extract<SheetAsk, { match: unknown }>): BarePart<MatchPart> {
+  const names = Object.keys(ask.match);
+  const options = [...new Set([...Object.values(ask.match), ...ask.also])];
+  if (options.length < 2) throw new Error('Every item has the same text; one way fits all.');
+  const spare = ask.also.find((text) => Object.values(ask.match).includes(text));
+  if (spare !== undefined)
+    throw new Error(`"${spare}" under also fits a pair; leave it out there.`);
+  const rows = names.map((text) => ({ text, right: options.indexOf(ask.match[text] ?? '') }));
+  const mixed = ask.mixed.map(({ is, with: other, say }) => {
+    const row = placeIn(names, is, 'item to match');
+    const option = placeIn(options, other, 'text to match with');
+    if (rows[row]?.right !== option) return { row, option, say };
+    throw new Error(`"${is}" with "${other}" is a right pair; write words for a wrong one.`);
+  });
+  return { kind: 'match', rows, options, mixed };
+}
+
+function placeIn(names: readonly string[], name: string, what: string): number {
+  const place = names.indexOf(name);
+  if (place >= 0) return place;
+  throw new Error(`"${name}" is no ${what}; use one of ${names.join(', ')}.`);
+}
+
+function requireUnlike(texts: readonly string[]): void {
+  const twice = texts.find((text, index) => texts.indexOf(text) !== index);
+  if (twice !== undefined) throw new Error(`"${twice}" stands there twice; tell them apart.`);
+}
