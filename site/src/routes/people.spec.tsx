@@ -23,6 +23,7 @@ function openDesk(view: PersonView = person) {
   signInAs(['administrator']);
   serve('get', '/api/people', { people: [view], nextCursor: null });
   serve('get', '/api/people/:id', { person: view, lately: [] });
+  serve('get', '/api/school/practice-profile', { profile: 'metric' });
   return renderRoute('/people');
 }
 
@@ -75,4 +76,26 @@ it('is not opened for a trainer', async () => {
   signInAs(['trainer']);
   renderRoute('/people');
   expect(await screen.findByRole('heading', { name: 'This is not yours to open' })).toBeVisible();
+});
+
+it('shows by which practice the school works, and chooses another', async () => {
+  const { user } = openDesk();
+  expect(await screen.findByRole('radio', { name: /^Metric practice/ })).toBeChecked();
+  const button = screen.getByRole('button', { name: 'Choose this profile' });
+  expect(button).toBeDisabled();
+  await user.click(screen.getByRole('radio', { name: /^AWG practice/ }));
+  const sent: unknown[] = [];
+  serveWith('put', '/api/school/practice-profile', (body) => {
+    sent.push(body);
+    return HttpResponse.json({ profile: 'awg' });
+  });
+  await user.click(button);
+  expect(await screen.findByText('The school works by AWG practice.')).toBeVisible();
+  expect(sent).toEqual([{ profile: 'awg' }]);
+});
+
+it('says that there is no profile before the school is entered', async () => {
+  openDesk();
+  serveWith('get', '/api/school/practice-profile', () => problemReply(404, 'not-found'));
+  expect(await screen.findByText(/The school itself is not entered yet/)).toBeVisible();
 });

@@ -5,6 +5,7 @@ import { type LoaderArgs, requireSession, sessionQuery } from '../api/session.ts
 import { PeopleTable } from '../features/people/people-table.tsx';
 import { PersonPanel } from '../features/people/person-panel.tsx';
 import { peopleQuery } from '../features/people/queries.ts';
+import { PracticeProfile } from '../features/school/practice-profile.tsx';
 import { FindField } from '../ui/find-field.tsx';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
@@ -45,6 +46,7 @@ export function Component() {
           </aside>
         )}
       </div>
+      <PracticeProfile />
     </Sheet>
   );
 }

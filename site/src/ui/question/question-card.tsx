@@ -9,6 +9,12 @@ import './question.css';
 import { Schematic } from './schematic.tsx';
 import { TableExtract } from './table-extract.tsx';
 import { type Answers, type PartView, type QuestionView, type RawAnswer } from './views.ts';
+import { type Lines, WorkedLines, WorkedPart } from './worked-part.tsx';
+
+interface FadedView {
+  shown: readonly { part: string; lines: Lines }[];
+  asked: readonly string[];
+}
 
 interface QuestionCardProps {
   question: QuestionView;
@@ -18,6 +24,8 @@ interface QuestionCardProps {
   readOnly?: boolean;
   /** Drawn between the given values and the parts: the curve of a curve reading. */
   curve?: ReactNode;
+  /** What is worked already, and which parts are left to answer; all of them without it. */
+  faded?: FadedView | null;
   /** What stands under the prompt of a part. */
   aside?: (part: PartView) => ReactNode;
   onChange: (part: string, answer: RawAnswer) => void;
@@ -25,24 +33,41 @@ interface QuestionCardProps {
 }
 
 /** A question as it is answered: given values, drawing, cautions, lettered parts with their marks. */
-export function QuestionCard({ question, answers, unclear = {}, ...props }: QuestionCardProps) {
+export function QuestionCard({
+  question,
+  answers,
+  unclear = {},
+  faded,
+  ...props
+}: QuestionCardProps) {
   return (
     <div className="question">
       <QuestionFacts question={question} />
       {props.curve}
       <ol className="parts">
-        {question.parts.map((part) => (
-          <PartEntry
-            key={part.id}
-            part={part}
-            answer={answers[part.id]}
-            unclear={unclear[part.id]}
-            readOnly={props.readOnly ?? false}
-            aside={props.aside?.(part)}
-            onChange={(answer) => props.onChange(part.id, answer)}
-            onLeave={() => props.onLeave?.(part.id)}
-          />
-        ))}
+        {question.parts.map((part) => {
+          const lines = faded?.shown.find((shown) => shown.part === part.id)?.lines ?? [];
+          if (faded && !faded.asked.includes(part.id)) {
+            return <WorkedPart key={part.id} part={part} lines={lines} />;
+          }
+          return (
+            <PartEntry
+              key={part.id}
+              part={part}
+              answer={answers[part.id]}
+              unclear={unclear[part.id]}
+              readOnly={props.readOnly ?? false}
+              aside={
+                <>
+                  {lines.length > 0 && <WorkedLines label="Worked as far as here" lines={lines} />}
+                  {props.aside?.(part)}
+                </>
+              }
+              onChange={(answer) => props.onChange(part.id, answer)}
+              onLeave={() => props.onLeave?.(part.id)}
+            />
+          );
+        })}
       </ol>
     </div>
   );
