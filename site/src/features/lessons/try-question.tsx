@@ -69,7 +69,7 @@ function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
       </header>
       {mark.data ? (
         <>
-          <MarkedQuestion marked={mark.data.marked} />
+          <MarkedQuestion marked={mark.data.marked} asked={question.parts} />
           <div className="marked-facts">
             <QuestionFacts question={question} />
             {curve}

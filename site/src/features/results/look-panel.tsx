@@ -84,7 +84,7 @@ function Opened({ look }: { look: LookView }) {
             </h3>
             <p className="look-lead">{item.question.lead}</p>
             <QuestionFacts question={item.question} />
-            <MarkedQuestion marked={item.marked} />
+            <MarkedQuestion marked={item.marked} asked={item.question.parts} />
             <Working answers={item.answers} />
           </li>
         ))}

@@ -55,7 +55,7 @@ function MarkedItem({ item, place, whose }: MarkedItemProps) {
           </p>
         )}
       </ItemHead>
-      <MarkedQuestion marked={marked} {...(whose && { whose })} />
+      <MarkedQuestion marked={marked} asked={question.parts} {...(whose && { whose })} />
       <div className="marked-facts">
         <QuestionFacts question={question} />
         {question.curve && <CurveReader curve={question.curve} />}

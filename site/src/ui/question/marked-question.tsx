@@ -2,20 +2,24 @@ import { type CSSProperties } from 'react';
 import { Line } from '../line.tsx';
 import { PenCross, PenTick } from '../symbols/signs.tsx';
 import { InlineMarkdown } from './inline-markdown.tsx';
+import { isListed, ListedColumn } from './marked-list.tsx';
 import './marked.css';
-import { type MarkedPartView, type MarkedQuestionView } from './views.ts';
+import { type MarkedPartView, type MarkedQuestionView, type PartView } from './views.ts';
+import { WhatToLookAt } from './what-to-look-at.tsx';
 
 type Lines = MarkedPartView['yours'];
 type Remark = MarkedPartView['remarks'][number];
 
 interface MarkedQuestionProps {
   marked: MarkedQuestionView;
+  /** The parts as they were asked: what was listed is ticked or crossed line by line. */
+  asked: readonly PartView[];
   /** Whose answers they are, when they are not the reader's. */
   whose?: string;
 }
 
 /** A marked question, part by part: yours, worked, marker. */
-export function MarkedQuestion({ marked, whose = 'Yours' }: MarkedQuestionProps) {
+export function MarkedQuestion({ marked, asked, whose = 'Yours' }: MarkedQuestionProps) {
   return (
     <div className="marked">
       <div className="marked-head" aria-hidden="true">
@@ -27,6 +31,7 @@ export function MarkedQuestion({ marked, whose = 'Yours' }: MarkedQuestionProps)
         <MarkedPart
           key={part.id}
           part={part}
+          kind={asked.find(({ id }) => id === part.id)?.kind ?? 'quantity'}
           whose={whose}
           strokesBefore={countStrokes(marked, index)}
         />
@@ -43,11 +48,12 @@ function countStrokes({ parts }: MarkedQuestionView, before: number): number {
 
 interface MarkedPartProps {
   part: MarkedPartView;
+  kind: PartView['kind'];
   whose: string;
   strokesBefore: number;
 }
 
-function MarkedPart({ part, whose, strokesBefore }: MarkedPartProps) {
+function MarkedPart({ part, kind, whose, strokesBefore }: MarkedPartProps) {
   const lines = Math.max(part.yours.length, part.worked.length, 1);
   const vars = { '--lines': lines } as CSSProperties;
   return (
@@ -55,13 +61,23 @@ function MarkedPart({ part, whose, strokesBefore }: MarkedPartProps) {
       <h3>
         <b>({part.id})</b> <InlineMarkdown>{part.prompt}</InlineMarkdown>
       </h3>
-      <WorkingColumn className="yours" heading={whose} lines={part.yours} />
-      <WorkingColumn className="worked" heading="Worked" lines={part.worked} />
+      {isListed(kind) ? (
+        <>
+          <ListedColumn heading={whose} part={part} kind={kind} />
+          <WorkingColumn className="worked listed" heading="Worked" lines={part.worked} />
+        </>
+      ) : (
+        <>
+          <WorkingColumn className="yours" heading={whose} lines={part.yours} />
+          <WorkingColumn className="worked" heading="Worked" lines={part.worked} />
+        </>
+      )}
       <div className="marker">
         <div>
           {part.remarks.map((remark, index) => (
             <RemarkLine key={index} remark={remark} stroke={strokesBefore + index} />
           ))}
+          <WhatToLookAt part={part} />
         </div>
         <p className="part-mark">
           {part.marks}
