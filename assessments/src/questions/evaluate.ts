@@ -46,13 +46,8 @@ export function compile(expr: Expr, practice: PracticeName): Formula {
     }
     case 'op':
       return OPERATIONS[expr.op](compile(expr.left, practice), compile(expr.right, practice));
-    case 'if': {
-      const [when, then, otherwise] = [expr.when, expr.then, expr.otherwise].map((branch) =>
-        compile(branch, practice),
-      );
-      if (!when || !then || !otherwise) throw new Error('A conditional has lost a branch.');
-      return (values) => (when(values) === 1 ? then(values) : otherwise(values));
-    }
+    case 'if':
+      return compileConditional(expr, practice);
     case 'call':
       return compileCall(expr, practice);
     case 'look': {
@@ -60,6 +55,13 @@ export function compile(expr: Expr, practice: PracticeName): Formula {
       return (values) => lookUp(expr, of(values));
     }
   }
+}
+
+function compileConditional(expr: Extract<Expr, { kind: 'if' }>, practice: PracticeName): Formula {
+  const when = compile(expr.when, practice);
+  const then = compile(expr.then, practice);
+  const otherwise = compile(expr.otherwise, practice);
+  return (values) => (when(values) === 1 ? then(values) : otherwise(values));
 }
 
 function compileCall(expr: Extract<Expr, { kind: 'call' }>, practice: PracticeName): Formula {

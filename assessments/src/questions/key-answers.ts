@@ -26,6 +26,21 @@ function choice(held: Extract<DrawnPart, { kind: 'options' }>, isSlipped: boolea
   return { ...blank, option: isSlipped ? (other ?? held.right) : held.right };
 }
 
+/** The right choice, order or pairs; slipped: one choice short or too many, one step moved, one pair wrong. */
+function listed(
+  held: Exclude<DrawnPart, { kind: 'quantity' | 'options' }>,
+  isSlipped: boolean,
+): RawAnswer {
+  const { right } = held;
+  if (!isSlipped) return { ...blank, options: right };
+  const [first = '', ...rest] = right;
+  const other = held.options.find(({ id }) => id !== first)?.id ?? first;
+  if (held.kind === 'match') return { ...blank, options: [other, ...rest] };
+  if (held.kind === 'order') return { ...blank, options: [...rest, first] };
+  const extra = held.options.find(({ id }) => !right.includes(id))?.id;
+  return { ...blank, options: extra === undefined ? rest : [...right, extra] };
+}
+
 interface Table {
   question: Compiled;
   drawn: Drawn;
@@ -66,9 +81,12 @@ export function keyAnswers(
   for (const part of question.parts) {
     const held = drawn.parts[part.id];
     const isSlipped = slippedParts.includes(part.id);
-    if (held?.kind === 'options') answers[part.id] = choice(held, isSlipped);
-    if (held?.kind !== 'quantity' || part.kind !== 'quantity') continue;
-    answers[part.id] = quantity(part, held, { table, isSlipped });
+    if (!held) continue;
+    if (held.kind === 'options') answers[part.id] = choice(held, isSlipped);
+    else if (held.kind !== 'quantity') answers[part.id] = listed(held, isSlipped);
+    else if (part.kind === 'quantity') {
+      answers[part.id] = quantity(part, held, { table, isSlipped });
+    }
   }
   return answers;
 }

@@ -61,14 +61,16 @@ export function remarksOnMatch({ drawn }: Page, part: MatchPart, { answer }: Jud
   const ids = chosenIn(answer);
   const kept = held.right.filter((id, row) => ids[row] === id).length;
   const wrong = held.rows.flatMap(({ index }, row) => {
-    const { text = '', right = -1 } = part.rows[index] ?? {};
-    const option = held.options.find(({ id }) => id === ids[row])?.index ?? -1;
-    if (option === right) return [];
-    const mixed = part.mixed.find((one) => one.row === index && one.option === option);
-    const fits = part.options[right] ?? '';
-    const other = part.options[option];
-    const plain = other === undefined ? `not matched; it is ${fits}` : `${fits}, not ${other}`;
-    return [lost(text, mixed?.say ?? plain)];
+    const option = held.options.find(({ id }) => id === ids[row])?.index;
+    const isRight = option === part.rows[index]?.right;
+    return isRight ? [] : [lost(part.rows[index]?.text ?? '', mixedWords(part, index, option))];
   });
   return [...soMany(kept, held.right.length, 'pairs right'), ...wrong];
+}
+
+function mixedWords(part: MatchPart, row: number, option: number | undefined): string {
+  const fits = part.options[part.rows[row]?.right ?? -1] ?? '';
+  if (option === undefined) return `not matched; it is ${fits}`;
+  const mixed = part.mixed.find((one) => one.row === row && one.option === option);
+  return mixed?.say ?? `${fits}, not ${part.options[option] ?? ''}`;
 }

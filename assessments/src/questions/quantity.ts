@@ -35,11 +35,13 @@ export function readQuantity(typed: string, wanted: Dimension | null): QuantityR
   if (number.state === 'ambiguous') {
     return { state: 'ambiguous', readings: number.readings.map((r) => `${r} ${spelling}`.trim()) };
   }
-  if (spelling === '') return { state: 'quantity', figure: number.value, unit: null };
+  return withUnit(number.value, spelling, wanted);
+}
+
+function withUnit(figure: number, spelling: string, wanted: Dimension | null): QuantityReading {
+  if (spelling === '') return { state: 'quantity', figure, unit: null };
   const unit = chooseUnit(unitsSpelt(spelling), wanted) ?? compoundUnit(spelling);
-  return unit
-    ? { state: 'quantity', figure: number.value, unit }
-    : { state: 'unknown-unit', spelling };
+  return unit ? { state: 'quantity', figure, unit } : { state: 'unknown-unit', spelling };
 }
 
 function chooseUnit(units: readonly Unit[], wanted: Dimension | null): Unit | undefined {

@@ -1,8 +1,14 @@
-import { type ChoicePart, type Drawn, type Part, type SizePart } from './compiled.ts';
+import {
+  type ChoicePart,
+  type Drawn,
+  type Part,
+  type QuantityPart,
+  type SizePart,
+} from './compiled.ts';
 import { type Judged, type Page } from './judged.ts';
 import { remarksOnChoices, remarksOnMatch, remarksOnOrder } from './listed-remarks.ts';
 import { fillIn } from './placeholders.ts';
-import { type RawAnswer, type Remark } from './types.ts';
+import { type RawAnswer, type Remark, type Verdict } from './types.ts';
 
 /** What the marker writes beside a part. */
 export function remarksOn(page: Page, judged: Judged): Remark[] {
@@ -15,28 +21,7 @@ export function remarksOn(page: Page, judged: Judged): Remark[] {
 }
 
 function rawRemarks(page: Page, judged: Judged): Remark[] {
-  const { part, finding } = judged;
-  switch (finding.verdict) {
-    case 'right':
-      return onRight(judged);
-    case 'carried-forward':
-      return [gained('Carried forward', `right sum on your own answer to ${partsUsed(judged)}`)];
-    case 'not-carried':
-      return [lost('Not carried forward', part.because)];
-    case 'slip':
-      return onSlip(page, judged);
-    case 'wrong-unit':
-      return onWrongUnit(judged);
-    case 'power-of-ten':
-      return onPowerOfTen(judged);
-    case 'blank':
-      return [lost(null, 'not answered')];
-    case 'not-understood':
-      return [lost('Not understood', finding.detail)];
-    case 'wrong':
-    case 'partly-right':
-      return onWrong(page, judged);
-  }
+  return REMARKS[judged.finding.verdict](page, judged);
 }
 
 const gained = (heading: string | null, text: string): Remark => ({
@@ -91,11 +76,23 @@ function withHalf(marks: number, part: Part, remark: Remark): Remark[] {
 
 function onWrong(page: Page, judged: Judged): Remark[] {
   const { part, answer } = judged;
-  if (part.kind === 'choices') return remarksOnChoices(page, part, judged);
-  if (part.kind === 'order') return remarksOnOrder(page, part, judged);
-  if (part.kind === 'match') return remarksOnMatch(page, part, judged);
-  if (part.kind === 'choice') return [lost(null, optionWords(page, part, answer))];
-  if (part.kind === 'size') return [lost(null, sizeWords(page.drawn, { part, answer }))];
+  switch (part.kind) {
+    case 'choice':
+      return [lost(null, optionWords(page, part, answer))];
+    case 'choices':
+      return remarksOnChoices(page, part, judged);
+    case 'order':
+      return remarksOnOrder(page, part, judged);
+    case 'match':
+      return remarksOnMatch(page, part, judged);
+    case 'size':
+      return [lost(null, sizeWords(page.drawn, { part, answer }))];
+    case 'quantity':
+      return onWrongQuantity(page, part);
+  }
+}
+
+function onWrongQuantity(page: Page, part: QuantityPart): Remark[] {
   const step = page.question.steps.find(({ name }) => name === part.step);
   const why =
     step?.how.kind === 'read'
@@ -119,3 +116,18 @@ function sizeWords(drawn: Drawn, { part, answer }: { part: SizePart; answer: Raw
     ? `too small for the job: ${part.because || 'it must be the next size that passes'}`
     : 'it would do, but a smaller stock size does as well';
 }
+
+const REMARKS: Record<Verdict, (page: Page, judged: Judged) => Remark[]> = {
+  right: (_, judged) => onRight(judged),
+  'carried-forward': (_, judged) => [
+    gained('Carried forward', `right sum on your own answer to ${partsUsed(judged)}`),
+  ],
+  'not-carried': (_, { part }) => [lost('Not carried forward', part.because)],
+  slip: onSlip,
+  'wrong-unit': (_, judged) => onWrongUnit(judged),
+  'power-of-ten': (_, judged) => onPowerOfTen(judged),
+  blank: () => [lost(null, 'not answered')],
+  'not-understood': (_, { finding }) => [lost('Not understood', finding.detail)],
+  wrong: onWrong,
+  'partly-right': onWrong,
+};

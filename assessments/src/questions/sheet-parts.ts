@@ -18,7 +18,7 @@ import {
   readOrder,
 } from './sheet-listed-parts.ts';
 import { type Sheet, type SheetAsk } from './sheet-schema.ts';
-import { STAGES, stageOptions } from './stages.ts';
+import { stageOptions } from './stages.ts';
 import { STOCK } from './stock-series.ts';
 import { parseUnit } from './unit-expression.ts';
 import { sameDimension, type Unit } from './units.ts';
@@ -46,16 +46,22 @@ export function readPart(
     throw new Error('carry: never needs the reason under because, and nothing else does.');
   }
   const { marks, carry, because = '', read = null } = ask;
-  const base = { id, prompt, marks, carry, because, read };
-  if ('find' in ask) return { ...base, ...readQuantity(ask, scope) };
-  if ('size' in ask) return { ...base, ...readSize(ask, scope) };
-  if ('choose' in ask) return { ...base, ...readChoice(ask, scope) };
-  if ('stage' in ask) return { ...base, ...readStage(ask.stage, scope) };
+  return { id, prompt, marks, carry, because, read, ...readAsk(ask, scope) };
+}
+
+type AnyBarePart = { [K in Part['kind']]: BarePart<Extract<Part, { kind: K }>> }[Part['kind']];
+
+function readAsk(ask: SheetAsk, scope: PartScope): AnyBarePart {
+  if ('find' in ask) return readQuantity(ask, scope);
+  if ('size' in ask) return readSize(ask, scope);
+  if ('choose' in ask) return readChoice(ask, scope);
+  if ('stage' in ask) return readStage(ask.stage, scope);
   // What was worked out before is no excuse for a wrong order, pair or reason.
-  if (carry === 'own') throw new Error('carry: own fits find, size and choose only; leave it out.');
-  if ('order' in ask) return { ...base, ...readOrder(ask) };
-  if ('match' in ask) return { ...base, ...readMatch(ask) };
-  return { ...base, ...readChoices(ask['choose all'], scope) };
+  if (ask.carry === 'own') {
+    throw new Error('carry: own fits find, size and choose only; leave it out.');
+  }
+  if ('order' in ask) return readOrder(ask);
+  return 'match' in ask ? readMatch(ask) : readChoices(ask['choose all'], scope);
 }
 
 function readQuantity(
@@ -117,10 +123,12 @@ function readChoice(
 }
 
 function readStage(label: string, scope: PartScope): BarePart<ChoicePart> {
-  const entry = scope.curve?.intervals[label];
-  if (!entry) throw new Error(`No interval ${label} is marked on a curve; add it to the curve.`);
+  const { curve } = scope;
+  const entry = curve?.intervals[label];
+  if (!curve || !entry)
+    throw new Error(`No interval ${label} is marked on a curve; add it to the curve.`);
   const right = typeof entry === 'string' ? entry : entry.stage;
-  return { kind: 'choice', options: stageOptions(right, STAGES) };
+  return { kind: 'choice', options: stageOptions(right, curve) };
 }
 
 function stepNamed(name: string, scope: PartScope): Step {
