@@ -41,7 +41,7 @@ export default {
         'src/main.ts',
         'src/cli/*.ts',
         'src/**/*.spec.ts',
-        'bin/{start,test,bench,bank-audit,postgres}.mjs',
+        'bin/{start,test,bench,remark,bank-audit,postgres}.mjs',
         'bin/bench/bare-server.mjs',
         'bin/**/*.spec.mjs',
         'fakes/**/*.spec.mjs',

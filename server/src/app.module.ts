@@ -15,7 +15,9 @@ import { LessonsModule } from './lessons/lessons.module.ts';
 import { PracticeModule } from './practice/practice.module.ts';
 import { MailModule } from './mail/mail.module.ts';
 import { PeopleModule } from './people/people.module.ts';
+import { RecordModule } from './record/record.module.ts';
 import { RegisterModule } from './register/register.module.ts';
+import { RemarkingModule } from './remarking/remarking.module.ts';
 import { SchoolModule } from './school/school.module.ts';
 import { SecondFactorsModule } from './second-factors/second-factors.module.ts';
 import { SessionsModule } from './sessions/sessions.module.ts';
@@ -42,6 +44,7 @@ export class AppModule {
         SecondFactorsModule,
         SignInModule,
         PeopleModule,
+        RecordModule,
         RegisterModule,
         SchoolModule,
         SittingsModule,
@@ -51,6 +54,7 @@ export class AppModule {
         LessonsModule,
         PracticeModule,
         WorksheetsModule,
+        RemarkingModule,
         HealthModule,
       ],
     };

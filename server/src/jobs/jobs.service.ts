@@ -39,7 +39,7 @@ export class JobsService implements OnApplicationBootstrap, OnApplicationShutdow
       schema: JOBS_SCHEMA,
       migrate: false,
       supervise: this.hasWorkers,
-      schedule: false,
+      schedule: this.hasWorkers,
       max: 4,
       application_name: 'ferrule-jobs',
     });

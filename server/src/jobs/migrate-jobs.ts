@@ -1,7 +1,10 @@
 import PgBoss from 'pg-boss';
 import pg from 'pg';
 import { JOBS_SCHEMA } from './jobs.service.ts';
-import { QUEUES } from './queues.ts';
+import { QUEUES, SCHEDULES } from './queues.ts';
+
+/** The job library's own queue for what is due by the clock; the server may not make it. */
+const CLOCK_QUEUE = '__pgboss__send-it';
 
 /** Makes the job schema and its queues with the owner's role and lets the server use them. */
 export async function migrateJobs(ownerUrl: string): Promise<void> {
@@ -15,7 +18,12 @@ export async function migrateJobs(ownerUrl: string): Promise<void> {
   boss.on('error', () => undefined);
   await boss.start();
   const known = new Set((await boss.getQueues()).map(({ name }) => name));
-  for (const queue of QUEUES) if (!known.has(queue)) await boss.createQueue(queue);
+  for (const queue of [CLOCK_QUEUE, ...QUEUES]) {
+    if (!known.has(queue)) await boss.createQueue(queue);
+  }
+  for (const { queue, cron, hoursAtMost } of SCHEDULES) {
+    await boss.schedule(queue, cron, {}, { tz: 'UTC', expireInHours: hoursAtMost, retryLimit: 1 });
+  }
   await boss.stop({ graceful: false, wait: true });
   const client = new pg.Client({ connectionString: ownerUrl });
   await client.connect();

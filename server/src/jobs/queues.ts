@@ -8,6 +8,7 @@ export interface JobPayloads {
   'close-sitting': { sittingId: string };
   'mark-sitting': { sittingId: string };
   'draw-certificate': { certificateId: string };
+  'remark-attempts': Record<string, never>;
 }
 
 export type QueueName = keyof JobPayloads;
@@ -18,4 +19,10 @@ export const QUEUES: readonly QueueName[] = [
   'close-sitting',
   'mark-sitting',
   'draw-certificate',
+  'remark-attempts',
+];
+
+/** What is enqueued by itself, by the clock of UTC. */
+export const SCHEDULES: readonly { queue: QueueName; cron: string; hoursAtMost: number }[] = [
+  { queue: 'remark-attempts', cron: '40 2 * * *', hoursAtMost: 6 },
 ];

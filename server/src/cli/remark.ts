@@ -1,0 +1,49 @@
+import { Sequelize } from 'sequelize';
+import type { Difference } from '../remarking/remark.ts';
+import { RemarkingRepository } from '../remarking/remarking.repository.ts';
+import { type Progress, RemarkingService } from '../remarking/remarking.service.ts';
+
+const databaseUrl = process.env['DATABASE_URL'];
+if (!databaseUrl) {
+  console.error('DATABASE_URL is missing: the address of the database with the server’s role.');
+  process.exit(1);
+}
+const sequelize = new Sequelize(databaseUrl, {
+  dialect: 'postgres',
+  logging: false,
+  dialectOptions: {
+    application_name: 'ferrule-remark',
+    options: '-c default_transaction_read_only=on',
+  },
+});
+
+const NAMES = {
+  worksheet: 'worksheet attempts',
+  practice: 'practice attempts',
+  sitting: 'sittings',
+} as const;
+
+function sayDifference({ kind, id, question, what, stored, again }: Difference): void {
+  const where = [kind, id, question].filter((part) => part !== null).join(' ');
+  console.log(`${where}: ${what} stored ${stored}, again ${again}`);
+}
+
+function sayProgress({ kind, done, outOf }: Progress): void {
+  console.error(`  ${NAMES[kind]}: ${done} of ${outOf}`);
+}
+
+let differences = 0;
+try {
+  const attempts = await new RemarkingService(new RemarkingRepository(sequelize)).remarkAll({
+    onProgress: sayProgress,
+    onDifference: (difference) => {
+      differences += 1;
+      sayDifference(difference);
+    },
+  });
+  const found = differences === 0 ? 'no differences' : `${differences} differences`;
+  console.log(`Marked ${attempts} attempts again: ${found}.`);
+} finally {
+  await sequelize.close();
+}
+if (differences > 0) process.exitCode = 1;
