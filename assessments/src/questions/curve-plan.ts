@@ -1,9 +1,94 @@
-import { type CurvePlan, type Given } from './compiled.ts';
-import { type Sheet } from './sheet-schema.ts';
+import { type Given } from './compiled.ts';
+import { type CurveSheet } from './curve-schema.ts';
+import { curveSettings } from './curve-settings.ts';
 import { parseUnit } from './unit-expression.ts';
 import { sameDimension } from './units.ts';
 
-type CurveSheet = NonNullable<Sheet['curve']>;
+/** Words of a sheet for what an interval shows. */
+export type StageWord = 'bulk' | 'absorption' | 'float' | 'rest' | 'off' | 'cannot tell';
+
+/** What is read off a drawn charge curve; `at` names the given that holds the time. */
+export type CurveRead =
+  | { kind: 'bulk ends' | 'float starts' | 'absorption lasts' | 'amps before float' }
+  | { kind: 'quiet ends' | 'protection opens' | 'vehicle taken' | 'vehicle let go' }
+  | { kind: 'highest volts' | 'amp-hours in bulk' }
+  | {
+      kind: 'amps at' | 'volts at' | 'battery amps at' | 'battery volts at' | 'input volts at';
+      at: string;
+    };
+
+/**
+ * A curve as it is kept: names of given values. What is marked optional was added later; a plan kept
+ * before has none of it.
+ */
+export interface CurvePlan {
+  battery: {
+    kind: 'flooded' | 'agm' | 'gel' | 'lithium';
+    capacity: string;
+    charge: string;
+    blocks: number;
+    temperature?: string;
+    aged?: { capacity: string; resistance: string };
+    protection?: { opensAt: string; closesAt?: string };
+  };
+  charger: {
+    limit: string;
+    absorption: string;
+    float: string | null;
+    tail: string;
+    /** h; null for no limit. */
+    longestAbsorption: string | null;
+    leastAbsorption?: string;
+    tailAt?: 'charger' | 'battery';
+    afterAbsorption?: 'float' | 'rest' | 'hold';
+    restart?: string;
+    compensation?: string;
+    quietUntil?: string;
+    derate?: { from: string; to: string; over?: string };
+    lead?: string;
+    sense?: 'charger' | 'battery';
+    pauses?: { every: string; for: string };
+  };
+  vehicle?: VehiclePlan;
+  solar?: { amps: string; shade?: { from: string; until: string; amps: string } };
+  load: { amps: string; from: string | null; until?: string } | null;
+  hours: number;
+  show?: ('battery volts' | 'battery amps' | 'input volts')[];
+  /** An interval may be kept before or after the time a given names. */
+  intervals: { label: string; stage: StageWord; before: string | null; after: string | null }[];
+}
+
+interface VehiclePlan {
+  from?: string;
+  until?: string;
+  volts: string;
+  engage: string;
+  release: string;
+  delay: string;
+  override: boolean;
+  cable: string;
+  efficiency: string;
+  battery: { capacity: string; charge: string };
+}
+
+/** Unit of what is read off. */
+const READ_IN: Readonly<Record<CurveRead['kind'], string>> = {
+  'bulk ends': 'h',
+  'float starts': 'h',
+  'absorption lasts': 'h',
+  'quiet ends': 'h',
+  'protection opens': 'h',
+  'vehicle taken': 'h',
+  'vehicle let go': 'h',
+  'amp-hours in bulk': 'Ah',
+  'highest volts': 'V',
+  'volts at': 'V',
+  'battery volts at': 'V',
+  'input volts at': 'V',
+  'amps before float': 'A',
+  'amps at': 'A',
+  'battery amps at': 'A',
+};
 
 /**
  * The curve of a sheet in the form that is kept, its names checked against the given values.
@@ -11,19 +96,25 @@ type CurveSheet = NonNullable<Sheet['curve']>;
  * @throws {Error} when a setting names no given value, or one of another kind.
  */
 export function planCurve(curve: CurveSheet, givens: readonly Given[]): CurvePlan {
-  const { battery, charger, load, hours, intervals } = curve;
-  for (const [name, unit] of settingsOf(curve)) requireSetting(name, unit, givens);
+  for (const [name, unit] of curveSettings(curve)) requireSetting(name, unit, givens);
+  for (const read of Object.values(curve.reads)) requireUnit(read);
+  requireWhole(curve);
+  const { battery, charger, load, input, hours, show, intervals } = curve;
+  const { protection } = battery;
   return {
-    battery,
-    charger: {
-      limit: charger.limit,
-      absorption: charger.absorption,
-      float: charger.float,
-      tail: charger.tail,
-      longestAbsorption: charger['longest absorption'] ?? null,
+    battery: {
+      ...battery,
+      protection: protection && {
+        opensAt: protection['opens at'],
+        closesAt: protection['closes at'],
+      },
     },
-    load: load ? { amps: load.amps, from: load.from ?? null } : null,
+    charger: planCharger(charger),
+    vehicle: input?.vehicle,
+    solar: input?.solar,
+    load: load ? { ...load, from: load.from ?? null } : null,
     hours,
+    show,
     intervals: Object.entries(intervals).map(([label, entry]) => {
       const marked = typeof entry === 'string' ? { stage: entry } : entry;
       return { label, before: null, after: null, ...marked };
@@ -31,33 +122,50 @@ export function planCurve(curve: CurveSheet, givens: readonly Given[]): CurvePla
   };
 }
 
-function settingsOf(curve: CurveSheet): [string | undefined, string][] {
-  const { battery, charger, load, intervals } = curve;
-  const times = Object.values(intervals).flatMap((entry): [string | undefined, string][] =>
-    typeof entry === 'string'
-      ? []
-      : [
-          [entry.before, 'h'],
-          [entry.after, 'h'],
-        ],
-  );
-  return [
-    ...times,
-    [battery.capacity, 'Ah'],
-    [battery.charge, '%'],
-    [charger.limit, 'A'],
-    [charger.absorption, 'V'],
-    [charger.float, 'V'],
-    [charger.tail, 'A'],
-    [charger['longest absorption'], 'h'],
-    [load?.amps, 'A'],
-    [load?.from, 'h'],
-  ];
+function planCharger(charger: CurveSheet['charger']): CurvePlan['charger'] {
+  return {
+    limit: charger.limit,
+    absorption: charger.absorption,
+    float: charger.float ?? null,
+    tail: charger.tail,
+    tailAt: charger['tail at'],
+    longestAbsorption: charger['longest absorption'] ?? null,
+    leastAbsorption: charger['least absorption'],
+    afterAbsorption: charger['after absorption'],
+    restart: charger.restart,
+    compensation: charger.compensation,
+    quietUntil: charger.quiet?.until,
+    derate: charger.derate,
+    lead: charger.lead,
+    sense: charger.sense,
+    pauses: charger.pauses,
+  };
+}
+
+/** Settings that need one another. */
+function requireWhole({ charger, input, show }: CurveSheet): void {
+  const after = charger['after absorption'] ?? 'float';
+  if (after === 'float' && charger.float === undefined) {
+    throw new Error('The charger goes to float and has none; name float or after absorption.');
+  }
+  if (charger.sense !== undefined && charger.lead === undefined) {
+    throw new Error('sense matters only behind a lead; name lead as well or leave sense out.');
+  }
+  if (show.includes('input volts') && !input?.vehicle) {
+    throw new Error('Input volts are those of the vehicle input; describe it under input.');
+  }
+}
+
+function requireUnit({ of: kind, unit }: CurveSheet['reads'][string]): void {
+  const wanted = READ_IN[kind];
+  if (sameDimension(parseUnit(unit).dimension, parseUnit(wanted).dimension)) return;
+  throw new Error(`A reading of "${kind}" is in ${wanted}, not in ${unit}; change its unit.`);
 }
 
 function requireSetting(name: string | undefined, unit: string, givens: readonly Given[]): void {
   if (name === undefined) return;
   const given = givens.find((one) => one.name === name);
   if (given && sameDimension(given.unit.dimension, parseUnit(unit).dimension)) return;
-  throw new Error(`The curve needs ${name} as a given value in ${unit}; declare it under given.`);
+  const wanted = unit === '' ? 'a pure number' : unit;
+  throw new Error(`The curve needs ${name} as a given value in ${wanted}; declare it under given.`);
 }

@@ -1,4 +1,4 @@
-import { type ChargeLog } from '../electrical/charging.ts';
+import { type ChargeLog } from '../electrical/charging/log-charge.ts';
 import {
   type ChoicePart,
   type Compiled,
@@ -10,7 +10,8 @@ import {
   type QuantityPart,
   type SizePart,
 } from './compiled.ts';
-import { drawCurve, readOff, runCurve } from './curve.ts';
+import { runCurve } from './curve-run.ts';
+import { drawCurve, readOff } from './curve.ts';
 import { type Expr } from './expression.ts';
 import { drawChoices, drawMatch, drawOrder } from './draw-listed.ts';
 import { type Draws, drawsFrom, opaqueIds } from './random.ts';
