@@ -14,7 +14,7 @@ export function openBank(): Compiled[] {
 
 function readBank(): Compiled[] {
   return readdirSync(BANK, { recursive: true, encoding: 'utf8' })
-    .filter((path) => path.endsWith('.md'))
+    .filter((path) => path.endsWith('.md') && path !== 'README.md')
     .sort()
     .map((path) => parseQuestion(readFileSync(BANK + path, 'utf8'), `bank/${path}`) as Compiled);
 }

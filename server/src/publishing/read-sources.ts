@@ -61,7 +61,8 @@ export async function readSources(folders: SourceFolders): Promise<Sources> {
   const isCourse = (file: string) => file.endsWith('course.md');
   const sheets = async (folder: string) => {
     const files = await filesUnder(join(folders.assessments, folder));
-    return Promise.all(files.filter((file) => file.endsWith('.md')).map(read));
+    const isSheet = (file: string) => file.endsWith('.md') && !file.endsWith('README.md');
+    return Promise.all(files.filter(isSheet).map(read));
   };
   return {
     courses: await Promise.all(lessonFiles.filter(isCourse).map(read)),
