@@ -1,22 +1,12 @@
-import { Sequelize } from 'sequelize';
+import { openRemarking } from '../remarking/open-remarking.ts';
 import type { Difference } from '../remarking/remark.ts';
-import { RemarkingRepository } from '../remarking/remarking.repository.ts';
-import { type Progress, RemarkingService } from '../remarking/remarking.service.ts';
+import type { Progress } from '../remarking/remarking.service.ts';
 
 const databaseUrl = process.env['DATABASE_URL'];
 if (!databaseUrl) {
   console.error('DATABASE_URL is missing: the address of the database with the server’s role.');
   process.exit(1);
 }
-const sequelize = new Sequelize(databaseUrl, {
-  dialect: 'postgres',
-  logging: false,
-  dialectOptions: {
-    application_name: 'ferrule-remark',
-    options: '-c default_transaction_read_only=on',
-  },
-});
-
 const NAMES = {
   worksheet: 'worksheet attempts',
   practice: 'practice attempts',
@@ -33,8 +23,9 @@ function sayProgress({ kind, done, outOf }: Progress): void {
 }
 
 let differences = 0;
+const { remarking, close } = openRemarking(databaseUrl);
 try {
-  const attempts = await new RemarkingService(new RemarkingRepository(sequelize)).remarkAll({
+  const attempts = await remarking.remarkAll({
     onProgress: sayProgress,
     onDifference: (difference) => {
       differences += 1;
@@ -44,6 +35,6 @@ try {
   const found = differences === 0 ? 'no differences' : `${differences} differences`;
   console.log(`Marked ${attempts} attempts again: ${found}.`);
 } finally {
-  await sequelize.close();
+  await close();
 }
 if (differences > 0) process.exitCode = 1;
