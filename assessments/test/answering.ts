@@ -1,4 +1,4 @@
-import { type Compiled, type Drawn, type Part } from '../src/questions/compiled.ts';
+import { type Compiled, type Drawn, type DrawnPart, type Part } from '../src/questions/compiled.ts';
 import { type Answers, type RawAnswer } from '../src/questions/types.ts';
 import { fromSi } from '../src/questions/units.ts';
 
@@ -16,16 +16,23 @@ export function choose(id: string): RawAnswer {
   return { ...BLANK, option: id };
 }
 
+/** Ids chosen, in their order, or matched row by row. */
+export function chooseAll(options: readonly string[]): RawAnswer {
+  return { ...BLANK, options: [...options] };
+}
+
 /** The right answer to every part. */
 export function answerRight(question: Compiled, drawn: Drawn): Answers {
   return Object.fromEntries(
     question.parts.map((part) => {
       const held = drawn.parts[part.id];
       if (!held) throw new Error(`Part ${part.id} was not drawn.`);
-      return [
-        part.id,
-        held.kind === 'options' ? choose(held.right) : typeSi(question, part, held.key),
-      ];
+      return [part.id, rightAnswer(question, part, held)];
     }),
   );
+}
+
+function rightAnswer(question: Compiled, part: Part, held: DrawnPart): RawAnswer {
+  if (held.kind === 'quantity') return typeSi(question, part, held.key);
+  return held.kind === 'options' ? choose(held.right) : chooseAll(held.right);
 }

@@ -1,6 +1,6 @@
 import { type Compiled, type Drawn, type Given, openQuestion } from '../questions/compiled.ts';
 import { drawQuestion } from '../questions/draw.ts';
-import { type CompiledQuestion } from '../questions/types.ts';
+import { type CompiledQuestion, type DrawnQuestion } from '../questions/types.ts';
 import { keyWords } from './key-words.ts';
 import { type PartAudit, PartTally } from './part-tally.ts';
 
@@ -27,6 +27,8 @@ interface AuditJob {
   draws: number;
   /** Milliseconds since any moment; only differences count. */
   clock: () => number;
+  /** Sees every draw. */
+  onDrawn?: (drawn: DrawnQuestion, number: number) => void;
 }
 
 /**
@@ -38,7 +40,10 @@ export function auditQuestion(stored: CompiledQuestion, job: AuditJob): Question
   const question = openQuestion(stored);
   const tally = new QuestionTally(question);
   const began = job.clock();
-  for (let number = 0; number < job.draws; number += 1) tally.draw(auditSeed(number));
+  for (let number = 0; number < job.draws; number += 1) {
+    const drawn = tally.draw(auditSeed(number));
+    if (drawn) job.onDrawn?.(drawn, number);
+  }
   return tally.result((job.clock() - began) / job.draws);
 }
 
@@ -63,12 +68,15 @@ class QuestionTally {
     this.live = question.slips.map(() => 0);
   }
 
-  draw(seed: string): void {
+  draw(seed: string): Drawn | null {
     try {
-      this.add(drawQuestion(this.question, seed, () => (this.rejected += 1)) as Drawn);
+      const drawn = drawQuestion(this.question, seed, () => (this.rejected += 1)) as Drawn;
+      this.add(drawn);
+      return drawn;
     } catch (error) {
       if (this.failures.count === 0) this.failures.first = String(error);
       this.failures.count += 1;
+      return null;
     }
   }
 
