@@ -1,6 +1,6 @@
 import { scaleLinear } from 'd3-scale';
 import { line } from 'd3-shape';
-import { type CurveLine, linesOf } from './curve-lines.ts';
+import { type CurveLine, headOf, linesOf } from './curve-lines.ts';
 import { type CurveView } from './views.ts';
 
 export interface CurveLayout {
@@ -90,26 +90,40 @@ interface Axis {
   x: (hours: number) => number;
 }
 
-/** Along the time axis, the likeliest place first. */
-const labelAt = [0.6, 0.5, 0.7, 0.4, 0.3, 0.2, 0.1];
+/** Where a name may begin along the time axis, the likeliest place first. */
+const labelAt = [0.6, 0.5, 0.65, 0.4, 0.3, 0.2, 0.1];
+const letterWidth = 7;
 
 /** A line is named where it stands clearest of the others of its pane, on the side away from them. */
 function placeLabel(drawn: Drawn, all: readonly Drawn[], { curve, x }: Axis) {
   const end = curve.hours.at(-1) ?? 1;
   const own = all.indexOf(drawn);
-  const spots = labelAt.map((share) => {
-    const { hours, values } = readAt(curve, end * share);
-    const heights = all.map((one, index) => one.y(values[index] ?? 0));
-    const y = heights[own] ?? 0;
-    const others = heights.filter((_, index) => index !== own && all[index]?.pane === drawn.pane);
-    const nearest = others.sort((one, other) => Math.abs(one - y) - Math.abs(other - y))[0];
-    const clear = nearest === undefined ? Infinity : Math.abs(nearest - y);
-    return { x: x(hours), y, clear, isAbove: nearest === undefined || y <= nearest };
+  const share = (headOf(drawn).length * letterWidth) / (x(end) - x(0));
+  const spots = labelAt.map((from) => {
+    // The name must stay clear of the line as far as it runs.
+    const run = [0, 0.5, 1].map((part) => {
+      const { values } = readAt(curve, end * Math.min(1, from + share * part));
+      return all.map((one, index) => one.y(values[index] ?? 0));
+    });
+    const heights = run.map((ofAll) => ofAll[own] ?? 0);
+    const others = all.flatMap((one, index) =>
+      index === own || one.pane !== drawn.pane ? [] : [run.map((ofAll) => ofAll[index] ?? 0)],
+    );
+    const above = roomOn(heights, others, -1);
+    const below = roomOn(heights, others, 1);
+    const isAbove = above >= below;
+    const y = isAbove ? Math.min(...heights) - 10 : Math.max(...heights) + 20;
+    return { x: x(end * from), y, room: Math.min(Math.max(above, below), 60) };
   });
-  const [first] = spots;
-  const best = spots.reduce(
-    (kept, spot) => (spot.clear > kept.clear + 6 ? spot : kept),
-    first ?? { x: 0, y: 0, clear: 0, isAbove: true },
+  const [first = { x: 0, y: 0, room: 0 }] = spots;
+  const best = spots.reduce((kept, spot) => (spot.room > kept.room + 6 ? spot : kept), first);
+  return { x: best.x, y: best.y };
+}
+
+/** How far away the next line is on one side (-1 above, 1 below), where it is nearest. */
+function roomOn(own: readonly number[], others: readonly number[][], side: -1 | 1): number {
+  const gaps = others.flatMap((other) =>
+    other.map((y, index) => (y - (own[index] ?? 0)) * side).filter((room) => room > -4),
   );
-  return { x: best.x, y: best.isAbove ? best.y - 10 : best.y + 20 };
+  return Math.min(...gaps, side === -1 ? 61 : 60);
 }

@@ -5,7 +5,7 @@ import { InlineMarkdown } from './inline-markdown.tsx';
 import { isListed, ListedColumn } from './marked-list.tsx';
 import './marked.css';
 import { type MarkedPartView, type MarkedQuestionView, type PartView } from './views.ts';
-import { WhatToLookAt } from './what-to-look-at.tsx';
+import { isSentThere, WhatToLookAt } from './what-to-look-at.tsx';
 
 type Lines = MarkedPartView['yours'];
 type Remark = MarkedPartView['remarks'][number];
@@ -33,6 +33,7 @@ export function MarkedQuestion({ marked, asked, whose = 'Yours' }: MarkedQuestio
           part={part}
           kind={asked.find(({ id }) => id === part.id)?.kind ?? 'quantity'}
           whose={whose}
+          isSentAbove={isSentThere(marked.parts.slice(0, index), part)}
           strokesBefore={countStrokes(marked, index)}
         />
       ))}
@@ -50,10 +51,11 @@ interface MarkedPartProps {
   part: MarkedPartView;
   kind: PartView['kind'];
   whose: string;
+  isSentAbove: boolean;
   strokesBefore: number;
 }
 
-function MarkedPart({ part, kind, whose, strokesBefore }: MarkedPartProps) {
+function MarkedPart({ part, kind, whose, isSentAbove, strokesBefore }: MarkedPartProps) {
   const lines = Math.max(part.yours.length, part.worked.length, 1);
   const vars = { '--lines': lines } as CSSProperties;
   return (
@@ -77,7 +79,7 @@ function MarkedPart({ part, kind, whose, strokesBefore }: MarkedPartProps) {
           {part.remarks.map((remark, index) => (
             <RemarkLine key={index} remark={remark} stroke={strokesBefore + index} />
           ))}
-          <WhatToLookAt part={part} />
+          <WhatToLookAt part={part} isSaidAbove={isSentAbove} />
         </div>
         <p className="part-mark">
           {part.marks}

@@ -52,7 +52,7 @@ export function OrderSteps({ part, options, chosen, disabled = false, ...props }
     <div role="group" aria-label={`Steps for (${part})`} aria-describedby={props.describedBy}>
       <p className="entry-legend">
         Move the steps until the first to do is at the top.{' '}
-        <span>{isPut ? 'Your order is kept.' : 'Nothing has been put in order yet.'}</span>
+        <span>{isPut ? 'This is your order.' : 'Nothing has been put in order yet.'}</span>
       </p>
       <ol className={isPut ? 'order-steps put' : 'order-steps'} ref={list}>
         {laid.map((step, index) => (

@@ -1,10 +1,16 @@
 import { ScrollTable } from '../scroll-table.tsx';
 import { type TableView } from './views.ts';
 
+const mostBesideAnother = 4;
+
 /** An extract of a printed table: caption above, units in the heads, source below. */
 export function TableExtract({ table }: { table: TableView }) {
   return (
-    <figure className="table-extract">
+    <figure
+      className={
+        table.columns.length > mostBesideAnother ? 'table-extract across' : 'table-extract'
+      }
+    >
       <ScrollTable label={table.caption}>
         <caption>{table.caption}</caption>
         <thead>

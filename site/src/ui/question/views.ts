@@ -28,7 +28,13 @@ export type QuestionView = Omit<StoredQuestion, 'parts' | 'curve'> & {
 };
 export type MarkedPartView = StoredMarked['parts'][number] & {
   wrongStep?: { symbol: string; says: string } | null;
-  read?: { sheet: string; paragraph: number | null; heading: string | null } | null;
+  read?: {
+    sheet: string;
+    title: string | null;
+    heading: string | null;
+    paragraph: number | null;
+    issued: boolean;
+  } | null;
 };
 export type MarkedQuestionView = Omit<StoredMarked, 'parts'> & { parts: MarkedPartView[] };
 export type RawAnswer = OpenedItem['answers'][string] & { options?: string[] };

@@ -2,9 +2,18 @@ import { Link } from 'react-router-dom';
 import { QuantitySymbol } from '../quantity.tsx';
 import { type MarkedPartView } from './views.ts';
 
+type Reading = NonNullable<MarkedPartView['read']>;
+
+interface WhatToLookAtProps {
+  part: MarkedPartView;
+  /** A part above sends to the same place: it is not said again. */
+  isSaidAbove: boolean;
+}
+
 /** After a wrong answer: the step that went wrong, and the paragraph to read. */
-export function WhatToLookAt({ part: { wrongStep, read } }: { part: MarkedPartView }) {
-  if (!wrongStep && !read) return null;
+export function WhatToLookAt({ part: { wrongStep, read }, isSaidAbove }: WhatToLookAtProps) {
+  const toRead = isSaidAbove ? null : read;
+  if (!wrongStep && !toRead) return null;
   return (
     <div className="look-at">
       {wrongStep && (
@@ -12,12 +21,9 @@ export function WhatToLookAt({ part: { wrongStep, read } }: { part: MarkedPartVi
           The step that went wrong: <StepName {...wrongStep} />
         </p>
       )}
-      {read && (
+      {toRead && (
         <p>
-          Read:{' '}
-          <Link to={`/sheets/${read.sheet}${read.paragraph ? `#p${read.paragraph}` : ''}`}>
-            {sayPlace(read)}
-          </Link>
+          Read: <Place read={toRead} />
         </p>
       )}
     </div>
@@ -36,7 +42,19 @@ function StepName({ symbol, says }: NonNullable<MarkedPartView['wrongStep']>) {
 }
 
 /** "sheet 3.4, paragraph 7, Out and back" */
-function sayPlace({ sheet, paragraph, heading }: NonNullable<MarkedPartView['read']>): string {
-  const within = [...(paragraph ? [`paragraph ${paragraph}`] : []), ...(heading ? [heading] : [])];
-  return [`sheet ${sheet}`, ...within].join(', ');
+function Place({ read: { sheet, title, heading, paragraph, issued } }: { read: Reading }) {
+  if (!issued) return `sheet ${sheet}, which is not issued yet`;
+  if (!paragraph) return <Link to={`/sheets/${sheet}`}>{`sheet ${sheet}, ${title ?? ''}`}</Link>;
+  return (
+    <Link to={`/sheets/${sheet}#p${paragraph}`}>
+      {`sheet ${sheet}, paragraph ${paragraph}, ${heading ?? ''}`}
+    </Link>
+  );
+}
+
+/** Whether one of these sends to the same place as the part does. */
+export function isSentThere(parts: readonly MarkedPartView[], { read }: MarkedPartView): boolean {
+  return parts.some(
+    (above) => above.read?.sheet === read?.sheet && above.read?.paragraph === read?.paragraph,
+  );
 }
