@@ -19,6 +19,14 @@ const LOAD = {
   remedy: 'give the load in amperes',
 };
 
+const CHASSIS = {
+  what: 'Chassis resistance',
+  unit: 'Ω',
+  least: 0,
+  most: 100,
+  remedy: 'measure it from bond to bond, in ohms; a sound one is milliohms',
+};
+
 /**
  * Voltage lost along a two-core run, there and back, V.
  *
@@ -30,6 +38,24 @@ export function dropAlong(run: { lengthM: number; ohmsPerKm: number; amps: numbe
   within(run.lengthM, RUN);
   within(run.amps, LOAD);
   return (2 * run.lengthM * run.ohmsPerKm * run.amps) / 1000;
+}
+
+/**
+ * Voltage lost with the chassis as the way back, V: one conductor out, and the chassis with its
+ * bonds as one resistance.
+ *
+ * @param run - `chassisOhms` from the load's bond to the battery's, bonds included.
+ * @throws {OutOfRange} when length, current or resistance is out of range.
+ * @example chassisReturnDrop({ lengthM: 5, ohmsPerKm: 3.3, amps: 10, chassisOhms: 0.004 }) // 0.205
+ */
+export function chassisReturnDrop(run: {
+  lengthM: number;
+  ohmsPerKm: number;
+  amps: number;
+  chassisOhms: number;
+}): number {
+  within(run.chassisOhms, CHASSIS);
+  return dropAlong(run) / 2 + run.amps * run.chassisOhms;
 }
 
 /**
