@@ -57,6 +57,7 @@ const UNITS: [string, string, string][] = [
   ['µs', 'microsecond', 's'],
   ['nA', 'nanoampere', 'A'],
   ['MW', 'megawatt', 'watt'],
+  ['L', 'liter', 'm^3'],
   ['m', 'meter', 'm'],
   ['K', 'kelvin', 'K'],
   ['%', 'percent', '1'],

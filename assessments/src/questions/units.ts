@@ -26,6 +26,7 @@ const WATT: Dimension = [1, 2, -3, 0, 0];
 const AMPERE: Dimension = [0, 0, 0, 1, 0];
 const AREA: Dimension = [0, 2, 0, 0, 0];
 const LENGTH: Dimension = [0, 1, 0, 0, 0];
+const VOLUME: Dimension = [0, 3, 0, 0, 0];
 const TIME: Dimension = [0, 0, 1, 0, 0];
 const CHARGE: Dimension = [0, 0, 1, 1, 0];
 const ENERGY: Dimension = [1, 2, -2, 0, 0];
@@ -109,6 +110,11 @@ export const BASE_UNITS: readonly BaseUnit[] = [
     factor: CIRCULAR_MIL_M2,
     spellings: ['CM', 'cmils'],
     words: ['circular mil', 'circular mils'],
+  }),
+  base('L', VOLUME, {
+    factor: 1e-3,
+    spellings: ['l'],
+    words: ['litre', 'litres', 'liter', 'liters'],
   }),
   base('mm', LENGTH, {
     factor: 1e-3,
