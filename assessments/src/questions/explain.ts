@@ -50,7 +50,7 @@ export function workedLines(page: Page, part: Part): Line[] {
 }
 
 /** The steps a part leans on that stand on no earlier part; from now on they count as shown. */
-export function takeSteps({ question, shown }: Page, part: Part): Step[] {
+export function takeSteps({ question, shown }: Omit<Page, 'drawn'>, part: Part): Step[] {
   const needed = leansOn(question, namesUsed(part));
   const steps = question.steps.filter(({ name }) => needed.has(name) && !shown.has(name));
   needed.forEach((name) => shown.add(name));
@@ -66,7 +66,12 @@ function namesUsed(part: Part): string[] {
   );
 }
 
-function stepLines(question: Compiled, step: Step, values: ReadonlyMap<string, number>): Line[] {
+/** One step as it is printed: where it comes from, and what it comes to. */
+export function stepLines(
+  question: Compiled,
+  step: Step,
+  values: ReadonlyMap<string, number>,
+): Line[] {
   const value = values.get(step.name) ?? NaN;
   const result = resultLine(step, value, step.unit);
   if (step.how.kind === 'read') {

@@ -15,6 +15,7 @@ import { type Finding, judgeQuantity } from './judge.ts';
 import { judgeChoices, judgeMatch, judgeOrder } from './judge-listed.ts';
 import { judgeOption } from './judge-option.ts';
 import { type Judged } from './judged.ts';
+import { fadeQuestion } from './fade.ts';
 import { isBeyondSense, type OwnValues, ownFor } from './own-values.ts';
 import { presentPart } from './present.ts';
 import { readAnswer, readTyped } from './read-answer.ts';
@@ -54,8 +55,32 @@ export function markQuestion(
 ): MarkedQuestion {
   const question = openQuestion(stored);
   const drawn = openDrawn(question, drawing);
+  return markParts({ question, drawn }, question.parts, answers);
+}
+
+/**
+ * Marks a draw of which the first steps were shown worked: the parts that were left, and no others.
+ * Each is worth what it is worth in the whole question.
+ */
+export function markFaded(
+  stored: CompiledQuestion,
+  drawing: DrawnQuestion,
+  { left, answers }: { left: number; answers: Answers },
+): MarkedQuestion {
+  const question = openQuestion(stored);
+  const drawn = openDrawn(question, drawing);
+  const { asked } = fadeQuestion(question, drawn, left);
+  const parts = question.parts.filter(({ id }) => asked.includes(id));
+  return markParts({ question, drawn }, parts, answers);
+}
+
+function markParts(
+  { question, drawn }: Pick<Desk, 'question' | 'drawn'>,
+  asked: readonly Part[],
+  answers: Answers,
+): MarkedQuestion {
   const desk: Desk = { question, drawn, own: new Map(), judged: [], trace: [] };
-  for (const part of question.parts) {
+  for (const part of asked) {
     const answer = Object.hasOwn(answers, part.id) ? answers[part.id] : undefined;
     markPart(desk, part, answer ?? NOTHING);
   }
@@ -64,7 +89,7 @@ export function markQuestion(
   return {
     markerVersion: MARKER_VERSION,
     marks: parts.reduce((sum, part) => sum + part.marks, 0),
-    outOf: question.meta.marks,
+    outOf: parts.reduce((sum, part) => sum + part.outOf, 0),
     summary: summarise(question, desk.judged),
     parts,
     trace: desk.trace,

@@ -142,7 +142,9 @@ describe('a question sheet', () => {
     const right = '{ is: yes, right: true }';
     expect(issuesOf(choice(`${right}, { is: no, say: because }`))).toEqual([]);
     expect(issuesOf(choice(`${right}, { is: no }`))[0]?.message).toContain('write why it is');
-    expect(issuesOf(choice(`${right}, ${right}`))[0]?.message).toContain('2 options are right');
+    const other = '{ is: surely, right: true }';
+    expect(issuesOf(choice(`${right}, ${other}`))[0]?.message).toContain('2 options are right');
+    expect(issuesOf(choice(`${right}, ${right}`))[0]?.message).toContain('stands there twice');
     expect(issuesOf(choice('{ is: a, say: x }, { is: b, say: x }'))[0]?.message).toContain(
       '0 options',
     );

@@ -7,6 +7,7 @@ const WORDS = ['No', 'One', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eig
 export function summarise(question: Compiled, judged: readonly Judged[]): string {
   const count = (verdict: string): number =>
     judged.filter(({ finding }) => finding.verdict === verdict).length;
+  if (judged.length === 0) return 'Worked in full, with nothing left to answer.';
   if (count('right') === judged.length) return 'All right, every part of it.';
   if (count('blank') === judged.length) return 'Nothing was answered.';
   const slips = [...new Set(judged.flatMap(({ finding }) => finding.slip ?? []))];
