@@ -63,7 +63,7 @@ function operation(
   const right = dimensionOf(sides.right, scope);
   if (op === '*') return quantity(backFrom(multiply(asMath(left), asMath(right))));
   if (op === '/') return quantity(backFrom(divide(asMath(left), asMath(right))));
-  if (op === '^') return quantity(power(left, sides.right));
+  if (op === '^') return quantity(power(left, { expr: sides.right, dimension: right }));
   matching(op, left, right);
   return isComparison(op) ? CONDITION : quantity(left);
 }
@@ -78,12 +78,18 @@ function matching(op: string, left: Dimension, right: Dimension): void {
   }
 }
 
-function power(base: Dimension, exponent: Expr): Dimension {
-  const times = exponent.kind === 'minus' ? exponent.of : exponent;
+/** A pure number may be raised to any pure number; a quantity only to one that is written out. */
+function power(base: Dimension, exponent: { expr: Expr; dimension: Dimension }): Dimension {
+  const isPure = (one: Dimension): boolean => sameDimension(one, NO_DIMENSION);
+  if (isPure(base) && isPure(exponent.dimension)) return NO_DIMENSION;
+  const { expr } = exponent;
+  const times = expr.kind === 'minus' ? expr.of : expr;
   if (times.kind !== 'number') {
-    throw new ExpressionRefused('An exponent must be a number written out; split the step.');
+    throw new ExpressionRefused(
+      'An exponent must be a number written out, or base and exponent pure numbers; split the step.',
+    );
   }
-  const signed = exponent.kind === 'minus' ? -times.value : times.value;
+  const signed = expr.kind === 'minus' ? -times.value : times.value;
   return backFrom(pow(asMath(base), signed));
 }
 
