@@ -4,6 +4,7 @@ import { randomUUID } from 'node:crypto';
 import { Clock } from '../clock/clock.ts';
 import { NotFound } from '../problems/common.errors.ts';
 import { AnswerUnclear } from '../questions/answers.errors.ts';
+import { MarkedViewsService } from '../questions/marked-views.service.ts';
 import type { Answers } from '../questions/question-view.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
 import { requireKnownPart, requireKnownParts, unclearParts } from '../questions/read-answers.ts';
@@ -17,6 +18,7 @@ import type { Hint, PracticeMarked, PracticeView } from './practice.schemas.ts';
 export class PracticeService {
   constructor(
     private readonly questions: QuestionsService,
+    private readonly views: MarkedViewsService,
     private readonly repository: PracticeRepository,
     private readonly clock: Clock,
   ) {}
@@ -59,7 +61,10 @@ export class PracticeService {
     const handedInAt = this.clock.now();
     const isKept = await this.repository.keepMarked(id, { answers, marked, handedInAt });
     if (!isKept) throw new PracticeAnswered();
-    return { marked, hints: [...attempt.hints] };
+    const revisionId = attempt.questionRevisionId;
+    const [shown] = await this.views.show([{ revisionId, marked }]);
+    if (!shown) throw new NotFound();
+    return { marked: shown, hints: [...attempt.hints] };
   }
 
   /** The formula a part begins with; that it was asked for is kept with the attempt. */

@@ -20,5 +20,8 @@ export function headingsIn(body: string): LessonHeading[] {
 }
 
 /** A lesson that was stored before headings were kept is read again. */
-export const headingsOf = ({ headings, body }: CompiledLesson): readonly LessonHeading[] =>
+export const headingsOf = ({
+  headings,
+  body,
+}: Pick<CompiledLesson, 'headings' | 'body'>): readonly LessonHeading[] =>
   headings ?? headingsIn(body);

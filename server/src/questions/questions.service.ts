@@ -1,5 +1,6 @@
 import { Inject, Injectable } from '@nestjs/common';
 import {
+  describeQuestion,
   drawQuestion,
   presentQuestion,
   type CompiledQuestion,
@@ -11,6 +12,7 @@ import type { Config } from '../config/config.schema.ts';
 import { NotFound } from '../problems/common.errors.ts';
 import type { Published } from '../publishing/content.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
+import type { PracticeQuestion } from './practice-question.ts';
 import type { QuestionView } from './question-view.ts';
 
 export interface PublishedQuestion {
@@ -65,6 +67,17 @@ export class QuestionsService {
     return listings
       .filter(({ pool }) => pool === 'paper')
       .map(({ id, slug, subject }) => ({ slug, subject: subject ?? '', revisionId: id }));
+  }
+
+  /** Every question that may be practised, as lists show it. */
+  async practiceBank(): Promise<PracticeQuestion[]> {
+    const published = await this.content.all('question');
+    return published
+      .filter(({ pool }) => pool === 'practice')
+      .map(({ content }) => {
+        const { slug, title, subject, level, lesson, marks } = content.meta;
+        return { slug, title, subject, level, lesson, marks, ...describeQuestion(content) };
+      });
   }
 
   async countPractice(): Promise<number> {

@@ -30,8 +30,10 @@ export class LooksService {
     const result = await this.results.find(sittingId);
     if (!result) throw new ResultNotReady();
     await this.looks.add({ sittingId, accountId: managerId, reason, at: found.now });
+    const items = await this.sheets.withQuestions(await this.sittings.itemsOf(sittingId));
     return presentOpenedItems(found.sitting, result, {
-      items: await this.sheets.withQuestions(await this.sittings.itemsOf(sittingId)),
+      items,
+      marked: await this.sheets.withReading(items, result),
       saved: await this.answers.allOf(sittingId),
       looks: await this.looks.allOf(sittingId),
     });

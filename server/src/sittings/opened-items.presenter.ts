@@ -1,5 +1,6 @@
 import { presentQuestion, SUBJECTS } from '@ferrule/assessments';
 import { localDay } from '../clock/local-day.ts';
+import type { MarkedQuestion } from '../questions/question-view.ts';
 import type { RecordedLook } from './looks.repository.ts';
 import type { OpenedItems } from './papers.schemas.ts';
 import { toAnswers, type Result } from './result.ts';
@@ -10,12 +11,13 @@ interface Opened {
   readonly items: readonly ShownItem[];
   readonly saved: readonly SavedAnswer[];
   readonly looks: readonly RecordedLook[];
+  /** By the key of the question. */
+  readonly marked: ReadonlyMap<string, MarkedQuestion>;
 }
 
 /** Questions, answers and marking of a paper, for a certification manager only. */
 export function presentOpenedItems(sitting: Sitting, result: Result, opened: Opened): OpenedItems {
   const counted = answersThatCount(opened.saved);
-  const marked = new Map(result.marked.map((item) => [item.key, item.marked]));
   return {
     id: sitting.id,
     name: candidateName(sitting),
@@ -25,7 +27,7 @@ export function presentOpenedItems(sitting: Sitting, result: Result, opened: Ope
     passed: result.passed,
     looks: opened.looks.map(({ at, by, reason }) => ({ at: at.toISOString(), by, reason })),
     items: opened.items.flatMap(({ item, question }) => {
-      const marking = marked.get(item.key);
+      const marking = opened.marked.get(item.key);
       if (!marking) return [];
       return {
         number: item.number,

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { presentQuestion, readAnswer, type PartView } from '@ferrule/assessments';
 import { randomBytes } from 'node:crypto';
+import { isDeepStrictEqual } from 'node:util';
 import type { SignedInAccount } from '../accounts/account.ts';
 import { Transactions } from '../database/transactions.ts';
 import { InvalidRequest, NotFound } from '../problems/common.errors.ts';
@@ -112,10 +113,7 @@ export class SavingService {
       before.itemKey === place.key &&
       before.part === place.part &&
       before.sequence === input.sequence &&
-      before.answer.text === input.answer.text &&
-      before.answer.unit === input.answer.unit &&
-      before.answer.option === input.answer.option &&
-      before.answer.working === input.answer.working;
+      isDeepStrictEqual(before.answer, input.answer);
     if (!isSame) throw usedForAnother();
     return before;
   }

@@ -1,7 +1,10 @@
 import { Injectable } from '@nestjs/common';
 import { NotFound } from '../problems/common.errors.ts';
+import { MarkedViewsService } from '../questions/marked-views.service.ts';
+import type { MarkedQuestion } from '../questions/question-view.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
 import { AnswersRepository } from './answers.repository.ts';
+import type { Result } from './result.ts';
 import { ResultsRepository } from './results.repository.ts';
 import { presentSitting, type ShownItem } from './sitting.presenter.ts';
 import { SittingsRepository, type SittingItem, type SittingNow } from './sittings.repository.ts';
@@ -15,6 +18,7 @@ export class SittingSheets {
     private readonly answers: AnswersRepository,
     private readonly results: ResultsRepository,
     private readonly questions: QuestionsService,
+    private readonly views: MarkedViewsService,
   ) {}
 
   async show(found: SittingNow, sessionId: string): Promise<SittingView> {
@@ -47,5 +51,19 @@ export class SittingSheets {
       const question = published[index]?.question;
       return question ? [{ item, question }] : [];
     });
+  }
+
+  /** The marking of each question, with what to read, by the question's key. */
+  async withReading(
+    items: readonly ShownItem[],
+    { marked }: Pick<Result, 'marked'>,
+  ): Promise<Map<string, MarkedQuestion>> {
+    const revisions = new Map(items.map(({ item }) => [item.key, item.questionRevisionId]));
+    const found = marked.flatMap((one) => {
+      const revisionId = revisions.get(one.key);
+      return revisionId === undefined ? [] : [{ key: one.key, revisionId, marked: one.marked }];
+    });
+    const shown = await this.views.show(found);
+    return new Map(shown.map((view, at) => [found[at]?.key ?? '', view]));
   }
 }

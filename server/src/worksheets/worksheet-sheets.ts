@@ -4,6 +4,8 @@ import { ClassesService } from '../classes/classes.service.ts';
 import { NotFound } from '../problems/common.errors.ts';
 import type { Published } from '../publishing/content.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
+import { MarkedViewsService } from '../questions/marked-views.service.ts';
+import type { MarkedQuestion } from '../questions/question-view.ts';
 import type { WorksheetAttempt } from './worksheet-attempt.ts';
 import { placeWorksheet, presentWorksheet, type PlacedWorksheet } from './worksheet.presenter.ts';
 import { WorksheetsRepository } from './worksheets.repository.ts';
@@ -16,6 +18,7 @@ export class WorksheetSheets {
     private readonly content: PublishedContentService,
     private readonly repository: WorksheetsRepository,
     private readonly classes: ClassesService,
+    private readonly views: MarkedViewsService,
   ) {}
 
   /** A worksheet of the current course. */
@@ -41,6 +44,25 @@ export class WorksheetSheets {
     const placed = course && placeWorksheet(course.content, attempt.worksheet);
     if (!placed) throw new NotFound();
     const trainee = await this.repository.nameOf(attempt.accountId);
-    return presentWorksheet(attempt, placed, { trainee, mine: attempt.accountId === viewerId });
+    const seen = { trainee, mine: attempt.accountId === viewerId };
+    return presentWorksheet(attempt, placed, { ...seen, marked: await this.markedOf(attempt) });
+  }
+
+  /** The markings of an attempt's questions by their keys; none before it is handed in. */
+  private async markedOf({
+    items,
+    marked,
+  }: WorksheetAttempt): Promise<Record<string, MarkedQuestion>> {
+    const markings = items.flatMap(({ key, revisionId }) => {
+      const found = marked?.[key];
+      return found ? [{ key, revisionId, marked: found }] : [];
+    });
+    const shown = await this.views.show(markings);
+    return Object.fromEntries(
+      markings.flatMap(({ key }, at) => {
+        const view = shown[at];
+        return view ? [[key, view]] : [];
+      }),
+    );
   }
 }

@@ -1,4 +1,5 @@
 import type { CompiledCourse, CourseUnit, CourseWorksheet } from '../publishing/compiled-course.ts';
+import type { Answers, MarkedQuestion } from '../questions/question-view.ts';
 import { percentOf } from './score.ts';
 import type { AttemptSummary, KeptItem, WorksheetAttempt } from './worksheet-attempt.ts';
 import type { WorksheetSummary, WorksheetView } from './worksheets.schemas.ts';
@@ -19,13 +20,15 @@ const scoreOf = ({ marks, outOf }: AttemptSummary) =>
 export interface SeenBy {
   readonly trainee: { givenName: string; familyName: string };
   readonly mine: boolean;
+  /** By the key of the question; empty until it is handed in. */
+  readonly marked: Readonly<Record<string, MarkedQuestion>>;
 }
 
 /** Before it is handed in there is nothing in it but what was shown and what was typed. */
 export function presentWorksheet(
   attempt: WorksheetAttempt,
   { unit, worksheet }: PlacedWorksheet,
-  { trainee, mine }: SeenBy,
+  { trainee, mine, marked }: SeenBy,
 ): WorksheetView {
   const percent = scoreOf(attempt);
   return {
@@ -41,7 +44,9 @@ export function presentWorksheet(
     handedInAt: attempt.handedInAt?.toISOString() ?? null,
     passPercent: worksheet.passPercent,
     setBy: [...new Set(attempt.items.map(({ author }) => author))].join(', '),
-    items: attempt.items.map((item) => presentItem(attempt, item)),
+    items: attempt.items.map((item) =>
+      presentItem(item, attempt.answers[item.key] ?? {}, marked[item.key] ?? null),
+    ),
     marks: attempt.marks,
     outOf: attempt.outOf,
     percent,
@@ -50,13 +55,16 @@ export function presentWorksheet(
   };
 }
 
-function presentItem(attempt: WorksheetAttempt, item: KeptItem): WorksheetView['items'][number] {
-  const marked = attempt.marked?.[item.key] ?? null;
+function presentItem(
+  item: KeptItem,
+  answers: Answers,
+  marked: MarkedQuestion | null,
+): WorksheetView['items'][number] {
   const isShort = marked !== null && marked.marks < marked.outOf;
   return {
     key: item.key,
     question: item.view,
-    answers: attempt.answers[item.key] ?? {},
+    answers,
     marked,
     readAgain: isShort && item.sheet ? { sheet: item.sheet.number, title: item.sheet.title } : null,
   };

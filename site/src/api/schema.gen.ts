@@ -500,6 +500,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/record/subjects": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Record_subjects"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/register/checks": {
         parameters: {
             query?: never;
@@ -1047,6 +1063,16 @@ export interface components {
                 value: string;
                 unit: string;
             }[];
+            /** @default [] */
+            tables: {
+                caption: string;
+                source: string;
+                columns: {
+                    label: string;
+                    unit: string;
+                }[];
+                rows: string[][];
+            }[];
             diagram: {
                 /** @enum {string} */
                 kind: "two-wire-run";
@@ -1065,6 +1091,9 @@ export interface components {
                 hours: number[];
                 volts: number[];
                 amps: number[];
+                batteryVolts?: number[];
+                inputVolts?: number[];
+                batteryAmps?: number[];
                 intervals: {
                     label: string;
                     fromH: number;
@@ -1080,13 +1109,18 @@ export interface components {
             parts: {
                 id: string;
                 /** @enum {string} */
-                kind: "quantity" | "choice";
+                kind: "quantity" | "choice" | "choices" | "order" | "match";
                 prompt: string;
                 marks: number;
                 symbol: string | null;
                 units: string[];
                 rounding: string | null;
                 options: {
+                    id: string;
+                    text: string;
+                }[];
+                /** @default [] */
+                rows: {
                     id: string;
                     text: string;
                 }[];
@@ -1098,6 +1132,7 @@ export interface components {
             text: string;
             unit: string | null;
             option: string | null;
+            options?: string[];
             working: string;
         };
         MarkedQuestion: {
@@ -1109,7 +1144,7 @@ export interface components {
                 id: string;
                 prompt: string;
                 /** @enum {string} */
-                verdict: "right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
+                verdict: "right" | "partly-right" | "carried-forward" | "slip" | "wrong-unit" | "power-of-ten" | "wrong" | "blank" | "not-understood" | "not-carried";
                 marks: number;
                 outOf: number;
                 yours: components["schemas"]["Line"][];
@@ -1120,6 +1155,12 @@ export interface components {
                     heading: string | null;
                     text: string;
                 }[];
+                /** @default null */
+                wrongStep: {
+                    symbol: string;
+                    says: string;
+                } | null;
+                read: components["schemas"]["ReadAgain"] | null;
             }[];
             trace: {
                 part: string;
@@ -1133,6 +1174,13 @@ export interface components {
             text: string;
             differs?: boolean;
         }[];
+        ReadAgain: {
+            sheet: string;
+            title: string | null;
+            heading: string | null;
+            paragraph: number | null;
+            issued: boolean;
+        };
         Reading: {
             /** @enum {string} */
             state: "blank";
@@ -1160,6 +1208,16 @@ export interface components {
                 value: string;
                 unit: string;
             }[];
+            /** @default [] */
+            tables: {
+                caption: string;
+                source: string;
+                columns: {
+                    label: string;
+                    unit: string;
+                }[];
+                rows: string[][];
+            }[];
             diagram: {
                 /** @enum {string} */
                 kind: "two-wire-run";
@@ -1178,6 +1236,9 @@ export interface components {
                 hours: number[];
                 volts: number[];
                 amps: number[];
+                batteryVolts?: number[];
+                inputVolts?: number[];
+                batteryAmps?: number[];
                 intervals: {
                     label: string;
                     fromH: number;
@@ -2395,6 +2456,50 @@ export interface operations {
             };
         };
     };
+    Record_subjects: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        subjects: {
+                            code: string;
+                            name: string;
+                            questions: number;
+                            shown: number;
+                            days: number;
+                            lastDay: string | null;
+                        }[];
+                        next: {
+                            slug: string;
+                            title: string;
+                            subject: {
+                                code: string;
+                                name: string;
+                            };
+                            /** @enum {string} */
+                            level: "recall" | "apply" | "reason";
+                            lesson: string;
+                            marks: number;
+                            /** @enum {string} */
+                            reason: "went-wrong" | "one-day-only" | "with-help" | "never-tried" | "longest-ago";
+                            says: string;
+                            lastDay: string | null;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
     Register_check: {
         parameters: {
             query?: never;
@@ -2944,6 +3049,7 @@ export interface operations {
                                     text: string;
                                     unit: string | null;
                                     option: string | null;
+                                    options?: string[];
                                     working: string;
                                     /** Format: date-time */
                                     savedAt: string;
@@ -3020,6 +3126,7 @@ export interface operations {
                                     text: string;
                                     unit: string | null;
                                     option: string | null;
+                                    options?: string[];
                                     working: string;
                                     /** Format: date-time */
                                     savedAt: string;
@@ -3172,6 +3279,7 @@ export interface operations {
                                     text: string;
                                     unit: string | null;
                                     option: string | null;
+                                    options?: string[];
                                     working: string;
                                     /** Format: date-time */
                                     savedAt: string;
