@@ -4,9 +4,9 @@ import { type ChargeTotals, totalsOf } from './readings.ts';
 import { requireRun } from './require-run.ts';
 import { type ChargeRun, type Stage } from './settings.ts';
 import { StageKeeper } from './stage-keeper.ts';
-import { stepFrom } from './step.ts';
+import { type Stand, stepFrom } from './step.ts';
 import { fullOutputAt, isPaused, momentsOf, SAME_H } from './timetable.ts';
-import { isTripping, isWorking, look, type Moment, type Sight, type World } from './world.ts';
+import { isTripping, isWorking, look, type Sight, type World } from './world.ts';
 
 export interface ChargeReading {
   hour: number;
@@ -66,7 +66,7 @@ class ChargeLogger {
   private readonly world: World;
   private readonly moments: readonly number[];
   private readonly readings: ChargeReading[] = [];
-  private now: Moment;
+  private now: Stand;
   private nextMoment = 0;
   private protectionOpensH: number | null = null;
 
@@ -76,19 +76,15 @@ class ChargeLogger {
     const keeper = new StageKeeper(run.charger, run.battery.restVolts[0] ?? NaN);
     this.world = { run, sources: new SourceChooser(run), keeper, isShut };
     const battery = { charge: run.charge, pairV: 0 };
-    this.now = { hour: 0, battery, startCharge: run.vehicle?.charge ?? NaN };
+    const moment = { hour: 0, battery, startCharge: run.vehicle?.charge ?? NaN };
+    this.now = { moment, sight: look(this.world, moment, 0) };
   }
 
   log(): ChargeLog {
-    const { readings, world, moments } = this;
+    const { readings, world } = this;
     const { keeper, sources, run } = world;
     this.settle();
-    while (this.now.hour < run.hours - SAME_H) {
-      while ((moments[this.nextMoment] ?? Infinity) <= this.now.hour + SAME_H) this.nextMoment += 1;
-      this.now = stepFrom(world, this.now, this.nextSpanH());
-      this.requireCharge();
-      this.settle();
-    }
+    while (this.now.moment.hour < run.hours - SAME_H) this.goOn();
     return {
       readings,
       bulkEndsH: keeper.bulkEndsH,
@@ -101,28 +97,48 @@ class ChargeLogger {
     };
   }
 
-  private nextSpanH(): number {
-    const { run, sources, keeper } = this.world;
-    const { hour } = this.now;
-    const waits = [this.moments[this.nextMoment], sources.changesAtH, keeper.waitsUntilH];
-    const ahead = waits.map((wait) => (wait ?? Infinity) - hour).filter((span) => span > SAME_H);
-    return Math.min(run.stepS / 3600, ...ahead);
+  private goOn(): void {
+    const { world, moments } = this;
+    const { hour } = this.now.moment;
+    while ((moments[this.nextMoment] ?? Infinity) <= hour + SAME_H) this.nextMoment += 1;
+    const stepH = world.run.stepS / 3600;
+    const { spanH, isAppointed } = this.nextSpan(stepH);
+    const { isChanged, ...next } = stepFrom(world, this.now, spanH);
+    this.now = next;
+    this.requireCharge();
+    this.write(next.sight, next.moment.hour - 2 * SAME_H);
+    if (isChanged || isAppointed) this.settle();
   }
 
-  /** Reads, lets every switch that waits on the reading change, and reads again. */
-  private settle(): void {
-    const { hour } = this.now;
-    const before = Math.max(0, hour - 2 * SAME_H);
-    this.write(look(this.world, this.now, before), before);
-    for (let changes = 0; changes < MOST_CHANGES; changes += 1) {
-      if (!this.change(look(this.world, this.now, hour))) break;
+  /** A whole step, or up to the next moment that is known beforehand. */
+  private nextSpan(stepH: number): { spanH: number; isAppointed: boolean } {
+    const { sources, keeper } = this.world;
+    const { hour } = this.now.moment;
+    let nextH = Infinity;
+    for (const wait of [this.moments[this.nextMoment], sources.changesAtH, keeper.waitsUntilH]) {
+      if (wait !== undefined && wait !== null && wait > hour + SAME_H)
+        nextH = Math.min(nextH, wait);
     }
-    this.write(look(this.world, this.now, hour), hour);
+    const isAppointed = nextH - hour <= stepH + SAME_H;
+    return { spanH: isAppointed ? nextH - hour : stepH, isAppointed };
+  }
+
+  /** Lets every switch that waits on the reading change, and reads again. */
+  private settle(): void {
+    const { moment } = this.now;
+    const { hour } = moment;
+    let sight = look(this.world, moment, hour);
+    for (let changes = 0; changes < MOST_CHANGES && this.change(sight); changes += 1) {
+      sight = look(this.world, moment, hour);
+    }
+    this.now = { moment, sight };
+    this.write(sight, hour);
   }
 
   private change(sight: Sight): boolean {
-    const { world, now } = this;
+    const { world } = this;
     const { keeper, sources } = world;
+    const now = this.now.moment;
     if (sight.input && sources.look(now.hour, sight.input)) {
       keeper.begin();
       return true;
@@ -136,14 +152,18 @@ class ChargeLogger {
   }
 
   private write({ circuit, input }: Sight, timetableH: number): void {
-    const { hour, battery, startCharge } = this.now;
-    const { volts, batteryVolts, amps, batteryAmps } = circuit;
-    const reading = {
-      ...{ hour, volts, batteryVolts, amps, batteryAmps, startCharge },
+    const { hour, battery, startCharge } = this.now.moment;
+    const reading: ChargeReading = {
+      hour,
+      volts: circuit.volts,
+      batteryVolts: circuit.batteryVolts,
       inputVolts: input?.volts ?? NaN,
       startVolts: input?.postV ?? NaN,
+      startCharge,
+      amps: circuit.amps,
+      batteryAmps: circuit.batteryAmps,
       charge: battery.charge,
-      stage: this.shownStage(amps, circuit.at, timetableH),
+      stage: this.shownStage(circuit.amps, circuit.at, timetableH),
       source: this.world.sources.source,
       isPaused: isPaused(this.world.run.charger, timetableH),
     };
@@ -162,10 +182,10 @@ class ChargeLogger {
   }
 
   private requireCharge(): void {
-    if (this.now.battery.charge > 0) return;
-    const hour = this.now.hour.toFixed(1);
+    const { battery, hour } = this.now.moment;
+    if (battery.charge > 0) return;
     throw new OutOfRange(
-      `The battery is empty at ${hour} h; lower the load or give the charger a source.`,
+      `The battery is empty at ${hour.toFixed(1)} h; lower the load or give the charger a source.`,
     );
   }
 }

@@ -84,17 +84,18 @@ export function isTripping({ run, isShut }: World, { battery }: Moment, sight: S
   return restV(run.battery, battery.charge) + battery.pairV <= protection.closesV;
 }
 
-/** Everything that is either so or not; a step ends where one of them changes. */
-export function flagsOf(world: World, moment: Moment, sight: Sight): string {
+const BRANCHES = { limit: 0, voltage: 1, idle: 2 };
+
+/** Everything that is either so or not, as bits; a step ends where one of them changes. */
+export function flagsOf(world: World, moment: Moment, sight: Sight): number {
   const { keeper, sources } = world;
   const { circuit, branch, input } = sight;
-  const flags = [
-    branch.at === 'voltage' && circuit.batteryAmps > 0,
-    keeper.isUnderTail(circuit),
-    keeper.isUnderRestart(circuit),
-    keeper.isFallenBack(circuit),
-    isTripping(world, moment, sight),
-    input !== null && sources.isCalling(input),
-  ];
-  return branch.at + flags.map(Number).join('');
+  let flags = BRANCHES[branch.at];
+  if (branch.at === 'voltage' && circuit.batteryAmps > 0) flags += 4;
+  if (keeper.isUnderTail(circuit)) flags += 8;
+  if (keeper.isUnderRestart(circuit)) flags += 16;
+  if (keeper.isFallenBack(circuit)) flags += 32;
+  if (isTripping(world, moment, sight)) flags += 64;
+  if (input !== null && sources.isCalling(input)) flags += 128;
+  return flags;
 }
