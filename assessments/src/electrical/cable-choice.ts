@@ -37,3 +37,19 @@ export function chooseCable(job: CableJob, profile: PracticeProfile): CableChoic
   const decidedBy = byCurrentMm2 > byDropMm2 ? 'current' : 'drop';
   return { byCurrentMm2, byDropMm2, takesMm2, decidedBy };
 }
+
+/**
+ * Whether a conductor is stout enough to be wired at all, whatever its load: a thin one breaks.
+ *
+ * Source: ISO 10133:2012 clause 7; 33 CFR 183.425(d) and (e) (both second-hand copies).
+ *
+ * @param cable - copper in mm², and whether a sheath holds it with others.
+ * @example stoutEnough({ areaMm2: 0.75, sheathed: false }, PROFILES.metric) // false
+ */
+export function stoutEnough(
+  cable: { areaMm2: number; sheathed: boolean },
+  profile: Pick<PracticeProfile, 'smallestAreasMm2'>,
+): boolean {
+  const { alone, sheathed } = profile.smallestAreasMm2;
+  return cable.areaMm2 >= (cable.sheathed ? sheathed : alone) * (1 - 1e-9);
+}

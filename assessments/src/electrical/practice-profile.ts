@@ -1,3 +1,5 @@
+import { gaugeAreaMm2 } from './gauge.ts';
+
 /** Practices a question may be asked under. */
 export type PracticeName = 'metric' | 'awg';
 
@@ -57,6 +59,6 @@ export const PROFILES: Readonly<Record<PracticeName, PracticeProfile>> = {
     ratingTable: 'small-craft',
     engineFactors: NOTE_ONE,
     // 16 and 18 AWG: 33 CFR 183.425(d) and (e) (second-hand copy).
-    smallestAreasMm2: { alone: 1.30869574, sheathed: 0.823046829 },
+    smallestAreasMm2: { alone: gaugeAreaMm2(16), sheathed: gaugeAreaMm2(18) },
   },
 };

@@ -9,29 +9,35 @@ const JACKETS_C: readonly number[] = [60, 75, 80, 90, 105, 125, 200];
 /** Jackets the house table keeps of them. */
 const HOUSE_JACKETS_C: readonly number[] = [60, 75, 90, 105];
 
-type Row = readonly [gauge: number, ...amps: number[]];
+interface Row {
+  gauge: number;
+  areaMm2: number;
+  amps: readonly number[];
+}
 
 /**
  * Allowable amperage of one cable under 50 V in 30 °C air, thinnest gauge first:
  * 33 CFR 183.425 table 5 (public domain; second-hand copy).
  */
-const TABLE_FIVE_A: readonly Row[] = [
-  [18, 10, 10, 15, 20, 20, 25, 25],
-  [16, 15, 15, 20, 25, 25, 30, 35],
-  [14, 20, 20, 25, 30, 35, 40, 45],
-  [12, 25, 25, 35, 40, 45, 50, 55],
-  [10, 40, 40, 50, 55, 60, 70, 70],
-  [8, 55, 65, 70, 70, 80, 90, 100],
-  [6, 80, 95, 100, 100, 120, 125, 135],
-  [4, 105, 125, 130, 135, 160, 170, 180],
-  [3, 120, 145, 150, 155, 180, 195, 210],
-  [2, 140, 170, 175, 180, 210, 225, 240],
-  [1, 165, 195, 210, 210, 245, 265, 280],
-  [0, 195, 230, 245, 245, 285, 305, 325],
-  [-1, 225, 265, 285, 285, 330, 355, 370],
-  [-2, 260, 310, 330, 330, 385, 410, 430],
-  [-3, 300, 360, 385, 385, 445, 475, 510],
-];
+const TABLE_FIVE: readonly Row[] = (
+  [
+    [18, 10, 10, 15, 20, 20, 25, 25],
+    [16, 15, 15, 20, 25, 25, 30, 35],
+    [14, 20, 20, 25, 30, 35, 40, 45],
+    [12, 25, 25, 35, 40, 45, 50, 55],
+    [10, 40, 40, 50, 55, 60, 70, 70],
+    [8, 55, 65, 70, 70, 80, 90, 100],
+    [6, 80, 95, 100, 100, 120, 125, 135],
+    [4, 105, 125, 130, 135, 160, 170, 180],
+    [3, 120, 145, 150, 155, 180, 195, 210],
+    [2, 140, 170, 175, 180, 210, 225, 240],
+    [1, 165, 195, 210, 210, 245, 265, 280],
+    [0, 195, 230, 245, 245, 285, 305, 325],
+    [-1, 225, 265, 285, 285, 330, 355, 370],
+    [-2, 260, 310, 330, 330, 385, 410, 430],
+    [-3, 300, 360, 385, 385, 445, 475, 510],
+  ] as const
+).map(([gauge, ...amps]) => ({ gauge, areaMm2: gaugeAreaMm2(gauge), amps }));
 
 /** Temperature of the air the tables are printed for, °C. */
 export const TABLE_AIR_C = 30;
@@ -54,10 +60,10 @@ export function jacketsC(profile: Pick<PracticeProfile, 'ratingTable'>): readonl
  * @example gaugeRatingAmps(10, 105) // 60
  */
 export function gaugeRatingAmps(gauge: number, jacketC: number): number {
-  const row = TABLE_FIVE_A.find(([one]) => one === gauge);
+  const row = TABLE_FIVE.find((one) => one.gauge === gauge);
   if (row) return columnOf(row, jacketC);
   throw new OutOfRange(
-    `No rating for gauge ${gauge}; the table has ${TABLE_FIVE_A.map(([one]) => gaugeName(one)).join(', ')}.`,
+    `No rating for gauge ${gauge}; the table has ${TABLE_FIVE.map((one) => gaugeName(one.gauge)).join(', ')}.`,
   );
 }
 
@@ -115,9 +121,7 @@ export function jacketBefore(
 }
 
 function readDown(areaMm2: number, jacketC: number): number {
-  const row = TABLE_FIVE_A.findLast(
-    ([gauge]) => gaugeAreaMm2(gauge) <= areaMm2 * (1 + SAME_COPPER),
-  );
+  const row = TABLE_FIVE.findLast((one) => one.areaMm2 <= areaMm2 * (1 + SAME_COPPER));
   // One more gauge step would begin at 135 mm²: the table says nothing of such cable.
   if (row && areaMm2 < 135) return columnOf(row, jacketC);
   throw new OutOfRange(
@@ -125,7 +129,7 @@ function readDown(areaMm2: number, jacketC: number): number {
   );
 }
 
-function columnOf([, ...amps]: Row, jacketC: number): number {
+function columnOf({ amps }: Row, jacketC: number): number {
   const rating = amps[JACKETS_C.findIndex((jacket) => Math.abs(jacket - jacketC) < 1e-6)];
   if (rating !== undefined) return rating;
   throw new OutOfRange(

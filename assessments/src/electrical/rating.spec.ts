@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { numberIn, readTable } from '../../test/reference/read-table.ts';
 import { derate, sizeForCurrent } from './ampacity.ts';
-import { chooseCable } from './cable-choice.ts';
+import { chooseCable, stoutEnough } from './cable-choice.ts';
 import { gaugeAreaMm2, gaugeNumber, STOCK_GAUGES } from './gauge.ts';
 import { OutOfRange } from './out-of-range.ts';
 import { PROFILES } from './practice-profile.ts';
@@ -203,6 +203,21 @@ describe('sizing', () => {
       );
     },
   );
+
+  it('leaves out wire too thin to last: 1 mm² or 16 AWG alone, less inside a sheath', () => {
+    const thin = (areaMm2: number, name: 'metric' | 'awg'): boolean[] =>
+      [false, true].map((sheathed) => stoutEnough({ areaMm2, sheathed }, PROFILES[name]));
+    expect([0.5, 0.75, 1].map((area) => thin(area, 'metric'))).toEqual([
+      [false, false],
+      [false, true],
+      [true, true],
+    ]);
+    expect([20, 18, 16].map((gauge) => thin(gaugeAreaMm2(gauge), 'awg'))).toEqual([
+      [false, false],
+      [false, true],
+      [true, true],
+    ]);
+  });
 
   it('says when no cable will do', () => {
     const job = { amps: 900, jacketC: 60, factor: 0.5, lengthM: 3, limitV: 1 };

@@ -135,6 +135,21 @@ describe('one loop with its joints', () => {
     expect(heat).toBeCloseTo(simulated.get('joint_watts') ?? NaN, 5);
   });
 
+  it.each([
+    { celsius: 20, load: 12.5, wire: 0.75 },
+    { celsius: 35, load: 12.42, wire: 0.79 },
+  ])('agrees with the textbook at $celsius °C: $load V at the load', ({ celsius, load, wire }) => {
+    // Lessons in Electric Circuits, vol. I ch. 12 (read): 15 Ω each way, its own 0.004041 /K; the
+    // 14 V source and 250 Ω load are inferred from its print.
+    const ohms = 15 * (1 + 0.004041 * (celsius - 20));
+    const { drops } = seriesPath(14, [
+      { is: 'out', ohms },
+      { is: 'load', ohms: 250 },
+      { is: 'back', ohms },
+    ]);
+    expect(drops.map(({ volts }) => Number(volts.toFixed(2)))).toEqual([wire, load, wire]);
+  });
+
   it('shares out all the volts and all the heat', () => {
     const part = fc.record({
       is: fc.constant('part'),

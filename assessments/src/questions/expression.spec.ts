@@ -278,6 +278,17 @@ describe('dimensions', () => {
   });
 });
 
+describe('practice', () => {
+  it('decides which stock a function steps up to', () => {
+    const scope = new Map([['area', 10e-6]]);
+    const next = (practice: 'metric' | 'awg'): number =>
+      evaluate(compile(read('nextCable(area)'), practice), scope, 'nextCable');
+    expect(next('metric')).toBe(10e-6);
+    // 6 AWG by ASTM B258.
+    expect(next('awg') * 1e6).toBeCloseTo(13.3017679, 6);
+  });
+});
+
 describe('names', () => {
   it.each(['A', 'm', 'h', 'V', 'pi', 'e', 'i', 'tau', 'mm', 'metre', 'kilo', 'drop', 'hours'])(
     'may not be %s, a unit, prefix or constant',

@@ -1,5 +1,10 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { OutOfRange } from '../electrical/out-of-range.ts';
 import { type PracticeName, PROFILES } from '../electrical/practice-profile.ts';
+import { CONDUCTOR_FUNCTIONS } from './functions-conductors.ts';
+import { PROTECTION_FUNCTIONS } from './functions-protection.ts';
+import { RATING_FUNCTIONS } from './functions-rating.ts';
 import { FUNCTIONS } from './functions.ts';
 
 const CELSIUS = 273.15;
@@ -90,5 +95,33 @@ describe('functions of a sheet', () => {
     expect(() => call('gaugeArea', [2.5])).toThrow('write 1/0 as 0');
     expect(() => call('prevCable', [1.5 * MM2])).toThrow('the series starts at 1.5');
     expect(() => call('nextOf', [9, 1, 2])).toThrow('the series ends at 2');
+  });
+
+  it.each(
+    [...CONDUCTOR_FUNCTIONS, ...RATING_FUNCTIONS, ...PROTECTION_FUNCTIONS].map(([name]) => name),
+  )('%s gives a finite figure or says what is out of range', (name) => {
+    const [least = 1] = FUNCTIONS.get(name)?.arity ?? [];
+    const figure = fc.oneof(
+      fc.double({ min: -50, max: 1000 }),
+      fc.double({ min: 0, max: 2e-4 }),
+      fc.constantFrom(...[-3, 0, 1, 10, 105].map((celsius) => celsius + CELSIUS)),
+      fc.constantFrom(1.5, 10, 120, 8.36556406008).map((areaMm2) => areaMm2 * MM2),
+      fc.integer({ min: -4, max: 42 }),
+      fc.constantFrom(NaN, Infinity, -Infinity),
+    );
+    fc.assert(
+      fc.property(
+        fc.array(figure, { minLength: least, maxLength: least }),
+        fc.constantFrom<PracticeName>('metric', 'awg'),
+        (si, practice) => {
+          try {
+            expect(Number.isFinite(call(name, si, practice))).toBe(true);
+          } catch (error) {
+            expect(error).toBeInstanceOf(OutOfRange);
+          }
+        },
+      ),
+      { numRuns: 300 },
+    );
   });
 });
