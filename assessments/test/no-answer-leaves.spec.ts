@@ -75,6 +75,8 @@ function everythingIn(value: unknown): string[] {
   return Object.entries(value).flatMap(([key, inner]) => [key, ...everythingIn(inner)]);
 }
 
+const MOMENTS = ['bulk ends', 'float starts', 'quiet ends', 'protection opens', 'vehicle taken'];
+
 describe('what leaves before marking', () => {
   const question = parseQuestion(PLANTED, 'bank/planted.md');
   const drawn = drawQuestion(question, seedNumber(1)) as Drawn;
@@ -131,10 +133,10 @@ describe('what leaves before marking', () => {
         const paper = drawQuestion(one, seedNumber(n)) as Drawn;
         const { curve } = presentQuestion(one, paper);
         const edges = (curve?.intervals ?? []).flatMap(({ fromH, toH }) => [fromH, toH]);
-        const keys = one.parts.flatMap((part) => {
-          const held = paper.parts[part.id];
-          const isTime = part.kind === 'quantity' && part.units[0]?.symbol === 'h';
-          return isTime && held?.kind === 'quantity' ? [held.key / 3600] : [];
+        // Moments alone: how long a stage lasts is no place on the time axis.
+        const keys = one.steps.flatMap(({ name, how }) => {
+          const isMoment = how.kind === 'read' && MOMENTS.includes(how.read.kind);
+          return isMoment ? [(paper.values[name] ?? NaN) / 3600] : [];
         });
         for (const key of keys) {
           expect(edges.filter((edge) => Math.abs(edge - key) < 0.02)).toEqual([]);
