@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { type Drawn } from '../src/questions/compiled.ts';
+import { type Compiled, type Drawn } from '../src/questions/compiled.ts';
 import { drawQuestion } from '../src/questions/draw.ts';
 import { markQuestion } from '../src/questions/mark.ts';
 import { presentQuestion } from '../src/questions/present.ts';

@@ -90,14 +90,13 @@ function sizeCircuit(job: BudgetJob, loadA: number, profile: PracticeProfile): B
     step('drop allowed', [limitV, 'V'], [`${profile.name} profile`, 'nominal voltage']),
     step('cable by current', [byCurrent, 'mm²'], ['output over 0.8', 'factor', ratings(profile)]),
     step('cable by drop', [byDrop, 'mm²'], ['output', 'length', 'drop allowed', sizes(profile)]),
-    step('cable', [areaMm2, 'mm²'], ['cable by current', 'cable by drop'], 'the larger'),
+    step('cable', [areaMm2, 'mm²', 'the larger'], ['cable by current', 'cable by drop']),
     step('cable carries', [cableA, 'A'], ['cable', 'factor', ratings(profile)]),
-    step(
-      'fuse',
-      [device.fits ? device.ratingA : device.needA, 'A'],
-      ['output over 0.8', 'cable carries', 'ratings to be had'],
-      device.fits ? 'fits' : device.remedy,
-    ),
+    step('fuse', device.fits ? [device.ratingA, 'A', 'fits'] : [device.needA, 'A', device.remedy], [
+      'output over 0.8',
+      'cable carries',
+      'ratings to be had',
+    ]),
     ...checkCircuit(job, { loadA, areaMm2, limitV }, profile),
   ];
 }
@@ -119,16 +118,18 @@ function checkCircuit(
   return [
     step(
       'drop',
-      [dropV, 'V'],
+      [
+        dropV,
+        'V',
+        dropV <= circuit.limitV + 1e-9 ? 'within the drop allowed' : 'over the drop allowed',
+      ],
       ['output', 'cable', 'length', sizes(profile)],
-      dropV <= circuit.limitV + 1e-9 ? 'within the drop allowed' : 'over the drop allowed',
     ),
     step('fault current at the far end', [farA, 'A'], ['battery', 'joints', 'cable']),
     step(
       'fault current at the fuse',
-      [nearA, 'A'],
+      [nearA, 'A', breaks ? 'the fuse can break it' : 'choose a fuse of higher breaking capacity'],
       ['battery', 'joints', 'breaking capacity'],
-      breaks ? 'the fuse can break it' : 'choose a fuse of higher breaking capacity',
     ),
   ];
 }
@@ -147,10 +148,10 @@ function sizes(profile: PracticeProfile): string {
 
 function step(
   name: string,
-  [value, unit]: [value: number, unit: string],
-  ...[used, verdict = null]: [used: string[], verdict?: string]
+  [value, unit, verdict]: [value: number, unit: string, verdict?: string],
+  used: string[],
 ): BudgetStep {
-  return { name, value, unit, used, verdict };
+  return { name, value, unit, used, verdict: verdict ?? null };
 }
 
 function requireSupply(bank: BudgetJob['bank'], source: BudgetJob['source']): void {
