@@ -5,6 +5,10 @@ import { CABLE_AREAS_MM2, nearestSize, nextSize } from './stock.ts';
 
 /** Copper areas of the stock gauges, mm², smallest first. */
 const GAUGE_AREAS_MM2: readonly number[] = STOCK_GAUGES.map(gaugeAreaMm2);
+const KNOWN_GAUGES = [18, ...STOCK_GAUGES].map((gauge) => ({
+  gauge,
+  areaMm2: gaugeAreaMm2(gauge),
+}));
 
 /** Stock cable of a practice by its copper area, mm², smallest first. */
 export function stockAreasMm2(profile: Pick<PracticeProfile, 'sizes'>): readonly number[] {
@@ -58,10 +62,8 @@ export function nearestMetric(gauge: number): number {
  * @throws {OutOfRange} when the area is no stock gauge's.
  */
 export function gaugeOfArea(areaMm2: number): number {
-  const gauge = [18, ...STOCK_GAUGES].find(
-    (one) => Math.abs(gaugeAreaMm2(one) / areaMm2 - 1) < 1e-4,
-  );
-  if (gauge !== undefined) return gauge;
+  const known = KNOWN_GAUGES.find((one) => Math.abs(one.areaMm2 / areaMm2 - 1) < 1e-4);
+  if (known) return known.gauge;
   throw new OutOfRange(`${areaMm2} mm² is the copper of no gauge; take the next gauge from it.`);
 }
 
