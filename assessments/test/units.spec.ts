@@ -33,6 +33,7 @@ const UNITS: [string, string, string][] = [
   ['kN', 'kilonewton', 'newton'],
   ['N·m', 'newton meter', 'joule'],
   ['kg', 'kilogram', 'kg'],
+  ['g', 'gram', 'kg'],
   ['d', 'day', 's'],
   // A gauge is counted, not measured.
   ['AWG', '1', '1'],

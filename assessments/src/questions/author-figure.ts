@@ -1,4 +1,5 @@
 import { readNumber } from './number-text.ts';
+import { plainSigns } from './plain-signs.ts';
 import { parseUnit } from './unit-expression.ts';
 import { sameDimension, type Unit } from './units.ts';
 
@@ -13,11 +14,12 @@ export interface AuthorFigure {
  * @throws {Error} when it is no figure, or the unit is unknown.
  */
 export function readAuthorFigure(text: string): AuthorFigure {
-  const number = readNumber(text);
+  const plain = plainSigns(text);
+  const number = readNumber(plain);
   if (number.state !== 'number') {
     throw new Error(`"${text}" is not a figure with its unit; write it like 12.8 V.`);
   }
-  return { figure: number.value, unit: parseUnit(text.slice(number.length)) };
+  return { figure: number.value, unit: parseUnit(plain.slice(number.length)) };
 }
 
 /** Figures that must share one unit, taken from the first that names one, or from `fallback`. */

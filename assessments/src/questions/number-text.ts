@@ -4,30 +4,30 @@ export type NumberReading =
   | { state: 'ambiguous'; readings: string[]; length: number }
   | { state: 'none' };
 
-const SPACE = '[ \\u00a0\\u2009\\u202f]';
 const FIGURE = new RegExp(
-  `^(?<sign>[-+\\u2212\\u2013]?)${SPACE}?` +
-    `(?<digits>\\d[\\d.,'\\u2019]*(?:${SPACE}\\d{3}(?![\\d]))*(?:[.,]\\d+)?|[.,]\\d+)` +
-    `(?<power>[eE][-+\\u2212]?\\d{1,3}(?!\\d)|${SPACE}?[×x*·]${SPACE}?10(?:\\^[-+\\u2212]?\\d{1,3}|[⁻⁺]?[⁰¹²³⁴-⁹]{1,3}))?`,
+  '^(?<sign>[-+]?) ?' +
+    "(?<digits>\\d[\\d.,'\u2019]*(?: \\d{3}(?!\\d))*(?:[.,]\\d+)?|[.,]\\d+)" +
+    '(?<power>[eE][-+]?\\d{1,3}(?!\\d)| ?[×xX*·⋅] ?10(?: ?\\^ ?[-+]?\\d{1,3}|[⁻⁺]?[⁰¹²³⁴-⁹]{1,3}))?',
 );
 const RAISED = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 
-/** Reads the figure a text begins with; `length` is how much of the text it took. */
+/** Reads the figure a text of plain signs begins with; `length` is how much of it it took. */
 export function readNumber(text: string): NumberReading {
   const found = FIGURE.exec(text);
   if (!found) return { state: 'none' };
   const { sign, digits, power } = found.groups as Record<string, string | undefined>;
   const plain = plainDigits(digits ?? '');
   if (plain.state === 'none') return plain;
-  const mark = sign === undefined || sign === '' || sign === '+' ? '' : '-';
+  const mark = sign === '-' ? '-' : '';
   const length = found[0].length;
   if (plain.state === 'ambiguous') {
-    const readings = plain.readings.map((one) => mark.replace('-', '\u2212') + one);
+    const readings = plain.readings.map((one) => mark.replace('-', '\u2212') + one + (power ?? ''));
     return { state: 'ambiguous', readings, length };
   }
   // One conversion of the joined text keeps the last digit that a product would lose.
   const value = Number(`${mark}${plain.text}e${exponentOf(power ?? '')}`);
-  return Number.isFinite(value) ? { state: 'number', value, length } : { state: 'none' };
+  const isLost = value === 0 && /[1-9]/.test(plain.text);
+  return Number.isFinite(value) && !isLost ? { state: 'number', value, length } : { state: 'none' };
 }
 
 type PlainReading =
@@ -38,7 +38,7 @@ type PlainReading =
 const NONE: PlainReading = { state: 'none' };
 
 function plainDigits(digits: string): PlainReading {
-  const spaced = /[ \u00a0\u2009\u202f'\u2019]/.test(digits);
+  const spaced = /[ '\u2019]/.test(digits);
   if (spaced) return groupedBySpaces(digits);
   const marks = [...digits].filter((c) => c === '.' || c === ',');
   const kinds = new Set(marks);
@@ -52,7 +52,7 @@ function plainDigits(digits: string): PlainReading {
 
 /** 1 234 567,8: groups of three set apart; what follows a point or comma is decimal. */
 function groupedBySpaces(digits: string): PlainReading {
-  const grouped = /^(\d{1,3}(?:[ \u00a0\u2009\u202f'\u2019]\d{3})+)(?:[.,](\d+))?$/.exec(digits);
+  const grouped = /^([1-9]\d{0,2}(?:[ '\u2019]\d{3})+)(?:[.,](\d+))?$/.exec(digits);
   if (!grouped) return NONE;
   const whole = (grouped[1] ?? '').replace(/\D/g, '');
   return numberFrom(grouped[2] === undefined ? whole : `${whole}.${grouped[2]}`);
@@ -60,17 +60,16 @@ function groupedBySpaces(digits: string): PlainReading {
 
 /** 1.234.567 can only be groups. */
 function groupedByMarks(digits: string): PlainReading {
-  return /^\d{1,3}(?:([.,])\d{3})(?:\1\d{3})+$/.test(digits)
+  return /^[1-9]\d{0,2}(?:([.,])\d{3})(?:\1\d{3})+$/.test(digits)
     ? numberFrom(digits.replace(/[.,]/g, ''))
     : NONE;
 }
 
-/** 1.234,5 and 1,234.5 are asked back: the habit of the writer decides, and we do not know it. */
+/** 1.234,5 and 1,234.5 can each be read in one way only: the last mark is the decimal one. */
 function mixedMarks(digits: string): PlainReading {
-  const mixed = /^(\d{1,3}(?:([.,])\d{3})+)([.,])(\d+)$/.exec(digits);
+  const mixed = /^([1-9]\d{0,2}([.,])\d{3}(?:\2\d{3})*)([.,])(\d+)$/.exec(digits);
   if (!mixed || mixed[2] === mixed[3]) return NONE;
-  const whole = (mixed[1] ?? '').replace(/[.,]/g, '');
-  return { state: 'ambiguous', readings: [`${whole}.${mixed[4] ?? ''}`] };
+  return numberFrom(`${(mixed[1] ?? '').replace(/[.,]/g, '')}.${mixed[4] ?? ''}`);
 }
 
 function numberFrom(text: string): PlainReading {
@@ -80,12 +79,11 @@ function numberFrom(text: string): PlainReading {
 
 function exponentOf(power: string): number {
   if (power === '') return 0;
-  const raised = power.replace(/^.*10/, '').replace(/^[eE^]/, '');
+  const raised = power.replace(/^.*10/, '').replace(/^[eE]/, '').replace(/[ ^]/g, '');
   const flat = [...raised]
     .map((c) => (RAISED.includes(c) ? String(RAISED.indexOf(c)) : c))
     .join('')
-    .replace(/[\u2212⁻]/g, '-')
-    .replace(/[+⁺]/g, '')
-    .replace(/^\^/, '');
+    .replace(/⁻/g, '-')
+    .replace(/[+⁺]/g, '');
   return Number(flat);
 }

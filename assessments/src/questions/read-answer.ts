@@ -3,7 +3,7 @@ import { readChosen } from './read-chosen.ts';
 import { readQuantity } from './quantity.ts';
 import { type PartView, type RawAnswer, type Reading } from './types.ts';
 import { parseUnit } from './unit-expression.ts';
-import { NO_DIMENSION, sameDimension, toSi, type Unit, unitsSpelt } from './units.ts';
+import { sameDimension, toSi, type Unit, unitsSpelt } from './units.ts';
 
 /** A figure a person typed, with the unit it stands in. */
 export interface TypedQuantity {
@@ -27,7 +27,7 @@ export function readAnswer(part: PartView, answer: RawAnswer): Reading {
   if (!isOfKind) {
     return {
       state: 'not-understood',
-      ask: `${unit.symbol} measures something else than this part asks for; give it in ${unitList(part)}.`,
+      ask: `${unit.symbol} measures something else than this part asks for; give it ${unitList(part)}.`,
     };
   }
   return { state: 'understood', value: toSi(figure, unit), shown: showTyped(reading.typed) };
@@ -42,8 +42,8 @@ function showTyped({ figure, unit }: TypedQuantity): string {
 /** Figure and unit of a quantity answer; a typed unit goes before a chosen one. */
 export function readTyped(part: PartView, answer: RawAnswer): TypedReading {
   const offered = part.units.map(parseUnit);
-  const dimension = offered[0]?.dimension ?? NO_DIMENSION;
-  const read = readQuantity(answer.text, dimension);
+  const wanted = offered[0] ?? parseUnit('');
+  const read = readQuantity(answer.text, wanted);
   switch (read.state) {
     case 'blank':
       return { state: 'blank' };
@@ -52,7 +52,7 @@ export function readTyped(part: PartView, answer: RawAnswer): TypedReading {
     case 'unknown-unit':
       return {
         state: 'not-understood',
-        ask: `"${read.spelling}" is not a unit we know; give it in ${unitList(part)}.`,
+        ask: `"${read.spelling}" is not a unit we know; give it ${unitList(part)}.`,
       };
     case 'not-a-quantity':
       return {
@@ -62,9 +62,12 @@ export function readTyped(part: PartView, answer: RawAnswer): TypedReading {
     case 'quantity': {
       const unit = read.unit ?? chosenUnit(offered, answer.unit);
       if (!unit) {
-        return { state: 'not-understood', ask: `Which unit is it in? Give ${unitList(part)}.` };
+        return {
+          state: 'not-understood',
+          ask: `Which unit is it in? Give ${part.units.join(' or ')}.`,
+        };
       }
-      const isOfKind = sameDimension(unit.dimension, dimension);
+      const isOfKind = sameDimension(unit.dimension, wanted.dimension);
       return { state: 'typed', typed: { figure: read.figure, unit, isOfKind } };
     }
   }
@@ -78,14 +81,17 @@ function chosenUnit(offered: readonly Unit[], chosen: string | null): Unit | und
 }
 
 function askWhich(readings: string[]): Reading & { state: 'ambiguous' } {
-  const [first = '', second] = readings;
-  const ask =
-    second === undefined
-      ? `Did you mean ${first}? Type it with one mark only, the decimal one.`
-      : `Did you mean ${first} or ${second}? Type it without a mark between thousands.`;
-  return { state: 'ambiguous', ask, readings };
+  const isTime = readings.some((reading) => / (?:h|min) \d/.test(reading));
+  const how = isTime ? 'with its units' : 'without a mark between thousands';
+  return {
+    state: 'ambiguous',
+    ask: `Did you mean ${readings.join(' or ')}? Type it ${how}.`,
+    readings,
+  };
 }
 
 function unitList(part: PartView): string {
-  return part.units.length === 0 ? 'a pure number, without a unit' : part.units.join(' or ');
+  return part.units.length === 0
+    ? 'as a pure number, without a unit'
+    : `in ${part.units.join(' or ')}`;
 }

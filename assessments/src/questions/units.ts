@@ -160,6 +160,7 @@ export const BASE_UNITS: readonly BaseUnit[] = [
     words: ['newton metre', 'newton metres', 'newton meter', 'newton meters'],
   }),
   base('kg', MASS, { spellings: ['KG', 'Kg'], words: ['kilogram', 'kilograms', 'kilo', 'kilos'] }),
+  base('g', MASS, { factor: 1e-3, words: ['gram', 'grams'] }),
   /** A gauge number: 10 is 10 AWG, 0 is 1/0, −1 is 2/0, −3 is 4/0. */
   base('AWG', NO_DIMENSION, { spellings: ['awg', 'Awg'] }),
   base('%', NO_DIMENSION, {
