@@ -11,6 +11,7 @@ import { markQuestion } from '../src/questions/mark.ts';
 import { solve } from '../src/questions/solve.ts';
 import { isWithin, slipRangeOf } from '../src/questions/tolerance.ts';
 import { type Answers, type MarkedQuestion, type RawAnswer } from '../src/questions/types.ts';
+import { fromSi } from '../src/questions/units.ts';
 import { answerRight, BLANK, choose, chooseAll, typeSi } from './answering.ts';
 import { openBank, seedNumber } from './bank-files.ts';
 
@@ -102,15 +103,16 @@ describe('any single error', () => {
     let [tried, worked] = [0, 0];
     fc.assert(
       fc.property(aBank, factor, (place, by) => {
+        const faults = new Set<string>();
         for (const one of figuresOf(bankAt(place))) {
           tried += 1;
           const answers = withOneError(one, (one.drawn.values[one.part.step] ?? 0) * by);
           if (!answers) continue;
           const marked = mark(one, answers);
-          const lost = lostOn(marked, one.part);
-          expect([named(one), marked.outOf - marked.marks]).toEqual([named(one), lost]);
+          if (marked.outOf - marked.marks !== lostOn(marked, one.part)) faults.add(named(one));
           worked += 1;
         }
+        expect([...faults]).toEqual([]);
       }),
       { numRuns: 8 },
     );
@@ -121,15 +123,16 @@ describe('any single error', () => {
   it('in a choice, an order or pairs costs no marks elsewhere', () => {
     fc.assert(
       fc.property(aBank, (place) => {
+        const faults = new Set<string>();
         for (const one of casesOf(bankAt(place))) {
           const other = anotherChoice(one);
           if (!other) continue;
           const right = answerRight(one.question, one.drawn);
           const marked = mark(one, { ...right, [one.part.id]: other });
           const lost = lostOn(marked, one.part);
-          expect([named(one), marked.outOf - marked.marks]).toEqual([named(one), lost]);
-          expect(lost, named(one)).toBeGreaterThan(0);
+          if (lost === 0 || marked.outOf - marked.marks !== lost) faults.add(named(one));
         }
+        expect([...faults]).toEqual([]);
       }),
       { numRuns: 3 },
     );
@@ -139,6 +142,7 @@ describe('any single error', () => {
     const factor = fc.double({ min: 0.2, max: 3, noNaN: true });
     fc.assert(
       fc.property(aBank, factor, (place, by) => {
+        const faults = new Set<string>();
         for (const one of figuresOf(bankAt(place))) {
           const off = (one.drawn.values[one.part.step] ?? 0) * by + 1e-9;
           const right = answerRight(one.question, one.drawn);
@@ -147,10 +151,10 @@ describe('any single error', () => {
             [one.part.id]: typeSi(one.question, one.part, off),
           });
           for (const other of marked.parts.filter(({ id }) => id !== one.part.id)) {
-            const what = `${named(one)} wrong, (${other.id}) right`;
-            expect([what, other.marks]).toEqual([what, other.outOf]);
+            if (other.marks !== other.outOf) faults.add(`${named(one)} wrong, (${other.id}) right`);
           }
         }
+        expect([...faults]).toEqual([]);
       }),
       { numRuns: 8 },
     );
@@ -282,6 +286,22 @@ describe('marking', () => {
       ),
       { numRuns: 300 },
     );
+  });
+
+  it('gives full marks for as many figures as the worked answer is printed with', () => {
+    const lost = new Set<string>();
+    for (const one of drawnBanks.flatMap(figuresOf)) {
+      const held = one.drawn.parts[one.part.id];
+      const step = one.question.steps.find(({ name }) => name === one.part.step);
+      if (held?.kind !== 'quantity' || !step) continue;
+      const unit = one.part.units[0];
+      const figure = unit ? fromSi(held.key, unit) : held.key;
+      const places = one.part.rounding ? 9 : step.figures;
+      const text = String(Number(figure.toPrecision(places)));
+      const marked = mark(one, { [one.part.id]: { ...BLANK, text, unit: unit?.symbol ?? null } });
+      if (lostOn(marked, one.part) > 0) lost.add(`${named(one)}: ${text} for ${figure}`);
+    }
+    expect([...lost]).toEqual([]);
   });
 
   it('leaves a paper with nothing on it without marks', () => {
