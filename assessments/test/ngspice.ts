@@ -15,7 +15,7 @@ const RESULT = /^\s*(\S+)\s*=\s*([-+]?\d\S*)\s*$/;
  */
 export function runNgspice(
   netlist: string,
-  values: Readonly<Record<string, number>> = {},
+  values: Readonly<Record<string, number | string>> = {},
 ): ReadonlyMap<string, number> {
   const text = readFileSync(new URL(`reference/${netlist}`, import.meta.url), 'utf8');
   const filled = text.replace(/\{\{(\w+)\}\}/g, (_, name: string) => {

@@ -16,7 +16,7 @@ const ZERO_C_IN_K = 273.15;
 const REFERENCE_C = 25;
 const LONGEST_STEP_S = 60;
 /** A short log is still resolved into so many steps. */
-const LEAST_STEPS = 240;
+const LEAST_STEPS = 720;
 /** The tail must have held for this long before a charger goes to float. */
 const TAIL_HOLD_H = 5 / 60;
 /** How long a hot charger's limit slides where the sheet does not say. */

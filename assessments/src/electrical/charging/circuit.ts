@@ -83,21 +83,57 @@ export function readCircuit(
 }
 
 /**
- * The state after a time on one branch: the pair exactly, the charge by its slope half-way through
- * (second order in the step).
+ * The state after a time on one branch: what the pair goes to moves in a straight line from its
+ * value at the start to that at the foreseen end, and the pair follows it exactly (second order in
+ * the step, however slow or fast the pair is).
  */
 export function advance(
   battery: Battery,
   state: BatteryState,
   { spanS, branchAt }: { spanS: number; branchAt: (state: BatteryState) => Branch },
 ): BatteryState {
-  const first = meanOver(battery, state, { spanS: spanS / 2, branch: branchAt(state) });
-  const middle = charged(battery, state.charge, { amps: first.amps, spanS: spanS / 2 });
-  const atMiddle = { charge: middle, pairV: state.pairV };
-  const whole = meanOver(battery, atMiddle, { spanS, branch: branchAt(atMiddle) });
+  const first = branchAt(state);
+  const start = goalOf(battery, state, first);
+  const foreseen = follow(state.pairV, { from: start, to: start, spanS });
+  const endCharge = charged(battery, state.charge, { amps: foreseen.amps, spanS });
+  const last = { charge: endCharge, pairV: state.pairV };
+  const to = goalOf(battery, last, branchAt(last));
+  const whole = follow(state.pairV, { from: start, to, spanS });
   return {
     charge: charged(battery, state.charge, { amps: whole.amps, spanS }),
     pairV: whole.pairV,
+  };
+}
+
+/** Where the pair goes at one charge, how fast, and the battery's current on the way. */
+interface Goal {
+  settledV: number;
+  ratePerS: number;
+  branch: Branch;
+}
+
+function goalOf(battery: Battery, { charge, pairV }: BatteryState, branch: Branch): Goal {
+  const { offsetA, slopeS } = branch;
+  const ohms = pairOhms(battery, charge, offsetA - slopeS * pairV > 0);
+  const stiffness = 1 + slopeS * ohms;
+  return { settledV: (offsetA * ohms) / stiffness, ratePerS: stiffness / battery.relaxS, branch };
+}
+
+/** The pair's voltage after a time, and the battery's mean current over it. */
+function follow(
+  pairV: number,
+  { from, to, spanS }: { from: Goal; to: Goal; spanS: number },
+): { pairV: number; amps: number } {
+  const spans = (spanS * (from.ratePerS + to.ratePerS)) / 2;
+  const left = Math.exp(-spans);
+  const meanLeft = spans > 1e-6 ? (1 - left) / spans : 1;
+  const lagV = spans > 1e-6 ? (to.settledV - from.settledV) / spans : 0;
+  const offV = pairV - from.settledV + lagV;
+  const meanV = (from.settledV + to.settledV) / 2 - lagV + offV * meanLeft;
+  const offsetA = (from.branch.offsetA + to.branch.offsetA) / 2;
+  return {
+    pairV: to.settledV - lagV + offV * left,
+    amps: offsetA - from.branch.slopeS * meanV,
   };
 }
 
@@ -111,20 +147,4 @@ function charged(
   const stays = amps > 0 ? amps * battery.efficiency : amps;
   const share = charge + (stays * spanS) / SECONDS_PER_HOUR / battery.capacityAh;
   return Math.min(1, Math.max(0, share));
-}
-
-/** The pair's voltage after a time at one charge, and the battery's mean current over it. */
-function meanOver(
-  battery: Battery,
-  { charge, pairV }: BatteryState,
-  { spanS, branch }: { spanS: number; branch: Branch },
-): { pairV: number; amps: number } {
-  const { offsetA, slopeS } = branch;
-  const ohms = pairOhms(battery, charge, offsetA - slopeS * pairV > 0);
-  const settledV = (offsetA * ohms) / (1 + slopeS * ohms);
-  const spans = (spanS * (1 + slopeS * ohms)) / battery.relaxS;
-  const left = Math.exp(-spans);
-  const meanShare = spans > 1e-9 ? (1 - left) / spans : 1;
-  const meanV = settledV + (pairV - settledV) * meanShare;
-  return { pairV: settledV + (pairV - settledV) * left, amps: offsetA - slopeS * meanV };
 }

@@ -38,18 +38,21 @@ export function readingAt(readings: readonly ChargeReading[], hour: number): Cha
   if (!before || !after || hour > after.hour + 1e-9) return null;
   if (after.hour <= before.hour) return before;
   const share = (hour - before.hour) / (after.hour - before.hour);
-  const between = (key: 'volts' | 'amps' | 'batteryVolts' | 'batteryAmps'): number =>
-    before[key] + (after[key] - before[key]) * share;
-  return {
-    ...before,
-    hour,
-    volts: between('volts'),
-    amps: between('amps'),
-    batteryVolts: between('batteryVolts'),
-    batteryAmps: between('batteryAmps'),
-    inputVolts: before.inputVolts + (after.inputVolts - before.inputVolts) * share,
-  };
+  const between = { ...before, hour };
+  for (const key of FIGURES) between[key] = before[key] + (after[key] - before[key]) * share;
+  return between;
 }
+
+const FIGURES = [
+  'volts',
+  'batteryVolts',
+  'inputVolts',
+  'startVolts',
+  'startCharge',
+  'amps',
+  'batteryAmps',
+  'charge',
+] as const;
 
 /** A stretch of a log in which the lines show one stage; pauses do not break it. */
 export interface Spell {
