@@ -120,6 +120,9 @@ describe('load, cable and device together', () => {
     expect(mostSmallCraftA({ tableA: 80, volts: 60 }, FUSE_RATINGS_A)).toBe(80);
     expect(mostSmallCraftA({ tableA: 85, volts: 60 }, FUSE_RATINGS_A)).toBe(100);
     expect(mostSmallCraftA({ tableA: 85, volts: 60 }, [60, 150])).toBe(60);
+    expect(
+      [49.9, 50].map((volts) => mostSmallCraftA({ tableA: 80, volts }, FUSE_RATINGS_A)),
+    ).toEqual([100, 80]);
     expect(mostSmallCraftA({ tableA: 0.5, volts: 12 }, FUSE_RATINGS_A)).toBeNull();
   });
 
@@ -163,6 +166,7 @@ describe('a short circuit', () => {
     const prospectiveA = prospectiveAmps(near);
     const breaks = [1000, 2000, 20_000].map((breakingA) => canBreak({ breakingA, prospectiveA }));
     expect(breaks.map((one) => one.breaks)).toEqual([false, false, true]);
+    expect(canBreak({ breakingA: 2000, prospectiveA: 2000 })).toEqual({ breaks: true, spareA: 0 });
     expect(breaks[0]?.spareA).toBeCloseTo(-1353.78, 2);
   });
 

@@ -26,6 +26,8 @@ describe('sizes in two systems', () => {
     expect([12, 10, 8, 6].map(nearestMetric)).toEqual([4, 6, 10, 16]);
     expect([6, 10, 16, 35].map(nearestGauge)).toEqual([10, 8, 6, 2]);
     expect(gaugeAreaMm2(nearestGauge(6))).toBeLessThan(6);
+    // Of two as near, the larger.
+    expect(nearestSize(2, [1, 4])).toBe(4);
   });
 
   it('find a gauge again from its own copper, and no gauge in other copper', () => {
