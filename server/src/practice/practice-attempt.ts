@@ -1,4 +1,4 @@
-import type { DrawnQuestion } from '@ferrule/assessments';
+import type { DrawnQuestion, FadedQuestion } from '@ferrule/assessments';
 import type { QuestionView } from '../questions/question-view.ts';
 
 /** What was drawn and what was shown of it. */
@@ -6,6 +6,8 @@ export interface KeptDraw {
   readonly slug: string;
   readonly drawn: DrawnQuestion;
   readonly view: QuestionView;
+  /** What was worked beforehand; missing where the question was asked whole. */
+  readonly faded?: FadedQuestion;
 }
 
 export interface PracticeAttempt {
@@ -17,3 +19,7 @@ export interface PracticeAttempt {
   readonly hints: readonly string[];
   readonly handedInAt: Date | null;
 }
+
+/** The question as far as it was asked. */
+export const askedOf = ({ view, faded }: KeptDraw): QuestionView =>
+  faded ? { ...view, parts: view.parts.filter(({ id }) => faded.asked.includes(id)) } : view;

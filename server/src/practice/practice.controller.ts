@@ -1,19 +1,24 @@
-import { Body, Controller, Param, Post } from '@nestjs/common';
+import { Body, Controller, Get, Param, Post, Query } from '@nestjs/common';
 import { z } from 'zod';
 import type { SignedInAccount } from '../accounts/account.ts';
 import { Allow } from '../http/allow.decorator.ts';
 import { CurrentAccount } from '../http/current-account.decorator.ts';
 import { Responds } from '../http/responds.decorator.ts';
+import { PracticeListService } from './practice-list.service.ts';
 import {
   answerPracticeSchema,
   askHintSchema,
+  findPracticeSchema,
   hintSchema,
+  practiceListSchema,
   practiceMarkedSchema,
   practiceViewSchema,
   startPracticeSchema,
   type AnswerPractice,
   type AskHint,
+  type FindPractice,
   type Hint,
+  type PracticeList,
   type PracticeMarked,
   type PracticeView,
   type StartPractice,
@@ -22,7 +27,20 @@ import { PracticeService } from './practice.service.ts';
 
 @Controller('api/practice')
 export class PracticeController {
-  constructor(private readonly practice: PracticeService) {}
+  constructor(
+    private readonly practice: PracticeService,
+    private readonly lists: PracticeListService,
+  ) {}
+
+  @Get('questions')
+  @Allow('signed-in')
+  @Responds(200, practiceListSchema)
+  list(
+    @CurrentAccount() account: SignedInAccount,
+    @Query({ schema: findPracticeSchema }) wanted: FindPractice,
+  ): Promise<PracticeList> {
+    return this.lists.list(account.id, wanted);
+  }
 
   @Post()
   @Allow('signed-in')
@@ -31,7 +49,7 @@ export class PracticeController {
     @CurrentAccount() account: SignedInAccount,
     @Body({ schema: startPracticeSchema }) input: StartPractice,
   ): Promise<PracticeView> {
-    return this.practice.start(account.id, input.question);
+    return this.practice.start(account.id, input);
   }
 
   @Post(':id/hints')

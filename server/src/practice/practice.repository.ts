@@ -17,7 +17,7 @@ export class PracticeRepository {
 
   async add(attempt: PracticeAttempt & { startedAt: Date }): Promise<void> {
     const { kept, ...rest } = attempt;
-    await this.attempts.create({ ...rest, drawn: kept });
+    await this.attempts.create({ ...rest, drawn: kept, stepsLeft: kept.faded?.left ?? null });
   }
 
   async findOwned(id: string, accountId: string): Promise<PracticeAttempt | null> {

@@ -1,17 +1,24 @@
-import { hintFor, markQuestion } from '@ferrule/assessments';
+import {
+  fadeQuestion,
+  fadingLevels,
+  hintFor,
+  markFaded,
+  markQuestion,
+  type CompiledQuestion,
+} from '@ferrule/assessments';
 import { Injectable } from '@nestjs/common';
 import { randomUUID } from 'node:crypto';
 import { Clock } from '../clock/clock.ts';
-import { NotFound } from '../problems/common.errors.ts';
+import { InvalidRequest, NotFound } from '../problems/common.errors.ts';
 import { AnswerUnclear } from '../questions/answers.errors.ts';
 import { MarkedViewsService } from '../questions/marked-views.service.ts';
 import type { Answers } from '../questions/question-view.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
 import { requireKnownPart, requireKnownParts, unclearParts } from '../questions/read-answers.ts';
-import type { KeptDraw, PracticeAttempt } from './practice-attempt.ts';
+import { askedOf, type KeptDraw, type PracticeAttempt } from './practice-attempt.ts';
 import { PracticeAnswered } from './practice.errors.ts';
 import { PracticeRepository } from './practice.repository.ts';
-import type { Hint, PracticeMarked, PracticeView } from './practice.schemas.ts';
+import type { Hint, PracticeMarked, PracticeView, StartPractice } from './practice.schemas.ts';
 
 /** One question in the middle of a sheet, to be tried as often as one likes. */
 @Injectable()
@@ -24,20 +31,24 @@ export class PracticeService {
   ) {}
 
   /** @throws {NotFound} for a question of the paper pool too: it must look as if there were none. */
-  async start(accountId: string, slug: string): Promise<PracticeView> {
+  async start(accountId: string, { question: slug, left }: StartPractice): Promise<PracticeView> {
     const published = await this.questions.practice(slug);
+    const levels = fadingLevels(published.question);
+    const whole = Math.max(...levels);
+    if (left !== undefined) requireLevel(left, whole);
     const id = randomUUID();
     const { revisionId, drawn, view } = this.questions.drawFor(`practice:${id}`, published);
+    const faded = fadeQuestion(published.question, drawn, left ?? whole);
     await this.repository.add({
       id,
       accountId,
       questionRevisionId: revisionId,
-      kept: { slug, drawn, view },
+      kept: { slug, drawn, view, ...(faded.left < whole ? { faded } : {}) },
       startedAt: this.clock.now(),
       handedInAt: null,
       hints: [],
     });
-    return { id, question: view };
+    return { id, question: view, levels, ...faded };
   }
 
   /** What the person was shown of late, question by question. */
@@ -52,12 +63,12 @@ export class PracticeService {
    */
   async answer(accountId: string, id: string, answers: Answers): Promise<PracticeMarked> {
     const attempt = await this.unmarked(accountId, id);
-    const { drawn, view } = attempt.kept;
-    requireKnownParts(view, answers);
-    const unclear = unclearParts(view, answers);
+    const asked = askedOf(attempt.kept);
+    requireKnownParts(asked, answers);
+    const unclear = unclearParts(asked, answers);
     if (unclear.length > 0) throw new AnswerUnclear(unclear);
     const { question } = await this.questions.byRevision(attempt.questionRevisionId);
-    const marked = markQuestion(question, drawn, answers);
+    const marked = markAttempt(question, attempt.kept, answers);
     const handedInAt = this.clock.now();
     const isKept = await this.repository.keepMarked(id, { answers, marked, handedInAt });
     if (!isKept) throw new PracticeAnswered();
@@ -70,7 +81,7 @@ export class PracticeService {
   /** The formula a part begins with; that it was asked for is kept with the attempt. */
   async hint(accountId: string, id: string, part: string): Promise<Hint> {
     const { kept, questionRevisionId } = await this.unmarked(accountId, id);
-    requireKnownPart(kept.view, part);
+    requireKnownPart(askedOf(kept), part);
     const { question } = await this.questions.byRevision(questionRevisionId);
     const line = hintFor(question, kept.drawn, part);
     if (line && !(await this.repository.keepHint(id, part))) throw new PracticeAnswered();
@@ -83,4 +94,16 @@ export class PracticeService {
     if (attempt.handedInAt) throw new PracticeAnswered();
     return attempt;
   }
+}
+
+/** Of a question with steps worked beforehand only the parts that were left are marked. */
+const markAttempt = (question: CompiledQuestion, { drawn, faded }: KeptDraw, answers: Answers) =>
+  faded
+    ? markFaded(question, drawn, { left: faded.left, answers })
+    : markQuestion(question, drawn, answers);
+
+function requireLevel(left: number, most: number): void {
+  if (left <= most) return;
+  const detail = `${left} steps cannot be left: this question has ${most}. Leave 0 to ${most}.`;
+  throw new InvalidRequest([{ pointer: '#/left', detail }]);
 }

@@ -11,10 +11,7 @@ export function requireKnownParts(question: QuestionView, answers: Answers): voi
   const strange = Object.keys(answers).filter((part) => !known.has(part));
   if (strange.length === 0) return;
   throw new InvalidRequest(
-    strange.map((part) => ({
-      pointer: `#/answers/${part}`,
-      detail: `There is no part ${part}; the parts are ${[...known].join(', ')}.`,
-    })),
+    strange.map((part) => ({ pointer: `#/answers/${part}`, detail: noSuchPart(part, [...known]) })),
   );
 }
 
@@ -22,9 +19,13 @@ export function requireKnownParts(question: QuestionView, answers: Answers): voi
 export function requireKnownPart({ parts }: QuestionView, part: string): void {
   const known = parts.map(({ id }) => id);
   if (known.includes(part)) return;
-  const detail = `There is no part ${part}; the parts are ${known.join(', ')}.`;
-  throw new InvalidRequest([{ pointer: '#/part', detail }]);
+  throw new InvalidRequest([{ pointer: '#/part', detail: noSuchPart(part, known) }]);
 }
+
+const noSuchPart = (part: string, asked: readonly string[]) =>
+  asked.length === 0
+    ? `Part ${part} is not asked: the question is worked in full.`
+    : `There is no part ${part} to answer; the parts are ${asked.join(', ')}.`;
 
 /** How each part's answer is understood. It is compared with nothing. */
 export function readAnswers(question: QuestionView, answers: Answers): Record<string, Reading> {

@@ -916,6 +916,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/practice/questions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Practice_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/practice": {
         parameters: {
             query?: never;
@@ -3890,6 +3906,53 @@ export interface operations {
             };
         };
     };
+    Practice_list: {
+        parameters: {
+            query?: {
+                subject?: "CL" | "SI" | "CO" | "VD" | "RD" | "PR" | "TE" | "BA" | "CC" | "DA" | "SO" | "MF";
+                level?: "recall" | "apply" | "reason";
+                lesson?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @enum {string} */
+                        profile: "metric" | "awg";
+                        questions: {
+                            slug: string;
+                            title: string;
+                            subject: {
+                                code: string;
+                                name: string;
+                            };
+                            /** @enum {string} */
+                            level: "recall" | "apply" | "reason";
+                            lesson: string;
+                            marks: number;
+                            kinds: ("quantity" | "choice" | "choices" | "order" | "match")[];
+                            readsCurve: boolean;
+                            /** @enum {string} */
+                            profile: "metric" | "awg";
+                            tries: number;
+                            best: {
+                                percent: number;
+                                on: string;
+                            } | null;
+                        }[];
+                    };
+                };
+            };
+        };
+    };
     Practice_start: {
         parameters: {
             query?: never;
@@ -3901,6 +3964,7 @@ export interface operations {
             content: {
                 "application/json": {
                     question: string;
+                    left?: number;
                 };
             };
         };
@@ -3913,6 +3977,13 @@ export interface operations {
                     "application/json": {
                         id: string;
                         question: components["schemas"]["QuestionView"];
+                        levels: number[];
+                        left: number;
+                        shown: {
+                            part: string;
+                            lines: components["schemas"]["Line"][];
+                        }[];
+                        asked: string[];
                     };
                 };
             };

@@ -18,6 +18,9 @@ export class PracticeAttemptModel extends Model {
   @Column({ type: DataType.ARRAY(DataType.TEXT), defaultValue: [] })
   declare hints: string[];
 
+  @Column({ type: DataType.INTEGER })
+  declare stepsLeft: number | null;
+
   @Column({ type: DataType.DATE })
   declare startedAt: Date;
 
