@@ -4,8 +4,11 @@ import { cacheOf, type LoaderArgs, requireSession, sessionQuery } from '../api/s
 import { ownCertificatesQuery } from '../features/certificates/holder-queries.ts';
 import { courseQuery, type CourseMapView } from '../features/course/queries.ts';
 import { paperQuery } from '../features/papers/queries.ts';
+import { NextPractice } from '../features/record/next-practice.tsx';
+import { subjectRecordsQuery } from '../features/record/queries.ts';
 import { RecordCertificates } from '../features/record/record-certificates.tsx';
 import { RecordSittings } from '../features/record/record-sittings.tsx';
+import { RecordSubjects } from '../features/record/record-subjects.tsx';
 import { RecordWorksheets } from '../features/record/record-worksheets.tsx';
 import { sayDate } from '../ui/dates.ts';
 import { PageTitle } from '../ui/page-title.tsx';
@@ -35,6 +38,7 @@ export function Component() {
           <h2>Certificates</h2>
           <Certificates />
         </section>
+        <Subjects />
         <div className="columns two">
           <section>
             <h2>Paper</h2>
@@ -88,6 +92,43 @@ function Certificates() {
   if (list.isPending) return <RuledLines what="your certificates" />;
   if (list.isError) return <FailedState error={list.error} retry={() => void list.refetch()} />;
   return <RecordCertificates certificates={list.data.certificates} />;
+}
+
+/** What has been shown, and what is worth practising next. */
+function Subjects() {
+  const records = useQuery(subjectRecordsQuery);
+  if (records.isPending) return <Waiting what="what you have shown" />;
+  if (records.isError) {
+    return (
+      <div className="section">
+        <FailedState error={records.error} retry={() => void records.refetch()} />
+      </div>
+    );
+  }
+  return (
+    <div className="columns record-shown">
+      <section>
+        <h2>What to practise next</h2>
+        <NextPractice next={records.data.next} />
+      </section>
+      <section>
+        <h2>What you have shown</h2>
+        <p className="fine">
+          A question counts as shown when it is done whole, without a hint, for at least four fifths
+          of its marks, on a worksheet or in practice.
+        </p>
+        <RecordSubjects subjects={records.data.subjects} />
+      </section>
+    </div>
+  );
+}
+
+function Waiting({ what }: { what: string }) {
+  return (
+    <div className="section">
+      <RuledLines what={what} />
+    </div>
+  );
 }
 
 function Sittings({ slug }: { slug: string }) {

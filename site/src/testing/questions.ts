@@ -1,8 +1,4 @@
-import { type Answer } from '../api/views.ts';
-
-type Item = Answer<'Worksheets_open'>['items'][number];
-type QuestionView = Item['question'];
-type MarkedQuestionView = NonNullable<Item['marked']>;
+import { type MarkedQuestionView, type QuestionView } from '../ui/question/views.ts';
 
 /** Two parts: a resistance to work out, a cable to choose. */
 export function makeQuestion(more: Partial<QuestionView> = {}): QuestionView {

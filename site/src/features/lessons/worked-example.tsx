@@ -5,6 +5,7 @@ import { CurveReader } from '../../ui/question/curve-reader.tsx';
 import { GivenTable } from '../../ui/question/given-table.tsx';
 import { InlineMarkdown } from '../../ui/question/inline-markdown.tsx';
 import { Schematic } from '../../ui/question/schematic.tsx';
+import { TableExtract } from '../../ui/question/table-extract.tsx';
 import { LessonContext } from './lesson-context.ts';
 
 interface WorkedExampleProps {
@@ -23,10 +24,13 @@ export function WorkedExample({ question, seed }: WorkedExampleProps) {
         <h3>{worked.title}</h3>
         <Markdown>{worked.lead}</Markdown>
       </header>
-      {(worked.given.length > 0 || worked.diagram) && (
+      {(worked.given.length > 0 || worked.diagram || worked.tables.length > 0) && (
         <div className="worked-given">
           {worked.given.length > 0 && <GivenTable given={worked.given} />}
           {worked.diagram && <Schematic diagram={worked.diagram} />}
+          {worked.tables.map((table) => (
+            <TableExtract key={table.caption} table={table} />
+          ))}
         </div>
       )}
       {worked.curve && <CurveReader curve={worked.curve} />}

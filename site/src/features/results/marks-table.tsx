@@ -1,5 +1,5 @@
 import { upperFirst } from '../../ui/words.ts';
-import { MarkCells } from './mark-cells.tsx';
+import { MarkCells } from '../../ui/mark-cells.tsx';
 import { type ResultView } from './queries.ts';
 import { sayWhereLost } from './say-marks.ts';
 
@@ -27,7 +27,7 @@ export function MarksTable({ result }: { result: ResultView }) {
             <tr key={subject}>
               <th scope="row">{upperFirst(name)}</th>
               <td className="cells">
-                <MarkCells marks={marks} outOf={outOf} />
+                <MarkCells gained={marks} outOf={outOf} label={`${marks} of ${outOf} marks`} />
               </td>
               <td className="number got">{marks}</td>
               <td className="number of">{outOf}</td>

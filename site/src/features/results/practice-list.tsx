@@ -30,10 +30,14 @@ export function PracticeList({ result }: { result: ResultView }) {
             <span>
               {upperFirst(name)}: {marks} of {outOf}.{' '}
               {practise.worksheet && (
-                <Link to={`/worksheets/${practise.worksheet}`}>
-                  Worksheet {practise.worksheet}, fresh figures
-                </Link>
+                <>
+                  <Link to={`/worksheets/${practise.worksheet}`}>
+                    Worksheet {practise.worksheet}, fresh figures
+                  </Link>
+                  {'; '}
+                </>
               )}
+              <Link to={`/practice?subject=${subject}`}>practise it step by step</Link>
             </span>
           </li>
         ))}

@@ -94,7 +94,7 @@ function SeveralEntry({ id, part, answer, readOnly = false, onChange, onLeave }:
     <div onBlur={leave}>
       {part.kind === 'choices' && <ChooseAll {...shared} />}
       {part.kind === 'order' && <OrderSteps {...shared} />}
-      {part.kind === 'match' && <MatchPairs {...shared} rows={part.rows ?? []} />}
+      {part.kind === 'match' && <MatchPairs {...shared} rows={part.rows} />}
     </div>
   );
 }

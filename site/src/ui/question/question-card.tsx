@@ -86,7 +86,7 @@ export function QuestionFacts({ question }: { question: QuestionView }) {
       )}
       {question.given.length > 0 && <GivenTable given={question.given} />}
       {question.diagram && <Schematic diagram={question.diagram} />}
-      {question.tables?.map((table) => (
+      {question.tables.map((table) => (
         <TableExtract key={table.caption} table={table} />
       ))}
       {question.cautions.map((caution) => (

@@ -1,4 +1,5 @@
 import { ScrollTable } from '../scroll-table.tsx';
+import './table-extract.css';
 import { type TableView } from './views.ts';
 
 const mostBesideAnother = 4;

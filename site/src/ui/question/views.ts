@@ -1,44 +1,17 @@
 import { type Answer } from '../../api/views.ts';
 
 type OpenedItem = Answer<'Worksheets_open'>['items'][number];
-type StoredQuestion = OpenedItem['question'];
-type StoredMarked = NonNullable<OpenedItem['marked']>;
 
-export type GivenView = StoredQuestion['given'][number];
-export type DiagramView = NonNullable<StoredQuestion['diagram']>;
-export type CurveView = NonNullable<StoredQuestion['curve']> & {
-  batteryVolts?: number[];
-  inputVolts?: number[];
-  batteryAmps?: number[];
-};
-export interface TableView {
-  caption: string;
-  source: string;
-  columns: { label: string; unit: string }[];
-  rows: string[][];
-}
-export type PartView = Omit<StoredQuestion['parts'][number], 'kind'> & {
-  kind: 'quantity' | 'choice' | 'choices' | 'order' | 'match';
-  rows?: { id: string; text: string }[];
-};
-export type QuestionView = Omit<StoredQuestion, 'parts' | 'curve'> & {
-  parts: PartView[];
-  tables?: TableView[];
-  curve: CurveView | null;
-};
-export type MarkedPartView = StoredMarked['parts'][number] & {
-  wrongStep?: { symbol: string; says: string } | null;
-  read?: {
-    sheet: string;
-    title: string | null;
-    heading: string | null;
-    paragraph: number | null;
-    issued: boolean;
-  } | null;
-};
-export type MarkedQuestionView = Omit<StoredMarked, 'parts'> & { parts: MarkedPartView[] };
-export type RawAnswer = OpenedItem['answers'][string] & { options?: string[] };
-export type Answers = Record<string, RawAnswer>;
+export type QuestionView = OpenedItem['question'];
+export type PartView = QuestionView['parts'][number];
+export type GivenView = QuestionView['given'][number];
+export type TableView = QuestionView['tables'][number];
+export type DiagramView = NonNullable<QuestionView['diagram']>;
+export type CurveView = NonNullable<QuestionView['curve']>;
+export type MarkedQuestionView = NonNullable<OpenedItem['marked']>;
+export type MarkedPartView = MarkedQuestionView['parts'][number];
+export type Answers = OpenedItem['answers'];
+export type RawAnswer = Answers[string];
 
 export const blankAnswer: RawAnswer = { text: '', unit: null, option: null, working: '' };
 
