@@ -22,11 +22,34 @@ const TAIL_HOLD_H = 5 / 60;
 /** How long a hot charger's limit slides where the sheet does not say. */
 const SLIDE_H = 0.5;
 
+/** More runs than this are not kept: each is some hundred kilobytes. */
+const MOST_KEPT = 1000;
+const keptRuns = new WeakMap<CurvePlan, Map<string, ChargeLog>>();
+
+/**
+ * Keeps every run of a plan until told to forget them: drawn ten thousand times, a curve meets the
+ * same settings over and over.
+ */
+export function keepRuns(plan: CurvePlan): { forget: () => void } {
+  keptRuns.set(plan, new Map());
+  return { forget: () => keptRuns.delete(plan) };
+}
+
 /** Runs the charger of a plan on drawn values. */
 export function runCurve(plan: CurvePlan, values: Values): ChargeLog {
+  const run = runOf(plan, values);
+  const kept = keptRuns.get(plan);
+  if (!kept) return logCharge(run);
+  const settings = JSON.stringify(run);
+  const log = kept.get(settings) ?? logCharge(run);
+  if (kept.size < MOST_KEPT) kept.set(settings, log);
+  return log;
+}
+
+function runOf(plan: CurvePlan, values: Values): ChargeRun {
   const read = readerOf(values);
   const { load, vehicle, solar, hours } = plan;
-  return logCharge({
+  return {
     battery: batteryOf(plan, read),
     charge: read.si(plan.battery.charge),
     charger: chargerOf(plan, read),
@@ -39,7 +62,7 @@ export function runCurve(plan: CurvePlan, values: Values): ChargeLog {
     ...(solar && { solar: solarOf(solar, read) }),
     hours,
     stepS: Math.max(1, Math.min(LONGEST_STEP_S, (hours * SECONDS_PER_HOUR) / LEAST_STEPS)),
-  } satisfies ChargeRun);
+  };
 }
 
 interface Reader {
