@@ -30,7 +30,8 @@ class DrawFailed extends Error {
   }
 }
 
-const MOST_TRIES = 400;
+/** Sets of values drawn before a draw is given up. */
+export const MOST_TRIES = 400;
 
 /**
  * Draws a question: values, keys, tolerances, order of options. The same seed gives the same draw.

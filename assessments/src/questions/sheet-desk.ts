@@ -13,15 +13,36 @@ export interface Desk {
   dimensions: Map<string, Dimension>;
 }
 
+/** A fault in a field below the one that is being checked. */
+class FieldFault extends Error {
+  readonly field: PropertyKey[];
+
+  constructor(field: PropertyKey[], message: string) {
+    super(message);
+    this.field = field;
+  }
+}
+
+/** Runs one check on a field below the one that is being checked: its line is told, not the whole's. */
+export function inField<T>(field: PropertyKey[], check: () => T): T {
+  try {
+    return check();
+  } catch (error) {
+    const below = error instanceof FieldFault ? error.field : [];
+    throw new FieldFault([...field, ...below], error instanceof Error ? error.message : '');
+  }
+}
+
 /** Runs one check; what it throws becomes an issue at the field's line. */
 export function attempt<T>(desk: Desk, field: PropertyKey[], check: () => T): T[] {
   try {
     return [check()];
   } catch (error) {
     const message = error instanceof Error ? error.message : String(error);
+    const whole = error instanceof FieldFault ? [...field, ...error.field] : field;
     desk.issues.push({
-      line: desk.file.lineOf(field),
-      message: `${field.join(' › ')}: ${message}`,
+      line: desk.file.lineOf(whole),
+      message: `${whole.join(' › ')}: ${message}`,
     });
     return [];
   }

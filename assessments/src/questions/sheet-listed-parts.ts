@@ -6,6 +6,7 @@ import {
   type OrderPart,
 } from './compiled.ts';
 import { type Expr } from './expression.ts';
+import { inField } from './sheet-desk.ts';
 import { type SheetAsk } from './sheet-schema.ts';
 
 type SheetOptions = Extract<SheetAsk, { choose: unknown }>['choose'];
@@ -16,15 +17,24 @@ export interface OptionScope {
 }
 
 /** Options to choose from, each that can be wrong with its reason. */
-export function readOptions(options: SheetOptions, scope: OptionScope): Option[] {
-  requireUnlike(options.map(({ is }) => is));
-  return options.map((option) => {
-    const right = typeof option.right === 'string' ? scope.condition(option.right) : option.right;
-    if (right !== true && option.say === undefined) {
-      throw new Error(`Option "${option.is}" can be wrong and has no say: write why it is.`);
-    }
-    return { text: option.is, right, say: option.say ?? null };
-  });
+export function readOptions(
+  way: 'choose' | 'choose all',
+  options: SheetOptions,
+  scope: OptionScope,
+): Option[] {
+  return options.map((option, index) =>
+    inField([way, index], () => {
+      requireUnlike(
+        option.is,
+        options.slice(0, index).map(({ is }) => is),
+      );
+      const right = typeof option.right === 'string' ? scope.condition(option.right) : option.right;
+      if (right !== true && option.say === undefined) {
+        throw new Error(`Option "${option.is}" can be wrong and has no say: write why it is.`);
+      }
+      return { text: option.is, right, say: option.say ?? null };
+    }),
+  );
 }
 
 /**
@@ -33,7 +43,7 @@ export function readOptions(options: SheetOptions, scope: OptionScope): Option[]
  * @throws {Error} when all or none are right whatever is drawn.
  */
 export function readChoices(options: SheetOptions, scope: OptionScope): BarePart<ChoicesPart> {
-  const read = readOptions(options, scope);
+  const read = readOptions('choose all', options, scope);
   const isAll = (right: boolean): boolean => read.every((option) => option.right === right);
   if (isAll(false)) throw new Error('No option is right; set right: true on those that apply.');
   if (isAll(true)) throw new Error('Every option is right; add one that does not apply.');
@@ -47,15 +57,21 @@ export function readChoices(options: SheetOptions, scope: OptionScope): BarePart
  */
 export function readOrder(ask: Extract<SheetAsk, { order: unknown }>): BarePart<OrderPart> {
   const names = Object.keys(ask.order);
-  requireUnlike(Object.values(ask.order));
+  const texts = Object.values(ask.order);
+  names.forEach((name, index) =>
+    inField(['order', name], () => requireUnlike(texts[index] ?? '', texts.slice(0, index))),
+  );
   const placeOf = (name: string): number => placeIn(names, name, 'step of the order');
-  const misplaced = ask.misplaced.map(({ first, then, say }) => {
-    if (placeOf(first) > placeOf(then)) return { first: placeOf(first), then: placeOf(then), say };
-    throw new Error(
-      `${first} before ${then} is the right order; write words for the wrong one, ${then} before ${first}.`,
-    );
-  });
-  return { kind: 'order', items: Object.values(ask.order), misplaced };
+  const misplaced = ask.misplaced.map(({ first, then, say }, index) =>
+    inField(['misplaced', index], () => {
+      const pair = { first: placeOf(first), then: placeOf(then), say };
+      if (pair.first > pair.then) return pair;
+      throw new Error(
+        `${first} before ${then} is the right order; write words for the wrong one, ${then} before ${first}.`,
+      );
+    }),
+  );
+  return { kind: 'order', items: texts, misplaced };
 }
 
 /**
@@ -67,16 +83,21 @@ export function readMatch(ask: Extract<SheetAsk, { match: unknown }>): BarePart<
   const names = Object.keys(ask.match);
   const options = [...new Set([...Object.values(ask.match), ...ask.also])];
   if (options.length < 2) throw new Error('Every item has the same text; one way fits all.');
-  const spare = ask.also.find((text) => Object.values(ask.match).includes(text));
-  if (spare !== undefined)
-    throw new Error(`"${spare}" under also fits a pair; leave it out there.`);
+  ask.also.forEach((text, index) =>
+    inField(['also', index], () => {
+      if (!Object.values(ask.match).includes(text)) return;
+      throw new Error(`"${text}" under also fits a pair; leave it out there.`);
+    }),
+  );
   const rows = names.map((text) => ({ text, right: options.indexOf(ask.match[text] ?? '') }));
-  const mixed = ask.mixed.map(({ is, with: other, say }) => {
-    const row = placeIn(names, is, 'item to match');
-    const option = placeIn(options, other, 'text to match with');
-    if (rows[row]?.right !== option) return { row, option, say };
-    throw new Error(`"${is}" with "${other}" is a right pair; write words for a wrong one.`);
-  });
+  const mixed = ask.mixed.map(({ is, with: other, say }, index) =>
+    inField(['mixed', index], () => {
+      const row = placeIn(names, is, 'item to match');
+      const option = placeIn(options, other, 'text to match with');
+      if (rows[row]?.right !== option) return { row, option, say };
+      throw new Error(`"${is}" with "${other}" is a right pair; write words for a wrong one.`);
+    }),
+  );
   return { kind: 'match', rows, options, mixed };
 }
 
@@ -86,7 +107,6 @@ function placeIn(names: readonly string[], name: string, what: string): number {
   throw new Error(`"${name}" is no ${what}; use one of ${names.join(', ')}.`);
 }
 
-function requireUnlike(texts: readonly string[]): void {
-  const twice = texts.find((text, index) => texts.indexOf(text) !== index);
-  if (twice !== undefined) throw new Error(`"${twice}" stands there twice; tell them apart.`);
+function requireUnlike(text: string, before: readonly string[]): void {
+  if (before.includes(text)) throw new Error(`"${text}" stands there twice; tell them apart.`);
 }

@@ -115,7 +115,7 @@ function readChoice(
   ask: Extract<SheetAsk, { choose: unknown }>,
   scope: PartScope,
 ): BarePart<ChoicePart> {
-  const options = readOptions(ask.choose, scope);
+  const options = readOptions('choose', ask.choose, scope);
   const plain = options.filter((option) => option.right === true).length;
   const depends = options.some((option) => typeof option.right !== 'boolean');
   if (!depends && plain !== 1) throw new Error(`${plain} options are right; exactly one must be.`);

@@ -1,7 +1,7 @@
 import { readAuthorFigure } from './author-figure.ts';
 import { type Table } from './compiled.ts';
 import { type Expr } from './expression.ts';
-import { attempt, type Desk } from './sheet-desk.ts';
+import { attempt, type Desk, inField } from './sheet-desk.ts';
 import { type Sheet } from './sheet-schema.ts';
 import { parseUnit } from './unit-expression.ts';
 import { type Dimension, sameDimension, toSi, type Unit } from './units.ts';
@@ -20,7 +20,7 @@ function readTable(desk: Desk, name: string, entry: SheetTable): Table {
   const columns = Object.entries(entry.columns).map(([column, { is, unit }]) => ({
     name: column,
     label: is,
-    unit: parseUnit(unit),
+    unit: inField(['columns', column], () => parseUnit(unit)),
   }));
   const rows = entry.rows.flatMap((cells, index) =>
     attempt(desk, ['tables', name, 'rows', index], () => {

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { workingTimeMs } from '../../test/working-time.ts';
 import { SheetInvalid } from '../sheets/errors.ts';
 import { parseQuestion } from './sheet.ts';
 
@@ -119,9 +120,57 @@ describe('a question sheet', () => {
     expect(() => parseQuestion(source, 'bank/test.md')).toThrow(/^bank\/test\.md:16: /);
   });
 
-  it('refuses a sheet no draw of which can be solved', () => {
-    const source = SHEET.replace('ask:', 'require:\n  - load > 2 * load\nask:');
-    expect(issuesOf(source)[0]?.message).toContain('none of 400 draws meets its conditions');
+  it('refuses a sheet no draw of which can be kept, at the condition that rejects', () => {
+    const source = SHEET.replace(
+      'ask:',
+      'require:\n  - load > path / path * load / 2\n  - load > 2 * load\nask:',
+    );
+    expect(issuesOf(source)).toEqual([
+      {
+        line: 21,
+        message:
+          'require › 1: 0 % of the drawn values meet the conditions, and 0 % this one alone; loosen it or narrow the given values.',
+      },
+    ]);
+  });
+
+  it('refuses a sheet that keeps fewer than one draw in ten', () => {
+    const limit = 'limit: { is: Limit, value: 15.5 A, shown: false }\nsteps:';
+    const wide = SHEET.replace('to: 16 A, step: 1 A', 'to: 16 A, step: 0.5 A');
+    const source = wide
+      .replace('steps:', `  ${limit}`)
+      .replace('ask:', 'require:\n  - load > limit\nask:');
+    expect(issuesOf(source)[0]).toMatchObject({ line: 21 });
+    expect(issuesOf(source.replace('15.5 A', '10 A'))).toEqual([]);
+  });
+
+  it('refuses a sheet that cannot be worked on one value of its list', () => {
+    const source = SHEET.replace('from: 8 A, to: 16 A, step: 1 A', 'one of: [8 A, 9 A, 10 A, 0 A]');
+    const divided = source.replace('load * path', 'path * load * load / load');
+    expect(issuesOf(divided)[0]?.message).toContain('Step fall comes to no finite number');
+  });
+
+  it.each([
+    'load * path * 10 ^ 9999',
+    'load * path * (9 ^ 9 ^ 9 ^ 9)',
+    'load ^ 1e308 * path',
+    'load ^ -9e99',
+    'lοad * path',
+    'load * pa\u200bth',
+    'load * path × 2',
+    '\u202eload * path',
+    'load\u00a0* path',
+    'load * path * １',
+    'constructor',
+    '__proto__ * path',
+    'load * path * [1][0]',
+    'load * path * (1:3)',
+    'load * path + 0 * toString()',
+  ])('refuses the hostile sum %j within 50 ms', (sum) => {
+    const source = SHEET.replace('is: load * path', `is: ${JSON.stringify(sum)}`);
+    let issues: unknown[] = [];
+    expect(workingTimeMs(() => (issues = issuesOf(source)))).toBeLessThan(50);
+    expect(issues).not.toEqual([]);
   });
 
   it('refuses a missing end of the front matter, broken YAML, doubled keys and aliases', () => {

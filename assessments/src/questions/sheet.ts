@@ -1,7 +1,6 @@
 import { openSheet } from '../sheets/sheet-file.ts';
 import { type Compiled, FORMAT_VERSION, type Given, type Part, type Step } from './compiled.ts';
 import { planCurve } from './curve-plan.ts';
-import { drawQuestion } from './draw.ts';
 import { type Expr } from './expression.ts';
 import { misnamedIn } from './placeholders.ts';
 import { attempt, type Desk, stopIfWrong } from './sheet-desk.ts';
@@ -10,14 +9,12 @@ import { type Sheet, sheetSchema } from './sheet-schema.ts';
 import { readSlip } from './sheet-slips.ts';
 import { readTables } from './sheet-tables.ts';
 import { conditionIn, readGivens, readSteps } from './sheet-steps.ts';
+import { tryDraws } from './trial-draws.ts';
 import { type CompiledQuestion, type DiagramView } from './types.ts';
-
-/** Draws tried when a sheet is published; enough to find a range that cannot be solved. */
-const TRIAL_DRAWS = 12;
 
 /**
  * Reads a question sheet, checks it whole and turns it into the form that is kept:
- * schema, names, units, bounds, and a dozen trial draws.
+ * schema, names, units, bounds, and a run of trial draws.
  *
  * @throws {SheetInvalid} naming the file and the line of everything that is wrong.
  */
@@ -58,7 +55,7 @@ export function parseQuestion(source: string, path: string): CompiledQuestion {
     curve,
     read: desk.sheet.read ?? null,
   };
-  attempt(desk, ['given'], () => tryDraws(question));
+  tryDraws(desk, question);
   stopIfWrong(desk);
   return question;
 }
@@ -127,10 +124,4 @@ function diagramOf(diagram: Sheet['diagram']): DiagramView | null {
     labels: { source, fuse, load, loadNote: diagram['load note'], cable, length },
     load: draws,
   };
-}
-
-function tryDraws(question: Compiled): void {
-  for (let trial = 1; trial <= TRIAL_DRAWS; trial += 1) {
-    drawQuestion(question, trial.toString(16).padStart(64, '0'));
-  }
 }

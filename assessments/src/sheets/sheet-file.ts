@@ -1,4 +1,4 @@
-import { isNode, LineCounter, parseDocument, type Document } from 'yaml';
+import { isNode, LineCounter, parseDocument, type Document, type YAMLError } from 'yaml';
 import { type z } from 'zod';
 import { SheetInvalid } from './errors.ts';
 
@@ -24,12 +24,11 @@ export function openSheet<T>(source: string, path: string, schema: z.ZodType<T>)
   const { yaml, text, textLine } = split(source, path);
   const lines = new LineCounter();
   const document = parseDocument(yaml, { lineCounter: lines, prettyErrors: false });
-  const problems = [...document.errors, ...document.warnings];
-  if (problems.length > 0) {
-    throw new SheetInvalid(
-      path,
-      problems.map((e) => ({ line: lines.linePos(e.pos[0]).line + 1, message: e.message })),
-    );
+  const [problem] = [...document.errors, ...document.warnings];
+  // What follows the first is its echo as a rule.
+  if (problem) {
+    const line = lines.linePos(problem.pos[0]).line + 1;
+    throw new SheetInvalid(path, [{ line, message: yamlWords(problem) }]);
   }
   const lineOf = (field: readonly PropertyKey[]): number => lineIn(document, lines, field);
   const checked = schema.safeParse(asPlain(document, path));
@@ -44,6 +43,11 @@ export function openSheet<T>(source: string, path: string, schema: z.ZodType<T>)
     );
   }
   return { front: checked.data, ...sectionsOf(text, textLine), introLine: textLine, lineOf };
+}
+
+function yamlWords({ code, message }: YAMLError): string {
+  if (code === 'DUPLICATE_KEY') return message;
+  return `${message}; put a text that holds a comma inside { }, a brace or ": " in quotes.`;
 }
 
 interface FieldIssue {
