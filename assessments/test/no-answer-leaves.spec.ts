@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { type Drawn } from '../src/questions/compiled.ts';
+import { type Drawn, type Part } from '../src/questions/compiled.ts';
 import { drawQuestion } from '../src/questions/draw.ts';
 import { presentQuestion } from '../src/questions/present.ts';
 import { parseQuestion } from '../src/questions/sheet.ts';
@@ -14,16 +14,25 @@ subject: VD
 level: apply
 pool: paper
 lesson: "3.4"
+read: planted-heading
 profile: metric
 language: en
 author: Odile Marchetti
 checked by: Ruaridh Nakamura
 sources: [planted-source]
+tables:
+  plantedTable:
+    caption: Pull
+    source: made up
+    columns: { plantedGauge: { is: Gauge, unit: AWG }, plantedForce: { is: Pull, unit: N } }
+    rows: [[16, 67], [14, 133]]
 given:
+  gauge: { is: Gauge, symbol: n, column: plantedTable.plantedGauge }
   load: { is: Load, symbol: I, from: 8 A, to: 16 A, step: 1 A }
   secret: { is: planted-hidden-label, value: 0.31337 Ω, shown: false }
 steps:
   plantedStep: { symbol: U_x, unit: V, is: load * secret }
+  plantedLook: { symbol: F, unit: N, says: planted-says, look up: { table: plantedTable, column: plantedForce, where: plantedGauge, is: gauge } }
   plantedSize: { symbol: A_x, unit: mm², is: "load > 2 * load ? nextCable(plantedArea) : nextCable(plantedArea)" }
 require:
   - plantedStep > plantedLeast
@@ -41,6 +50,25 @@ ask:
       - { is: The first, right: true }
       - { is: The second, say: planted-say-of-option }
     marks: 1
+    read: planted-heading-of-part
+  d:
+    choose all:
+      - { is: Any, right: true, say: planted-say-of-right }
+      - { is: Other, right: load > load, say: planted-say-of-choice }
+    marks: 1
+  e:
+    order: { plantedFirst: One, plantedSecond: Two, plantedThird: Three }
+    misplaced:
+      - { first: plantedSecond, then: plantedFirst, say: planted-misplaced }
+      - { first: plantedThird, then: plantedFirst, say: planted-misplaced }
+    marks: 1
+  f:
+    match: { left: right, top: bottom }
+    mixed:
+      - { is: left, with: bottom, say: planted-mixed }
+      - { is: top, with: right, say: planted-mixed }
+    marks: 1
+  g: { find: plantedLook, units: [N], within: exact, marks: 1 }
 slips:
   - is: planted-slip-sentence
     say: planted-slip-say
@@ -62,12 +90,37 @@ Choose it.
 ## c
 
 Which?
+
+## d
+
+All?
+
+## e
+
+Order?
+
+## f
+
+Match?
+
+## g
+
+Look up?
 `.replace(
   'steps:',
   `  plantedArea: { is: planted-area, value: 3.3 mm², shown: false }
   plantedLeast: { is: planted-least, value: 0.0123 V, shown: false }
 steps:`,
 );
+
+/** Words of a part that stand beside a wrong answer, and nowhere before. */
+function wordsKept(part: Part): string[] {
+  const { because, read } = part;
+  const own = [because, read ?? ''].filter((text) => text !== '');
+  if (part.kind === 'order') return [...own, ...part.misplaced.map(({ say }) => say)];
+  if (part.kind === 'match') return [...own, ...part.mixed.map(({ say }) => say)];
+  return 'options' in part ? [...own, ...part.options.flatMap(({ say }) => say ?? [])] : own;
+}
 
 /** Every string, number and key anywhere in a value. */
 function everythingIn(value: unknown): string[] {
@@ -99,13 +152,19 @@ describe('what leaves before marking', () => {
   it('names the fields it sends, and no others', () => {
     expect(Object.keys(view).sort()).toEqual([
       ...['aids', 'body', 'cautions', 'curve', 'diagram', 'given', 'lead'],
-      ...['marks', 'parts', 'profile', 'subject', 'title'],
+      ...['marks', 'parts', 'profile', 'subject', 'tables', 'title'],
     ]);
     for (const part of view.parts) {
       expect(Object.keys(part).sort()).toEqual([
-        ...['id', 'kind', 'layout', 'marks', 'options', 'prompt', 'rounding', 'symbol', 'units'],
+        ...['id', 'kind', 'layout', 'marks', 'options', 'prompt', 'rounding', 'rows', 'symbol'],
+        'units',
       ]);
-      for (const option of part.options) expect(Object.keys(option)).toEqual(['id', 'text']);
+      for (const option of [...part.options, ...part.rows])
+        expect(Object.keys(option)).toEqual(['id', 'text']);
+    }
+    for (const table of view.tables) {
+      expect(Object.keys(table).sort()).toEqual(['caption', 'columns', 'rows', 'source']);
+      for (const column of table.columns) expect(Object.keys(column)).toEqual(['label', 'unit']);
     }
     for (const given of view.given) {
       expect(Object.keys(given).sort()).toEqual(['label', 'symbol', 'unit', 'value']);
@@ -119,7 +178,7 @@ describe('what leaves before marking', () => {
         const shown = everythingIn(presentQuestion(one, paper)).join('\n');
         const hidden = [
           ...one.slips.flatMap(({ is, say, credit }) => [is, say, credit ?? is]),
-          ...one.parts.map(({ because }) => because).filter((text) => text !== ''),
+          ...one.parts.flatMap(wordsKept),
           ...one.givens.filter(({ isShown }) => !isShown).map(({ label }) => label),
         ];
         expect(hidden.filter((text) => shown.includes(text))).toEqual([]);
