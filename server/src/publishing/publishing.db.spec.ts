@@ -52,6 +52,16 @@ describe('a course that is in order', () => {
   it('has no problems', async () => {
     expect(await problemsOf({})).toEqual([]);
   });
+
+  it('may send readers to a heading, and to a sheet that is not issued yet', async () => {
+    const reading = (heading: string, lesson: string) =>
+      practiceSheet({ id: 'vd-feed', lesson }).replace(
+        '\nprofile:',
+        `\nread: ${heading}\nprofile:`,
+      );
+    expect(await problemsOf({ [FEED]: reading('The run', '1.1') })).toEqual([]);
+    expect(await problemsOf({ [FEED]: reading('Anything', '1.9') })).toEqual([]);
+  });
 });
 
 describe('what is refused', () => {
@@ -188,6 +198,23 @@ describe('what is refused', () => {
       'a question sheet that is not sound',
       { [FEED]: practiceSheet({ id: 'vd-feed' }).replace('subject: VD', 'subject: XX') },
       'vd-feed.md:5: ',
+    ],
+    [
+      'a question that sends its reader to a heading that is not there',
+      {
+        [FEED]: practiceSheet({ id: 'vd-feed' }).replace('\nprofile:', '\nread: Joints\nprofile:'),
+      },
+      'vd-feed.md:9: read: sheet 1.1 has no heading "Joints": write The run',
+    ],
+    [
+      'a part that does, in a sheet without headings',
+      {
+        [FEED]: practiceSheet({ id: 'vd-feed', lesson: '1.2' }).replace(
+          '    carry: never',
+          '    read: Joints\n    carry: never',
+        ),
+      },
+      'vd-feed.md:33: read: sheet 1.2 has no heading "Joints": it has no headings',
     ],
     [
       'a paper that asks more than the pool holds',
