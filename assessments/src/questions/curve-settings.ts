@@ -50,22 +50,32 @@ function ofCharger(charger: CurveSheet['charger']): Setting[] {
 }
 
 function ofInputs(input: CurveSheet['input']): Setting[] {
-  const { vehicle, solar } = input ?? {};
+  return [...ofVehicle(input?.vehicle), ...ofSolar(input?.solar)];
+}
+
+function ofVehicle(vehicle: NonNullable<CurveSheet['input']>['vehicle']): Setting[] {
+  if (!vehicle) return [];
   return [
-    [vehicle?.from, 'h'],
-    [vehicle?.until, 'h'],
-    [vehicle?.volts, 'V'],
-    [vehicle?.engage, 'V'],
-    [vehicle?.release, 'V'],
-    [vehicle?.delay, 's'],
-    [vehicle?.cable, 'mΩ'],
-    [vehicle?.efficiency, ''],
-    [vehicle?.battery.capacity, 'Ah'],
-    [vehicle?.battery.charge, '%'],
-    [solar?.amps, 'A'],
-    [solar?.shade?.from, 'h'],
-    [solar?.shade?.until, 'h'],
-    [solar?.shade?.amps, 'A'],
+    [vehicle.from, 'h'],
+    [vehicle.until, 'h'],
+    [vehicle.volts, 'V'],
+    [vehicle.engage, 'V'],
+    [vehicle.release, 'V'],
+    [vehicle.delay, 's'],
+    [vehicle.cable, 'mΩ'],
+    [vehicle.efficiency, ''],
+    [vehicle.battery.capacity, 'Ah'],
+    [vehicle.battery.charge, '%'],
+  ];
+}
+
+function ofSolar(solar: NonNullable<CurveSheet['input']>['solar']): Setting[] {
+  if (!solar) return [];
+  return [
+    [solar.amps, 'A'],
+    [solar.shade?.from, 'h'],
+    [solar.shade?.until, 'h'],
+    [solar.shade?.amps, 'A'],
   ];
 }
 
