@@ -175,11 +175,13 @@ describe('what leaves before marking', () => {
     for (const one of openBank()) {
       for (let n = 0; n < 5; n += 1) {
         const paper = drawQuestion(one, seedNumber(n)) as Drawn;
-        const shown = everythingIn(presentQuestion(one, paper)).join('\n');
+        const view = presentQuestion(one, paper);
+        const shown = everythingIn(view).join('\n');
+        const labels = one.givens.filter(({ isShown }) => isShown).map(({ label }) => label);
+        expect(view.given.map(({ label }) => label)).toEqual(labels);
         const hidden = [
           ...one.slips.flatMap(({ is, say, credit }) => [is, say, credit ?? is]),
           ...one.parts.flatMap(wordsKept),
-          ...one.givens.filter(({ isShown }) => !isShown).map(({ label }) => label),
         ];
         expect(hidden.filter((text) => shown.includes(text))).toEqual([]);
       }
