@@ -23,6 +23,8 @@ export interface StoredQuestion {
   readonly revisionId: string;
   readonly drawn: DrawnQuestion;
   readonly answers: Answers;
+  /** How many of the last steps were left to do; null where the question was asked whole. */
+  readonly left: number | null;
   /** Null where the marking lacks the question. */
   readonly stored: QuestionMarks | null;
 }

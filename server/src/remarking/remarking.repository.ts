@@ -21,7 +21,7 @@ interface WorksheetRow {
 interface PracticeRow {
   id: string;
   revisionId: string;
-  kept: { slug: string; drawn: DrawnQuestion };
+  kept: { slug: string; drawn: DrawnQuestion; faded?: { left: number } };
   answers: Answers | null;
   marked: QuestionMarks;
 }
@@ -77,7 +77,7 @@ function toWorksheet(row: WorksheetRow): StoredAttempt {
     kind: 'worksheet',
     id: row.id,
     questions: row.items.map(({ key, slug, revisionId, drawn }) => ({
-      ...{ slug, subject: '', revisionId, drawn },
+      ...{ slug, subject: '', revisionId, drawn, left: null },
       answers: row.answers[key] ?? {},
       stored: row.marked[key] ?? null,
     })),
@@ -87,8 +87,11 @@ function toWorksheet(row: WorksheetRow): StoredAttempt {
 }
 
 function toPractice({ id, revisionId, kept, answers, marked }: PracticeRow): StoredAttempt {
-  const { slug, drawn } = kept;
-  const question = { slug, subject: '', revisionId, drawn, answers: answers ?? {}, stored: marked };
+  const { slug, drawn, faded } = kept;
+  const question = {
+    ...{ slug, subject: '', revisionId, drawn, left: faded?.left ?? null },
+    ...{ answers: answers ?? {}, stored: marked },
+  };
   return { kind: 'practice', id, questions: [question], totals: {}, passMarks: null };
 }
 
@@ -98,6 +101,7 @@ function toSitting(row: SittingRow): StoredAttempt {
     id: row.id,
     questions: row.items.map(({ key, ...item }) => ({
       ...item,
+      left: null,
       stored: row.marked.find((one) => one.key === key)?.marked ?? null,
     })),
     totals: {

@@ -1,4 +1,4 @@
-import { type CompiledQuestion, markQuestion } from '@ferrule/assessments';
+import { type CompiledQuestion, markFaded, markQuestion } from '@ferrule/assessments';
 import { Injectable } from '@nestjs/common';
 import {
   type AttemptKind,
@@ -101,12 +101,16 @@ function tell(
 
 /** What cannot be marked any more is a difference too: its draw may be of another format. */
 function markAgain(
-  { drawn, answers, revisionId }: StoredQuestion,
+  { drawn, answers, left, revisionId }: StoredQuestion,
   question: CompiledQuestion | undefined,
 ): { again: QuestionMarks; refusal: string | null } {
   if (!question) return { again: REFUSED, refusal: `no revision ${revisionId} of the question` };
   try {
-    return { again: markQuestion(question, drawn, answers), refusal: null };
+    const again =
+      left === null
+        ? markQuestion(question, drawn, answers)
+        : markFaded(question, drawn, { left, answers });
+    return { again, refusal: null };
   } catch (error) {
     return { again: REFUSED, refusal: error instanceof Error ? error.message : String(error) };
   }
