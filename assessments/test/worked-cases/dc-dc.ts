@@ -100,4 +100,20 @@ export const dcDcCases: Case[] = [
     given: { output: 40, efficiency: 90, inVolts: 26, run: 5, factor: 0.68 },
     results: { input: 49.2307692308, fuse: 70, forCurrent: 16, size: 16 },
   },
+  {
+    slug: 'da-offload-curve',
+    source: 'arithmetic by bc: gap 180, mean 30*174/180, lifts 14-13.6',
+    given: {
+      capacity: 110,
+      charge: 50,
+      limit: 30,
+      tail: 2,
+      every: 180,
+      look: 6,
+      alternator: 14,
+      cable: 12,
+      loaded: 13.6,
+    },
+    results: { gap: 180, mean: 29, lifts: 0.4 },
+  },
 ];

@@ -67,4 +67,31 @@ export const ratingCases: Case[] = [
     given: { load: 50, jacket: 105, factor: 0.7 },
     results: { space: 0.85, both: 0.595, need: 84.0336134454, size: 16 },
   },
+  {
+    slug: 'rd-site-office',
+    source:
+      'house table, 90 °C jacket: 6 mm² 55 A is under 56.3, 10 mm² 70 A is not; arithmetic by bc: factor sqrt(40/60), need 46/sqrt(40/60), size 10',
+    given: { load: 46, ambient: 50 },
+    results: { factor: 0.816496580928, need: 56.338264084, size: 10 },
+  },
+  {
+    slug: 'rd-trailer-loom',
+    source:
+      'house table, 105 °C jacket: 4 mm² 45 A is under 50, 6 mm² 60 A is not; arithmetic by bc: heat sqrt(55/75), bunch 0.7, both sqrt(55/75)*.7, need 30/(sqrt(55/75)*.7), size 6',
+    given: { load: 30, ambient: 50, circuits: 3 },
+    results: {
+      heat: 0.856348838578,
+      bunch: 0.7,
+      both: 0.599444187004,
+      need: 50.0463606961,
+      size: 6,
+    },
+  },
+  {
+    slug: 'rd-wheelhouse-bunch',
+    source:
+      'BS 7671 table 4C1 and 33 CFR 183.425 table 5; arithmetic by bc: rated 80, bunch 0.65, carries 80*.65',
+    given: { area: 10, jacket: 105, circuits: 4, load: 45 },
+    results: { rated: 80, bunch: 0.65, carries: 52 },
+  },
 ];

@@ -66,4 +66,10 @@ export const solarCases: Case[] = [
     given: { panelVolts: 18, panelAmps: 5.5, battery: 12.8 },
     results: { best: 99, plain: 70.4, lost: 28.8888888889 },
   },
+  {
+    slug: 'so-shade-dip',
+    source: 'loss of the dip: 7.8 A for half an hour; arithmetic by bc: short 12-4.2, lost 7.8*.5',
+    given: { capacity: 110, charge: 45, limit: 40, tail: 2, sun: 12, shaded: 4.2, low: 4.2 },
+    results: { short: 7.8, lost: 3.9 },
+  },
 ];
