@@ -6,7 +6,7 @@ import type { MarkedQuestion, ReadAgain } from './question-view.ts';
 type Lesson = Pick<CompiledLesson, 'number' | 'title' | 'headings' | 'body'>;
 
 /** A sheet, and the paragraph of it where the heading still stands. */
-export function placeReading(
+function placeReading(
   sheet: string,
   lesson: Lesson | undefined,
   heading: string | null,
