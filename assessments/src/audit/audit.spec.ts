@@ -91,6 +91,35 @@ describe('the audit of a question', () => {
     expect(breachesOf(slow).map((breach) => breach.figure)).toEqual(['time for a draw']);
   });
 
+  it('takes papers for one whose options only stand elsewhere', () => {
+    const listed = smallSheet(
+      `given: {}
+ask:
+  a:
+    choose all:
+      - { is: One, right: true }
+      - { is: Two, right: true }
+      - { is: Three, say: not this }
+    marks: 2
+  b:
+    match: { left: first, right: second, both: first }
+    mixed:
+      - { is: left, with: second, say: the other one }
+      - { is: right, with: first, say: the other one }
+    marks: 3
+  c:
+    order: { one: First, two: Then, three: Last }
+    misplaced:
+      - { first: two, then: one, say: one before two }
+      - { first: three, then: two, say: two before three }
+    marks: 2`,
+      '## a\n\nChoose.\n\n## b\n\nMatch.\n\n## c\n\nOrder.',
+    );
+    const found = auditQuestion(listed.question, stopped);
+    expect(found).toMatchObject({ papers: 1, hasDrawnFigures: false });
+    expect(breachesOf(found)).toEqual([]);
+  });
+
   it('sees slip and key that could be taken for each other', () => {
     const found = auditQuestion(sheet(), stopped);
     const [part] = found.parts;

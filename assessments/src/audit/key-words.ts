@@ -10,16 +10,22 @@ function partWords(held: DrawnPart): string {
     case 'quantity':
       return held.key.toPrecision(4);
     case 'options':
-      return placesOf(held.options, [held.right]);
+      return places(held.options, [held.right]).join();
     case 'choices':
-      return placesOf(held.options, [...held.right].sort());
+      return places(held.options, held.right).sort().join();
     case 'order':
-      return placesOf(held.options, held.right);
-    case 'match':
-      return placesOf(held.options, held.right);
+      return places(held.options, held.right).join();
+    case 'match': {
+      const texts = places(held.options, held.right);
+      return held.rows
+        .map(({ index }, row) => `${index}:${texts[row]}`)
+        .sort()
+        .join();
+    }
   }
 }
 
-function placesOf(options: readonly DrawnOption[], ids: readonly string[]): string {
-  return ids.map((id) => options.find((one) => one.id === id)?.index ?? '?').join(' ');
+/** Where the sheet has what the ids stand for: ids and their order are drawn anew each time. */
+function places(options: readonly DrawnOption[], ids: readonly string[]): string[] {
+  return ids.map((id) => String(options.find((one) => one.id === id)?.index));
 }
