@@ -156,4 +156,10 @@ export const chargingCases: Case[] = [
     given: { capacity: 110, charge: 50, limit: 30, tail: 2, load: 8, settled: 9 },
     results: { battery: 1 },
   },
+  {
+    slug: 'cc-read-flooded',
+    source: 'by hand: 40 A × 2.25 h = 90 Ah; 4.75 h − 2.25 h = 2.5 h',
+    given: { capacity: 200, charge: 40, limit: 40, tail: 4, bulkEnds: 2.25, floatStarts: 4.75 },
+    results: { put: 90, lasted: 2.5 },
+  },
 ];
