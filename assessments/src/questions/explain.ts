@@ -4,6 +4,7 @@ import { type Expr, namesIn } from './expression.ts';
 import { figureText } from './format.ts';
 import { type Judged, type Page } from './judged.ts';
 import { chosenLines, rightLines } from './listed-lines.ts';
+import { fillIn } from './placeholders.ts';
 import { remarksOn } from './remarks.ts';
 import { leansOn } from './solve.ts';
 import { type TypedQuantity } from './read-answer.ts';
@@ -12,7 +13,7 @@ import { figuresLine, formulaLine, operator, resultLine, symbolToken, words } fr
 
 /** The marked part as a trainee reads it: own lines, worked lines, remarks. */
 export function explainPart(page: Page, judged: Judged): MarkedPart {
-  const { part, view, finding } = judged;
+  const { part, finding } = judged;
   const worked = workedLines(page, part);
   const yours = ownLines(page, judged);
   const isLost = finding.marks < part.marks;
@@ -20,7 +21,7 @@ export function explainPart(page: Page, judged: Judged): MarkedPart {
   const [own, flagged] = isOff ? flagDifferences(yours, worked) : [yours, worked];
   return {
     id: part.id,
-    prompt: view.prompt,
+    prompt: fillIn(part.prompt, page.question.givens, page.drawn.values),
     verdict: finding.verdict,
     marks: finding.marks,
     outOf: part.marks,
@@ -33,8 +34,8 @@ export function explainPart(page: Page, judged: Judged): MarkedPart {
 }
 
 /** The step that went wrong: an earlier part's where the error began there, else the one asked for. */
-function wrongStepOf(question: Compiled, { part, finding, own }: Judged): MarkedPart['wrongStep'] {
-  const began = finding.verdict === 'not-carried' ? own?.parts[0] : undefined;
+function wrongStepOf(question: Compiled, { part, finding, sums }: Judged): MarkedPart['wrongStep'] {
+  const began = finding.verdict === 'not-carried' ? sums?.account?.parts[0] : undefined;
   const from = question.parts.find(({ id }) => id === began) ?? part;
   const step = 'step' in from && question.steps.find(({ name }) => name === from.step);
   return step ? { symbol: step.symbol, says: step.says ?? '' } : null;
@@ -114,7 +115,7 @@ function typedLines(
   if (typed.unit.symbol !== '') result.push({ kind: 'unit', text: typed.unit.symbol });
   const expr = ownFormula(page, judged, step);
   if (!expr) return [[symbolToken(step.symbol), ...result]];
-  const values = judged.own?.values ?? new Map(Object.entries(page.drawn.values));
+  const values = judged.sums?.account?.values ?? new Map(Object.entries(page.drawn.values));
   const formula = formulaLine(page.question, step, expr);
   return [formula, figuresLine(page.question, expr, values), result];
 }

@@ -5,14 +5,15 @@ type Held<K extends DrawnPart['kind']> = Extract<DrawnPart, { kind: K }>;
 
 /** A share of a part's marks, rounded down. */
 function scored(marks: number, { share, detail }: { share: number; detail: string }): Finding {
-  if (share === 1) return { verdict: 'right', marks, rule: 'right', detail };
+  const say = (): string => detail;
+  if (share === 1) return { verdict: 'right', marks, rule: 'right', say };
   const some = share > 0;
   return {
     verdict: some ? 'partly-right' : 'wrong',
     // 3 × 1/3 is 1, not a binary digit less.
     marks: Math.floor(marks * share + 1e-9),
     rule: some ? 'partly-right' : 'wrong',
-    detail,
+    say,
   };
 }
 

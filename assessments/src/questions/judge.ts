@@ -1,17 +1,20 @@
 import { type Compiled, type DrawnPart, type QuantityPart } from './compiled.ts';
 import { toShortFigures } from './format.ts';
+import { type OwnSums } from './own-values.ts';
 import { type TypedQuantity } from './read-answer.ts';
 import { slipValues, workRounded } from './predictions.ts';
 import { isTooNear, isWithin, keyOf, rangeOf, slipRangeOf } from './tolerance.ts';
 import { type Verdict } from './types.ts';
 import { toSi, type Unit } from './units.ts';
+import { workingsOf } from './workings.ts';
 
 /** What the marker decided about one part, and by which rule. */
 export interface Finding {
   verdict: Verdict;
   marks: number;
   rule: string;
-  detail: string;
+  /** Says why, for the trace; put into words only when it is asked for. */
+  say: () => string;
   /** Which slip was recognised. */
   slip?: number;
   /** The unit the figure fits, where the unit was wrong. */
@@ -26,12 +29,10 @@ export interface QuantityCase {
   part: QuantityPart;
   drawn: Extract<DrawnPart, { kind: 'quantity' }>;
   typed: TypedQuantity;
-  /** All values recomputed on the trainee's own earlier ones; null when there are none. */
-  own: Map<string, number> | null;
+  /** Everything recomputed on the trainee's own earlier values. */
+  sums: OwnSums;
   /** All values as drawn, SI. */
   values: Readonly<Record<string, number>>;
-  /** Whether one of those earlier answers was itself not right. */
-  ownIsOff: boolean;
 }
 
 type Rule = (it: QuantityCase) => Finding | null;
@@ -44,7 +45,7 @@ export function judgeQuantity(it: QuantityCase): Finding {
     const finding = rule(it);
     if (finding) return finding;
   }
-  return { verdict: 'wrong', marks: 0, rule: 'wrong', detail: `${figures(it)} fits no rule` };
+  return { verdict: 'wrong', marks: 0, rule: 'wrong', say: () => `${figures(it)} fits no rule` };
 }
 
 /** Half a part's marks, rounded down, for the right figures in a wrong unit or power of ten. */
@@ -66,34 +67,35 @@ function right(it: QuantityCase): Finding | null {
     verdict: 'right',
     marks: it.part.marks,
     rule: 'right',
-    detail: `${figures(it)} is within ${span(it.drawn)} (SI)`,
+    say: () => `${figures(it)} is within ${span(it.drawn)} (SI)`,
   };
 }
 
 /** The key recomputed on the trainee's own earlier values, or null where there are none. */
 function ownKeyOf(it: QuantityCase): number | null {
-  const value = it.own?.get(it.part.step);
-  const step = it.question.steps.find((one) => one.name === it.part.step);
+  const value = it.sums.account?.values.get(it.part.step);
+  const step = workingsOf(it.question).steps.get(it.part.step)?.step;
   return value === undefined || !step ? null : keyOf(it.part, step.unit, value);
 }
 
 function carried(it: QuantityCase): Finding | null {
   const ownKey = ownKeyOf(it);
   if (ownKey === null || !isWithin(valueOf(it), rangeOf(it.part, ownKey))) return null;
-  const detail = `${figures(it)} is within ${span(rangeOf(it.part, ownKey))} (SI), on own earlier values`;
+  const say = (): string =>
+    `${figures(it)} is within ${span(rangeOf(it.part, ownKey))} (SI), on own earlier values`;
   if (it.part.carry === 'never') {
-    return { verdict: 'not-carried', marks: 0, rule: 'not-carried', detail };
+    return { verdict: 'not-carried', marks: 0, rule: 'not-carried', say };
   }
-  return it.ownIsOff
-    ? { verdict: 'carried-forward', marks: it.part.marks, rule: 'carried-forward', detail }
-    : { verdict: 'right', marks: it.part.marks, rule: 'right-on-own-rounding', detail };
+  return it.sums.account?.isOff
+    ? { verdict: 'carried-forward', marks: it.part.marks, rule: 'carried-forward', say }
+    : { verdict: 'right', marks: it.part.marks, rule: 'right-on-own-rounding', say };
 }
 
 /** A slip predicted on the true values, or on the trainee's own where they carry. */
 function slipped(it: QuantityCase): Finding | null {
   const value = valueOf(it);
-  const mayCarry = it.own !== null && it.part.carry === 'own';
-  const onOwn = mayCarry && it.own ? slipValues(it.question, it.part.step, it.own) : [];
+  const own = it.part.carry === 'own' ? it.sums.account : null;
+  const onOwn = own ? slipValues(it.question, it.part.step, own.values) : [];
   const ownKey = ownKeyOf(it);
   const live = onOwn.filter((one) => ownKey !== null && !isTooNear(it.part, ownKey, one.value));
   const found = [...it.drawn.slips, ...live].find((one) =>
@@ -106,7 +108,8 @@ function slipped(it: QuantityCase): Finding | null {
     marks: made.keep,
     rule: 'slip',
     slip: found.slip,
-    detail: `${figures(it)} is what slip ${found.slip + 1} gives (${toShortFigures(found.value, 6)} SI)`,
+    say: () =>
+      `${figures(it)} is what slip ${found.slip + 1} gives (${toShortFigures(found.value, 6)} SI)`,
   };
 }
 
@@ -122,7 +125,7 @@ function roundedEarly(it: QuantityCase): Finding | null {
     verdict: 'slip',
     marks: half(part),
     rule: 'rounded-early',
-    detail: `${figures(it)} is what steps rounded to ${TOO_FEW} figures give`,
+    say: () => `${figures(it)} is what steps rounded to ${TOO_FEW} figures give`,
   };
 }
 
@@ -143,7 +146,7 @@ function wrongUnit(it: QuantityCase): Finding | null {
       marks: half(it.part),
       rule: 'wrong-unit',
       fits,
-      detail: `${figures(it)} would be right in ${fits.symbol}`,
+      say: () => `${figures(it)} would be right in ${fits.symbol}`,
     };
   }
   return null;
@@ -153,7 +156,9 @@ const MOST_POWER = 6;
 
 function powerOfTen(it: QuantityCase): Finding | null {
   const value = valueOf(it);
-  if (!Number.isFinite(value) || it.typed.unit.offset !== 0) return null;
+  // 1 AWG is not ten times too small for 10 AWG.
+  const isCounted = it.part.units[0]?.symbol === 'AWG';
+  if (!Number.isFinite(value) || it.typed.unit.offset !== 0 || isCounted) return null;
   for (const key of keysOf(it)) {
     for (let power = -MOST_POWER; power <= MOST_POWER; power += 1) {
       if (power === 0 || !isWithin(value / 10 ** power, rangeOf(it.part, key))) continue;
@@ -162,7 +167,7 @@ function powerOfTen(it: QuantityCase): Finding | null {
         marks: half(it.part),
         rule: 'power-of-ten',
         power,
-        detail: `${figures(it)} is out by 10^${power}`,
+        say: () => `${figures(it)} is out by 10^${power}`,
       };
     }
   }

@@ -50,6 +50,7 @@ export function ownFor(question: Compiled, drawn: Drawn, wanted: Wanted): OwnAcc
 }
 
 function usedOwn(question: Compiled, { step, options, own }: Wanted): [string, OwnValue][] {
+  if (own.size === 0) return [];
   const conditions = (options ?? []).flatMap(({ right }) =>
     typeof right === 'boolean' ? [] : [...namesIn(right)],
   );
@@ -57,6 +58,25 @@ function usedOwn(question: Compiled, { step, options, own }: Wanted): [string, O
   const stop = new Set([...own.keys()].filter((name) => name !== step));
   const needed = leansOn(question, step === undefined ? conditions : [step], stop);
   return [...own].filter(([name]) => needed.has(name) && name !== step);
+}
+
+/** The sums on a trainee's own earlier values, worked once and only when they are asked for. */
+export class OwnSums {
+  private worked: OwnAccount | null | undefined;
+  private readonly question: Compiled;
+  private readonly drawn: Drawn;
+  private readonly wanted: Wanted;
+
+  constructor(question: Compiled, drawn: Drawn, wanted: Wanted) {
+    this.question = question;
+    this.drawn = drawn;
+    this.wanted = wanted;
+  }
+
+  get account(): OwnAccount | null {
+    if (this.worked === undefined) this.worked = ownFor(this.question, this.drawn, this.wanted);
+    return this.worked;
+  }
 }
 
 /** A value a million times out could not be meant. */

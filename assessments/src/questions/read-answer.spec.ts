@@ -17,6 +17,7 @@ function part(...units: string[]): PartView {
     units,
     rounding: null,
     options: [],
+    rows: [],
     layout: 'rows',
   };
 }

@@ -21,13 +21,14 @@ const SHOWN_FIGURES = 10;
 /** Reads what was typed or chosen; never compares it with a key. */
 export function readAnswer(part: PartView, answer: RawAnswer): Reading {
   if (part.kind !== 'quantity') return readChosen(part, answer);
-  const reading = readTyped(part, answer);
+  const offered = part.units.map(parseUnit);
+  const reading = readTypedIn(offered, answer);
   if (reading.state !== 'typed') return reading;
   const { figure, unit, isOfKind } = reading.typed;
   if (!isOfKind) {
     return {
       state: 'not-understood',
-      ask: `${unit.symbol} measures something else than this part asks for; give it ${unitList(part)}.`,
+      ask: `${unit.symbol} measures something else than this part asks for; give it ${unitList(offered)}.`,
     };
   }
   return { state: 'understood', value: toSi(figure, unit), shown: showTyped(reading.typed) };
@@ -40,8 +41,7 @@ function showTyped({ figure, unit }: TypedQuantity): string {
 }
 
 /** Figure and unit of a quantity answer; a typed unit goes before a chosen one. */
-export function readTyped(part: PartView, answer: RawAnswer): TypedReading {
-  const offered = part.units.map(parseUnit);
+export function readTypedIn(offered: readonly Unit[], answer: RawAnswer): TypedReading {
   const wanted = offered[0] ?? parseUnit('');
   const read = readQuantity(answer.text, wanted);
   switch (read.state) {
@@ -52,7 +52,7 @@ export function readTyped(part: PartView, answer: RawAnswer): TypedReading {
     case 'unknown-unit':
       return {
         state: 'not-understood',
-        ask: `"${read.spelling}" is not a unit we know; give it ${unitList(part)}.`,
+        ask: `"${read.spelling}" is not a unit we know; give it ${unitList(offered)}.`,
       };
     case 'not-a-quantity':
       return {
@@ -64,7 +64,7 @@ export function readTyped(part: PartView, answer: RawAnswer): TypedReading {
       if (!unit) {
         return {
           state: 'not-understood',
-          ask: `Which unit is it in? Give ${part.units.join(' or ')}.`,
+          ask: `Which unit is it in? Give ${symbolsOf(offered)}.`,
         };
       }
       const isOfKind = sameDimension(unit.dimension, wanted.dimension);
@@ -90,8 +90,10 @@ function askWhich(readings: string[]): Reading & { state: 'ambiguous' } {
   };
 }
 
-function unitList(part: PartView): string {
-  return part.units.length === 0
-    ? 'as a pure number, without a unit'
-    : `in ${part.units.join(' or ')}`;
+function unitList(offered: readonly Unit[]): string {
+  return offered.length === 0 ? 'as a pure number, without a unit' : `in ${symbolsOf(offered)}`;
+}
+
+function symbolsOf(units: readonly Unit[]): string {
+  return units.map(({ symbol }) => symbol).join(' or ');
 }

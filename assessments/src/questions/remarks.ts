@@ -39,8 +39,8 @@ function onRight({ finding }: Judged): Remark[] {
     : remarks;
 }
 
-function partsUsed({ own }: Judged): string {
-  return (own?.parts ?? []).map((id) => `(${id})`).join(' and ');
+function partsUsed({ sums }: Judged): string {
+  return (sums?.account?.parts ?? []).map((id) => `(${id})`).join(' and ');
 }
 
 const ROUNDED_EARLY = 'rounded too early: carry three figures or more until the last line';
@@ -127,7 +127,7 @@ const REMARKS: Record<Verdict, (page: Page, judged: Judged) => Remark[]> = {
   'wrong-unit': (_, judged) => onWrongUnit(judged),
   'power-of-ten': (_, judged) => onPowerOfTen(judged),
   blank: () => [lost(null, 'not answered')],
-  'not-understood': (_, { finding }) => [lost('Not understood', finding.detail)],
+  'not-understood': (_, { finding }) => [lost('Not understood', finding.say())],
   wrong: onWrong,
   'partly-right': onWrong,
 };

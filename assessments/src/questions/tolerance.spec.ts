@@ -16,6 +16,7 @@ function part(tolerance: QuantityPart['tolerance']): QuantityPart {
     marks: 1,
     carry: 'none',
     because: '',
+    read: null,
     step: 'x',
     units: [],
     tolerance,

@@ -204,6 +204,14 @@ export interface MarkedQuestion {
   trace: TraceEntry[];
 }
 
+/** What a marking decided, without the lines and words that explain it. */
+export interface JudgedQuestion {
+  markerVersion: number;
+  marks: number;
+  outOf: number;
+  parts: { id: string; verdict: Verdict; marks: number; outOf: number; rule: string }[];
+}
+
 export interface WorkedAnswer {
   title: string;
   lead: string;
