@@ -1,3 +1,4 @@
+import { BATTERY_FUNCTIONS } from './functions-batteries.ts';
 import { CONDUCTOR_FUNCTIONS } from './functions-conductors.ts';
 import { CORE_FUNCTIONS } from './functions-core.ts';
 import { PROTECTION_FUNCTIONS } from './functions-protection.ts';
@@ -11,5 +12,6 @@ export const FUNCTIONS: ReadonlyMap<string, TradeFunction> = new Map<string, Tra
   ...CONDUCTOR_FUNCTIONS,
   ...RATING_FUNCTIONS,
   ...PROTECTION_FUNCTIONS,
+  ...BATTERY_FUNCTIONS,
   ...SOLAR_FUNCTIONS,
 ]);

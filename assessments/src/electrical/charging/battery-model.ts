@@ -1,6 +1,7 @@
+import { type ChargeChemistry, mayCharge } from '../charge-voltage.ts';
 import { within } from '../out-of-range.ts';
 
-export type BatteryKind = 'flooded' | 'agm' | 'gel' | 'lithium';
+export type BatteryKind = ChargeChemistry;
 
 /**
  * A battery as its charger sees it: a rest voltage by charge, a resistance that acts at once, and
@@ -108,7 +109,7 @@ export function batteryModel(plate: BatteryPlate): Battery {
     seriesOhms: chemistry.seriesOhms * scale,
     fillingOhms: chemistry.fillingOhms * scale,
     relaxOhms: chemistry.relaxOhms * scale,
-    refusesCharge: kind === 'lithium' && celsius < 0,
+    refusesCharge: !mayCharge(kind, celsius),
   };
 }
 
