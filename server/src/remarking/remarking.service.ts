@@ -1,4 +1,4 @@
-import { type CompiledQuestion, markFaded, markQuestion } from '@ferrule/assessments';
+import { type CompiledQuestion, judgeQuestion, markFaded } from '@ferrule/assessments';
 import { Injectable } from '@nestjs/common';
 import {
   type AttemptKind,
@@ -108,7 +108,7 @@ function markAgain(
   try {
     const again =
       left === null
-        ? markQuestion(question, drawn, answers)
+        ? judgeQuestion(question, drawn, answers)
         : markFaded(question, drawn, { left, answers });
     return { again, refusal: null };
   } catch (error) {
