@@ -161,13 +161,23 @@ describe('any single error', () => {
   });
 });
 
+const meanOf = (shares: readonly number[]): number =>
+  shares.reduce((sum, share) => sum + share, 0) / shares.length;
+
 /** Decades either side of the key that a wrong value may lie in. */
 const DECADES = 2;
 
 describe('slips', () => {
-  it('each catch under one in a hundred wrong values, even by ratio', () => {
+  /**
+   * A figure read off a drawing is taken as exactly as the drawing can be read, which on a ratio
+   * scale is wide where the figure is small.
+   */
+  const mostCaught = ({ question, part }: Case<QuantityPart>): number =>
+    question.curve && part.tolerance.kind === 'plain' ? 0.02 : 0.01;
+
+  it('each catch under one in a hundred wrong values, even by ratio; off a curve under two', () => {
     const tries = 500;
-    const wide = new Map<string, number[]>();
+    const wide = new Map<string, { most: number; shares: number[] }>();
     for (const one of drawnBanks.flatMap(figuresOf)) {
       const held = one.drawn.parts[one.part.id];
       if (held?.kind !== 'quantity') continue;
@@ -176,13 +186,12 @@ describe('slips', () => {
         const caught = Array.from({ length: tries }, (_, at) => wrongValue(held.key, at / tries));
         const share = caught.filter((wrong) => isWithin(wrong, range)).length / tries;
         const name = `${named(one)}: ${one.question.slips[slip]?.is}`;
-        wide.set(name, [...(wide.get(name) ?? []), share]);
+        const shares = [...(wide.get(name)?.shares ?? []), share];
+        wide.set(name, { most: mostCaught(one), shares });
       }
     }
-    const tooWide = [...wide]
-      .map(([name, shares]) => ({ name, share: shares.reduce((a, b) => a + b, 0) / shares.length }))
-      .filter(({ share }) => share >= 0.01);
-    expect(tooWide).toEqual([]);
+    const tooWide = [...wide].filter(([, { most, shares }]) => meanOf(shares) >= most);
+    expect(tooWide.map(([name, { shares }]) => `${name} ${meanOf(shares)}`)).toEqual([]);
   });
 
   it('are recognised in under one in a hundred random wrong values of the whole bank', () => {
