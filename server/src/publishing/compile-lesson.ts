@@ -8,6 +8,7 @@ import type { Sheet } from './front-matter.ts';
 import { readBlocks, type FigureBlock, type LessonBlocks } from './lesson-blocks.ts';
 import { headingsIn } from './lesson-headings.ts';
 import type { LessonFrontMatter } from './lesson-front-matter.ts';
+import { checkObjectives, objectivesOf } from './lesson-objectives.ts';
 import { isFormula, nodesOf, parseText, sourceOf, type TextNode } from './markdown.ts';
 import type { ProblemList } from './problem-list.ts';
 import type { LessonFile } from './read-sources.ts';
@@ -134,14 +135,17 @@ export function compileLesson(
   const alone = formulasAlone(root);
   checkText(root, references.targets, complain);
   checkRecall(work);
+  checkObjectives({ path: file.path, sheet }, references.pools, problems);
   const blocks = readBlocks(root, complain);
   const paragraphs = (root.children ?? []).filter(({ type }) => type === 'paragraph');
-  const { words, ...front } = sheet.front;
+  const { words, can, ...front } = sheet.front;
   const body = withFormulaBlocks(sheet.body, alone).trim();
   return {
     hash: hashOf(work, blocks),
     compiled: {
       ...front,
+      can: can.map(({ does }) => does),
+      objectives: objectivesOf(sheet.front),
       words: Object.entries(words).map(([term, meaning]) => ({ term, meaning })),
       body,
       paragraphs: paragraphs.length - alone.length,

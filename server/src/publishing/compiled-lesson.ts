@@ -14,6 +14,15 @@ export interface CompiledFigure {
   readonly long: string;
 }
 
+/** What a reader can do afterwards, and what asks for it. */
+export interface CompiledObjective {
+  readonly does: string;
+  /** Practice questions by slug. */
+  readonly questions: readonly string[];
+  /** Recall questions of the sheet, the first is 1. */
+  readonly recall: readonly number[];
+}
+
 export interface LessonHeading {
   readonly text: string;
   /** Number of the first paragraph under it. */
@@ -37,6 +46,10 @@ export interface CompiledLesson {
   readonly minutes: number;
   readonly lead: string;
   readonly can: readonly string[];
+  /** Missing in lessons stored before it was kept. */
+  readonly objectives?: readonly CompiledObjective[];
+  /** Sheets to read before this one; missing in lessons stored before it was kept. */
+  readonly needs?: readonly string[];
   readonly words: readonly { readonly term: string; readonly meaning: string }[];
   readonly sources: readonly string[];
   readonly cautions: readonly string[];

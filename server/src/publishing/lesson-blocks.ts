@@ -1,3 +1,4 @@
+import { DRAWING_KINDS, isDrawingKind, type DrawingKind } from './lesson-drawings.ts';
 import { isFormula, nodesOf, type TextNode } from './markdown.ts';
 import type { Complain } from './text-checks.ts';
 
@@ -17,8 +18,16 @@ export interface QuestionBlock {
   readonly seed: string;
 }
 
+/** A drawing to handle. */
+export interface DrawingBlock {
+  readonly node: TextNode;
+  readonly kind: DrawingKind;
+  readonly title: string;
+}
+
 export interface LessonBlocks {
   readonly figures: readonly FigureBlock[];
+  readonly drawings: readonly DrawingBlock[];
   readonly worked: readonly QuestionBlock[];
   readonly tries: readonly QuestionBlock[];
 }
@@ -34,6 +43,7 @@ const BLOCKS: Readonly<Record<string, { form: string; attributes: readonly strin
   local: { form: 'containerDirective', attributes: [] },
   figure: { form: 'containerDirective', attributes: ['src!', 'short!', 'narrow'] },
   description: { form: 'containerDirective', attributes: [] },
+  drawing: { form: 'leafDirective', attributes: ['kind!', 'title!'] },
   worked: { form: 'leafDirective', attributes: ['question!', 'seed!'] },
   try: { form: 'leafDirective', attributes: ['question!'] },
 };
@@ -42,6 +52,10 @@ const attributeOf = (node: TextNode, name: string) => (node.attributes?.[name] ?
 
 function checkBlock(node: TextNode, complain: Complain): boolean {
   const name = node.name ?? '';
+  if (node.type === 'textDirective' && name === 'sum') {
+    complain(node, 'a sum is written :sum[name]');
+    return false;
+  }
   if (node.type === 'textDirective') {
     complain(node, `":${name}" reads as a block: put a space after the colon, or \\ before it`);
     return false;
@@ -99,6 +113,21 @@ function readFigure(node: TextNode, complain: Complain): FigureBlock[] {
   return [{ node, src, narrow: narrow || null, short: attributeOf(node, 'short'), description }];
 }
 
+function readDrawingBlock(node: TextNode, complain: Complain): DrawingBlock[] {
+  const kind = attributeOf(node, 'kind');
+  if (isDrawingKind(kind)) return [{ node, kind, title: attributeOf(node, 'title') }];
+  complain(node, `drawing "${kind}" is not one of ${DRAWING_KINDS.join(', ')}`);
+  return [];
+}
+
+function refuseDrawnTwice(drawings: readonly DrawingBlock[], complain: Complain): void {
+  drawings.forEach(({ node, kind }, at) => {
+    if (drawings.findIndex((other) => other.kind === kind) < at) {
+      complain(node, `drawing ${kind} stands twice in this sheet`);
+    }
+  });
+}
+
 function readQuestionBlock(node: TextNode, complain: Complain): QuestionBlock[] {
   const seed = attributeOf(node, 'seed');
   if (node.name === 'worked' && !SEED.test(seed)) {
@@ -128,7 +157,10 @@ export function readBlocks(root: TextNode, complain: Complain): LessonBlocks {
     (node) => node.type.endsWith('Directive') && checkBlock(node, complain),
   );
   const named = (name: string) => sound.filter((node) => node.name === name);
+  const drawings = named('drawing').flatMap((node) => readDrawingBlock(node, complain));
+  refuseDrawnTwice(drawings, complain);
   return {
+    drawings,
     figures: named('figure').flatMap((node) => readFigure(node, complain)),
     worked: named('worked').flatMap((node) => readQuestionBlock(node, complain)),
     tries: named('try').flatMap((node) => readQuestionBlock(node, complain)),

@@ -1,43 +1,27 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from '@jest/globals';
 import { createHash } from 'node:crypto';
-import { join } from 'node:path';
 import pg from 'pg';
 import {
   courseSheet,
   DRAWING,
   goodFiles,
-  inFolder,
   LESSON_BODY,
   lessonSheet,
   practiceSheet,
+  problemsOf,
   publishFiles,
   type Files,
 } from '../../test/factories/content.ts';
 import { blueprintSheet } from '../../test/factories/paper.ts';
 import { createTestDatabase, type TestDatabase } from '../../test/test-database.ts';
-import { compileContent } from './compile-content.ts';
 import type { CompiledLesson } from './compiled-lesson.ts';
-import { ProblemList } from './problem-list.ts';
 import { publish } from './publish.ts';
-import { readSources } from './read-sources.ts';
 
 const LESSON = 'lessons/hq-dc2/runs/01-the-run.md';
 const COURSE = 'lessons/hq-dc2/course.md';
 const FEED = 'assessments/bank/drop/vd-feed.md';
 const PAPER = 'assessments/papers/try-paper.md';
 const SVG = 'lessons/hq-dc2/runs/fig-1.svg';
-
-/** Compiles a course that is in order but for the given files; each problem as `path:line: message`. */
-async function problemsOf(changed: Files): Promise<string[]> {
-  return inFolder({ ...goodFiles(), ...changed }, async (folder) => {
-    const problems = new ProblemList();
-    const folders = { lessons: join(folder, 'lessons'), assessments: join(folder, 'assessments') };
-    compileContent(await readSources(folders), problems);
-    return problems
-      .sorted()
-      .map(({ path, line, message }) => `${path.split('/').at(-1) ?? ''}:${line}: ${message}`);
-  });
-}
 
 function fail(reason: string): never {
   throw new Error(reason);

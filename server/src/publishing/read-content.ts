@@ -7,6 +7,7 @@ import {
 } from '@ferrule/assessments';
 import { basename } from 'node:path';
 import { readCourse, type Pools, type ReadCourse } from './course-sheet.ts';
+import { fillSums } from './fill-sums.ts';
 import { readSheet, type Sheet } from './front-matter.ts';
 import { lessonFrontMatter, type LessonFrontMatter } from './lesson-front-matter.ts';
 import type { ProblemList } from './problem-list.ts';
@@ -26,7 +27,7 @@ export interface ReadLesson {
 function readLessons(files: readonly LessonFile[], problems: ProblemList): ReadLesson[] {
   return files.flatMap((file) => {
     const sheet = readSheet(file, lessonFrontMatter, problems);
-    return sheet ? [{ file, sheet }] : [];
+    return sheet ? [{ file, sheet: fillSums(file, sheet, problems) }] : [];
   });
 }
 

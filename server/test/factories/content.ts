@@ -1,7 +1,10 @@
 import { mkdir, mkdtemp, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
+import { compileContent } from '../../src/publishing/compile-content.ts';
+import { ProblemList } from '../../src/publishing/problem-list.ts';
 import { publish, type PublishingOutcome } from '../../src/publishing/publish.ts';
+import { readSources } from '../../src/publishing/read-sources.ts';
 import { blueprintSheet, questionSheet } from './paper.ts';
 
 /** Files by path, as they lie under `lessons/` and `assessments/`. */
@@ -215,6 +218,18 @@ export async function inFolder<T>(files: Files, work: (folder: string) => Promis
   } finally {
     await rm(folder, { recursive: true, force: true });
   }
+}
+
+/** Compiles a course that is in order but for the given files; each problem as `path:line: message`. */
+export async function problemsOf(changed: Files): Promise<string[]> {
+  return inFolder({ ...goodFiles(), ...changed }, async (folder) => {
+    const problems = new ProblemList();
+    const folders = { lessons: join(folder, 'lessons'), assessments: join(folder, 'assessments') };
+    compileContent(await readSources(folders), problems);
+    return problems
+      .sorted()
+      .map(({ path, line, message }) => `${path.split('/').at(-1) ?? ''}:${line}: ${message}`);
+  });
 }
 
 /** Publishes the files into a test's database. */
