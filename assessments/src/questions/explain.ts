@@ -10,6 +10,7 @@ import { leansOn } from './solve.ts';
 import { type TypedQuantity } from './read-answer.ts';
 import { type Line, type MarkedPart } from './types.ts';
 import { figuresLine, formulaLine, operator, resultLine, symbolToken, words } from './typeset.ts';
+import { wrongStepOf } from './wrong-step.ts';
 
 /** The marked part as a trainee reads it: own lines, worked lines, remarks. */
 export function explainPart(page: Page, judged: Judged): MarkedPart {
@@ -28,17 +29,9 @@ export function explainPart(page: Page, judged: Judged): MarkedPart {
     yours: own,
     worked: flagged,
     remarks: remarksOn(page, judged),
-    wrongStep: isLost ? wrongStepOf(page.question, judged) : null,
+    wrongStep: isLost ? wrongStepOf(page, judged) : null,
     read: isLost ? (part.read ?? page.question.read) : null,
   };
-}
-
-/** The step that went wrong: an earlier part's where the error began there, else the one asked for. */
-function wrongStepOf(question: Compiled, { part, finding, sums }: Judged): MarkedPart['wrongStep'] {
-  const began = finding.verdict === 'not-carried' ? sums?.account?.parts[0] : undefined;
-  const from = question.parts.find(({ id }) => id === began) ?? part;
-  const step = 'step' in from && question.steps.find(({ name }) => name === from.step);
-  return step ? { symbol: step.symbol, says: step.says ?? '' } : null;
 }
 
 /** The worked answer of a part, line by line; steps printed for an earlier part are not repeated. */
