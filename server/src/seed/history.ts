@@ -52,7 +52,7 @@ function wholeCourse(from: string, name: string): Happening[] {
   ]);
 }
 
-const oneWay = [['a', 'd'], [], []];
+const oneWay = [['a', 'd'], [], [], ['a'], ['a']];
 
 const happenings: Happening[] = [
   paper('2023-10-14T09:00:00Z', 'anselm.tau', 0),
@@ -97,11 +97,11 @@ const happenings: Happening[] = [
   finish('2026-10-09T17:00:00Z', 'signe.holloway', '1.4'),
   worksheet('2026-11-20T18:00:00Z', ['signe.holloway', 'W3'], oneWay),
   finish('2026-11-21T17:00:00Z', 'caspian.rudd', '3.4'),
-  worksheet('2026-11-21T18:00:00Z', ['caspian.rudd', 'W3'], [['a'], [], ['a']]),
+  worksheet('2026-11-21T18:00:00Z', ['caspian.rudd', 'W3'], [['a'], [], ['a'], [], []]),
   worksheet('2026-11-22T18:00:00Z', ['amadi.thrale', 'W3'], oneWay),
-  worksheet('2026-11-23T18:00:00Z', ['oona.kirkbride', 'W3'], [['d'], ['a'], []]),
+  worksheet('2026-11-23T18:00:00Z', ['oona.kirkbride', 'W3'], [['d'], ['a'], [], [], ['a']]),
   finish('2026-11-24T18:00:00Z', 'zuleika.varga', '1.4'),
-  worksheet('2026-11-24T19:00:00Z', ['zuleika.varga', 'W1'], [['a']]),
+  worksheet('2026-11-24T19:00:00Z', ['zuleika.varga', 'W1'], [['b'], ['a'], ['a'], ['b']]),
   {
     at: '2026-11-15T18:30:00Z',
     who: home('maren.stoddart'),

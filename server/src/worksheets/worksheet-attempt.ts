@@ -68,5 +68,9 @@ type Figures = Pick<QuestionView, 'given' | 'curve'>;
 export const figuresOf = (slug: string, { given, curve }: Figures): string =>
   JSON.stringify([slug, given.map(({ label, value, unit }) => [label, value, unit]), curve]);
 
+/** A question of words alone has none: drawing it anew changes only the order of its choices. */
+export const hasFigures = ({ given, curve }: Figures): boolean =>
+  given.length > 0 || curve !== null;
+
 export const marksOf = (marked: MarkedByItem): number =>
   Object.values(marked).reduce((sum, { marks }) => sum + marks, 0);

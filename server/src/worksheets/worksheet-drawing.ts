@@ -5,7 +5,7 @@ import { PracticeService } from '../practice/practice.service.ts';
 import type { Published } from '../publishing/content.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
 import { QuestionsService, type Draw } from '../questions/questions.service.ts';
-import { figuresOf, variantOf, type KeptItem, type NewAttempt } from './worksheet-attempt.ts';
+import { figuresOf, hasFigures, variantOf, type KeptItem, type NewAttempt } from './worksheet-attempt.ts';
 import type { PlacedWorksheet } from './worksheet.presenter.ts';
 import { WorksheetsRepository } from './worksheets.repository.ts';
 
@@ -67,7 +67,7 @@ export class WorksheetDrawing {
     seen: ReadonlySet<string>,
   ): Promise<Draw> {
     const published = await this.questions.practice(slug);
-    const isSeen = ({ view }: Draw) => seen.has(figuresOf(slug, view));
+    const isSeen = ({ view }: Draw) => hasFigures(view) && seen.has(figuresOf(slug, view));
     let draw = this.questions.drawFor(purpose, published);
     for (let again = 1; again < MOST_DRAWS && isSeen(draw); again += 1) {
       draw = this.questions.drawFor(`${purpose}:${again}`, published);

@@ -63,6 +63,7 @@ function presentItem(
   const isShort = marked !== null && marked.marks < marked.outOf;
   return {
     key: item.key,
+    slug: item.slug,
     question: item.view,
     answers,
     marked,
@@ -79,6 +80,7 @@ export function presentSummary(
     title: worksheet.title,
     unit: { number: unit.number, title: unit.title },
     questions: worksheet.questions.length,
+    practise: [...worksheet.questions],
     passPercent: worksheet.passPercent,
     attempts: attempts.map((attempt) => ({
       id: attempt.id,

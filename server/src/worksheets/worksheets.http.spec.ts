@@ -134,6 +134,7 @@ describe('a worksheet', () => {
     const open = await startWorksheet(trainee);
     const { body } = await trainee.call('GET', '/api/worksheets/W1');
     expect(body).toMatchObject({ number: 'W1', questions: 2, passPercent: 80 });
+    expect(body.practise).toEqual(['vd-feed', 'vd-lamp']);
     expect(body.attempts).toMatchObject([
       { id: first.id, attempt: 1, marks: 8, outOf: 10, percent: 80 },
       { id: open.id, attempt: 2, marks: null, percent: null, handedInAt: null },

@@ -29,6 +29,8 @@ export const worksheetSchema = z.object({
   items: z.array(
     z.object({
       key: z.string(),
+      /** By which the question can be practised. */
+      slug: z.string(),
       question: questionViewSchema,
       answers: answersSchema,
       marked: markedQuestionSchema.nullable(),
@@ -48,6 +50,8 @@ export const worksheetSummarySchema = z.object({
   title: z.string(),
   unit: unitSchema,
   questions: z.number(),
+  /** Its questions in their order, by which they can be practised one at a time. */
+  practise: z.array(z.string()),
   passPercent: z.number(),
   attempts: z.array(
     z.object({
