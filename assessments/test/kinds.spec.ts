@@ -223,6 +223,15 @@ describe('the new kinds', () => {
     }
   });
 
+  it('say at the top how much is partly right', () => {
+    const answers = keyAnswers(question, drawn, ['a', 'c', 'd']);
+    expect(markQuestion(question, drawn, answers).summary).toBe(
+      'One slip, two parts partly right. You halved it.',
+    );
+    const { summary } = markQuestion(question, drawn, { ...answers, d: { ...BLANK, text: '7' } });
+    expect(summary).toBe('One part wrong, two partly right.');
+  });
+
   it('work out in the worked answer as they are marked', () => {
     const worked = workQuestion(question, drawn).parts.map(({ lines }) => lines.map(text));
     const marked = markQuestion(question, drawn, {}).parts.map(({ worked: w }) => w.map(text));

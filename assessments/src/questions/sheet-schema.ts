@@ -38,6 +38,11 @@ const slip = z.strictObject({
   keep: z.record(name, z.int().min(0).max(9)).default({}),
 });
 
+/** A record of so many entries at most: a sheet has its bounds as a sum has. */
+function atMost<T extends z.ZodType<object>>(count: number, record: T): T {
+  return record.refine((entries) => Object.keys(entries).length <= count, `at most ${count}`);
+}
+
 /** Front matter of a question sheet. */
 export const sheetSchema = z.strictObject({
   id: z.string().regex(/^[a-z]{2}-[a-z0-9-]{2,40}$/, 'an id is like vd-chart-table'),
@@ -63,13 +68,13 @@ export const sheetSchema = z.strictObject({
       }),
     )
     .default([]),
-  tables: z.record(name, table).default({}),
-  given: z.record(name, given),
-  steps: z.record(name, step).default({}),
-  require: z.array(sum).default([]),
+  tables: atMost(4, z.record(name, table)).default({}),
+  given: atMost(40, z.record(name, given)),
+  steps: atMost(40, z.record(name, step)).default({}),
+  require: z.array(sum).max(20, 'at most 20').default([]),
   curve: curve.optional(),
   ask: z.record(partId, ask),
-  slips: z.array(slip).default([]),
+  slips: z.array(slip).max(24, 'at most 24').default([]),
   diagram: z
     .strictObject({
       kind: z.literal('two-wire-run'),

@@ -1,7 +1,10 @@
 import { type Compiled } from './compiled.ts';
 import { type Judged } from './judged.ts';
+import { type Verdict } from './types.ts';
 
 const WORDS = ['No', 'One', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eight'];
+
+const OFF: readonly Verdict[] = ['wrong', 'wrong-unit', 'power-of-ten', 'not-understood'];
 
 /** One or two sentences that lead a marked question: what went wrong, and what did not. */
 export function summarise(question: Compiled, judged: readonly Judged[]): string {
@@ -13,35 +16,37 @@ export function summarise(question: Compiled, judged: readonly Judged[]): string
   const slips = [...new Set(judged.flatMap(({ finding }) => finding.slip ?? []))];
   const isRounded = judged.some(({ finding }) => finding.rule === 'rounded-early');
   const carriedOn = count('carried-forward') > 0 || count('not-carried') > 0;
-  const off = judged.filter(({ finding }) =>
-    ['wrong', 'partly-right', 'wrong-unit', 'power-of-ten', 'not-understood'].includes(
-      finding.verdict,
-    ),
-  ).length;
+  const off = judged.filter(({ finding }) => OFF.includes(finding.verdict)).length;
+  const partly = count('partly-right');
+  const found = { slips: slips.length + Number(isRounded), off, partly, blank: count('blank') };
   return [
-    headline({ slips: slips.length + Number(isRounded), off, carriedOn, blank: count('blank') }),
+    headline(found, carriedOn),
     ...slips.slice(0, 2).map((slip) => question.slips[slip]?.is ?? ''),
     isRounded ? 'You rounded too early.' : '',
-    off === 0 && carriedOn ? 'Your method after that was sound.' : '',
+    off + partly === 0 && carriedOn ? 'Your method after that was sound.' : '',
   ]
     .filter((sentence) => sentence !== '')
     .join(' ');
 }
 
-function headline(found: {
+interface Found {
   slips: number;
   off: number;
-  carriedOn: boolean;
+  partly: number;
   blank: number;
-}): string {
-  const { slips, off, carriedOn, blank } = found;
-  const parts = [
-    slips > 0 ? `${WORDS[slips] ?? slips} slip${slips === 1 ? '' : 's'}` : '',
-    off > 0 ? `${numberWord(off, slips > 0)} part${off === 1 ? '' : 's'} wrong` : '',
-    blank > 0 ? `${numberWord(blank, slips + off > 0)} not answered` : '',
-    carriedOn ? 'carried through' : '',
-  ].filter((part) => part !== '');
-  return `${capital(parts.join(', '))}.`;
+}
+
+/** "One slip, two parts wrong, one partly right, carried through." */
+function headline({ slips, off, partly, blank }: Found, carriedOn: boolean): string {
+  const counted: [number, string][] = [
+    [slips, slips === 1 ? 'slip' : 'slips'],
+    [off, off === 1 ? 'part wrong' : 'parts wrong'],
+    [partly, off > 0 ? 'partly right' : partly === 1 ? 'part partly right' : 'parts partly right'],
+    [blank, 'not answered'],
+  ];
+  const said = counted.filter(([count]) => count > 0);
+  const parts = said.map(([count, what], index) => `${numberWord(count, index > 0)} ${what}`);
+  return `${[...parts, ...(carriedOn ? ['carried through'] : [])].map(capitalFirst).join(', ')}.`;
 }
 
 function numberWord(count: number, isInside: boolean): string {
@@ -49,6 +54,6 @@ function numberWord(count: number, isInside: boolean): string {
   return isInside ? word.toLowerCase() : word;
 }
 
-function capital(text: string): string {
-  return text.charAt(0).toUpperCase() + text.slice(1);
+function capitalFirst(text: string, index: number): string {
+  return index === 0 ? text.charAt(0).toUpperCase() + text.slice(1) : text;
 }
