@@ -73,6 +73,14 @@ describe('alternators and the input of chargers', () => {
     );
   });
 
+  it('the override left on takes half of 60 Ah in 0.605 h at 49.57 A (trap: engine off)', () => {
+    const { amps } = feedConstantPower(OVERRIDE);
+    expect(amps).toBeCloseTo(49.569126, 5);
+    expect(hoursToTake(60, 0.5, amps)).toBeCloseTo(0.605215, 5);
+    // At 14.4 V, with the engine on, it would have been 41.67 A.
+    expect(amps).toBeGreaterThan(600 / 14.4);
+  });
+
   it('two chargers go beyond half of a hot alternator that one keeps within', () => {
     const one = chargersOnAlternator(HOT_IDLE, { inputsA: [38], share: 0.5 });
     const two = chargersOnAlternator(HOT_IDLE, { inputsA: [38, 22], share: 0.5 });

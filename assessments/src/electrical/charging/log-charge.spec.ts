@@ -144,6 +144,19 @@ describe('the stages', () => {
   });
 });
 
+describe('what goes in and out', () => {
+  it('adds up: charger less loads is the battery’s, and its efficiency what stays', () => {
+    const log = logCharge({ ...AGM, load: { amps: 3, fromH: 1, untilH: 3 }, hours: 3.5 });
+    const { chargerAh, batteryAh, chargerWh, bulkAh } = log.totals;
+    expect(chargerAh - batteryAh).toBeCloseTo(6, 9);
+    const gained = (log.readings.at(-1)?.charge ?? NaN) - 0.5;
+    expect((batteryAh * 0.9) / 110 / gained).toBeCloseTo(1, 3);
+    expect(bulkAh).toBeCloseTo(30 * hoursOf(log.bulkEndsH), 6);
+    expect(chargerWh / chargerAh).toBeGreaterThan(13);
+    expect(chargerWh / chargerAh).toBeLessThan(14.4);
+  });
+});
+
 describe('what changes a charge', () => {
   it('quiet running gives exactly half until its time-out', () => {
     const log = logCharge(withCharger({ quietUntilH: 1 }));
@@ -251,6 +264,10 @@ describe('bad input', () => {
     ],
     ['The battery is empty at 0.9 h; lower the load', { load: { amps: 90, fromH: 0 } }],
     ['Off-load look of 200 s', withCharger({ pauses: { everyH: 0.05, forH: 1 / 18 } })],
+    [
+      'Protection that closes at 14.6 V is not below the 14.6 V at which it opens',
+      { battery: { ...AGM.battery, protection: { opensV: 14.6, closesV: 14.6 } } },
+    ],
     [
       'Release 13.3 V is not below engagement 13.2 V',
       { vehicle: { ...VEHICLE_PARKED, releaseV: 13.3 } },

@@ -6,7 +6,7 @@ import { type ChargeRun, type Stage } from './settings.ts';
 import { StageKeeper } from './stage-keeper.ts';
 import { type Stand, stepFrom } from './step.ts';
 import { fullOutputAt, isPaused, momentsOf, SAME_H } from './timetable.ts';
-import { isTripping, isWorking, look, type Sight, type World } from './world.ts';
+import { isTripping, isWorking, look, mayCloseAtH, type Sight, type World } from './world.ts';
 
 export interface ChargeReading {
   hour: number;
@@ -74,7 +74,7 @@ class ChargeLogger {
     this.moments = momentsOf(run);
     const isShut = run.battery.refusesCharge ?? false;
     const keeper = new StageKeeper(run.charger, run.battery.restVolts[0] ?? NaN);
-    this.world = { run, sources: new SourceChooser(run), keeper, isShut };
+    this.world = { run, sources: new SourceChooser(run), keeper, isShut, shutFromH: null };
     const battery = { charge: run.charge, pairV: 0 };
     const moment = { hour: 0, battery, startCharge: run.vehicle?.charge ?? NaN };
     this.now = { moment, sight: look(this.world, moment, 0) };
@@ -115,7 +115,8 @@ class ChargeLogger {
     const { sources, keeper } = this.world;
     const { hour } = this.now.moment;
     let nextH = Infinity;
-    for (const wait of [this.moments[this.nextMoment], sources.changesAtH, keeper.waitsUntilH]) {
+    const waits = [sources.changesAtH, keeper.waitsUntilH, mayCloseAtH(this.world)];
+    for (const wait of [this.moments[this.nextMoment], ...waits]) {
       if (wait !== undefined && wait !== null && wait > hour + SAME_H)
         nextH = Math.min(nextH, wait);
     }
@@ -145,6 +146,7 @@ class ChargeLogger {
     }
     if (isTripping(world, now, sight)) {
       world.isShut = !world.isShut;
+      world.shutFromH = world.isShut ? now.hour : null;
       if (world.isShut) this.protectionOpensH ??= now.hour;
       return true;
     }

@@ -31,6 +31,46 @@ const runs: fc.Arbitrary<ChargeRun> = fc
     stepS: 60,
   }));
 
+/** Everything that may befall a charge, in one run. */
+const oddRuns: fc.Arbitrary<ChargeRun> = fc
+  .record({
+    run: runs,
+    engageV: between(12.5, 14),
+    gapV: between(0.05, 1.5),
+    cableOhms: between(0, 0.06),
+    hasOverride: fc.boolean(),
+    startCharge: between(0.1, 1),
+    sunA: between(0, 30),
+    opensV: between(13.8, 14.8),
+    closesUnderV: between(0.01, 1),
+    lookS: between(1, 20),
+    derateA: between(1, 30),
+    restartV: between(12, 13.5),
+    afterAbsorption: fc.constantFrom('float' as const, 'rest' as const, 'hold' as const),
+  })
+  .map((odd) => ({
+    ...odd.run,
+    battery: {
+      ...odd.run.battery,
+      protection: { opensV: odd.opensV, closesV: odd.opensV - odd.closesUnderV },
+    },
+    charger: {
+      ...odd.run.charger,
+      ...{ afterAbsorption: odd.afterAbsorption, restartV: odd.restartV },
+      pauses: { everyH: 0.05, forH: odd.lookS / 3600 },
+      derate: { fromH: 0.3, toA: odd.derateA, overH: 0.4 },
+    },
+    vehicle: {
+      ...{ fromH: 0.4, untilH: 2, volts: 14.2, delayH: 30 / 3600, efficiency: 0.9 },
+      ...{ engageV: odd.engageV, releaseV: odd.engageV - odd.gapV },
+      ...{ hasOverride: odd.hasOverride, cableOhms: odd.cableOhms, charge: odd.startCharge },
+      battery: batteryModel({ kind: 'flooded' as const, capacityAh: 60, blocks: 1 }),
+    },
+    solar: { amps: odd.sunA, shade: { fromH: 0.2, untilH: 0.6, amps: 0 } },
+    load: { amps: 1, fromH: 0.5 },
+    hours: 4,
+  }));
+
 const FIGURES = ['hour', 'volts', 'batteryVolts', 'amps', 'batteryAmps', 'charge'] as const;
 
 function moved(one: ChargeLog, other: ChargeLog, time: 'bulkEndsH' | 'floatStartsH'): number {
@@ -54,7 +94,7 @@ describe('whatever the settings', () => {
 
   it('every figure is finite, time runs forwards and no ampere is lost', () => {
     fc.assert(
-      fc.property(runs, (run) => {
+      fc.property(fc.oneof(runs, oddRuns), (run) => {
         const { readings } = logCharge(run);
         const isWrong = readings.findIndex((reading, index) => {
           const { amps, batteryAmps, hour } = reading;

@@ -6,7 +6,8 @@ import { type ChargeRun, type ChargerSettings, type VehicleInput } from './setti
  *
  * @throws {OutOfRange} naming the value, the rule and the remedy.
  */
-export function requireRun({ charge, charger, vehicle, hours, stepS }: ChargeRun): void {
+export function requireRun(run: ChargeRun): void {
+  const { charge, charger, vehicle, hours, stepS } = run;
   within(charge, {
     what: 'Charge at the start',
     unit: 'of full',
@@ -18,6 +19,15 @@ export function requireRun({ charge, charger, vehicle, hours, stepS }: ChargeRun
   within(stepS, { what: 'Step', unit: 's', least: 1, most: 600, remedy: 'choose a shorter one' });
   requireCharger(charger);
   if (vehicle) requireVehicle(vehicle);
+  requireProtection(run.battery.protection);
+}
+
+function requireProtection(protection: ChargeRun['battery']['protection']): void {
+  if (!protection || protection.closesV < protection.opensV) return;
+  const { closesV, opensV } = protection;
+  throw new OutOfRange(
+    `Protection that closes at ${closesV} V is not below the ${opensV} V at which it opens; lower it.`,
+  );
 }
 
 function requireCharger(charger: ChargerSettings): void {

@@ -10,7 +10,7 @@ import {
 import { type InputReading, readInput, type SourceChooser } from './inputs.ts';
 import { type ChargeRun } from './settings.ts';
 import { type StageKeeper } from './stage-keeper.ts';
-import { isPaused, loadAt, ownLimitAt, sunAmpsAt } from './timetable.ts';
+import { isPaused, loadAt, ownLimitAt, SAME_H, sunAmpsAt } from './timetable.ts';
 
 /** What flows on its own. */
 export interface Moment {
@@ -27,6 +27,16 @@ export interface World {
   keeper: StageKeeper;
   /** The battery's own protection keeps charge out. */
   isShut: boolean;
+  /** The moment it opened; null while it is closed. */
+  shutFromH: number | null;
+}
+
+/** Once open, the protection stays so for this long whatever the cells do, h. */
+const SHUT_HOLD_H = 1 / 60;
+
+/** The moment from which an open protection may close; Infinity while there is none to wait for. */
+export function mayCloseAtH({ shutFromH }: World): number {
+  return shutFromH === null ? Infinity : shutFromH + SHUT_HOLD_H;
 }
 
 /** All that can be read at a moment. */
@@ -76,11 +86,13 @@ export function look(world: World, moment: Moment, hour: number): Sight {
 }
 
 /** Whether the battery's protection would change over. */
-export function isTripping({ run, isShut }: World, { battery }: Moment, sight: Sight): boolean {
+export function isTripping(world: World, { battery, hour }: Moment, sight: Sight): boolean {
+  const { run, isShut } = world;
   const { protection, refusesCharge } = run.battery;
   if (!protection || refusesCharge) return false;
   const { batteryAmps, batteryVolts } = sight.circuit;
   if (!isShut) return batteryAmps > 0 && batteryVolts >= protection.opensV;
+  if (hour < mayCloseAtH(world) - SAME_H) return false;
   return restV(run.battery, battery.charge) + battery.pairV <= protection.closesV;
 }
 
