@@ -1,5 +1,7 @@
-import { readdirSync, readFileSync } from 'node:fs';
+import { readdirSync } from 'node:fs';
+import { basename } from 'node:path';
 import { readOptions } from './bank-audit/options.mjs';
+import { auditSheets } from './bank-audit/pool.mjs';
 import { breachLine, headings, rowOf } from './bank-audit/table.mjs';
 import { buildServer } from './steps/builds.mjs';
 import { installDependencies } from './steps/dependencies.mjs';
@@ -9,40 +11,54 @@ import { fromRoot } from './steps/paths.mjs';
 import { StepFailed } from './steps/processes.mjs';
 import { createProgress } from './steps/progress.mjs';
 
-function readSheets(only) {
-  const bank = fromRoot('assessments', 'bank');
-  const files = readdirSync(bank, { recursive: true })
-    .filter((path) => path.endsWith('.md') && !path.endsWith('README.md'))
-    .filter((path) => only === null || path.endsWith(`/${only}.md`))
-    .sort();
-  if (files.length > 0) return files.map((path) => ({ path, source: sourceOf(bank, path) }));
-  throw new StepFailed(`No sheet ${only} in assessments/bank; give the id as it stands in one.`);
+const bank = 'assessments/bank';
+const heartbeatMilliseconds = 30_000;
+const indent = ' '.repeat(9);
+
+function findSheets(only) {
+  const paths = readdirSync(fromRoot(bank), { recursive: true })
+    .filter((path) => path.endsWith('.md') && path !== 'README.md')
+    .filter((path) => only === null || basename(path) === `${only}.md`)
+    .sort()
+    .map((path) => `${bank}/${path}`);
+  if (paths.length > 0) return paths;
+  throw new StepFailed(`No sheet ${only} in ${bank}; give the id as it stands in one.`);
 }
 
-const sourceOf = (bank, path) => readFileSync(`${bank}/${path}`, 'utf8');
-
-/** Processor time: other programs must not make a question look slow. */
-function clock() {
-  const { user, system } = process.cpuUsage();
-  return (user + system) / 1000;
+/** Prints each question as it is done and, now and then, what is still under way. */
+function createTable(count) {
+  const underWay = new Map();
+  let done = 0;
+  const heartbeat = setInterval(() => {
+    const names = [...underWay].map(([path, since]) => {
+      return `${basename(path, '.md')} (${Math.round((Date.now() - since) / 1000)} s)`;
+    });
+    console.log(`${indent}... under way: ${names.join(', ')}`);
+  }, heartbeatMilliseconds);
+  heartbeat.unref();
+  return {
+    onBegin: (path) => underWay.set(path, Date.now()),
+    add(path, audit) {
+      underWay.delete(path);
+      done += 1;
+      const place = `${done}/${count}`.padStart(indent.length - 1);
+      console.log(`${place} ${rowOf(audit).replaceAll('\n', `\n${indent}`)}`);
+    },
+    end: () => clearInterval(heartbeat),
+  };
 }
 
-async function audit({ only, draws }, signal) {
-  // Built only now.
-  const { auditQuestion, breachesOf, parseQuestion } = await import('@ferrule/assessments');
-  const sheets = readSheets(only);
+async function auditBank({ only, draws }, signal) {
+  const sheets = findSheets(only);
   const breaches = [];
-  const place = (at) => `${at + 1}/${sheets.length}`.padStart(8);
-  console.log(`\n${draws} draws of each question\n${''.padStart(8)} ${headings()}`);
-  for (const [at, { path, source }] of sheets.entries()) {
-    const question = parseQuestion(source, `assessments/bank/${path}`);
-    const found = auditQuestion(question, { draws, clock });
-    breaches.push(...breachesOf(found));
-    console.log(`${place(at)} ${rowOf(found).replaceAll('\n', `\n${''.padStart(8)} `)}`);
-    // Lets a signal to stop come through.
-    await new Promise((resolve) => setImmediate(resolve));
-    signal.throwIfAborted();
-  }
+  console.log(`\n${draws} draws of each question\n${indent}${headings()}`);
+  const table = createTable(sheets.length);
+  const onEnd = (path, found) => {
+    breaches.push(...found.breaches);
+    table.add(path, found.audit);
+  };
+  await auditSheets(sheets, { draws, signal, onBegin: table.onBegin, onEnd });
+  table.end();
   return { breaches, count: sheets.length };
 }
 
@@ -52,16 +68,15 @@ async function main({ signal }) {
   await progress.step('Node.js', async (report) => checkNodeVersion(report));
   await progress.step('Dependencies', (report) => installDependencies({ report, signal }));
   await progress.step('Server and libraries', () => buildServer(signal));
-  const { breaches, count } = await audit(options, signal);
-  console.log(`\n${count} questions, ${breaches.length} figures out of bounds`);
+  const { breaches, count } = await auditBank(options, signal);
+  console.log(`\nQuestions: ${count}, figures out of bounds: ${breaches.length}`);
   for (const breach of breaches) console.error(`  ${breachLine(breach)}`);
   return breaches.length === 0 ? 0 : 1;
 }
 
 function reasonOf(error) {
   if (lifetime.signal.aborted) return 'Stopped before the end.';
-  const isOwn = error instanceof StepFailed || error.name === 'SheetInvalid';
-  return isOwn ? error.message : error.stack;
+  return error instanceof StepFailed ? error.message : error.stack;
 }
 
 const lifetime = createLifetime();
