@@ -27,7 +27,7 @@ export default {
     // The checks run the boundaries tool by its path.
     '.': { entry: [], ignoreDependencies: ['dependency-cruiser'] },
     assessments: {
-      entry: ['src/**/*.spec.ts', 'test/**/*.spec.ts'],
+      entry: ['src/**/*.spec.ts', 'test/**/*.spec.ts', 'test/worked-cases/*.ts'],
       // GNU units and ngspice, packages of the operating system.
       ignoreBinaries: ['units', 'ngspice'],
       project: ['src/**/*.ts', 'test/**/*.ts'],
@@ -43,6 +43,7 @@ export default {
         'src/**/*.spec.ts',
         'bin/{start,test,bench,remark,bank-audit,postgres}.mjs',
         'bin/bench/bare-server.mjs',
+        'bin/bank-audit/worker.mjs',
         'bin/**/*.spec.mjs',
         'fakes/**/*.spec.mjs',
         'fakes/mail/sink.mjs',

@@ -2,7 +2,7 @@ import { type QuestionAudit } from './audit-question.ts';
 import { type PartAudit } from './part-tally.ts';
 
 /** Bounds every question keeps. */
-export const AUDIT_BOUNDS = {
+const AUDIT_BOUNDS = {
   mostRejected: 1 / 3,
   /** From key to slip, in tolerances: nearer ones could be taken for each other. */
   nearestSlip: 2,
