@@ -3,7 +3,7 @@ import { drawQuestion, MOST_TRIES } from './draw.ts';
 import { attempt, type Desk } from './sheet-desk.ts';
 
 /** Draws tried when a sheet is published: enough to meet every value of a list; a curve is slow. */
-const TRIALS = { plain: 200, curve: 12 };
+const TRIALS = { plain: 100, curve: 12 };
 /** With fewer of the drawn values kept, a trainee might one day be left without a question. */
 const LEAST_KEPT = 0.1;
 const TRIED_BY_CONDITION = 5;
