@@ -1,9 +1,21 @@
 import { type Locator, type Page } from '@playwright/test';
 import { query } from './stack.ts';
 
+interface HeldOption {
+  id: string;
+}
+
+/** All that apply, an order, or an option for each row. */
+interface HeldList {
+  kind: 'choices' | 'order' | 'match';
+  right: string[];
+  options: HeldOption[];
+}
+
 type HeldPart =
   | { kind: 'quantity'; key: number; slips: { value: number }[] }
-  | { kind: 'options'; right: string; options: { id: string }[] };
+  | { kind: 'options'; right: string; options: HeldOption[] }
+  | HeldList;
 
 export interface HeldItem {
   key: string;
@@ -47,7 +59,9 @@ export async function answerQuestion(
 ): Promise<void> {
   for (const [part, held] of Object.entries(item.parts)) {
     if (held.kind === 'options') await choose(question, wrongOrRight(held, wrong));
-    else await type(question, part, wrong ? held.key / 3.7 : held.key);
+    else if (held.kind === 'quantity')
+      await type(question, part, wrong ? held.key / 3.7 : held.key);
+    else await list[held.kind](question, part, wrong ? [...held.right].reverse() : held.right);
   }
 }
 
@@ -57,6 +71,35 @@ function wrongOrRight({ right, options }: Extract<HeldPart, { kind: 'options' }>
 
 async function choose(question: Page | Locator, option: string): Promise<void> {
   await question.locator(`input[type="radio"][value="${option}"]`).check({ force: true });
+}
+
+const list: Record<
+  HeldList['kind'],
+  (question: Page | Locator, part: string, right: readonly string[]) => Promise<void>
+> = { choices: tick, order: putInOrder, match: pair };
+
+async function tick(question: Page | Locator, _part: string, ids: readonly string[]) {
+  for (const id of ids) {
+    await question.locator(`input[type="checkbox"][value="${id}"]`).check({ force: true });
+  }
+}
+
+async function putInOrder(question: Page | Locator, part: string, ids: readonly string[]) {
+  const steps = question.getByRole('group', { name: `Steps for (${part})` });
+  await steps.getByRole('button', { name: /as they stand/ }).click();
+  for (const [to, id] of ids.entries()) {
+    const laid = await steps
+      .locator('li')
+      .evaluateAll((rows) => rows.map((row) => row.getAttribute('data-step') ?? ''));
+    for (let from = laid.indexOf(id); from > to; from -= 1) {
+      await steps.locator(`li[data-step="${id}"] .move-up`).click();
+    }
+  }
+}
+
+async function pair(question: Page | Locator, part: string, ids: readonly string[]) {
+  const rows = question.getByRole('group', { name: `Pairs for (${part})` }).locator('select');
+  for (const [row, id] of ids.entries()) await rows.nth(row).selectOption(id);
 }
 
 async function type(question: Page | Locator, part: string, si: number): Promise<void> {

@@ -27,7 +27,8 @@ export async function pressOn(wanted: Locator, key: 'Enter' | 'Space'): Promise<
 export async function answerByKeyboard(page: Page, item: HeldItem): Promise<void> {
   for (const [part, held] of Object.entries(item.parts)) {
     if (held.kind === 'options') await choose(page, part, held.right);
-    else await type(page, part, held.key);
+    else if (held.kind === 'quantity') await type(page, part, held.key);
+    else throw new Error(`No paper asks for ${held.kind} yet: part (${part}).`);
   }
 }
 
