@@ -4074,6 +4074,7 @@ export interface operations {
                             title: string;
                         };
                         questions: number;
+                        practise: string[];
                         passPercent: number;
                         attempts: {
                             id: string;
@@ -4126,6 +4127,7 @@ export interface operations {
                         setBy: string;
                         items: {
                             key: string;
+                            slug: string;
                             question: components["schemas"]["QuestionView"];
                             answers: {
                                 [key: string]: components["schemas"]["RawAnswer"];
@@ -4183,6 +4185,7 @@ export interface operations {
                         setBy: string;
                         items: {
                             key: string;
+                            slug: string;
                             question: components["schemas"]["QuestionView"];
                             answers: {
                                 [key: string]: components["schemas"]["RawAnswer"];
@@ -4279,6 +4282,7 @@ export interface operations {
                         setBy: string;
                         items: {
                             key: string;
+                            slug: string;
                             question: components["schemas"]["QuestionView"];
                             answers: {
                                 [key: string]: components["schemas"]["RawAnswer"];

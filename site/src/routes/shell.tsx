@@ -10,6 +10,7 @@ const publicLinks = [{ label: 'Check a certificate', to: '/check' }];
 const linksByRole: Record<Role, { label: string; to: string }[]> = {
   trainee: [
     { label: 'Course map', to: '/course' },
+    { label: 'Practice', to: '/practice' },
     { label: 'My record', to: '/record' },
   ],
   trainer: [{ label: 'Classes', to: '/classes' }],

@@ -26,7 +26,12 @@ const open: WorksheetView = {
   handedInAt: null,
   passPercent: 80,
   setBy: 'O. Marchetti',
-  items: [{ key: 'q1', question: makeQuestion(), answers: {}, marked: null, readAgain: null }],
+  items: [
+    {
+      ...{ key: 'q1', slug: 'vd-chart-table', question: makeQuestion() },
+      ...{ answers: {}, marked: null, readAgain: null },
+    },
+  ],
   marks: null,
   outOf: 4,
   percent: null,
@@ -43,6 +48,7 @@ const marked: WorksheetView = {
   items: [
     {
       key: 'q1',
+      slug: 'vd-chart-table',
       question: makeQuestion(),
       answers: {},
       marked: makeMarked(),

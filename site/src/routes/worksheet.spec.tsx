@@ -1,6 +1,7 @@
 import { screen, within } from '@testing-library/react';
-import { expect, it } from 'vitest';
+import { beforeEach, expect, it } from 'vitest';
 import { problemReply, serve, serveWith, signInAs } from '../testing/api-server.ts';
+import { makeBank } from '../testing/practice.ts';
 import { renderRoute } from '../testing/render-route.tsx';
 
 const summary = {
@@ -8,6 +9,7 @@ const summary = {
   title: 'Runs and returns',
   unit: { number: 3, title: 'Voltage drop' },
   questions: 3,
+  practise: ['vd-deck-lamps', 'vd-chart-table'],
   passPercent: 80,
   attempts: [
     {
@@ -31,8 +33,12 @@ const summary = {
   ],
 };
 
-it('lists every attempt, the last first, and goes on with the open one', async () => {
+beforeEach(() => {
   signInAs();
+  serve('get', '/api/practice/questions', makeBank());
+});
+
+it('lists every attempt, the last first, and goes on with the open one', async () => {
   serve('get', '/api/worksheets/W3', summary);
   renderRoute('/worksheets/W3');
   const rows = within(await screen.findByRole('table')).getAllByRole('row');
@@ -42,7 +48,6 @@ it('lists every attempt, the last first, and goes on with the open one', async (
 });
 
 it('says that nothing is kept yet, and why a start was refused', async () => {
-  signInAs();
   serve('get', '/api/worksheets/W3', { ...summary, attempts: [] });
   serveWith('post', '/api/worksheets/W3/attempts', () =>
     problemReply(429, 'too-many-attempts', { title: 'Too many at once', retryAfterSeconds: 30 }),
@@ -51,4 +56,14 @@ it('says that nothing is kept yet, and why a start was refused', async () => {
   expect(await screen.findByText(/None yet/)).toBeVisible();
   await user.click(screen.getByRole('button', { name: 'Work it' }));
   expect(await screen.findByRole('alert')).toHaveTextContent(/Too many at once.*30 seconds/);
+});
+
+it('offers to build up to each of its questions, in their order', async () => {
+  serve('get', '/api/worksheets/W3', summary);
+  renderRoute('/worksheets/W3');
+  const links = await screen.findAllByRole('link', { name: /^Build up to it/ });
+  expect(links.map((link) => link.getAttribute('href'))).toEqual([
+    '/practice/vd-deck-lamps?left=0',
+    '/practice/vd-chart-table?left=0',
+  ]);
 });

@@ -1,8 +1,10 @@
 import '../features/worksheets/worksheets.css';
-import { useSuspenseQuery } from '@tanstack/react-query';
+import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { Link, useParams } from 'react-router-dom';
 import { cacheOf, type LoaderArgs, requireSession } from '../api/session.ts';
+import { bankQuery } from '../features/practice/queries.ts';
 import { AttemptsTable } from '../features/worksheets/attempts-table.tsx';
+import { BuildUp } from '../features/worksheets/build-up.tsx';
 import { worksheetQuery, type WorksheetSummary } from '../features/worksheets/queries.ts';
 import { StartAttempt } from '../features/worksheets/start-attempt.tsx';
 import { PageTitle } from '../ui/page-title.tsx';
@@ -50,6 +52,7 @@ export function Component() {
           </StartAttempt>
         </SheetHead>
         <AttemptsTable summary={summary} />
+        <Questions summary={summary} />
       </Sheet>
       <FootStrip
         label="Worksheet"
@@ -60,6 +63,15 @@ export function Component() {
       />
     </>
   );
+}
+
+/** Left out while the list of questions is on its way, or when it does not come. */
+function Questions({ summary }: { summary: WorksheetSummary }) {
+  const { data: bank } = useQuery(bankQuery);
+  const questions = summary.practise.flatMap(
+    (slug) => bank?.questions.find((question) => question.slug === slug) ?? [],
+  );
+  return questions.length > 0 && <BuildUp questions={questions} />;
 }
 
 function sayStart({ attempts }: WorksheetSummary): string {

@@ -64,7 +64,9 @@ function useHandIn(id: string, flush: () => Promise<boolean>) {
     onSuccess: (marked) => {
       queryClient.setQueryData(attemptQuery(id).queryKey, marked);
       void queryClient.invalidateQueries({ queryKey: ['worksheet', marked.number] });
-      void queryClient.invalidateQueries({ queryKey: ['course'] });
+      for (const key of ['course', 'record', 'practice']) {
+        void queryClient.invalidateQueries({ queryKey: [key] });
+      }
     },
   });
 }

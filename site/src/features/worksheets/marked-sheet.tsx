@@ -42,16 +42,20 @@ interface MarkedItemProps {
 }
 
 function MarkedItem({ item, place, whose }: MarkedItemProps) {
-  const { question, marked, readAgain } = item;
+  const { question, marked, readAgain, slug } = item;
   if (!marked) return null;
+  const isOwnAndShort = !whose && marked.marks < marked.outOf;
   return (
     <section aria-labelledby={`${item.key}-title`}>
       <ItemHead item={item} place={place} says={marked.summary}>
-        {readAgain && (
-          <p>
-            <Link to={`/sheets/${readAgain.sheet}`}>
-              Read {readAgain.sheet}, {readAgain.title}
-            </Link>
+        {(readAgain ?? isOwnAndShort) && (
+          <p className="item-links">
+            {readAgain && (
+              <Link to={`/sheets/${readAgain.sheet}`}>
+                Read {readAgain.sheet}, {readAgain.title}
+              </Link>
+            )}
+            {isOwnAndShort && <Link to={`/practice/${slug}?left=1`}>Build up to it</Link>}
           </p>
         )}
       </ItemHead>

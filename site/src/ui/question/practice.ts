@@ -7,8 +7,10 @@ import { type Answers, type RawAnswer } from './views.ts';
 
 export type PracticeView = Answer<'Practice_start'>;
 
-export function startPractice(question: string) {
-  return answerOf(api.POST('/api/practice', { body: { question } }));
+/** Draws fresh figures; only the last steps are left to do where a number of them is given. */
+export function startPractice(question: string, left?: number) {
+  const body = { question, ...(left !== undefined && { left }) };
+  return answerOf(api.POST('/api/practice', { body }));
 }
 
 function answerPractice(id: string, answers: Answers) {
@@ -24,9 +26,12 @@ export function askHint(id: string, part: string) {
 }
 
 /** One practice question from its drawing to its mark; what is typed lives on the page alone. */
-export function usePracticeAnswers(id: string) {
+export function usePracticeAnswers(id: string, onMarked?: () => void) {
   const [answers, setAnswers] = useState<Answers>({});
-  const mark = useMutation({ mutationFn: () => answerPractice(id, answers) });
+  const mark = useMutation({
+    mutationFn: () => answerPractice(id, answers),
+    onSuccess: onMarked,
+  });
   const unclear = readUnclear(mark.error);
   return {
     answers,
