@@ -1,7 +1,15 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { numberIn, readTable } from '../../test/reference/read-table.ts';
 import { GENERIC_36_CELLS, shareOf } from './single-diode.ts';
-import { inParallel, inSeries, panelCircuitAmps } from './solar-array.ts';
+import { OutOfRange } from './out-of-range.ts';
+import {
+  inParallel,
+  inputMarginV,
+  inSeries,
+  mostInSeries,
+  panelCircuitAmps,
+} from './solar-array.ts';
 import { directFrom, trackedFrom, withoutTracking, withTracking } from './solar-controller.ts';
 
 const TRACKER = { efficiency: 0.95, limitA: Infinity, headroomV: 0 };
@@ -78,5 +86,68 @@ describe('controllers', () => {
       'give it as a share',
     );
     expect(() => withTracking(LABEL, 12.8, { ...TRACKER, limitA: 0 })).toThrow('not above 0 A');
+  });
+});
+
+describe('solar sums over their whole range', () => {
+  const within = (least: number, most: number): fc.Arbitrary<number> =>
+    fc.double({ min: least, max: most, noNaN: true });
+  const panel = fc.record({ volts: within(0.1, 1500), amps: within(0, 50) });
+
+  it('scale: like panels in series multiply volts, in parallel amps, and watts either way', () => {
+    fc.assert(
+      fc.property(panel, fc.integer({ min: 1, max: 20 }), (one, count) => {
+        const panels = Array.from({ length: count }, () => one);
+        const [string, bank] = [inSeries(panels), inParallel(panels)];
+        expect(string.volts).toBeCloseTo(count * one.volts, 6);
+        expect(bank.amps).toBeCloseTo(count * one.amps, 6);
+        expect(string.volts * string.amps).toBeCloseTo(bank.volts * bank.amps, 3);
+      }),
+    );
+  });
+
+  it('never put one panel too many in a string, nor one too few', () => {
+    // Labels and limits are printed to a tenth of a volt.
+    const tenths = (least: number, most: number): fc.Arbitrary<number> =>
+      fc.integer({ min: least, max: most }).map((count) => count / 10);
+    fc.assert(
+      fc.property(tenths(100, 800), tenths(300, 6000), (coldOpenV, limitV) => {
+        const most = mostInSeries({ coldOpenV, limitV });
+        const margin = (inSeries: number): number => inputMarginV({ coldOpenV, inSeries, limitV });
+        if (most > 0) expect(margin(most)).toBeGreaterThanOrEqual(-1e-6);
+        expect(margin(most + 1)).toBeLessThan(0);
+      }),
+    );
+  });
+
+  it('come to a finite figure or say why there is none', () => {
+    fc.assert(
+      fc.property(panel, within(6, 66), within(0.5, 1), within(0, 10), (one, ...rest) => {
+        const [batteryV, efficiency, headroomV] = rest;
+        const tracker = { efficiency, limitA: 40, headroomV };
+        for (const sum of [
+          () => withoutTracking(one, batteryV),
+          () => withTracking(one, batteryV, tracker),
+        ]) {
+          try {
+            const { amps, watts } = sum();
+            expect(Number.isFinite(amps) && amps >= 0 && Number.isFinite(watts)).toBe(true);
+          } catch (error) {
+            expect(error).toBeInstanceOf(OutOfRange);
+          }
+        }
+      }),
+    );
+  });
+
+  it('a tracker without loss never gives less than the same panel straight on', () => {
+    const string = { groups: [GENERIC_36_CELLS], hasBypass: false };
+    fc.assert(
+      fc.property(within(6, 17), (batteryV) => {
+        const tracked = trackedFrom(string, batteryV, { ...TRACKER, efficiency: 1 });
+        expect(tracked.watts).toBeGreaterThanOrEqual(directFrom(string, batteryV).watts - 1e-9);
+      }),
+      { numRuns: 15 },
+    );
   });
 });
