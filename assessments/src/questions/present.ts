@@ -87,7 +87,7 @@ export function presentDiagram(question: Compiled, drawn: Drawn): DiagramView | 
   };
 }
 
-export function presentPart(question: Compiled, drawn: Drawn, part: Part): PartView {
+function presentPart(question: Compiled, drawn: Drawn, part: Part): PartView {
   const step = 'step' in part ? question.steps.find((one) => one.name === part.step) : undefined;
   return {
     id: part.id,

@@ -80,11 +80,11 @@ function onWrong(page: Page, judged: Judged): Remark[] {
     case 'choice':
       return [lost(null, optionWords(page, part, answer))];
     case 'choices':
-      return remarksOnChoices(page, part, judged);
+      return [...remarksOnChoices(page, part, judged), ...neverWords(part)];
     case 'order':
-      return remarksOnOrder(page, part, judged);
+      return [...remarksOnOrder(page, part, judged), ...neverWords(part)];
     case 'match':
-      return remarksOnMatch(page, part, judged);
+      return [...remarksOnMatch(page, part, judged), ...neverWords(part)];
     case 'size':
       return [lost(null, sizeWords(page.drawn, { part, answer }))];
     case 'quantity':
@@ -98,7 +98,12 @@ function onWrongQuantity(page: Page, part: QuantityPart): Remark[] {
     step?.how.kind === 'read'
       ? `read it again: ${step.how.because}`
       : 'no slip we know leads here: put your lines beside the worked ones';
-  return part.carry === 'never' ? [lost(null, why), note(part.because)] : [lost(null, why)];
+  return [lost(null, why), ...neverWords(part)];
+}
+
+/** Why a part is judged without mercy: it is a matter of safety. */
+function neverWords(part: Part): Remark[] {
+  return part.carry === 'never' ? [note(part.because)] : [];
 }
 
 function optionWords({ drawn }: Page, part: ChoicePart, answer: RawAnswer): string {
