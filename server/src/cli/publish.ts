@@ -1,6 +1,7 @@
 import { fileURLToPath } from 'node:url';
 import { ContentNotInOrder } from '../publishing/problem-list.ts';
 import { publish } from '../publishing/publish.ts';
+import { summariseNotes } from '../publishing/summarise.ts';
 
 const checkout = (folder: string) => fileURLToPath(new URL(`../../../${folder}`, import.meta.url));
 
@@ -21,7 +22,9 @@ try {
     report.leftOut > 0
       ? ` ${report.leftOut} sample paper questions left out: a school keeps its paper pool in its database only.`
       : '';
-  console.log(`${report.published.length} published, ${report.unchanged} unchanged.${leftOut}`);
+  console.log(
+    `${report.published.length} published, ${report.unchanged} unchanged.${leftOut}${summariseNotes(report.notes)}`,
+  );
 } catch (error) {
   if (!(error instanceof ContentNotInOrder)) throw error;
   console.error(error.message);

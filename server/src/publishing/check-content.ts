@@ -1,5 +1,7 @@
 import { assemblePaper, PoolTooSmall } from '@ferrule/assessments';
 import { checkReadings } from './check-readings.ts';
+import { checkWhole } from './check-whole.ts';
+import { checkWords } from './check-words.ts';
 import { checkCourse, type Pools, type ReadCourse } from './course-sheet.ts';
 import type { ProblemList } from './problem-list.ts';
 import type { Read, ReadContent, ReadLesson } from './read-content.ts';
@@ -104,4 +106,6 @@ export function checkContent(
   for (const lesson of lessons) checkPlace(lesson, courses, problems);
   checkPapers(content, problems);
   checkReadings(content, problems);
+  checkWords(content, problems);
+  checkWhole(content, problems);
 }

@@ -5,11 +5,12 @@ import type { CompiledLesson } from './compiled-lesson.ts';
 import { compileLesson, type LessonReferences } from './compile-lesson.ts';
 import type { ContentKind } from './content.ts';
 import type { ReadCourse } from './course-sheet.ts';
+import type { ReadGlossary } from './glossary-sheet.ts';
 import type { ProblemList } from './problem-list.ts';
 import { readContent, referencesOf, type Read } from './read-content.ts';
 import type { SourceFile, Sources } from './read-sources.ts';
 
-/** Version of the compiled form of courses and lessons. */
+/** Version of the compiled form of courses, lessons and glossaries. */
 const FORMAT_VERSION = 1;
 
 /** One revision, ready to be stored. */
@@ -69,6 +70,17 @@ const questionRevision = ({ file, value }: Read<CompiledQuestion>): Revision => 
   lesson: value.meta.lesson,
 });
 
+const glossaryRevision = ({ file, compiled }: ReadGlossary): Revision => ({
+  kind: 'glossary',
+  ...pick(compiled),
+  ...sourceOf(file),
+  formatVersion: FORMAT_VERSION,
+  compiled,
+  pool: null,
+  subject: null,
+  lesson: null,
+});
+
 const blueprintRevision = ({ file, value }: Read<Blueprint>): Revision => ({
   kind: 'blueprint',
   ...pick(value),
@@ -122,6 +134,7 @@ export function compileContent(
         return lessonRevision(file, compiled, hash);
       }),
       ...courses.map(courseRevision),
+      ...content.glossaries.map(glossaryRevision),
       ...blueprints.map(blueprintRevision),
     ],
     schemes: blueprints.map(({ file, value }) => ({ path: file.path, scheme: value.scheme })),

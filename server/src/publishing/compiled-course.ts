@@ -27,6 +27,8 @@ export interface CompiledCourse {
   readonly zone: string;
   readonly units: readonly CourseUnit[];
   readonly paper: string;
+  /** How many sheets the course will have; missing where nobody said. */
+  readonly planned?: number | undefined;
   /** Markdown. */
   readonly intro: string;
 }

@@ -1,5 +1,6 @@
 import type { Blueprint, CompiledQuestion } from '@ferrule/assessments';
 import type { CompiledCourse } from './compiled-course.ts';
+import type { CompiledGlossary } from './compiled-glossary.ts';
 import type { CompiledLesson } from './compiled-lesson.ts';
 
 /** What the compiled form of each kind of published content is. */
@@ -8,6 +9,7 @@ export interface ContentByKind {
   lesson: CompiledLesson;
   question: CompiledQuestion;
   blueprint: Blueprint;
+  glossary: CompiledGlossary;
 }
 
 export type ContentKind = keyof ContentByKind;

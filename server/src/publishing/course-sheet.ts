@@ -23,6 +23,8 @@ const courseFrontMatter = z.strictObject({
   issued: day,
   language,
   owner: line(120),
+  /** How many sheets there will be: once they are all listed, the course is checked as a whole. */
+  planned: z.number().int().min(1).max(200).optional(),
   zone: z.string().refine(isZone, 'a time zone such as Europe/London').default('Europe/London'),
   units: z
     .array(

@@ -1,6 +1,6 @@
 import pg from 'pg';
 import { compileContent, type CompiledContent } from './compile-content.ts';
-import { ContentNotInOrder, ProblemList } from './problem-list.ts';
+import { ContentNotInOrder, ProblemList, type ContentNote } from './problem-list.ts';
 import { readSources, type SourceFolders } from './read-sources.ts';
 import { storeContent, type PublishingReport } from './store-content.ts';
 
@@ -38,6 +38,8 @@ export interface PublishingOptions extends SourceFolders {
 export interface PublishingOutcome extends PublishingReport {
   /** How many paper questions were left out. */
   readonly leftOut: number;
+  /** What does not keep content back, but its authors may want to know. */
+  readonly notes: readonly ContentNote[];
 }
 
 /**
@@ -58,7 +60,8 @@ export async function publish(
   return inTransaction(ownerUrl, async (client) => {
     const report = await storeContent(client, content, problems);
     refuseIfAny(problems);
-    return { ...report, leftOut: compiled.revisions.length - content.revisions.length };
+    const leftOut = compiled.revisions.length - content.revisions.length;
+    return { ...report, leftOut, notes: problems.notes() };
   });
 }
 

@@ -9,6 +9,7 @@ import { basename } from 'node:path';
 import { readCourse, type Pools, type ReadCourse } from './course-sheet.ts';
 import { fillSums } from './fill-sums.ts';
 import { readSheet, type Sheet } from './front-matter.ts';
+import { readGlossary, type ReadGlossary } from './glossary-sheet.ts';
 import { lessonFrontMatter, type LessonFrontMatter } from './lesson-front-matter.ts';
 import type { ProblemList } from './problem-list.ts';
 import type { LessonFile, SourceFile, Sources } from './read-sources.ts';
@@ -34,6 +35,7 @@ function readLessons(files: readonly LessonFile[], problems: ProblemList): ReadL
 /** Every sheet that could be read by itself, and the names of those that could not. */
 export interface ReadContent {
   readonly courses: readonly ReadCourse[];
+  readonly glossaries: readonly ReadGlossary[];
   readonly lessons: readonly ReadLesson[];
   readonly questions: readonly Read<CompiledQuestion>[];
   readonly blueprints: readonly Read<Blueprint>[];
@@ -74,6 +76,7 @@ export function readContent(sources: Sources, problems: ProblemList): ReadConten
   const lessons = readLessons(sources.lessons, problems);
   return {
     courses: sources.courses.flatMap((file) => readCourse(file, problems) ?? []),
+    glossaries: sources.glossaries.flatMap((file) => readGlossary(file, problems) ?? []),
     ...{ lessons, questions, blueprints },
     unread: {
       lessons: lessons.length < sources.lessons.length,

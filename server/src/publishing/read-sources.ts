@@ -1,11 +1,16 @@
 import { readdir, readFile } from 'node:fs/promises';
-import { dirname, join, relative } from 'node:path';
+import { basename, dirname, join, relative } from 'node:path';
 import { ContentNotInOrder } from './problem-list.ts';
 
 export interface SourceFile {
   /** As an author would type it, relative to where publishing was started. */
   readonly path: string;
   readonly text: string;
+}
+
+export interface GlossaryFile extends SourceFile {
+  /** Folder name of the course. */
+  readonly course: string;
 }
 
 export interface LessonFile extends SourceFile {
@@ -18,6 +23,7 @@ export interface LessonFile extends SourceFile {
 export interface Sources {
   readonly courses: readonly SourceFile[];
   readonly lessons: readonly LessonFile[];
+  readonly glossaries: readonly GlossaryFile[];
   readonly questions: readonly SourceFile[];
   readonly blueprints: readonly SourceFile[];
 }
@@ -46,30 +52,38 @@ async function read(file: string): Promise<SourceFile> {
   return { path: relative(process.cwd(), file), text: text.replaceAll('\r\n', '\n') };
 }
 
+async function readGlossary(file: string, lessonsFolder: string): Promise<GlossaryFile> {
+  return { ...(await read(file)), course: courseOf(file, lessonsFolder) };
+}
+
+const courseOf = (file: string, lessonsFolder: string) =>
+  relative(lessonsFolder, file).split(/[\\/]/)[0] ?? '';
+
 async function readLesson(file: string, lessonsFolder: string): Promise<LessonFile> {
   const folder = dirname(file);
   const names = (await readdir(folder)).filter((name) => name.endsWith('.svg')).sort();
   const drawings = new Map<string, SourceFile>();
   for (const name of names) drawings.set(name, await read(join(folder, name)));
-  const [course = ''] = relative(lessonsFolder, file).split(/[\\/]/);
-  return { ...(await read(file)), course, drawings };
+  return { ...(await read(file)), course: courseOf(file, lessonsFolder), drawings };
 }
 
 /** Reads everything that may be published; nothing is judged yet. */
 export async function readSources(folders: SourceFolders): Promise<Sources> {
   const lessonFiles = (await filesUnder(folders.lessons)).filter((file) => file.endsWith('.md'));
-  const isCourse = (file: string) => file.endsWith('course.md');
+  const named = (name: string) => lessonFiles.filter((file) => basename(file) === name);
+  const isLesson = (file: string) => !['course.md', 'glossary.md'].includes(basename(file));
   const sheets = async (folder: string) => {
     const files = await filesUnder(join(folders.assessments, folder));
     const isSheet = (file: string) => file.endsWith('.md') && !file.endsWith('README.md');
     return Promise.all(files.filter(isSheet).map(read));
   };
   return {
-    courses: await Promise.all(lessonFiles.filter(isCourse).map(read)),
+    courses: await Promise.all(named('course.md').map(read)),
+    glossaries: await Promise.all(
+      named('glossary.md').map((file) => readGlossary(file, folders.lessons)),
+    ),
     lessons: await Promise.all(
-      lessonFiles
-        .filter((file) => !isCourse(file))
-        .map((file) => readLesson(file, folders.lessons)),
+      lessonFiles.filter(isLesson).map((file) => readLesson(file, folders.lessons)),
     ),
     questions: await sheets('bank'),
     blueprints: await sheets('papers'),

@@ -8,6 +8,7 @@ import { createCertificates } from './20261201T1000-create-certificates.ts';
 import { endCertificatesOnce } from './20261201T1010-end-certificates-once.ts';
 import { fadePractice } from './20261201T1700-fade-practice.ts';
 import { choosePracticeProfile } from './20261201T1710-choose-practice-profile.ts';
+import { publishGlossaries } from './20261201T1740-publish-glossaries.ts';
 
 /** One step of the schema's history. Never edited once it has landed. */
 export interface Migration {
@@ -26,4 +27,5 @@ export const migrations: readonly Migration[] = [
   endCertificatesOnce,
   fadePractice,
   choosePracticeProfile,
+  publishGlossaries,
 ];
