@@ -11,6 +11,7 @@ import { ClassesService } from '../classes/classes.service.ts';
 import { JobsService } from '../jobs/jobs.service.ts';
 import { LessonsService } from '../lessons/lessons.service.ts';
 import { PapersService } from '../papers/papers.service.ts';
+import { PracticeService } from '../practice/practice.service.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
 import { SessionsService } from '../sessions/sessions.service.ts';
 import { SavingService } from '../sittings/saving.service.ts';
@@ -59,6 +60,9 @@ export class HistoryPlayer {
         return;
       case 'worksheet':
         await this.work(accountId, happening);
+        return;
+      case 'practise':
+        await this.practise(accountId, happening);
         return;
       case 'paper':
         await this.sit(accountId, happening);
@@ -110,6 +114,26 @@ export class HistoryPlayer {
     await worksheets.handIn(accountId, id);
   }
 
+  private async practise(
+    accountId: string,
+    { question, left, slipped }: Extract<Happening, { does: 'practise' }>,
+  ): Promise<void> {
+    const practice = this.service(PracticeService);
+    const { id, asked } = await practice.start(accountId, { question, left });
+    const [item] = await this.rows<Pick<StoredItem, 'revisionId' | 'drawn'>>(
+      `SELECT question_revision_id AS "revisionId", drawn -> 'drawn' AS drawn
+         FROM practice_attempts WHERE id = $1`,
+      [id],
+    );
+    if (!item) throw new Error(`Practice of ${question} was not kept.`);
+    const answers = Object.entries(await this.answers(item, slipped));
+    await practice.answer(
+      accountId,
+      id,
+      Object.fromEntries(answers.filter(([part]) => asked.includes(part))),
+    );
+  }
+
   private async sit(
     accountId: string,
     { at, wrongFromEnd }: Extract<Happening, { does: 'paper' }>,
@@ -151,7 +175,10 @@ export class HistoryPlayer {
     }
   }
 
-  private async answers({ revisionId, drawn }: StoredItem, slipped: readonly string[]) {
+  private async answers(
+    { revisionId, drawn }: Pick<StoredItem, 'revisionId' | 'drawn'>,
+    slipped: readonly string[],
+  ) {
     const { question } = await this.service(QuestionsService).byRevision(revisionId);
     return keyAnswers(question, drawn, slipped);
   }

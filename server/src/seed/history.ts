@@ -10,6 +10,13 @@ export type Happening = {
   | { readonly does: 'finish'; readonly sheet: string }
   /** `slipped`: per question, in its order, the parts answered with a predicted slip. */
   | { readonly does: 'worksheet'; readonly number: string; readonly slipped: readonly string[][] }
+  /** `left`: how many of the last steps were left to do; whole where it is missing. */
+  | {
+      readonly does: 'practise';
+      readonly question: string;
+      readonly left?: number;
+      readonly slipped: readonly string[];
+    }
   /** `slipped`: whole questions answered wrongly, by their place on the paper from the end. */
   | { readonly does: 'paper'; readonly wrongFromEnd: number }
   /** What somebody of the school, by e-mail, does to the person's certificate. */
@@ -30,6 +37,11 @@ const worksheet = (
   [name, number]: [string, string],
   slipped: readonly string[][] = right,
 ): Happening => ({ ...{ at, number, slipped }, who: home(name), does: 'worksheet' });
+const practise = (
+  at: string,
+  [name, question]: [string, string],
+  more: { left?: number; slipped?: readonly string[] } = {},
+): Happening => ({ slipped: [], ...more, ...{ at, question }, who: home(name), does: 'practise' });
 const paper = (at: string, name: string, wrongFromEnd: number): Happening => ({
   ...{ at, wrongFromEnd },
   who: home(name),
@@ -94,6 +106,12 @@ const happenings: Happening[] = [
     paragraph: 4,
   },
   worksheet('2026-11-30T19:40:00Z', ['ifeoma.castellan', 'W3'], oneWay),
+  practise('2026-10-12T18:00:00Z', ['ifeoma.castellan', 'cl-amps-from-watts'], { left: 1 }),
+  practise('2026-10-12T18:20:00Z', ['ifeoma.castellan', 'cl-amps-from-watts']),
+  practise('2026-10-26T18:10:00Z', ['ifeoma.castellan', 'cl-amps-from-watts']),
+  practise('2026-11-09T18:05:00Z', ['ifeoma.castellan', 'cl-duty'], { slipped: ['a'] }),
+  practise('2026-11-09T18:30:00Z', ['ifeoma.castellan', 'si-which-lead-first']),
+  practise('2026-11-29T18:15:00Z', ['ifeoma.castellan', 'vd-chart-table'], { left: 2 }),
   finish('2026-10-09T17:00:00Z', 'signe.holloway', '1.4'),
   worksheet('2026-11-20T18:00:00Z', ['signe.holloway', 'W3'], oneWay),
   finish('2026-11-21T17:00:00Z', 'caspian.rudd', '3.4'),
