@@ -16,7 +16,7 @@ import { type Expr } from './expression.ts';
 import { drawChoices, drawMatch, drawOrder } from './draw-listed.ts';
 import { type Draws, drawsFrom, opaqueIds } from './random.ts';
 import { isRightOption, slipValues } from './predictions.ts';
-import { holds, solve } from './solve.ts';
+import { holds, solveInto } from './solve.ts';
 import { isSameSize, sizeSi } from './sizes.ts';
 import { isTooNear, keyOf, rangeOf } from './tolerance.ts';
 import { type CompiledQuestion, type CurveView, type DrawnQuestion } from './types.ts';
@@ -49,17 +49,16 @@ export function drawQuestion(
   const draws = drawsFrom(seed);
   try {
     const { values, curve } = drawValues(question, draws, onRejected);
-    const parts = question.parts.map((part) => [
-      part.id,
-      drawPart(part, { question, values, draws }),
-    ]);
+    const table = { question, values, draws };
+    const parts: Record<string, DrawnPart> = {};
+    for (const part of question.parts) parts[part.id] = drawPart(part, table);
     const drawn: Drawn = {
       formatVersion: FORMAT_VERSION,
       markerVersion: MARKER_VERSION,
       slug: question.meta.slug,
       revision: question.meta.revision,
-      values: Object.fromEntries(values),
-      parts: Object.fromEntries(parts) as Record<string, DrawnPart>,
+      values: inOrder(question, values),
+      parts,
       curve,
     };
     return drawn;
@@ -88,7 +87,7 @@ function drawValues(
     if (log) readInto(values, question, log);
     if (!onCurve.every(isMet)) continue;
     const curve = question.curve && log ? drawCurve(question.curve, log, values) : null;
-    return { values: inOrder(question, solve(question, values)), curve };
+    return { values: solveInto(question, values), curve };
   }
   throw new Error(`none of ${MOST_TRIES} draws meets its conditions; widen the given values.`);
 }
@@ -103,8 +102,10 @@ function drawGivens(question: Compiled, draws: Draws): Map<string, number> {
 }
 
 /** Steps are worked as conditions ask for them; they are kept as they stand on the sheet. */
-function inOrder(question: Compiled, values: ReadonlyMap<string, number>): Map<string, number> {
-  return new Map(workingsOf(question).names.map((name) => [name, values.get(name) ?? NaN]));
+function inOrder(question: Compiled, values: ReadonlyMap<string, number>): Record<string, number> {
+  const kept: Record<string, number> = {};
+  for (const name of workingsOf(question).names) kept[name] = values.get(name) ?? NaN;
+  return kept;
 }
 
 /** Adds what is read off a curve to the values. */

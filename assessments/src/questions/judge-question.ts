@@ -15,9 +15,8 @@ import { judgeChoices, judgeMatch, judgeOrder } from './judge-listed.ts';
 import { judgeOption } from './judge-option.ts';
 import { type Judged } from './judged.ts';
 import { isBeyondSense, OwnSums, type OwnValues } from './own-values.ts';
-import { presentPart } from './present.ts';
 import { readTypedIn } from './read-answer.ts';
-import { chosenIn, readChosen } from './read-chosen.ts';
+import { chosenIn, readChosenId } from './read-chosen.ts';
 import { sizeSi } from './sizes.ts';
 import {
   type Answers,
@@ -53,9 +52,9 @@ export function judgeQuestion(
   const question = openQuestion(stored);
   const drawn = openDrawn(question, drawing);
   const parts = judgeParts({ question, drawn }, question.parts, answers).map(
-    ({ part: { id, marks: outOf }, finding: { verdict, marks, rule } }) => ({
-      ...{ id, verdict, marks, outOf, rule },
-    }),
+    ({ part: { id, marks: outOf }, finding: { verdict, marks, rule } }) => {
+      return { id, verdict, marks, outOf, rule };
+    },
   );
   return {
     markerVersion: MARKER_VERSION,
@@ -71,7 +70,7 @@ export function judgeParts(
   asked: readonly Part[],
   answers: Answers,
 ): Judged[] {
-  const desk: Desk = { question, drawn, own: new Map(), judged: [] };
+  const desk: Desk = { question, drawn, own: [], judged: [] };
   for (const part of asked) {
     const answer = Object.hasOwn(answers, part.id) ? answers[part.id] : undefined;
     desk.judged.push(judgePart(desk, part, answer ?? NOTHING));
@@ -117,11 +116,9 @@ function judgeTyped(desk: Desk, asked: Asked<QuantityPart>): Judged {
   if (held?.kind !== 'quantity') return unjudged(asked, UNDRAWN);
   const { typed } = reading;
   const { question, drawn } = desk;
-  const sums = new OwnSums(question, drawn, { step: part.step, own: new Map(desk.own) });
-  const finding = judgeQuantity({
-    ...{ question, part, drawn: held, typed, sums },
-    values: drawn.values,
-  });
+  const sums = new OwnSums(question, drawn, { step: part.step, own: desk.own });
+  const { values } = drawn;
+  const finding = judgeQuantity({ question, part, drawn: held, typed, sums, values });
   const value = toSi(typed.figure, typed.unit);
   const isCarryStopped = typed.isOfKind && !keepOwn(desk, part, { finding, value });
   return { part, answer, finding, sums, typed, isCarryStopped };
@@ -129,7 +126,7 @@ function judgeTyped(desk: Desk, asked: Asked<QuantityPart>): Judged {
 
 function judgeChosen(desk: Desk, asked: Asked<Exclude<Part, QuantityPart>>): Judged {
   const { part, answer, held } = asked;
-  const reading = readChosen(presentPart(desk.question, desk.drawn, part), answer);
+  const reading = readChosenId(part, held, answer);
   if (reading.state === 'blank') return unjudged(asked, BLANK);
   if (reading.state !== 'understood') return unjudged(asked, notUnderstood(reading.ask));
   if (held && (part.kind === 'size' || part.kind === 'choice')) {
@@ -151,11 +148,9 @@ function judgeOneOf(desk: Desk, asked: Asked<SizePart | ChoicePart>): Judged {
   if (held?.kind !== 'options' || !chosen) return unjudged(asked, UNDRAWN);
   const names = part.kind === 'size' ? { step: part.step } : { options: part.options };
   const { question, drawn } = desk;
-  const sums = new OwnSums(question, drawn, { ...names, own: new Map(desk.own) });
-  const finding = judgeOption({
-    ...{ question, part, held, chosen, sums },
-    slipsBefore: desk.judged.flatMap((one) => one.finding.slip ?? []),
-  });
+  const sums = new OwnSums(question, drawn, { ...names, own: desk.own });
+  const slipsBefore = desk.judged.flatMap((one) => one.finding.slip ?? []);
+  const finding = judgeOption({ question, part, held, chosen, sums, slipsBefore });
   const isCarryStopped =
     part.kind === 'size' && !keepOwn(desk, part, { finding, value: sizeSi(part, chosen.index) });
   return { part, answer, finding, sums, typed: null, isCarryStopped };
@@ -169,6 +164,7 @@ function keepOwn(
 ): boolean {
   const step = workingsOf(desk.question).steps.get(part.step)?.step;
   if (step && isBeyondSense(value, desk.drawn.values[part.step] ?? NaN, step.unit)) return false;
-  desk.own.set(part.step, { value, part: part.id, isOff: finding.verdict !== 'right' });
+  const isOff = finding.verdict !== 'right';
+  desk.own.push({ step: part.step, value, part: part.id, isOff });
   return true;
 }

@@ -58,7 +58,7 @@ function quantity(
   const slipped = isSlipped ? held.slips[0]?.value : undefined;
   const value = slipped ?? worked ?? held.key;
   const isOff = value < held.low || value > held.high;
-  own.set(part.step, { value, part: part.id, isOff });
+  own.push({ step: part.step, value, part: part.id, isOff });
   return typed(part, value);
 }
 
@@ -76,7 +76,7 @@ export function keyAnswers(
 ): Answers {
   const question = openQuestion(stored);
   const drawn = drawnQuestion as unknown as Drawn;
-  const table: Table = { question, drawn, own: new Map() };
+  const table: Table = { question, drawn, own: [] };
   const answers: Answers = {};
   for (const part of question.parts) {
     const held = drawn.parts[part.id];

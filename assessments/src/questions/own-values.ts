@@ -6,11 +6,13 @@ import { type Dimension, sameDimension, type Unit } from './units.ts';
 
 /** A trainee's own answer to a step, and whether it was anything but right. */
 interface OwnValue {
+  step: string;
   value: number;
   part: string;
   isOff: boolean;
 }
-export type OwnValues = Map<string, OwnValue>;
+/** In the order they were given; of two to one step the later counts. */
+export type OwnValues = OwnValue[];
 
 /** Everything recomputed on a trainee's own earlier values. */
 export interface OwnAccount {
@@ -23,7 +25,7 @@ export interface OwnAccount {
 interface Wanted {
   step?: string;
   options?: readonly Option[];
-  own: OwnValues;
+  own: Readonly<OwnValues>;
 }
 
 /**
@@ -38,9 +40,9 @@ export function ownFor(question: Compiled, drawn: Drawn, wanted: Wanted): OwnAcc
   for (const step of question.steps) {
     if (step.how.kind === 'read') known.set(step.name, drawn.values[step.name] ?? NaN);
   }
-  for (const [name, { value }] of used) known.set(name, value);
-  const off = used.filter(([, { isOff }]) => isOff);
-  const account = { parts: off.map(([, { part }]) => part), isOff: off.length > 0 };
+  for (const { step, value } of used) known.set(step, value);
+  const off = used.filter(({ isOff }) => isOff);
+  const account = { parts: off.map(({ part }) => part), isOff: off.length > 0 };
   try {
     return { values: solve(question, known), ...account };
   } catch {
@@ -49,15 +51,16 @@ export function ownFor(question: Compiled, drawn: Drawn, wanted: Wanted): OwnAcc
   }
 }
 
-function usedOwn(question: Compiled, { step, options, own }: Wanted): [string, OwnValue][] {
-  if (own.size === 0) return [];
+function usedOwn(question: Compiled, { step, options, own }: Wanted): OwnValue[] {
+  if (own.length === 0) return [];
+  const latest = new Map(own.map((one) => [one.step, one]));
   const conditions = (options ?? []).flatMap(({ right }) =>
     typeof right === 'boolean' ? [] : [...namesIn(right)],
   );
   // What an own value was made of matters no more: the search stops there.
-  const stop = new Set([...own.keys()].filter((name) => name !== step));
+  const stop = new Set([...latest.keys()].filter((name) => name !== step));
   const needed = leansOn(question, step === undefined ? conditions : [step], stop);
-  return [...own].filter(([name]) => needed.has(name) && name !== step);
+  return [...latest.values()].filter((one) => needed.has(one.step) && one.step !== step);
 }
 
 /** The sums on a trainee's own earlier values, worked once and only when they are asked for. */
@@ -66,15 +69,21 @@ export class OwnSums {
   private readonly question: Compiled;
   private readonly drawn: Drawn;
   private readonly wanted: Wanted;
+  /** Own values that were there when the part was judged; later ones do not count for it. */
+  private readonly count: number;
 
   constructor(question: Compiled, drawn: Drawn, wanted: Wanted) {
     this.question = question;
     this.drawn = drawn;
     this.wanted = wanted;
+    this.count = wanted.own.length;
   }
 
   get account(): OwnAccount | null {
-    if (this.worked === undefined) this.worked = ownFor(this.question, this.drawn, this.wanted);
+    if (this.worked === undefined) {
+      const own = this.wanted.own.slice(0, this.count);
+      this.worked = ownFor(this.question, this.drawn, { ...this.wanted, own });
+    }
     return this.worked;
   }
 }
@@ -90,6 +99,7 @@ const RUNS_BOTH_WAYS: readonly Dimension[] = ['A', 'V', ''].map(
 export function isBeyondSense(value: number, key: number, unit: Unit): boolean {
   const ratio = Math.abs(value / key);
   const isFar = key !== 0 && !(ratio >= 1 / FURTHEST && ratio <= FURTHEST);
-  const mayBeNegative = RUNS_BOTH_WAYS.some((one) => sameDimension(one, unit.dimension));
-  return isFar || !Number.isFinite(value) || (value <= 0 && key > 0 && !mayBeNegative);
+  if (isFar || !Number.isFinite(value)) return true;
+  if (value > 0 || key <= 0) return false;
+  return !RUNS_BOTH_WAYS.some((one) => sameDimension(one, unit.dimension));
 }

@@ -14,6 +14,8 @@ export type QuantityReading =
   | { state: 'not-a-quantity' };
 
 const LONGEST = 60;
+/** What most people type; it needs no further look. */
+const PLAIN_FIGURE = /^-?\d+(?:\.\d+)?$/;
 /** "I = 14 A", "U_d = 0.67 V", "≈ 5": what a figure is called, or that it is rounded. */
 const CALLED = /^(?:\p{L}[\p{L}\p{N}_]{0,9} ?)?[=≈~] ?/u;
 const MINUS_IN_WORDS = /^minus (?=[\d.,])/i;
@@ -34,6 +36,9 @@ export function readQuantity(typed: string, wanted: Unit | null): QuantityReadin
   const text = plainSigns(typed);
   if (text === '') return { state: 'blank' };
   if (text.length > LONGEST) return { state: 'not-a-quantity' };
+  if (PLAIN_FIGURE.test(text) && wanted?.symbol !== 'AWG') {
+    return { state: 'quantity', figure: Number(text), unit: null };
+  }
   const bare = text.replace(CALLED, '').replace(MINUS_IN_WORDS, '-');
   const time = readTime(bare, wanted);
   if (time) return time.state === 'time' ? { ...time, state: 'quantity' } : time;

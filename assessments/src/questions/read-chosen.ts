@@ -1,3 +1,4 @@
+import { type DrawnPart, type Part } from './compiled.ts';
 import { type OptionView, type PartView, type RawAnswer, type Reading } from './types.ts';
 
 const NOT_ON_PAPER: Reading = {
@@ -5,8 +6,28 @@ const NOT_ON_PAPER: Reading = {
   ask: 'That choice is not on this paper; choose again.',
 };
 
+/** What of a part a choice is read by. */
+type Choosable = Pick<PartView, 'kind' | 'options' | 'rows'>;
+
+/** As readChosen, for the marker: it needs no text of what was chosen. */
+export function readChosenId(
+  { kind }: Part,
+  held: DrawnPart | undefined,
+  answer: RawAnswer,
+): Reading {
+  const untold = (one: { id: string }): OptionView => ({ id: one.id, text: '' });
+  return readChosen(
+    {
+      kind: kind === 'size' ? 'choice' : kind,
+      options: held && held.kind !== 'quantity' ? held.options.map(untold) : [],
+      rows: held?.kind === 'match' ? held.rows.map(untold) : [],
+    },
+    answer,
+  );
+}
+
 /** Reads what was chosen, put in order or matched; never compares it with a key. */
-export function readChosen(part: PartView, answer: RawAnswer): Reading {
+export function readChosen(part: Choosable, answer: RawAnswer): Reading {
   switch (part.kind) {
     case 'choices':
       return readAll(part, chosenIn(answer));
@@ -25,20 +46,20 @@ export function chosenIn(answer: RawAnswer): string[] {
   return Array.isArray(options) ? options.map(String) : [];
 }
 
-function readOne({ options }: PartView, id: string | null): Reading {
+function readOne({ options }: Choosable, id: string | null): Reading {
   if (id === null || id === '') return { state: 'blank' };
   const chosen = options.find((option) => option.id === id);
   return chosen ? understood(chosen.text) : NOT_ON_PAPER;
 }
 
-function readAll({ options }: PartView, ids: readonly string[]): Reading {
+function readAll({ options }: Choosable, ids: readonly string[]): Reading {
   if (ids.length === 0) return { state: 'blank' };
   if (textsOf(ids, options).length < ids.length) return NOT_ON_PAPER;
   // Said in the order of the paper, each once, however they were ticked.
   return understood(textsOf([...new Set(ids)], options).join('; '));
 }
 
-function readOrder({ options }: PartView, ids: readonly string[]): Reading {
+function readOrder({ options }: Choosable, ids: readonly string[]): Reading {
   if (ids.length === 0) return { state: 'blank' };
   const texts = textsOf(ids, options);
   if (texts.length < ids.length) return NOT_ON_PAPER;
@@ -51,7 +72,7 @@ function readOrder({ options }: PartView, ids: readonly string[]): Reading {
   };
 }
 
-function readMatch({ rows, options }: PartView, ids: readonly string[]): Reading {
+function readMatch({ rows, options }: Choosable, ids: readonly string[]): Reading {
   if (ids.every((id) => id === '')) return { state: 'blank' };
   const given = ids.filter((id) => id !== '');
   if (ids.length > rows.length || textsOf(given, options).length < given.length) {

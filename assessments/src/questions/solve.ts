@@ -27,7 +27,12 @@ export function leansOn(
  * @throws {NotFinite} when a step comes to no finite number.
  */
 export function solve(question: Compiled, known: ReadonlyMap<string, number>): Map<string, number> {
-  return workMissing(workingsOf(question).steps.values(), new Map(known));
+  return solveInto(question, new Map(known));
+}
+
+/** As solve, adding to the values themselves. */
+export function solveInto(question: Compiled, values: Map<string, number>): Map<string, number> {
+  return workMissing(workingsOf(question).steps.values(), values);
 }
 
 function workMissing(

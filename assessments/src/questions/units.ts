@@ -202,12 +202,14 @@ function addPrefixed(unit: BaseUnit, add: (spelling: string, unit: Unit) => void
 
 /** Units a spelling may stand for, likeliest first; empty when none. */
 export function unitsSpelt(spelling: string): readonly Unit[] {
+  const known = BY_SPELLING.get(spelling);
+  if (known) return known;
   const tidy = spelling.trim().replace(/[\s\u00a0\u2009\u202f]+/g, ' ');
   return BY_SPELLING.get(tidy) ?? BY_SPELLING.get(tidy.toLowerCase()) ?? [];
 }
 
 export function sameDimension(a: Dimension, b: Dimension): boolean {
-  return a.every((exponent, index) => exponent === b[index]);
+  return a[0] === b[0] && a[1] === b[1] && a[2] === b[2] && a[3] === b[3] && a[4] === b[4];
 }
 
 /** Value in SI of a figure in the unit. */
