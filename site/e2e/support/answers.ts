@@ -46,6 +46,17 @@ export async function itemsOfAttempt(attemptId: string): Promise<HeldItem[]> {
   );
 }
 
+/** Of the practice question that was drawn last for that person. */
+export async function partsOfPractice(slug: string, email: string): Promise<HeldItem['parts']> {
+  const [latest] = await query<Pick<HeldItem, 'parts'>>(
+    `SELECT drawn -> 'drawn' -> 'parts' AS parts
+       FROM practice_attempts JOIN accounts ON accounts.id = account_id
+      WHERE drawn ->> 'slug' = $1 AND email = $2 ORDER BY started_at DESC LIMIT 1`,
+    [slug, email],
+  );
+  return latest?.parts ?? {};
+}
+
 interface Wanted {
   /** Half of the right figure, or another option than the right one. */
   wrong?: boolean;

@@ -24,11 +24,13 @@ export async function pressOn(wanted: Locator, key: 'Enter' | 'Space'): Promise<
 }
 
 /** Answers every part of the question on the page rightly, with the keyboard alone. */
-export async function answerByKeyboard(page: Page, item: HeldItem): Promise<void> {
+export async function answerByKeyboard(page: Page, item: Pick<HeldItem, 'parts'>): Promise<void> {
   for (const [part, held] of Object.entries(item.parts)) {
     if (held.kind === 'options') await choose(page, part, held.right);
     else if (held.kind === 'quantity') await type(page, part, held.key);
-    else throw new Error(`No paper asks for ${held.kind} yet: part (${part}).`);
+    else if (held.kind === 'choices') await tick(page, part, held.right);
+    else if (held.kind === 'order') await putInOrder(page, part, held.right);
+    else await match(page, part, held.right);
   }
 }
 
@@ -50,6 +52,35 @@ async function type(page: Page, part: string, si: number): Promise<void> {
   if (!typed.unit) return;
   await tabTo(unit);
   await pressUntil(page, async () => (await unit.inputValue()) === typed.unit);
+}
+
+async function tick(page: Page, part: string, ids: readonly string[]): Promise<void> {
+  const choices = page.getByRole('group', { name: `Choices for (${part})` });
+  for (const id of ids) await pressOn(choices.locator(`[value="${id}"]`), 'Space');
+}
+
+async function putInOrder(page: Page, part: string, ids: readonly string[]): Promise<void> {
+  const steps = page.getByRole('group', { name: `Steps for (${part})` });
+  await pressOn(steps.getByRole('button', { name: /as they stand/ }), 'Enter');
+  for (const [to, id] of ids.entries()) {
+    const step = steps.locator(`[data-step="${id}"]`);
+    const placeOf = async () => Number(await step.locator('.step-number').textContent()) - 1;
+    const up = step.getByRole('button', { name: /^Move up/ });
+    for (let from = await placeOf(); from > to; from -= 1) {
+      await pressOn(up, 'Space');
+      // It has moved, and the focus with it.
+      await expect.poll(placeOf).toBe(from - 1);
+      await expect(up).toBeFocused();
+    }
+  }
+}
+
+async function match(page: Page, part: string, ids: readonly string[]): Promise<void> {
+  const rows = page.getByRole('group', { name: `Pairs for (${part})` }).getByRole('combobox');
+  for (const [at, id] of ids.entries()) {
+    await tabTo(rows.nth(at));
+    await pressUntil(page, async () => (await rows.nth(at).inputValue()) === id);
+  }
 }
 
 async function pressUntil(page: Page, isThere: () => Promise<boolean>): Promise<void> {

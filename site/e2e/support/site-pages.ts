@@ -31,6 +31,11 @@ const drawFigures = async (page: Page) => {
   await page.getByLabel('Answer to (a)').waitFor();
 };
 
+const markUnanswered = async (page: Page) => {
+  await page.getByRole('button', { name: 'Mark it' }).click();
+  await page.locator('.marked').waitFor();
+};
+
 const openItems = async (page: Page) => {
   await page.getByLabel('Reason, kept with the look').fill('An appeal.');
   await page.getByRole('button', { name: 'Open the items' }).click();
@@ -87,6 +92,25 @@ export const traineePages: SitePage[] = [
     at: ({ markedWorksheet }) => `worksheet-attempts/${markedWorksheet}`,
     heading: 'Runs and returns',
   },
+  { route: 'practice', heading: 'One question at a time' },
+  { route: 'practice', at: 'practice?subject=VD&level=apply', heading: 'One question at a time' },
+  { route: 'practice', at: 'practice?find=nothing-like-it', heading: 'One question at a time' },
+  { route: 'practice/:slug', at: 'practice/vd-chart-table', heading: 'Feeding the chart table' },
+  {
+    route: 'practice/:slug',
+    at: 'practice/vd-chart-table?left=2',
+    heading: 'Feeding the chart table',
+  },
+  {
+    route: 'practice/:slug',
+    at: 'practice/vd-chart-table?left=1',
+    heading: 'Feeding the chart table',
+    after: markUnanswered,
+  },
+  { route: 'practice/:slug', at: 'practice/si-order-two-sources', heading: /./ },
+  { route: 'practice/:slug', at: 'practice/si-spanner', heading: /./, after: markUnanswered },
+  { route: 'practice/:slug', at: 'practice/cc-stage-points', heading: /./ },
+  { route: 'practice/:slug', at: 'practice/no-such-question', heading: /no such question/ },
   { route: 'papers/:slug', at: 'papers/final-paper', heading: 'Final paper' },
   { route: 'record', heading: 'My record' },
   { route: 'account', heading: 'Ifeoma Castellan' },
