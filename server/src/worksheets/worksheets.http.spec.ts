@@ -59,7 +59,7 @@ describe('a worksheet', () => {
     const again = await startWorksheet(trainee);
     expect(again.id).toBe(sheet.id);
     expect(firstItem(again.items)).toEqual({
-      ...{ key, question, marked: null, readAgain: null },
+      ...{ key, slug: 'vd-feed', question, marked: null, readAgain: null },
       answers: { a: answers['a'], b: answers['b'] },
     });
   });
