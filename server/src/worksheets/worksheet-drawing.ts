@@ -5,7 +5,13 @@ import { PracticeService } from '../practice/practice.service.ts';
 import type { Published } from '../publishing/content.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
 import { QuestionsService, type Draw } from '../questions/questions.service.ts';
-import { figuresOf, hasFigures, variantOf, type KeptItem, type NewAttempt } from './worksheet-attempt.ts';
+import {
+  figuresOf,
+  hasFigures,
+  variantOf,
+  type KeptItem,
+  type NewAttempt,
+} from './worksheet-attempt.ts';
 import type { PlacedWorksheet } from './worksheet.presenter.ts';
 import { WorksheetsRepository } from './worksheets.repository.ts';
 
