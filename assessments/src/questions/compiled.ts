@@ -11,7 +11,7 @@ import {
 import { type Unit } from './units.ts';
 
 export const FORMAT_VERSION = 1;
-export const MARKER_VERSION = 1;
+export const MARKER_VERSION = 2;
 
 /** Where a given value comes from; figures are in the given's own unit. */
 export type Source =

@@ -1,8 +1,9 @@
 import { type Compiled, type Drawn, type Option } from './compiled.ts';
 import { namesIn } from './expression.ts';
-import { leansOn, solve } from './solve.ts';
+import { leansOn, SolvedOnDemand } from './solve.ts';
 import { parseUnit } from './unit-expression.ts';
 import { type Dimension, sameDimension, type Unit } from './units.ts';
+import { workingsOf } from './workings.ts';
 
 /** A trainee's own answer to a step, and whether it was anything but right. */
 interface OwnValue {
@@ -14,7 +15,7 @@ interface OwnValue {
 /** In the order they were given; of two to one step the later counts. */
 export type OwnValues = OwnValue[];
 
-/** Everything recomputed on a trainee's own earlier values. */
+/** What is recomputed on a trainee's own earlier values, as far as it is asked for. */
 export interface OwnAccount {
   values: Map<string, number>;
   /** Parts whose answers were used and were not right. */
@@ -35,16 +36,14 @@ interface Wanted {
 export function ownFor(question: Compiled, drawn: Drawn, wanted: Wanted): OwnAccount | null {
   const used = usedOwn(question, wanted);
   if (used.length === 0) return null;
-  const known = new Map<string, number>();
-  for (const given of question.givens) known.set(given.name, drawn.values[given.name] ?? NaN);
-  for (const step of question.steps) {
-    if (step.how.kind === 'read') known.set(step.name, drawn.values[step.name] ?? NaN);
-  }
-  for (const { step, value } of used) known.set(step, value);
+  const values = new SolvedOnDemand(question, []);
+  for (const name of workingsOf(question).unworked) values.set(name, drawn.values[name] ?? NaN);
+  for (const { step, value } of used) values.set(step, value);
   const off = used.filter(({ isOff }) => isOff);
   const account = { parts: off.map(({ part }) => part), isOff: off.length > 0 };
   try {
-    return { values: solve(question, known), ...account };
+    if (wanted.step !== undefined) values.get(wanted.step);
+    return { values, ...account };
   } catch {
     // Own values may lead outside every table; then there is nothing to carry.
     return null;

@@ -1,5 +1,5 @@
-import { type Compiled } from './compiled.ts';
-import { evaluate } from './evaluate.ts';
+import { type Compiled, type Step } from './compiled.ts';
+import { evaluate, type Formula, NotFinite, type Values } from './evaluate.ts';
 import { type Expr } from './expression.ts';
 import { conditionOf, type StepWorking, workingsOf } from './workings.ts';
 
@@ -41,9 +41,36 @@ function workMissing(
 ): Map<string, number> {
   for (const { step, formula } of steps) {
     if (formula === null || values.has(step.name)) continue;
-    values.set(step.name, evaluate(formula, values, `Step ${step.name}`));
+    values.set(step.name, workStep(step, formula, values));
   }
   return values;
+}
+
+function workStep(step: Step, formula: Formula, values: Values): number {
+  const value = formula(values);
+  if (Number.isFinite(value)) return value;
+  throw new NotFinite(`Step ${step.name}`);
+}
+
+/** Values of which a step is worked when it is asked for, on those that are known by then. */
+export class SolvedOnDemand extends Map<string, number> {
+  private readonly question: Compiled;
+
+  constructor(question: Compiled, known: Iterable<readonly [string, number]>) {
+    super(known);
+    this.question = question;
+  }
+
+  /** @throws {Error} when the step comes to no finite number, or leads out of a table. */
+  override get(name: string): number | undefined {
+    const known = super.get(name);
+    if (known !== undefined) return known;
+    const working = workingsOf(this.question).steps.get(name);
+    if (!working?.formula) return undefined;
+    const value = workStep(working.step, working.formula, this);
+    this.set(name, value);
+    return value;
+  }
 }
 
 /** Whether a condition holds. Steps it leans on are worked first and added to the values. */

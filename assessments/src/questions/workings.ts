@@ -25,6 +25,8 @@ export interface Workings {
   readonly steps: ReadonlyMap<string, StepWorking>;
   /** In the order they are kept in: given values, what is read off a curve, steps. */
   readonly names: readonly string[];
+  /** Those of them that are drawn or read, not worked. */
+  readonly unworked: readonly string[];
   /** Conditions, those first that need no curve to be run. */
   readonly plain: readonly Expr[];
   readonly onCurve: readonly Expr[];
@@ -69,17 +71,15 @@ function makeReady(question: Compiled): Workings {
   for (const step of question.steps) steps.set(step.name, workingOf(step, { question, steps }));
   const isRead = ({ how }: Step): boolean => how.kind === 'read';
   const reads = question.steps.filter(isRead).map(({ name }) => name);
+  const unworked = [...question.givens.map(({ name }) => name), ...reads];
   const isOnCurve = (condition: Expr): boolean => {
     const below = belowAll(namesIn(condition), steps);
     return reads.some((name) => below.has(name));
   };
   return {
     steps,
-    names: [
-      ...question.givens.map(({ name }) => name),
-      ...reads,
-      ...question.steps.filter((step) => !isRead(step)).map(({ name }) => name),
-    ],
+    unworked,
+    names: [...unworked, ...question.steps.filter((step) => !isRead(step)).map(({ name }) => name)],
     plain: question.require.filter((condition) => !isOnCurve(condition)),
     onCurve: question.require.filter(isOnCurve),
     slips: slipsOf(question),
