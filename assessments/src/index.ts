@@ -1,5 +1,7 @@
 export type * from './questions/types.ts';
 export type * from './papers/types.ts';
+export type * from './drawings/types.ts';
+export { DRAWING_KINDS, drawingData, type DrawingKind } from './drawings/index.ts';
 export * as electrical from './electrical/index.ts';
 export { SheetInvalid } from './sheets/errors.ts';
 export { parseQuestion } from './questions/sheet.ts';

@@ -9,6 +9,7 @@ import { ConfigModule } from './config/config.module.ts';
 import type { Config } from './config/config.schema.ts';
 import { CoursesModule } from './courses/courses.module.ts';
 import { DatabaseModule } from './database/database.module.ts';
+import { GlossaryModule } from './glossary/glossary.module.ts';
 import { HealthModule } from './health/health.module.ts';
 import { JobsModule } from './jobs/jobs.module.ts';
 import { LessonsModule } from './lessons/lessons.module.ts';
@@ -23,6 +24,7 @@ import { SecondFactorsModule } from './second-factors/second-factors.module.ts';
 import { SessionsModule } from './sessions/sessions.module.ts';
 import { SignInModule } from './sessions/sign-in.module.ts';
 import { SittingsModule } from './sittings/sittings.module.ts';
+import { TablesModule } from './tables/tables.module.ts';
 import { WorksheetsModule } from './worksheets/worksheets.module.ts';
 
 /** The list of features, nothing else. */
@@ -51,8 +53,10 @@ export class AppModule {
         ClassesModule,
         ClassViewModule,
         CoursesModule,
+        GlossaryModule,
         LessonsModule,
         PracticeModule,
+        TablesModule,
         WorksheetsModule,
         RemarkingModule,
         HealthModule,

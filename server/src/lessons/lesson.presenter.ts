@@ -1,10 +1,13 @@
 import { createHash } from 'node:crypto';
+import type { Term } from '../glossary/terms.ts';
 import type { CompiledCourse, CourseUnit } from '../publishing/compiled-course.ts';
+import type { CompiledLesson } from '../publishing/compiled-lesson.ts';
 import type { Published } from '../publishing/content.ts';
+import { headingsOf } from '../publishing/lesson-headings.ts';
 import type { LessonView } from './lessons.schemas.ts';
 
 /** Raised when the shape of the view changes, so that no browser keeps the old one. */
-const VIEW_VERSION = 1;
+const VIEW_VERSION = 2;
 
 type Lesson = Published<'lesson'>;
 
@@ -15,6 +18,8 @@ export interface PlacedLesson {
   readonly course: Published<'course'>;
   readonly previous: Lesson | null;
   readonly next: Lesson | null;
+  /** Sheets to read before it. */
+  readonly needs: readonly Lesson[];
 }
 
 /** Finds a sheet and its neighbours in the order of the course; null when it is not on it. */
@@ -30,20 +35,36 @@ export function placeLesson(
   const lesson = byNumber.get(number);
   if (!unit || !lesson) return null;
   const neighbour = (index: number) => byNumber.get(order[index] ?? '') ?? null;
-  return { lesson, unit, course, previous: neighbour(at - 1), next: neighbour(at + 1) };
+  const needs = (lesson.content.needs ?? []).flatMap((need) => byNumber.get(need) ?? []);
+  return { lesson, unit, course, needs, previous: neighbour(at - 1), next: neighbour(at + 1) };
 }
 
 const sheetsInOrder = (course: CompiledCourse) => course.units.flatMap(({ sheets }) => sheets);
 
-const reference = (lesson: Lesson | null) =>
-  lesson && { number: lesson.content.number, title: lesson.content.title };
+const referenceTo = ({ content: { number, title } }: Lesson) => ({ number, title });
+const reference = (lesson: Lesson | null) => lesson && referenceTo(lesson);
 
-export function presentLesson({ lesson, unit, previous, next }: PlacedLesson): LessonView {
+/** A lesson stored before questions were named with what it teaches has none to name. */
+const objectivesOf = ({ can, objectives }: CompiledLesson): LessonView['objectives'] =>
+  (objectives ?? can.map((does) => ({ does, questions: [], recall: [] }))).map((objective) => ({
+    does: objective.does,
+    questions: [...objective.questions],
+    recall: [...objective.recall],
+  }));
+
+/** @param terms - those of the glossary that the lesson uses. */
+export function presentLesson(placed: PlacedLesson, terms: readonly Term[]): LessonView {
+  const { lesson, unit, previous, next, needs } = placed;
   const { content } = lesson;
   return {
     ...content,
     unit: { number: unit.number, title: unit.title },
     can: [...content.can],
+    objectives: objectivesOf(content),
+    needs: needs.map(referenceTo),
+    headings: headingsOf(content).map((heading) => ({ ...heading })),
+    terms: terms.map(({ term, means, also }) => ({ term, means, forms: [term, ...also] })),
+    drawings: { ...content.drawings } as LessonView['drawings'],
     words: [...content.words],
     sources: [...content.sources],
     recall: [...content.recall],
@@ -57,10 +78,11 @@ export function presentLesson({ lesson, unit, previous, next }: PlacedLesson): L
 }
 
 /** Changes with anything the view shows. */
-export function etagOf({ lesson, course, previous, next }: PlacedLesson): string {
-  const parts = [lesson, course, previous, next].map((item) => item?.id ?? '-');
+export function etagOf(placed: PlacedLesson, terms: readonly Term[]): string {
+  const { lesson, course, previous, next, needs } = placed;
+  const parts = [lesson, course, previous, next, ...needs].map((item) => item?.id ?? '-');
   const hash = createHash('sha256')
-    .update([VIEW_VERSION, ...parts].join('|'))
+    .update([VIEW_VERSION, ...parts, JSON.stringify(terms)].join('|'))
     .digest('base64url');
   return `"${hash.slice(0, 22)}"`;
 }

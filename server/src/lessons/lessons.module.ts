@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { SequelizeModule } from '@nestjs/sequelize';
+import { GlossaryModule } from '../glossary/glossary.module.ts';
 import { PublishingModule } from '../publishing/publishing.module.ts';
 import { LessonProgressRepository } from './lesson-progress.repository.ts';
 import { LessonsController } from './lessons.controller.ts';
@@ -7,7 +8,7 @@ import { LessonsService } from './lessons.service.ts';
 import { LessonProgressModel } from './models/lesson-progress.model.ts';
 
 @Module({
-  imports: [PublishingModule, SequelizeModule.forFeature([LessonProgressModel])],
+  imports: [GlossaryModule, PublishingModule, SequelizeModule.forFeature([LessonProgressModel])],
   controllers: [LessonsController],
   providers: [LessonsService, LessonProgressRepository],
   exports: [LessonsService],

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { drawingsSchema } from './drawing-view.ts';
 import { workedAnswerSchema } from '../questions/question-view.ts';
 
 export const lessonNumberSchema = z
@@ -21,9 +22,22 @@ export const lessonViewSchema = z.object({
   minutes: z.number(),
   lead: z.string(),
   can: z.array(z.string()),
+  /** What `can` says, each with what asks for it: practice questions by slug, recall by number. */
+  objectives: z.array(
+    z.object({
+      does: z.string(),
+      questions: z.array(z.string()),
+      recall: z.array(z.number()),
+    }),
+  ),
+  /** Sheets to read before this one. */
+  needs: z.array(z.object({ number: z.string(), title: z.string() })),
+  headings: z.array(z.object({ text: z.string(), paragraph: z.number() })),
   body: z.string(),
   paragraphs: z.number(),
   words: z.array(z.object({ term: z.string(), meaning: z.string() })),
+  /** Terms of the glossary that the sheet uses, each with the forms it goes by. */
+  terms: z.array(z.object({ term: z.string(), means: z.string(), forms: z.array(z.string()) })),
   sources: z.array(z.string()),
   recall: z.array(z.object({ ask: z.string(), answer: z.string() })),
   /** MathML by the formula's source. */
@@ -38,6 +52,8 @@ export const lessonViewSchema = z.object({
       long: z.string(),
     }),
   ),
+  /** Data of the drawings to handle, by kind. */
+  drawings: drawingsSchema,
   /** Worked answers by `question#seed`. */
   worked: z.record(z.string(), workedAnswerSchema),
   /** Questions of the sheet's try blocks. */

@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { Clock } from '../clock/clock.ts';
+import { GlossaryService } from '../glossary/glossary.service.ts';
 import { NotFound } from '../problems/common.errors.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
 import { etagOf, placeLesson, presentLesson, type PlacedLesson } from './lesson.presenter.ts';
@@ -14,12 +15,14 @@ export class LessonsService {
     private readonly content: PublishedContentService,
     private readonly repository: LessonProgressRepository,
     private readonly clock: Clock,
+    private readonly glossary: GlossaryService,
   ) {}
 
   /** The sheet as anyone sees it, with a tag that changes when it does. */
   async read(number: string): Promise<{ etag: string; view: LessonView }> {
     const placed = await this.placed(number);
-    return { etag: etagOf(placed), view: presentLesson(placed) };
+    const terms = await this.glossary.termsOf(placed.lesson.content);
+    return { etag: etagOf(placed, terms), view: presentLesson(placed, terms) };
   }
 
   async progress(accountId: string, number: string): Promise<LessonProgressView> {

@@ -11,7 +11,7 @@ import { readContent, referencesOf, type Read } from './read-content.ts';
 import type { SourceFile, Sources } from './read-sources.ts';
 
 /** Version of the compiled form of courses, lessons and glossaries. */
-const FORMAT_VERSION = 1;
+const FORMAT_VERSION = 2;
 
 /** One revision, ready to be stored. */
 export interface Revision {

@@ -1,4 +1,9 @@
-import { drawQuestion, workQuestion, type CompiledQuestion } from '@ferrule/assessments';
+import {
+  drawingData,
+  drawQuestion,
+  workQuestion,
+  type CompiledQuestion,
+} from '@ferrule/assessments';
 import { createHash } from 'node:crypto';
 import type { CompiledFigure, CompiledLesson, Tree } from './compiled-lesson.ts';
 import { whyNotPractice, type Pools } from './course-sheet.ts';
@@ -152,6 +157,7 @@ export function compileLesson(
       headings: headingsIn(body),
       formulas: typesetFormulas(root, alone, complain),
       figures: compileFigures(work, blocks),
+      drawings: Object.fromEntries(blocks.drawings.map(({ kind }) => [kind, drawingData(kind)])),
       worked: compileWorked(work, blocks),
       tries: [...new Set(blocks.tries.map(({ question }) => question))],
     },

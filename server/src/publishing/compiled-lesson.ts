@@ -1,4 +1,4 @@
-import type { WorkedAnswer } from '@ferrule/assessments';
+import type { DrawingData, DrawingKind, WorkedAnswer } from '@ferrule/assessments';
 
 /** A hast root, plain JSON. */
 export interface Tree {
@@ -61,6 +61,8 @@ export interface CompiledLesson {
   readonly headings?: readonly LessonHeading[];
   readonly formulas: Readonly<Record<string, Tree>>;
   readonly figures: Readonly<Record<string, CompiledFigure>>;
+  /** Data of the drawings to handle; missing in lessons stored before there were any. */
+  readonly drawings?: Readonly<Partial<Record<DrawingKind, DrawingData>>>;
   readonly worked: Readonly<Record<string, WorkedAnswer>>;
   readonly tries: readonly string[];
 }

@@ -1,4 +1,4 @@
-import { DRAWING_KINDS, isDrawingKind, type DrawingKind } from './lesson-drawings.ts';
+import { DRAWING_KINDS, type DrawingKind } from '@ferrule/assessments';
 import { isFormula, nodesOf, type TextNode } from './markdown.ts';
 import type { Complain } from './text-checks.ts';
 
@@ -22,7 +22,6 @@ export interface QuestionBlock {
 export interface DrawingBlock {
   readonly node: TextNode;
   readonly kind: DrawingKind;
-  readonly title: string;
 }
 
 export interface LessonBlocks {
@@ -114,9 +113,12 @@ function readFigure(node: TextNode, complain: Complain): FigureBlock[] {
 }
 
 function readDrawingBlock(node: TextNode, complain: Complain): DrawingBlock[] {
-  const kind = attributeOf(node, 'kind');
-  if (isDrawingKind(kind)) return [{ node, kind, title: attributeOf(node, 'title') }];
-  complain(node, `drawing "${kind}" is not one of ${DRAWING_KINDS.join(', ')}`);
+  const kind = DRAWING_KINDS.find((known) => known === attributeOf(node, 'kind'));
+  if (kind) return [{ node, kind }];
+  complain(
+    node,
+    `drawing "${attributeOf(node, 'kind')}" is not one of ${DRAWING_KINDS.join(', ')}`,
+  );
   return [];
 }
 

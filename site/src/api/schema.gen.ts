@@ -868,6 +868,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/glossary": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Glossary_glossary"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/lessons/{number}": {
         parameters: {
             query?: never;
@@ -974,6 +990,22 @@ export interface paths {
         get?: never;
         put?: never;
         post: operations["Practice_answer"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/tables": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Tables_tables"];
+        put?: never;
+        post?: never;
         delete?: never;
         options?: never;
         head?: never;
@@ -3703,6 +3735,38 @@ export interface operations {
             };
         };
     };
+    Glossary_glossary: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        language: string;
+                        revision: string | null;
+                        terms: {
+                            term: string;
+                            anchor: string;
+                            means: string;
+                            also: string[];
+                            sheets: {
+                                number: string;
+                                title: string;
+                            }[];
+                        }[];
+                    };
+                };
+            };
+        };
+    };
     Lessons_read: {
         parameters: {
             query?: never;
@@ -3735,11 +3799,29 @@ export interface operations {
                         minutes: number;
                         lead: string;
                         can: string[];
+                        objectives: {
+                            does: string;
+                            questions: string[];
+                            recall: number[];
+                        }[];
+                        needs: {
+                            number: string;
+                            title: string;
+                        }[];
+                        headings: {
+                            text: string;
+                            paragraph: number;
+                        }[];
                         body: string;
                         paragraphs: number;
                         words: {
                             term: string;
                             meaning: string;
+                        }[];
+                        terms: {
+                            term: string;
+                            means: string;
+                            forms: string[];
                         }[];
                         sources: string[];
                         recall: {
@@ -3767,6 +3849,132 @@ export interface operations {
                                 } | null;
                                 short: string;
                                 long: string;
+                            };
+                        };
+                        drawings: {
+                            "voltage-run"?: {
+                                /** @enum {string} */
+                                kind: "voltage-run";
+                                supplyV: number;
+                                start: {
+                                    lengthM: number;
+                                    areaMm2: number;
+                                    amps: number;
+                                };
+                                lengthM: {
+                                    from: number;
+                                    to: number;
+                                    step: number;
+                                };
+                                amps: {
+                                    from: number;
+                                    to: number;
+                                    step: number;
+                                };
+                                areas: {
+                                    areaMm2: number;
+                                    ohmsPerM: number;
+                                }[];
+                                limits: {
+                                    percent: number;
+                                    volts: number;
+                                    label: string;
+                                }[];
+                                source: string;
+                            };
+                            "charge-curve"?: {
+                                /** @enum {string} */
+                                kind: "charge-curve";
+                                settings: {
+                                    chargerA: number;
+                                    absorptionV: number;
+                                    floatV: number;
+                                    tailA: number;
+                                };
+                                battery: {
+                                    name: string;
+                                    capacityAh: number;
+                                    startPercent: number;
+                                };
+                                hours: number;
+                                points: {
+                                    hour: number;
+                                    volts: number;
+                                    amps: number;
+                                    chargePercent: number;
+                                }[];
+                                stages: {
+                                    /** @enum {string} */
+                                    name: "bulk" | "absorption" | "float";
+                                    fromH: number;
+                                    toH: number;
+                                    from: {
+                                        volts: number;
+                                        amps: number;
+                                        chargePercent: number;
+                                    };
+                                    to: {
+                                        volts: number;
+                                        amps: number;
+                                        chargePercent: number;
+                                    };
+                                    ah: number;
+                                    says: string;
+                                }[];
+                                source: string;
+                            };
+                            "source-timeline"?: {
+                                /** @enum {string} */
+                                kind: "source-timeline";
+                                settings: {
+                                    engageV: number;
+                                    releaseV: number;
+                                    delayS: number;
+                                    solarA: number;
+                                    chargerA: number;
+                                };
+                                minutes: number;
+                                events: {
+                                    minute: number;
+                                    title: string;
+                                    says: string;
+                                }[];
+                                spells: {
+                                    fromMinute: number;
+                                    toMinute: number;
+                                    engine: boolean;
+                                    /** @enum {string} */
+                                    source: "solar" | "vehicle" | "none";
+                                    chargerA: number;
+                                    says: string;
+                                }[];
+                                points: {
+                                    minute: number;
+                                    inputV: number;
+                                    chargerA: number;
+                                }[];
+                                source: string;
+                            };
+                            "current-balance"?: {
+                                /** @enum {string} */
+                                kind: "current-balance";
+                                chargerA: {
+                                    from: number;
+                                    to: number;
+                                    step: number;
+                                    start: number;
+                                };
+                                loads: {
+                                    name: string;
+                                    amps: number;
+                                    isOn: boolean;
+                                }[];
+                                bypass: {
+                                    name: string;
+                                    amps: number;
+                                    isOn: boolean;
+                                };
+                                source: string;
                             };
                         };
                         worked: {
@@ -4045,6 +4253,55 @@ export interface operations {
                     "application/json": {
                         marked: components["schemas"]["MarkedQuestion"];
                         hints: string[];
+                    };
+                };
+            };
+        };
+    };
+    Tables_tables: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        tables: {
+                            slug: string;
+                            title: string;
+                            note: string;
+                            columns: {
+                                label: string;
+                                unit: string;
+                            }[];
+                            rows: {
+                                cells: string[];
+                            }[];
+                            sources: {
+                                text: string;
+                                /** @enum {string} */
+                                provenance: "read" | "second-hand copy" | "from memory" | "computed" | "common practice";
+                            }[];
+                            caution: string | null;
+                        }[];
+                        symbols: {
+                            source: string;
+                            list: {
+                                slug: string;
+                                letter: string;
+                                name: string;
+                                looks: string;
+                                means: string;
+                            }[];
+                        };
+                        local: string;
                     };
                 };
             };
