@@ -10,10 +10,9 @@ export function toFigures(value: number, figures: number): string {
   if (value === 0) return '0';
   const size = Math.abs(value);
   if (size < SMALLEST_PLAIN || size >= LARGEST_PLAIN) return withPower(value, figures);
-  // Rounding first: 9.996 to three figures is 10.0, one decimal less than its size says.
-  const rounded = Number(value.toPrecision(figures));
-  const magnitude = Math.floor(Math.log10(Math.abs(rounded)) + 1e-12);
-  return signed(rounded.toFixed(Math.max(0, figures - 1 - magnitude)));
+  const rounded = value.toPrecision(figures);
+  // With more digits before the point than figures it comes with a power of ten: 1.23e+4.
+  return signed(rounded.includes('e') ? String(Number(rounded)) : rounded);
 }
 
 /** A figure as short as it can be said at so many significant figures: "5.5", "4". */

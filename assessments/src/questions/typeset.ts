@@ -32,10 +32,17 @@ function quantityTokens(si: number, unit: Unit, figures: number): Token[] {
   return unit.symbol === '' ? [number] : [number, { kind: 'unit', text: unit.symbol }];
 }
 
+/** The right-hand side of a formula, the same for every draw; an expression is of one question. */
+const symbols = new WeakMap<Expr, Line>();
+
 /** "U_d = I × R" */
 export function formulaLine(question: Compiled, step: Step, expr: Expr): Line {
-  const tokens = typeset(expr, (name) => symbolOf(question, name));
-  return [symbolToken(step.symbol), EQUALS, ...joinFactors(tokens)];
+  let tokens = symbols.get(expr);
+  if (!tokens) {
+    tokens = joinFactors(typeset(expr, (name) => symbolOf(question, name)));
+    symbols.set(expr, tokens);
+  }
+  return [symbolToken(step.symbol), EQUALS, ...tokens];
 }
 
 /** "= 14 A × 48.1 mΩ" */
