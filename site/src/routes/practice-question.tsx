@@ -13,6 +13,7 @@ import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { EmptyState, FailedState, RuledLines } from '../ui/states.tsx';
 import { FootStrip } from '../ui/thumb-index.tsx';
 import { TitleBlock } from '../ui/title-block.tsx';
+import { upperFirst } from '../ui/words.ts';
 
 export async function loader(args: LoaderArgs) {
   await requireSession(args);
@@ -118,7 +119,7 @@ function QuestionBlock({ question }: { question: BankQuestion }) {
         { label: 'Marks', value: marks, kind: 'strong' },
         {
           label: 'All of the subject',
-          value: <Link to={listOf(question)}>{subject.name}</Link>,
+          value: <Link to={listOf(question)}>{upperFirst(subject.name)}</Link>,
           span: 4,
         },
         { label: 'Sheet', value: lesson },

@@ -2,6 +2,7 @@ import { useId } from 'react';
 import { Link } from 'react-router-dom';
 import { Segments } from '../../ui/choice-row.tsx';
 import { FindField } from '../../ui/find-field.tsx';
+import { upperFirst } from '../../ui/words.ts';
 import { isLevel, type Filter, type SubjectCount } from './filter.ts';
 import { levelNames } from './words.ts';
 
@@ -51,7 +52,7 @@ export function Subjects({ subjects, chosen, pathOf, onChoose }: SubjectsProps) 
           {subjects.map(({ code, name, shown, questions }) => (
             <li key={code}>
               <Link to={pathOf(code)} aria-current={chosen === code ? 'true' : undefined}>
-                <span>{name}</span>
+                <span>{upperFirst(name)}</span>
                 <span className="number">
                   {shown}
                   <span aria-hidden="true">/</span>
@@ -74,7 +75,7 @@ export function Subjects({ subjects, chosen, pathOf, onChoose }: SubjectsProps) 
           <option value="">All subjects</option>
           {subjects.map(({ code, name, shown, questions }) => (
             <option key={code} value={code}>
-              {name}, {shown} of {questions} shown
+              {upperFirst(name)}, {shown} of {questions} shown
             </option>
           ))}
         </select>

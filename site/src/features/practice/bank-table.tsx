@@ -1,6 +1,7 @@
 import { Link } from 'react-router-dom';
 import { sayDate } from '../../ui/dates.ts';
 import { Terminal, type TerminalState } from '../../ui/symbols/terminal.tsx';
+import { upperFirst } from '../../ui/words.ts';
 import { bySubject, type State, stateOf } from './filter.ts';
 import { type BankQuestion, type BankView } from './queries.ts';
 import { levelNames, sayKinds } from './words.ts';
@@ -34,7 +35,7 @@ export function BankTable({ questions, profile }: BankTableProps) {
         <tbody key={code}>
           <tr className="bank-subject">
             <th scope="rowgroup" colSpan={6}>
-              {ofSubject[0]?.subject.name}
+              {upperFirst(ofSubject[0]?.subject.name ?? '')}
             </th>
           </tr>
           {ofSubject.map((question) => (

@@ -7,6 +7,7 @@ import { MarkedQuestion } from '../../ui/question/marked-question.tsx';
 import { PartHint } from '../../ui/question/part-hint.tsx';
 import { type PracticeView, sayHints, usePracticeAnswers } from '../../ui/question/practice.ts';
 import { QuestionCard, QuestionFacts } from '../../ui/question/question-card.tsx';
+import { type Drawn, NextFigures } from './next-figures.tsx';
 import { titleOf } from './words.ts';
 
 /** Of the marks, from which one step more is the next thing to do. */
@@ -23,42 +24,37 @@ interface PracticeRunProps {
 /** One question with the figures that were drawn: answered, then marked where it stands. */
 export function PracticeRun({ practice, isFirst, onAgain, onMarked }: PracticeRunProps) {
   const { question, levels, left } = practice;
-  const { answers, change, mark, unclear } = usePracticeAnswers(practice.id, onMarked);
-  const all = levels.at(-1) ?? left;
+  const desk = usePracticeAnswers(practice.id, onMarked);
+  const drawn = {
+    left,
+    all: levels.at(-1) ?? left,
+    // A question of words alone is drawn anew in the order of its choices only.
+    hasFigures: question.given.length > 0 || question.curve !== null,
+    onAgain,
+  };
   const curve = question.curve && <CurveReader curve={question.curve} />;
-  if (mark.data) {
-    const { marked, hints } = mark.data;
-    return (
-      <>
-        <RunHead title="Marked" says={marked.summary} takesFocus />
-        <MarkedQuestion marked={marked} asked={question.parts} />
-        <div className="marked-facts">
-          <QuestionFacts question={question} />
-          {curve}
-        </div>
-        <RunFoot
-          says={
-            <>
-              <b>
-                {marked.marks} of {marked.outOf} marks{sayHints(hints)}.
-              </b>{' '}
-              <WhatItCounts isWhole={left >= all} />
-            </>
-          }
-        >
-          <NextFigures
-            {...{ left, all, onAgain }}
-            isReady={marked.marks >= goodShare * marked.outOf}
-          />
-        </RunFoot>
-      </>
-    );
-  }
+  return desk.mark.data ? (
+    <MarkedRun practice={practice} reply={desk.mark.data} drawn={drawn} curve={curve} />
+  ) : (
+    <OpenRun {...{ practice, desk, drawn, curve, isFirst }} />
+  );
+}
+
+type Desk = ReturnType<typeof usePracticeAnswers>;
+
+interface OpenRunProps extends Pick<PracticeRunProps, 'practice' | 'isFirst'> {
+  desk: Desk;
+  drawn: Drawn;
+  curve: ReactNode;
+}
+
+function OpenRun({ practice, desk, drawn, curve, isFirst }: OpenRunProps) {
+  const { answers, change, mark, unclear } = desk;
   return (
     <>
-      <RunHead title={titleOf(left, all)} takesFocus={!isFirst} />
+      <RunHead title={titleOf(drawn.left, drawn.all)} takesFocus={!isFirst} />
       <QuestionCard
-        question={question}
+        question={practice.question}
         answers={answers}
         unclear={unclear ?? {}}
         faded={practice}
@@ -70,18 +66,51 @@ export function PracticeRun({ practice, isFirst, onAgain, onMarked }: PracticeRu
       />
       {!unclear && <ProblemCallout error={mark.error} />}
       <RunFoot says={unclear && 'Some answers cannot be read. Nothing has been marked.'}>
-        {left === 0 ? (
-          <NextFigures {...{ left, all, onAgain }} isReady />
+        {drawn.left === 0 ? (
+          <NextFigures {...drawn} isReady />
         ) : (
           <>
-            <Button size="3" variant="outline" onClick={onAgain}>
-              Other figures
+            <Button size="3" variant="outline" onClick={drawn.onAgain}>
+              {drawn.hasFigures ? 'Other figures' : 'Begin again'}
             </Button>
             <Button size="3" disabled={mark.isPending} onClick={() => mark.mutate()}>
               {mark.isPending ? 'Marking' : 'Mark it'}
             </Button>
           </>
         )}
+      </RunFoot>
+    </>
+  );
+}
+
+interface MarkedRunProps {
+  practice: PracticeView;
+  reply: NonNullable<Desk['mark']['data']>;
+  drawn: Drawn;
+  curve: ReactNode;
+}
+
+function MarkedRun({ practice: { question }, reply, drawn, curve }: MarkedRunProps) {
+  const { marked, hints } = reply;
+  return (
+    <>
+      <RunHead title="Marked" says={marked.summary} takesFocus />
+      <MarkedQuestion marked={marked} asked={question.parts} />
+      <div className="marked-facts">
+        <QuestionFacts question={question} />
+        {curve}
+      </div>
+      <RunFoot
+        says={
+          <>
+            <b>
+              {marked.marks} of {marked.outOf} marks{sayHints(hints)}.
+            </b>{' '}
+            <WhatItCounts isWhole={drawn.left >= drawn.all} />
+          </>
+        }
+      >
+        <NextFigures {...drawn} isReady={marked.marks >= goodShare * marked.outOf} />
       </RunFoot>
     </>
   );
@@ -123,42 +152,6 @@ function WhatItCounts({ isWhole }: { isWhole: boolean }) {
   return (
     <>
       It stands in <Link to="/record">your record</Link>, in no result.
-    </>
-  );
-}
-
-interface NextFiguresProps {
-  left: number;
-  /** All the steps there are. */
-  all: number;
-  onAgain: () => void;
-  /** For one step more: it went well, or nothing was asked. */
-  isReady: boolean;
-}
-
-/** What comes next: the same again, one step more, all of it. */
-function NextFigures({ left, all, onAgain, isReady }: NextFiguresProps) {
-  const hasMore = left < all;
-  const goesOn = hasMore && isReady;
-  return (
-    <>
-      {left < all - 1 && (
-        <Button size="3" variant="outline" asChild>
-          <Link to="?" replace>
-            The whole
-          </Link>
-        </Button>
-      )}
-      <Button size="3" variant={goesOn ? 'outline' : 'solid'} onClick={onAgain}>
-        {left === 0 ? 'See other figures' : 'Again with fresh figures'}
-      </Button>
-      {hasMore && (
-        <Button size="3" variant={goesOn ? 'solid' : 'outline'} asChild>
-          <Link to={left + 1 === all ? '?' : `?left=${left + 1}`} replace>
-            {left === 0 ? 'Do the last step' : 'One more step'}
-          </Link>
-        </Button>
-      )}
     </>
   );
 }

@@ -1,5 +1,6 @@
 import { Link } from 'react-router-dom';
 import { sayDate } from '../../ui/dates.ts';
+import { upperFirst } from '../../ui/words.ts';
 import { type SubjectRecords } from './queries.ts';
 
 /** At most three questions that are worth practising next, each with its reason. */
@@ -20,7 +21,7 @@ export function NextPractice({ next }: { next: SubjectRecords['next'] }) {
               <Link to={`/practice/${slug}`}>{title}</Link>
             </b>
             <span>
-              {subject.name}. {says} {lastDay && `Last tried ${sayDate(lastDay)}.`}
+              {upperFirst(subject.name)}. {says} {lastDay && `Last tried ${sayDate(lastDay)}.`}
             </span>
           </li>
         ))}

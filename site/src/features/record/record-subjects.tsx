@@ -1,6 +1,7 @@
 import { Link } from 'react-router-dom';
 import { sayDate } from '../../ui/dates.ts';
 import { MarkCells } from '../../ui/mark-cells.tsx';
+import { upperFirst } from '../../ui/words.ts';
 import { type SubjectRecords } from './queries.ts';
 
 type SubjectRecord = SubjectRecords['subjects'][number];
@@ -15,7 +16,7 @@ export function RecordSubjects({ subjects }: { subjects: readonly SubjectRecord[
           <th scope="col">Subject</th>
           <th scope="col">Questions shown</th>
           <th scope="col" className="number">
-            On days
+            Days
           </th>
           <th scope="col">Last</th>
         </tr>
@@ -34,7 +35,7 @@ function SubjectRow({ subject }: { subject: SubjectRecord }) {
   return (
     <tr>
       <th scope="row">
-        <Link to={`/practice?subject=${code}`}>{name}</Link>
+        <Link to={`/practice?subject=${code}`}>{upperFirst(name)}</Link>
       </th>
       <td className="shown">
         <span className="quantity">

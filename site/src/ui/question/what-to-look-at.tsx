@@ -11,8 +11,10 @@ interface WhatToLookAtProps {
 }
 
 /** After a wrong answer: the step that went wrong, and the paragraph to read. */
-export function WhatToLookAt({ part: { wrongStep, read }, isSaidAbove }: WhatToLookAtProps) {
-  const toRead = isSaidAbove ? null : read;
+export function WhatToLookAt({ part, isSaidAbove }: WhatToLookAtProps) {
+  const toRead = isSaidAbove ? null : part.read;
+  // Where nothing was written no step went wrong.
+  const wrongStep = part.verdict === 'blank' ? null : part.wrongStep;
   if (!wrongStep && !toRead) return null;
   return (
     <div className="look-at">
