@@ -14,8 +14,11 @@ async function main(lifetime) {
   signal.throwIfAborted();
   // What it measures is there only now.
   const { measureAll } = await import('./bench/measure-all.mjs');
-  const { drawTable } = await import('./bench/table.mjs');
-  console.log(`\n${drawTable(await measureAll({ lifetime, progress }))}`);
+  const { drawTable, overBounds } = await import('./bench/table.mjs');
+  const measured = await measureAll({ lifetime, progress });
+  console.log(`\n${drawTable(measured)}`);
+  const over = overBounds(measured);
+  if (over.length > 0) throw new StepFailed(`Over its bound: ${over.join('; ')}.`);
 }
 
 function reasonOf(error) {

@@ -1,6 +1,7 @@
 import { describe, expect, it } from '@jest/globals';
 import { compare } from './rounds.mjs';
 import { readStatements } from './statements.mjs';
+import { overBounds } from './table.mjs';
 
 const { signal } = new AbortController();
 
@@ -20,6 +21,20 @@ describe('comparing two sides', () => {
 
     expect(turns.slice(0, 4)).toEqual(['ours', 'bare', 'bare', 'ours']);
     expect(time).toEqual({ ours: 4, bare: 2, ratio: 2, low: 2, high: 3 });
+  });
+});
+
+describe('bounds', () => {
+  it('name what is over them, and nothing that has none', () => {
+    const rows = [
+      { what: '  Marking', ratio: 0.51, bound: 0.5 },
+      { what: 'Signing', ratio: 900 },
+    ];
+    const alone = [
+      { what: 'A day', milliseconds: 19.9, bound: 20 },
+      { what: 'Draws', perSecond: 5 },
+    ];
+    expect(overBounds({ rows, alone })).toEqual(['Marking']);
   });
 });
 

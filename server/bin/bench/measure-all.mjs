@@ -1,20 +1,31 @@
-import { measureMarking } from './marking.mjs';
+import { measureDay } from './alone.mjs';
+import { measureGrowth } from './growth.mjs';
+import { measureQuestions } from './questions.mjs';
 import { measureServing } from './serving.mjs';
 import { measureSigning } from './signing.mjs';
 
-const limitMilliseconds = 175_000;
+const limitMilliseconds = 240_000;
 
 /** Every comparison, one after the other, so that none disturbs another. */
 export async function measureAll({ lifetime: { signal: asked, onEnd }, progress }) {
   const signal = AbortSignal.any([asked, AbortSignal.timeout(limitMilliseconds)]);
   const lifetime = { signal, onEnd };
   const rows = [];
+  const alone = [];
   const measure = (title, work) =>
     progress.step(title, async () => {
       rows.push(...(await work()));
     });
-  await measure('Marking', () => measureMarking(lifetime));
+  await measure('Drawing and marking', async () => {
+    const { rows: compared, rates } = await measureQuestions(lifetime);
+    alone.push(...rates);
+    return compared;
+  });
+  await measure('Growth with the parts', () => measureGrowth(lifetime));
+  await progress.step('Charging model', async () => {
+    alone.push(await measureDay());
+  });
   await measure('Signing', () => measureSigning(lifetime));
   rows.push(...(await measureServing({ lifetime, progress })));
-  return rows;
+  return { rows, alone };
 }

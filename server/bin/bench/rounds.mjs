@@ -39,6 +39,16 @@ export async function compare({ rounds, ours, bare, signal }) {
   return Object.fromEntries(names.map((name) => [name, compareFigure(measured, name)]));
 }
 
+/** The median of what `measure` says the processor took, over so many rounds. */
+export async function medianOf(measure, rounds) {
+  const figures = [];
+  for (let round = 0; round < warmingRounds + rounds; round += 1) {
+    const { processor } = await measure();
+    if (round >= warmingRounds) figures.push(processor);
+  }
+  return quantile(figures, 0.5);
+}
+
 const processorMilliseconds = () => {
   const { user, system } = process.cpuUsage();
   return (user + system) / 1000;
