@@ -7,6 +7,7 @@ it('asks an administrator for a code on the way to the people page', async () =>
   signInAs(['administrator'], { secondFactor: 'needed' });
   serve('post', '/api/session/second-factor', makeSession(['administrator']));
   serve('get', '/api/people', { people: [], nextCursor: null });
+  serve('get', '/api/school/practice-profile', { profile: 'metric' });
   const { user, router } = renderRoute('/people');
   await user.type(await screen.findByLabelText('Code'), '123456');
   await user.click(screen.getByRole('button', { name: 'Carry on' }));
@@ -36,6 +37,7 @@ it('enrols with a square code and shows the recovery codes before going on', asy
     recoveryCodes: ['k7q2-1000', 'm3x9-2000'],
   });
   serve('get', '/api/people', { people: [], nextCursor: null });
+  serve('get', '/api/school/practice-profile', { profile: 'metric' });
   const { user } = renderRoute('/second-factor');
   await user.click(await screen.findByRole('button', { name: 'Set up the second step' }));
   expect(await screen.findByRole('img', { name: /Square code/ })).toBeVisible();
