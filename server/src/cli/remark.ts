@@ -32,7 +32,7 @@ try {
       sayDifference(difference);
     },
   });
-  const found = differences === 0 ? 'no differences' : `${differences} differences`;
+  const found = differences === 1 ? '1 difference' : `${differences || 'no'} differences`;
   console.log(`Marked ${attempts} attempts again: ${found}.`);
 } finally {
   await close();
