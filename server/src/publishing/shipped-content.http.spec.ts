@@ -38,10 +38,20 @@ describe('the lessons and questions that come with the product', () => {
     expect((await publish(test.database.ownerUrl, folders)).published).toEqual([]);
   });
 
-  it('cover the five sheets of the course', () => {
+  it('list every sheet that is written under its unit, the first five among them', () => {
     const numbers = lessons.map(({ number }) => number).sort();
-    expect(numbers).toEqual(['1.4', '3.4', '4.1', '5.6', '6.7']);
+    expect(numbers).toEqual(expect.arrayContaining(['1.4', '3.4', '4.1', '5.6', '6.7']));
     expect(course?.units.flatMap(({ sheets }) => sheets).sort()).toEqual(numbers);
+  });
+
+  it('give each unit with sheets a worksheet of four to six questions, and no other', () => {
+    const counts = course?.units.map(({ number, sheets, worksheet }) => ({
+      ...{ number, isIssued: sheets.length > 0 },
+      fits:
+        worksheet !== null && worksheet.questions.length >= 4 && worksheet.questions.length <= 6,
+    }));
+    expect(counts).toEqual(counts?.map((unit) => ({ ...unit, fits: unit.isIssued })));
+    expect(counts?.length).toBe(7);
   });
 
   it('give each sheet a drawing, a worked example, a question to try and its cautions', () => {
