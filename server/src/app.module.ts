@@ -20,6 +20,7 @@ import { RecordModule } from './record/record.module.ts';
 import { RegisterModule } from './register/register.module.ts';
 import { RemarkingModule } from './remarking/remarking.module.ts';
 import { SchoolModule } from './school/school.module.ts';
+import { SearchModule } from './search/search.module.ts';
 import { SecondFactorsModule } from './second-factors/second-factors.module.ts';
 import { SessionsModule } from './sessions/sessions.module.ts';
 import { SignInModule } from './sessions/sign-in.module.ts';
@@ -56,6 +57,7 @@ export class AppModule {
         GlossaryModule,
         LessonsModule,
         PracticeModule,
+        SearchModule,
         TablesModule,
         WorksheetsModule,
         RemarkingModule,

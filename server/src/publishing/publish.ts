@@ -1,4 +1,5 @@
 import pg from 'pg';
+import { indexContent } from '../search/index-content.ts';
 import { compileContent, type CompiledContent } from './compile-content.ts';
 import { ContentNotInOrder, ProblemList, type ContentNote } from './problem-list.ts';
 import { readSources, type SourceFolders } from './read-sources.ts';
@@ -60,6 +61,7 @@ export async function publish(
   return inTransaction(ownerUrl, async (client) => {
     const report = await storeContent(client, content, problems);
     refuseIfAny(problems);
+    await indexContent(client);
     const leftOut = compiled.revisions.length - content.revisions.length;
     return { ...report, leftOut, notes: problems.notes() };
   });

@@ -996,6 +996,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/search": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Search_search"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/tables": {
         parameters: {
             query?: never;
@@ -4253,6 +4269,47 @@ export interface operations {
                     "application/json": {
                         marked: components["schemas"]["MarkedQuestion"];
                         hints: string[];
+                    };
+                };
+            };
+        };
+    };
+    Search_search: {
+        parameters: {
+            query: {
+                q: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        query: string;
+                        corrected: string | null;
+                        more: boolean;
+                        results: {
+                            /** @enum {string} */
+                            kind: "sheet" | "paragraph" | "table" | "term";
+                            title: string;
+                            sheet: string | null;
+                            paragraph: number | null;
+                            heading: string | null;
+                            link: string;
+                            snippet: {
+                                text: string;
+                                marks: {
+                                    from: number;
+                                    to: number;
+                                }[];
+                            };
+                        }[];
                     };
                 };
             };

@@ -9,6 +9,7 @@ import { endCertificatesOnce } from './20261201T1010-end-certificates-once.ts';
 import { fadePractice } from './20261201T1700-fade-practice.ts';
 import { choosePracticeProfile } from './20261201T1710-choose-practice-profile.ts';
 import { publishGlossaries } from './20261201T1740-publish-glossaries.ts';
+import { searchContent } from './20261201T1750-search-content.ts';
 
 /** One step of the schema's history. Never edited once it has landed. */
 export interface Migration {
@@ -28,4 +29,5 @@ export const migrations: readonly Migration[] = [
   fadePractice,
   choosePracticeProfile,
   publishGlossaries,
+  searchContent,
 ];
