@@ -5,7 +5,8 @@ import { Link, useParams } from 'react-router-dom';
 import { cacheOf, type LoaderArgs, requireSession } from '../api/session.ts';
 import { thumbLabel } from '../features/course/map-words.ts';
 import { courseQuery, type CourseMapView } from '../features/course/queries.ts';
-import { LessonAims, LessonEnd } from '../features/lessons/lesson-end.tsx';
+import { LessonAims } from '../features/lessons/lesson-aims.tsx';
+import { LessonEnd } from '../features/lessons/lesson-end.tsx';
 import { LessonText } from '../features/lessons/lesson-text.tsx';
 import { lessonQuery, type LessonView, progressQuery } from '../features/lessons/queries.ts';
 import { useReadingProgress } from '../features/lessons/reading-progress.ts';
@@ -54,7 +55,7 @@ function LessonSheet({ number }: { number: string }) {
           titleBlock={<LessonTitleBlock lesson={lesson} map={map} />}
         />
         <RevisionNotice progress={progress} />
-        <LessonAims can={lesson.can} />
+        <LessonAims lesson={lesson} />
         <article className="lesson" lang={lesson.language} aria-label={lesson.title}>
           <LessonText lesson={lesson} named={named} />
         </article>

@@ -24,7 +24,7 @@ interface Row {
 }
 
 /** Blocks that run across both columns. */
-const wideBlocks = ['figure', 'worked', 'try'];
+const wideBlocks = ['figure', 'drawing', 'worked', 'try'];
 /** Blocks that stand in the margin, level with the paragraph before them. */
 const marginBlocks = ['margin', 'hazard'];
 

@@ -1,17 +1,24 @@
-import { type ReactNode, use } from 'react';
+import { lazy, type ReactNode, Suspense, use } from 'react';
 import Markdown, { type Components } from 'react-markdown';
 import remarkDirective from 'remark-directive';
 import remarkGfm from 'remark-gfm';
 import remarkMath from 'remark-math';
 import { Hazard, type HazardLevel } from '../../ui/hazard.tsx';
 import { ScrollTable } from '../../ui/scroll-table.tsx';
+import { RuledLines } from '../../ui/states.tsx';
 import { layOutSheet } from './lay-out-sheet.ts';
 import { LessonContext } from './lesson-context.ts';
 import { LessonFigure } from './lesson-figure.tsx';
+import { markTerms } from './mark-terms.ts';
 import { type LessonView } from './queries.ts';
+import { TermNote } from './term-note.tsx';
 import { DrawnTree } from './tree.tsx';
 import { TryQuestion } from './try-question.tsx';
 import { WorkedExample } from './worked-example.tsx';
+
+const LessonDrawing = lazy(() =>
+  import('./drawings/lesson-drawing.tsx').then((part) => ({ default: part.LessonDrawing })),
+);
 
 interface RowProps {
   paragraph?: number;
@@ -61,6 +68,14 @@ function SheetHazard(props: { level: HazardLevel; title: string; children?: Reac
   );
 }
 
+function SheetDrawing(props: { kind: string; title: string }) {
+  return (
+    <Suspense fallback={<RuledLines what="the drawing" />}>
+      <LessonDrawing {...props} />
+    </Suspense>
+  );
+}
+
 function LocalCode({ children }: { children?: ReactNode }) {
   return (
     <div className="local-code" role="note">
@@ -77,6 +92,8 @@ const components = {
   'sheet-hazard': SheetHazard,
   'sheet-local': LocalCode,
   'sheet-figure': LessonFigure,
+  'sheet-drawing': SheetDrawing,
+  'sheet-term': TermNote,
   'sheet-worked': WorkedExample,
   'sheet-try': TryQuestion,
   table: ScrollTable,
@@ -98,6 +115,7 @@ export function LessonText({ lesson, named = null }: LessonTextProps) {
           remarkMath,
           remarkDirective,
           [layOutSheet, { words: lesson.words }],
+          [markTerms, lesson.terms],
         ]}
         components={components}
       >
