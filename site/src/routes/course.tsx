@@ -45,6 +45,7 @@ export function Component() {
           ...(map.carryOn
             ? [{ label: `Sheet ${map.carryOn.sheet}`, to: `/sheets/${map.carryOn.sheet}` }]
             : []),
+          { label: 'Practice', to: '/practice' },
           { label: 'My record', to: '/record' },
         ]}
       />

@@ -58,6 +58,7 @@ export function Component() {
         label="Record"
         links={[
           { label: 'Course map', to: '/course' },
+          { label: 'Practice', to: '/practice' },
           { label: 'My record', to: '/record', current: true },
         ]}
       />

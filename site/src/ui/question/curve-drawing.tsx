@@ -73,14 +73,17 @@ function Axes({ placed, layout }: { placed: PlacedCurve; layout: CurveLayout }) 
     <>
       <g>{placed.voltTicks.map((tick) => figure(tick, placed.volts(tick)))}</g>
       <g>{placed.ampTicks.map((tick) => figure(tick, placed.amps(tick)))}</g>
-      {placed.hourTicks.map((tick) => (
-        <g key={tick}>
-          <path className="conductor" d={`M${placed.x(tick)} ${placed.ampsFoot}v5`} />
-          <text className="second" x={placed.x(tick)} y={placed.ampsFoot + 20} textAnchor="middle">
-            {tick}
-          </text>
-        </g>
-      ))}
+      {placed.timeTicks.map((tick) => {
+        const x = placed.x(tick / placed.time.perHour);
+        return (
+          <g key={tick}>
+            <path className="conductor" d={`M${x} ${placed.ampsFoot}v5`} />
+            <text className="second" x={x} y={placed.ampsFoot + 20} textAnchor="middle">
+              {tick}
+            </text>
+          </g>
+        );
+      })}
       <path
         className="conductor"
         d={`M${layout.left} ${placed.ampsTop}V${placed.ampsFoot}H${edge}`}
@@ -90,7 +93,7 @@ function Axes({ placed, layout }: { placed: PlacedCurve; layout: CurveLayout }) 
         d={`M${layout.left} ${placed.voltsTop}V${placed.voltsFoot}H${edge}`}
       />
       <text className="second" x={edge} y={layout.height - 2} textAnchor="end">
-        Time, h
+        Time, {placed.time.unit}
       </text>
     </>
   );

@@ -50,3 +50,17 @@ it('reads and lists a second voltage and a second current by their own names', (
   const row = screen.getByRole('row', { name: /^Into the battery, A/ });
   expect(within(row).getAllByRole('cell').at(-1)).toHaveTextContent('−8.0');
 });
+
+it('reads a short log second by second', () => {
+  const short = { ...curve, hours: [0, 0.05, 0.1, 0.2], intervals: [] };
+  render(<CurveReader curve={short} />);
+  const slider = screen.getByRole('slider', { name: /time in seconds/ });
+  expect(slider).toHaveAttribute('max', '720');
+  expect(slider).toHaveAttribute('aria-valuetext', '360 seconds, 14.40 volts, 10.0 amperes');
+  fireEvent.click(screen.getByRole('button', { name: 'Cursor back 1 second' }));
+  fireEvent.keyDown(slider, { key: 'PageDown' });
+  expect(slider).toHaveValue('329');
+  const times = within(screen.getByRole('row', { name: /^Time, s/ })).getAllByRole('cell');
+  expect(times.map(({ textContent }) => textContent)).toHaveLength(25);
+  expect(times.at(-1)).toHaveTextContent('720');
+});

@@ -3,80 +3,89 @@ import { Quantity } from '../quantity.tsx';
 import { CurveDrawing } from './curve-drawing.tsx';
 import { type CurveLine, figureOf, headOf, linesOf } from './curve-lines.ts';
 import './curve.css';
-import { type CurveLayout, readAt, type Reading, readingsOf } from './curve-scales.ts';
+import { type CurveLayout, readAt, readingsOf } from './curve-scales.ts';
+import { type CurveTime, placeCursor, timeOf } from './curve-time.ts';
 import { type CurveView } from './views.ts';
 
 const wide: CurveLayout = { width: 840, height: 450, left: 46, right: 14 };
 const narrow: CurveLayout = { width: 350, height: 410, left: 34, right: 8 };
 
-const step = 0.1;
-const leap = 1;
+interface Read {
+  time: CurveTime;
+  /** Where the cursor stands, in the unit of the time. */
+  at: number;
+  lines: readonly CurveLine[];
+  values: readonly number[];
+}
 
 /** "3.6 hours, 14.40 volts, 14.9 amperes" */
-function sayReading(lines: readonly CurveLine[], { hours, values }: Reading): string {
+function sayReading({ time, at, lines, values }: Read): string {
   const said = lines.map((line, index) => {
     const figure = figureOf(line, values[index] ?? 0).replace('\u2212', 'minus ');
     return `${figure} ${line.said}`;
   });
-  return [`${hours.toFixed(1)} hours`, ...said].join(', ');
+  return [`${at.toFixed(time.places)} ${time.said}`, ...said].join(', ');
 }
 
 /** A charge curve to read: a cursor moved by slider, keys or buttons, and the readings as a table. */
 export function CurveReader({ curve }: { curve: CurveView }) {
-  const end = curve.hours.at(-1) ?? 0;
-  const [hours, setHours] = useState(() => Math.round(end * 5) / 10);
-  const cursor = readAt(curve, hours);
-  const lines = linesOf(curve);
-  const put = (at: number) => setHours(Math.min(end, Math.max(0, Math.round(at * 10) / 10)));
-  const within = curve.intervals.find(({ fromH, toH }) => fromH <= hours && hours <= toH);
-  const drawn = { curve, cursor, within, onMove: put };
+  const time = timeOf(curve);
+  const [at, setAt] = useState(() => placeCursor(time, time.end / 2));
+  const cursor = readAt(curve, at / time.perHour);
+  const put = (next: number) => setAt(placeCursor(time, next));
+  const within = curve.intervals.find(
+    ({ fromH, toH }) => fromH <= cursor.hours && cursor.hours <= toH,
+  );
+  const onMove = (hours: number) => put(hours * time.perHour);
+  const drawn = { curve, cursor, within, onMove };
   return (
     <div className="curve" role="group" aria-label="Charge curve">
       <CurveDrawing {...drawn} layout={wide} className="only-wide" />
       <CurveDrawing {...drawn} layout={narrow} className="only-narrow" />
-      <p className="visually-hidden">{sayIntervals(curve)}</p>
-      <CursorControls lines={lines} cursor={cursor} end={end} onPut={put} />
-      <ReadingsTable curve={curve} within={within} />
+      <p className="visually-hidden">{sayIntervals(curve, time)}</p>
+      <CursorControls {...{ time, at }} lines={linesOf(curve)} values={cursor.values} onPut={put} />
+      <ReadingsTable curve={curve} time={time} within={within} />
     </div>
   );
 }
 
-function sayIntervals({ intervals }: CurveView): string {
+function sayIntervals({ intervals }: CurveView, { perHour, places, said }: CurveTime): string {
+  const figure = (hours: number) => (hours * perHour).toFixed(places);
   return intervals
     .map(
-      ({ label, fromH, toH }) =>
-        `Interval ${label}: ${fromH.toFixed(1)} to ${toH.toFixed(1)} hours.`,
+      ({ label, fromH, toH }) => `Interval ${label}: ${figure(fromH)} to ${figure(toH)} ${said}.`,
     )
     .join(' ');
 }
 
-interface CursorControlsProps {
-  lines: readonly CurveLine[];
-  cursor: Reading;
-  end: number;
-  onPut: (hours: number) => void;
+/** "0.1 hours", "1 second" */
+const sayStep = ({ step, said }: CurveTime) => (step === 1 ? said.slice(0, -1) : said);
+
+interface CursorControlsProps extends Read {
+  onPut: (at: number) => void;
 }
 
-function CursorControls({ lines, cursor, end, onPut }: CursorControlsProps) {
+function CursorControls({ onPut, ...read }: CursorControlsProps) {
   const id = useId();
+  const { time, at, lines, values } = read;
   return (
     <div className="curve-cursor">
       <label className="curve-slider" htmlFor={id}>
-        <span className="visually-hidden">Cursor, time in hours</span>
+        <span className="visually-hidden">Cursor, time in {time.said}</span>
         <input
           id={id}
           type="range"
           min={0}
-          max={end}
-          step={step}
-          value={cursor.hours}
-          aria-valuetext={sayReading(lines, cursor)}
+          max={time.end}
+          step={time.step}
+          value={at}
+          aria-valuetext={sayReading(read)}
           onChange={(event) => onPut(Number(event.target.value))}
           onKeyDown={(event) => {
-            const by = { PageUp: leap, PageDown: -leap }[event.key];
+            const by = { PageUp: time.leap, PageDown: -time.leap }[event.key];
             if (by === undefined) return;
             event.preventDefault();
-            onPut(cursor.hours + by);
+            onPut(at + by);
           }}
         />
       </label>
@@ -84,7 +93,7 @@ function CursorControls({ lines, cursor, end, onPut }: CursorControlsProps) {
         <div>
           <dt>Time</dt>
           <dd>
-            <Quantity value={cursor.hours.toFixed(1)} unit="h" />
+            <Quantity value={at.toFixed(time.places)} unit={time.unit} />
           </dd>
         </div>
         {lines.map((line, index) => (
@@ -94,7 +103,7 @@ function CursorControls({ lines, cursor, end, onPut }: CursorControlsProps) {
               {lines.length > 2 && <LineSample line={line} />}
             </dt>
             <dd className={line.pane === 'volts' ? 'pen' : undefined}>
-              <Quantity value={figureOf(line, cursor.values[index] ?? 0)} unit={line.unit} />
+              <Quantity value={figureOf(line, values[index] ?? 0)} unit={line.unit} />
             </dd>
           </div>
         ))}
@@ -102,15 +111,15 @@ function CursorControls({ lines, cursor, end, onPut }: CursorControlsProps) {
       <p className="curve-steps not-printed">
         <button
           type="button"
-          onClick={() => onPut(cursor.hours - step)}
-          aria-label="Cursor back 0.1 hours"
+          onClick={() => onPut(at - time.step)}
+          aria-label={`Cursor back ${time.step} ${sayStep(time)}`}
         >
           ‹
         </button>
         <button
           type="button"
-          onClick={() => onPut(cursor.hours + step)}
-          aria-label="Cursor on 0.1 hours"
+          onClick={() => onPut(at + time.step)}
+          aria-label={`Cursor on ${time.step} ${sayStep(time)}`}
         >
           ›
         </button>
@@ -130,16 +139,20 @@ function LineSample({ line }: { line: CurveLine }) {
 
 interface ReadingsTableProps {
   curve: CurveView;
+  time: CurveTime;
   within: CurveView['intervals'][number] | undefined;
 }
 
-function ReadingsTable({ curve, within }: ReadingsTableProps) {
+function ReadingsTable({ curve, time, within }: ReadingsTableProps) {
   const readings = readingsOf(curve);
   const isWithin = readings.map(
     ({ hours }) => within !== undefined && within.fromH <= hours && hours <= within.toH,
   );
   const rows = [
-    { name: 'Time, h', figures: readings.map(({ hours }) => String(Number(hours.toFixed(2)))) },
+    {
+      name: `Time, ${time.unit}`,
+      figures: readings.map(({ hours }) => String(Number((hours * time.perHour).toFixed(2)))),
+    },
     ...linesOf(curve).map((line, index) => ({
       name: headOf(line),
       figures: readings.map(({ values }) => figureOf(line, values[index] ?? 0)),

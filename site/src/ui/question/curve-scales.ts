@@ -1,6 +1,7 @@
 import { scaleLinear } from 'd3-scale';
 import { line } from 'd3-shape';
 import { type CurveLine, headOf, linesOf } from './curve-lines.ts';
+import { timeOf } from './curve-time.ts';
 import { type CurveView } from './views.ts';
 
 export interface CurveLayout {
@@ -38,15 +39,15 @@ export function readAt(curve: CurveView, hours: number): Reading {
 
 /** Readings at even times, at most some two dozen, for the table beside the drawing. */
 export function readingsOf(curve: CurveView): Reading[] {
-  const end = curve.hours.at(-1) ?? 0;
-  const step = end <= 4 ? 0.25 : end <= 8 ? 0.5 : 1;
-  const count = Math.floor(end / step + 1e-9) + 1;
-  return Array.from({ length: count }, (_, index) => readAt(curve, index * step));
+  const { end, between, perHour } = timeOf(curve);
+  const count = Math.floor(end / between + 1e-9) + 1;
+  return Array.from({ length: count }, (_, index) => readAt(curve, (index * between) / perHour));
 }
 
 /** Everything the drawing needs to place a curve: scales, ticks and paths. */
 export function placeCurve(curve: CurveView, layout: CurveLayout) {
   const end = curve.hours.at(-1) ?? 1;
+  const time = timeOf(curve);
   const plot = layout.height - voltsTop - gap - foot;
   const voltsFoot = voltsTop + plot * 0.58;
   const ampsTop = voltsFoot + gap;
@@ -73,7 +74,10 @@ export function placeCurve(curve: CurveView, layout: CurveLayout) {
   return {
     ...{ x, volts, amps, bracketTop, voltsTop, voltsFoot, ampsTop, ampsFoot },
     lines: drawn.map((one) => ({ ...one, label: placeLabel(one, drawn, { curve, x }) })),
-    hourTicks: x.ticks(Math.min(10, Math.max(4, Math.round(layout.width / 70)))),
+    time,
+    timeTicks: scaleLinear([0, time.end], [0, 1]).ticks(
+      Math.min(10, Math.max(4, Math.round(layout.width / 70))),
+    ),
     voltTicks: volts.ticks(Math.min(5, highest - lowest)),
     ampTicks: amps.ticks(3),
   };
@@ -109,21 +113,22 @@ function placeLabel(drawn: Drawn, all: readonly Drawn[], { curve, x }: Axis) {
     const others = all.flatMap((one, index) =>
       index === own || one.pane !== drawn.pane ? [] : [run.map((ofAll) => ofAll[index] ?? 0)],
     );
-    const above = roomOn(heights, others, -1);
-    const below = roomOn(heights, others, 1);
+    // Which line is meant is told where the name begins, less where it ends.
+    const above = roomOn(heights.slice(0, 2), others, -1);
+    const below = roomOn(heights.slice(0, 2), others, 1);
     const isAbove = above >= below;
     const y = isAbove ? Math.min(...heights) - 10 : Math.max(...heights) + 20;
     return { x: x(end * from), y, room: Math.min(Math.max(above, below), 60) };
   });
   const [first = { x: 0, y: 0, room: 0 }] = spots;
-  const best = spots.reduce((kept, spot) => (spot.room > kept.room + 6 ? spot : kept), first);
+  const best = spots.reduce((kept, spot) => (spot.room > kept.room + 4 ? spot : kept), first);
   return { x: best.x, y: best.y };
 }
 
 /** How far away the next line is on one side (-1 above, 1 below), where it is nearest. */
 function roomOn(own: readonly number[], others: readonly number[][], side: -1 | 1): number {
   const gaps = others.flatMap((other) =>
-    other.map((y, index) => (y - (own[index] ?? 0)) * side).filter((room) => room > -4),
+    own.map((y, index) => ((other[index] ?? 0) - y) * side).filter((room) => room > -4),
   );
   return Math.min(...gaps, side === -1 ? 61 : 60);
 }
