@@ -1,5 +1,6 @@
 import type pg from 'pg';
 import { gatherTerms } from '../glossary/terms.ts';
+import type { CompiledCourse } from '../publishing/compiled-course.ts';
 import type { CompiledGlossary } from '../publishing/compiled-glossary.ts';
 import type { CompiledLesson } from '../publishing/compiled-lesson.ts';
 import { SYMBOLS } from '../tables/symbols.ts';
@@ -36,11 +37,15 @@ async function currentOf<T>(client: pg.ClientBase, kind: string): Promise<T[]> {
 }
 
 async function entriesOf(client: pg.ClientBase): Promise<SearchEntry[]> {
+  const courses = await currentOf<CompiledCourse>(client, 'course');
+  const units = courses.flatMap((course) => course.units);
   const lessons = await currentOf<CompiledLesson>(client, 'lesson');
+  const unitOf = ({ number }: CompiledLesson) =>
+    units.find(({ sheets }) => sheets.includes(number))?.title ?? '';
   const glossaries = await currentOf<CompiledGlossary>(client, 'glossary');
   const language = glossaries[0]?.language ?? 'en';
   return [
-    ...lessons.flatMap(lessonEntries),
+    ...lessons.flatMap((lesson) => lessonEntries(lesson, unitOf(lesson))),
     ...gatherTerms(glossaries, lessons).map((term) => termEntry(term, language)),
     ...TABLES.map(tableEntry),
     ...SYMBOLS.map(symbolEntry),
@@ -53,7 +58,9 @@ INSERT INTO search_entries
 SELECT id, kind, title, sheet, paragraph, heading, link, body, configuration,
   setweight(to_tsvector(configuration, normalize(names, NFKC)), 'A')
     || setweight(to_tsvector(configuration, normalize(intro, NFKC)), 'B')
-    || setweight(to_tsvector(configuration, normalize(body, NFKC)), 'C')
+    || setweight(
+      to_tsvector(configuration, normalize(body, NFKC)),
+      CASE kind WHEN 'sheet' THEN 'D' ELSE 'C' END::"char")
 FROM jsonb_to_recordset($1::jsonb) AS entry
   (id integer, kind text, title text, sheet text, paragraph integer, heading text, link text,
    body text, names text, intro text, configuration regconfig)`;

@@ -40,8 +40,12 @@ function passagesOf(lesson: CompiledLesson): Passage[] {
   return passages;
 }
 
-/** A lesson as what can be found of it: the sheet itself, and each of its paragraphs. */
-export function lessonEntries(lesson: CompiledLesson): SearchEntry[] {
+/**
+ * A lesson as what can be found of it: the sheet itself, and each of its paragraphs.
+ *
+ * @param unit - title of the unit it stands in.
+ */
+export function lessonEntries(lesson: CompiledLesson, unit: string): SearchEntry[] {
   const { number, title, language, lead, can, recall } = lesson;
   const shared = { title, sheet: number, language };
   const asked = recall.flatMap(({ ask, answer }) => [ask, answer]).map(plainOf);
@@ -49,7 +53,7 @@ export function lessonEntries(lesson: CompiledLesson): SearchEntry[] {
     {
       ...shared,
       ...{ kind: 'sheet', paragraph: null, heading: null, link: `/sheets/${number}` },
-      ...{ names: title, intro: lead, body: [lead, ...can, ...asked].join(' ') },
+      ...{ names: title, intro: `${unit} ${lead}`, body: [lead, ...can, ...asked].join(' ') },
     },
     ...passagesOf(lesson).map(({ paragraph, heading, opens, texts }): SearchEntry => ({
       ...shared,

@@ -72,7 +72,9 @@ describe('a search', () => {
   });
 
   it('puts a sheet of that name before what mentions it', async () => {
-    expect((await links('pair'))[0]).toBe('/sheets/1.2');
+    expect((await links('the pair'))[0]).toBe('/sheets/1.2');
+    expect((await links('run'))[0]).toBe('/glossary#run');
+
     expect((await links('winch'))[0]).toBe('/sheets/1.2#p2');
   });
 

@@ -10,15 +10,19 @@ export interface FoundEntry extends Pick<
   'kind' | 'title' | 'sheet' | 'paragraph' | 'heading' | 'link'
 > {
   readonly headline: string;
+  /** How its whole text begins and ends: the headline may be a piece of it. */
+  readonly opening: string;
+  readonly closing: string;
 }
 
-const HEADLINE = `StartSel=${OPEN}, StopSel=${CLOSE}, MaxWords=32, MinWords=16, ShortWord=2`;
+const HEADLINE = `StartSel=${OPEN}, StopSel=${CLOSE}, MaxFragments=1, MaxWords=32, MinWords=16, ShortWord=2`;
 
 const MOST_COMPLETIONS = 12;
 
 /**
  * The query is put together for every configuration there is. Words are letters and digits alone,
- * so none can be read as an operator; the last may be the beginning of a word.
+ * so none can be read as an operator; the last may be the beginning of a word. What is called just
+ * so comes first.
  */
 const FIND = `
 WITH asked AS (
@@ -35,12 +39,13 @@ WITH asked AS (
     ts_rank_cd('{0.1, 0.3, 0.6, 1.0}', words, query, 1) AS rank
   FROM search_entries AS entry JOIN asked USING (configuration)
   WHERE words @@ query
-  ORDER BY rank DESC, id
+  ORDER BY lower(title) = $5 DESC, rank DESC, id
   LIMIT $2
 )
 SELECT kind, title, sheet, paragraph, heading, link,
-  ts_headline(configuration, body, query, $4) AS headline
-FROM best ORDER BY rank DESC, id`;
+  ts_headline(configuration, body, query, $4) AS headline,
+  left(body, 20) AS opening, right(body, 20) AS closing
+FROM best ORDER BY lower(title) = $5 DESC, rank DESC, id`;
 
 @Injectable()
 export class SearchRepository {
@@ -59,7 +64,7 @@ export class SearchRepository {
     const beginnings = [`${last}:*`, ...(await this.completions(last))].join(' | ');
     const lexemes = [...words.slice(0, -1), `(${beginnings})`];
     return this.sequelize.query<FoundEntry>(FIND, {
-      bind: [lexemes, how.most, how.every, HEADLINE],
+      bind: [lexemes, how.most, how.every, HEADLINE, words.join(' ')],
       type: QueryTypes.SELECT,
     });
   }

@@ -41,8 +41,9 @@ export class SearchService {
 function present(query: string, found: readonly FoundEntry[], corrected: string | null): Found {
   return {
     ...{ query, corrected, more: found.length > MOST_RESULTS },
-    results: found
-      .slice(0, MOST_RESULTS)
-      .map(({ headline, ...entry }) => ({ ...entry, snippet: readSnippet(headline) })),
+    results: found.slice(0, MOST_RESULTS).map(({ headline, opening, closing, ...entry }) => ({
+      ...entry,
+      snippet: readSnippet(headline, { opening, closing }),
+    })),
   };
 }

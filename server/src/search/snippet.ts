@@ -8,8 +8,27 @@ export interface Snippet {
 export const OPEN = '\ue000';
 export const CLOSE = '\ue001';
 
-/** Takes the signs out of a headline and says where they stood. */
-export function readSnippet(headline: string): Snippet {
+const LEFT_OUT = '…';
+
+/**
+ * Takes the signs out of a headline and says where they stood. Where it is cut out of a longer
+ * text, an ellipsis says so.
+ */
+export function readSnippet(
+  headline: string,
+  whole: { opening: string; closing: string },
+): Snippet {
+  const { text, marks } = readMarks(headline.trim());
+  const before = text.startsWith(whole.opening.trim()) ? '' : `${LEFT_OUT} `;
+  const after = text.endsWith(whole.closing.trim()) ? '' : ` ${LEFT_OUT}`;
+  const shift = before.length;
+  return {
+    text: `${before}${text}${after}`,
+    marks: marks.map(({ from, to }) => ({ from: from + shift, to: to + shift })),
+  };
+}
+
+function readMarks(headline: string): Snippet {
   const marks: { from: number; to: number }[] = [];
   let text = '';
   let from: number | null = null;

@@ -41,12 +41,21 @@ describe('the word that was meant', () => {
 
 describe('a snippet', () => {
   it('is plain text with the places of the finds', () => {
-    expect(readSnippet('The \ue000fuse\ue001 protects the \ue000cable\ue001.')).toEqual({
+    const whole = { opening: 'The fuse', closing: 'the cable.' };
+    expect(readSnippet('The \ue000fuse\ue001 protects the \ue000cable\ue001.', whole)).toEqual({
       text: 'The fuse protects the cable.',
       marks: [
         { from: 4, to: 8 },
         { from: 22, to: 27 },
       ],
+    });
+  });
+
+  it('shows where it is cut out of a longer text, its places moved along', () => {
+    const whole = { opening: 'First of all', closing: 'and so on.' };
+    expect(readSnippet('the \ue000fuse\ue001 protects', whole)).toEqual({
+      text: '… the fuse protects …',
+      marks: [{ from: 6, to: 10 }],
     });
   });
 });
