@@ -1,6 +1,6 @@
 import { batteryModel } from '../electrical/charging/battery-model.ts';
-import { type ChargeReading, logCharge } from '../electrical/charging/log-charge.ts';
-import { totalsOf } from '../electrical/charging/readings.ts';
+import { logCharge } from '../electrical/charging/log-charge.ts';
+import { type ChargeReading, totalsOf } from '../electrical/charging/readings.ts';
 import { rounded } from './rounded.ts';
 import { type ChargeCurve, type ChargeMoment } from './types.ts';
 

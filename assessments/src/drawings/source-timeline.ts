@@ -1,9 +1,6 @@
 import { batteryModel } from '../electrical/charging/battery-model.ts';
-import {
-  type ChargeLog,
-  type ChargeReading,
-  logCharge,
-} from '../electrical/charging/log-charge.ts';
+import { type ChargeLog, logCharge } from '../electrical/charging/log-charge.ts';
+import { type ChargeReading } from '../electrical/charging/readings.ts';
 import { rounded } from './rounded.ts';
 import { type SourceTimeline } from './types.ts';
 

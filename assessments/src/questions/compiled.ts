@@ -1,4 +1,4 @@
-import { type CurvePlan, type CurveRead } from './curve-plan.ts';
+import { type CurvePlan, type CurveRead } from './curve-types.ts';
 import { type Expr } from './expression.ts';
 import {
   type CautionView,

@@ -6,7 +6,7 @@ import {
   type SolarInput,
   type VehicleInput,
 } from '../electrical/charging/settings.ts';
-import { type CurvePlan } from './curve-plan.ts';
+import { type CurvePlan } from './curve-types.ts';
 
 /** Values by name, SI. */
 type Values = ReadonlyMap<string, number>;

@@ -1,6 +1,6 @@
-import { type ChargeLog, type ChargeReading } from '../electrical/charging/log-charge.ts';
-import { readingAt, spellsOf } from '../electrical/charging/readings.ts';
-import { type CurvePlan, type CurveRead, type StageWord } from './curve-plan.ts';
+import { type ChargeLog } from '../electrical/charging/log-charge.ts';
+import { type ChargeReading, readingAt, spellsOf } from '../electrical/charging/readings.ts';
+import { type CurvePlan, type CurveRead, type StageWord } from './curve-types.ts';
 import { type CurveView } from './types.ts';
 
 type Values = ReadonlyMap<string, number>;

@@ -1,5 +1,5 @@
 import { type Option } from './compiled.ts';
-import { type StageWord } from './curve-plan.ts';
+import { type StageWord } from './curve-types.ts';
 import { type CurveSheet } from './curve-schema.ts';
 
 /** What a trainee may answer; a charger that rests and one that is off read alike. */

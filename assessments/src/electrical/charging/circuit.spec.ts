@@ -2,8 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { runNgspice } from '../../../test/ngspice.ts';
 import { numberIn, readTable } from '../../../test/reference/read-table.ts';
 import { type Battery, type BatteryKind, batteryModel } from './battery-model.ts';
-import { type ChargeLog, type ChargeReading, logCharge } from './log-charge.ts';
-import { readingAt } from './readings.ts';
+import { type ChargeLog, logCharge } from './log-charge.ts';
+import { type ChargeReading, readingAt } from './readings.ts';
 import { type ChargeRun } from './settings.ts';
 
 /** Rest voltage rising with charge behind one resistance: what the closed forms are about. */

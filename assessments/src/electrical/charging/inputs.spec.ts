@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { runNgspice } from '../../../test/ngspice.ts';
 import { batteryModel } from './battery-model.ts';
-import { type ChargeReading, logCharge } from './log-charge.ts';
-import { readingAt } from './readings.ts';
+import { logCharge } from './log-charge.ts';
+import { type ChargeReading, readingAt } from './readings.ts';
 import { type ChargeRun, type VehicleInput } from './settings.ts';
 
 const VEHICLE: VehicleInput = {

@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { readTable, numberIn } from '../../../test/reference/read-table.ts';
 import { type BatteryKind, batteryModel } from './battery-model.ts';
-import { type ChargeLog, type ChargeReading, logCharge } from './log-charge.ts';
-import { readingAt, spellsOf } from './readings.ts';
+import { type ChargeLog, logCharge } from './log-charge.ts';
+import { type ChargeReading, readingAt, spellsOf } from './readings.ts';
 import { type ChargeRun, type VehicleInput } from './settings.ts';
 
 const CHARGER = {

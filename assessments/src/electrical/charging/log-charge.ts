@@ -1,32 +1,12 @@
 import { OutOfRange } from '../out-of-range.ts';
-import { type Source, SourceChooser } from './inputs.ts';
-import { type ChargeTotals, totalsOf } from './readings.ts';
+import { SourceChooser } from './inputs.ts';
+import { type ChargeReading, type ChargeTotals, totalsOf } from './readings.ts';
 import { requireRun } from './require-run.ts';
 import { type ChargeRun, type Stage } from './settings.ts';
 import { StageKeeper } from './stage-keeper.ts';
 import { type Stand, stepFrom } from './step.ts';
 import { fullOutputAt, isPaused, momentsOf, SAME_H } from './timetable.ts';
 import { isTripping, isWorking, look, mayCloseAtH, type Sight, type World } from './world.ts';
-
-export interface ChargeReading {
-  hour: number;
-  /** At the charger's posts. */
-  volts: number;
-  batteryVolts: number;
-  /** At the charger's vehicle input; NaN without one. */
-  inputVolts: number;
-  /** At the start battery's posts, and the share it is charged; NaN without one. */
-  startVolts: number;
-  startCharge: number;
-  /** Out of the charger; the battery takes this less the load. */
-  amps: number;
-  batteryAmps: number;
-  charge: number;
-  stage: Stage;
-  source: Source;
-  /** The charger has stopped to look at its source. */
-  isPaused: boolean;
-}
 
 export interface ChargeLog {
   readings: ChargeReading[];

@@ -1,4 +1,25 @@
-import { type ChargeReading } from './log-charge.ts';
+import { type Source } from './inputs.ts';
+import { type Stage } from './settings.ts';
+
+export interface ChargeReading {
+  hour: number;
+  /** At the charger's posts. */
+  volts: number;
+  batteryVolts: number;
+  /** At the charger's vehicle input; NaN without one. */
+  inputVolts: number;
+  /** At the start battery's posts, and the share it is charged; NaN without one. */
+  startVolts: number;
+  startCharge: number;
+  /** Out of the charger; the battery takes this less the load. */
+  amps: number;
+  batteryAmps: number;
+  charge: number;
+  stage: Stage;
+  source: Source;
+  /** The charger has stopped to look at its source. */
+  isPaused: boolean;
+}
 
 /** What a log adds up to. */
 export interface ChargeTotals {
