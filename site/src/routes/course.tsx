@@ -37,6 +37,7 @@ export function Component() {
         {!map.class && <JoinClass />}
         <CourseDiagram map={map} />
         <Schedule map={map} />
+        <Reference />
       </Sheet>
       <FootStrip
         label="Course"
@@ -50,6 +51,17 @@ export function Component() {
         ]}
       />
     </>
+  );
+}
+
+/** What one looks things up in, from every sheet. */
+function Reference() {
+  return (
+    <nav className="reference-links" aria-label="To look things up">
+      <Link to="/tables">Tables</Link>
+      <Link to="/glossary">Glossary</Link>
+      <Link to="/search">Search</Link>
+    </nav>
   );
 }
 

@@ -3,6 +3,7 @@ import { Link, Outlet, useLocation, useNavigate } from 'react-router-dom';
 import { answerOf, api } from '../api/client.ts';
 import { changeSession, needsSecondStep, sessionQuery } from '../api/session.ts';
 import { type Role, type SessionView } from '../api/views.ts';
+import { HeadSearch } from '../features/search/head-search.tsx';
 import { RunningHead } from '../ui/running-head.tsx';
 
 const publicLinks = [{ label: 'Check a certificate', to: '/check' }];
@@ -39,7 +40,12 @@ export function Shell() {
     <>
       <RunningHead
         links={linksFor(session)}
-        end={offersSignIn && <Link to="/sign-in">Sign in</Link>}
+        end={
+          <>
+            {offersSignIn && <Link to="/sign-in">Sign in</Link>}
+            {session && !needsSecondStep(session) && <HeadSearch />}
+          </>
+        }
         own={session && <SignedIn session={session} />}
       />
       <Outlet />

@@ -1,0 +1,46 @@
+import { Link } from 'react-router-dom';
+import { type Letter } from './by-letter.ts';
+import { type TermView } from './queries.ts';
+
+interface LetterSectionProps extends Letter {
+  /** The place the address names. */
+  named: string;
+}
+
+/** One letter of the glossary. */
+export function LetterSection({ letter, terms, named }: LetterSectionProps) {
+  return (
+    <section className="letter" id={letterAnchor(letter)} aria-label={`Letter ${letter}`}>
+      <h2>{letter}</h2>
+      <dl>
+        {terms.map((term) => (
+          <TermRow key={term.anchor} term={term} isNamed={term.anchor === named} />
+        ))}
+      </dl>
+    </section>
+  );
+}
+
+/** Not to be taken for the term of the same name. */
+export const letterAnchor = (letter: string) => `letter-${letter === '#' ? 'other' : letter}`;
+
+function TermRow({ term, isNamed }: { term: TermView; isNamed: boolean }) {
+  return (
+    <div className={isNamed ? 'named' : undefined} id={term.anchor}>
+      <dt>{term.term}</dt>
+      <dd>
+        <p>{term.means}</p>
+        {term.also.length > 0 && <p className="fine">Also: {term.also.join(', ')}</p>}
+        {term.sheets.length > 0 && (
+          <p className="fine term-sheets">
+            {term.sheets.map(({ number, title }) => (
+              <Link key={number} to={`/sheets/${number}`}>
+                Sheet {number}, {title}
+              </Link>
+            ))}
+          </p>
+        )}
+      </dd>
+    </div>
+  );
+}
