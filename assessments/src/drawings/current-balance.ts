@@ -6,11 +6,11 @@ export function drawCurrentBalance(): CurrentBalanceDrawing {
     kind: 'current-balance',
     chargerA: { from: 0, to: 40, step: 0.5, start: 30 },
     loads: [
-      { name: 'Lights', amps: 3.5, isOn: true },
-      { name: 'Fridge', amps: 7.2, isOn: true },
-      { name: 'Pump', amps: 3.25, isOn: true },
+      { name: 'Lights E1', amps: 3.5, isOn: true },
+      { name: 'Motor M1', amps: 7.2, isOn: true },
+      { name: 'Heater E2', amps: 3.25, isOn: true },
     ],
-    bypass: { name: 'Tracker on the battery post', amps: 2.4, isOn: false },
+    bypass: { name: 'E4 on the battery post', amps: 2.4, isOn: false },
     source:
       'Kirchhoff’s first law at the negative bar: definition. The currents are given data of the course.',
   };

@@ -6,7 +6,7 @@ import { type SourceTimeline } from './types.ts';
 
 const SETTINGS = { engageV: 13.2, releaseV: 12.8, delayS: 120, solarA: 6, chargerA: 30 };
 const MINUTES = 60;
-const ENGINE = { on: 10, off: 40 };
+const ENGINE = { on: 20, off: 45 };
 const ALTERNATOR_V = 14.2;
 /** Pair of 5 m of 16 mm² class 5 copper, Ω. */
 const CABLE_OHMS = 0.0121;

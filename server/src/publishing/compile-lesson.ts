@@ -35,7 +35,7 @@ interface LessonWork {
 
 export interface LessonOutcome {
   readonly compiled: CompiledLesson;
-  /** Changes with the text, the drawings, and the questions that are worked in it. */
+  /** Changes with the text, the drawings, its sums, and the questions that are worked in it. */
   readonly hash: Buffer;
 }
 
@@ -123,6 +123,11 @@ function hashOf(work: LessonWork, blocks: LessonBlocks): Buffer {
     const revision = work.references.questions.get(question)?.meta.revision ?? '';
     hash.update(`\0${question}#${seed}@${revision}`);
   }
+  if (work.file.text.includes(':sum[')) {
+    const { body, front } = work.sheet;
+    hash.update(`\0${JSON.stringify([body, front.lead, front.recall])}`);
+  }
+  for (const { kind } of blocks.drawings) hash.update(`\0${JSON.stringify(drawingData(kind))}`);
   return hash.digest();
 }
 
