@@ -4,42 +4,11 @@ import { beforeEach, expect, it, vi } from 'vitest';
 import { type Answer } from '../api/views.ts';
 import { problemReply, serve, serveWith, signInAs } from '../testing/api-server.ts';
 import { makeCourseMap } from '../testing/course-map.ts';
+import { makeLesson } from '../testing/lesson.ts';
 import { makeMarked, makeQuestion } from '../testing/questions.ts';
 import { renderRoute } from '../testing/render-route.tsx';
 
-type LessonView = Answer<'Lessons_read'>;
 type ProgressView = Answer<'Lessons_progress'>;
-
-const lesson: LessonView = {
-  number: '3.4',
-  slug: 'the-long-run',
-  title: 'The long run',
-  revision: 'C',
-  issued: '2026-11-02',
-  language: 'en',
-  unit: { number: 3, title: 'Voltage drop' },
-  author: 'O. Marchetti',
-  checkedBy: 'R. Nakamura',
-  minutes: 14,
-  lead: 'Both conductors cost you volts.',
-  can: ['size a two-wire run'],
-  objectives: [{ does: 'size a two-wire run', questions: ['vd-chart-table'], recall: [1] }],
-  needs: [],
-  headings: [],
-  terms: [],
-  drawings: {},
-  body: 'Stand at the fuse board.\n\nA conductor is a resistor.\n\n::try{question="vd-chart-table"}',
-  paragraphs: 2,
-  words: [],
-  sources: ['IEC 60228:2004 (from memory)'],
-  recall: [{ ask: 'Why twice?', answer: 'Out and back.' }],
-  formulas: {},
-  figures: {},
-  worked: {},
-  tries: ['vd-chart-table'],
-  previous: { number: '1.4', title: 'Isolate, lock, prove dead' },
-  next: null,
-};
 
 const begun: ProgressView = { state: 'begun', paragraph: 1, revisionRead: null, current: 'C' };
 
@@ -59,7 +28,7 @@ beforeEach(() => {
   vi.stubGlobal('IntersectionObserver', SightOfEverything);
   signInAs();
   serve('get', '/api/course', makeCourseMap());
-  serve('get', '/api/lessons/3.4', lesson);
+  serve('get', '/api/lessons/3.4', makeLesson());
   serve('get', '/api/lessons/3.4/progress', begun);
   serve('put', '/api/lessons/3.4/progress', { ...begun, paragraph: 2 });
 });
@@ -159,4 +128,47 @@ it('brings the paragraph that the address names into sight, marks it and reads f
   expect(screen.getByText('Stand at the fuse board.').closest('.sheet-row')).not.toHaveClass(
     'named',
   );
+});
+
+it('says what to read first, where things stand and which questions ask for it', async () => {
+  serve(
+    'get',
+    '/api/lessons/3.4',
+    makeLesson({
+      needs: [{ number: '3.2', title: 'Two wires' }],
+      headings: [{ text: 'Under load', paragraph: 2 }],
+    }),
+  );
+  renderRoute('/sheets/3.4');
+  expect(await screen.findByRole('link', { name: 'Sheet 3.2, Two wires' })).toHaveAttribute(
+    'href',
+    '/sheets/3.2',
+  );
+  expect(screen.getByRole('link', { name: 'Under load, 2' })).toHaveAttribute(
+    'href',
+    '/sheets/3.4#p2',
+  );
+  expect(
+    screen.getByRole('link', { name: 'Practise: size a two-wire run, question 1' }),
+  ).toHaveAttribute('href', '/practice/vd-chart-table');
+});
+
+it('explains a word of the glossary where it first stands, and Escape closes the note', async () => {
+  const terms = [{ term: 'resistor', means: 'what turns volts into heat', forms: ['resistor'] }];
+  const body = 'A conductor is a Resistor.\n\nEvery resistor warms.';
+  serve('get', '/api/lessons/3.4', makeLesson({ terms, body }));
+  const { user } = renderRoute('/sheets/3.4');
+  const word = await screen.findByRole('button', { name: 'Resistor' });
+  expect(word).toHaveAccessibleDescription(/what turns volts into heat/);
+  expect(screen.getByText('Every resistor warms.')).toBeVisible();
+  word.focus();
+  await user.keyboard('{Enter}');
+  expect(screen.getByText(/what turns volts into heat/)).toBeVisible();
+  expect(screen.getByRole('link', { name: 'In the glossary' })).toHaveAttribute(
+    'href',
+    '/glossary#resistor',
+  );
+  await user.keyboard('{Tab}{Escape}');
+  expect(screen.getByText(/what turns volts into heat/)).not.toBeVisible();
+  expect(word).toHaveFocus();
 });

@@ -2,7 +2,7 @@ import { type BankQuestion, type BankView } from '../features/practice/queries.t
 import { type PracticeView } from '../ui/question/practice.ts';
 import { makeQuestion } from './questions.ts';
 
-export function makeBankQuestion(more: Partial<BankQuestion> = {}): BankQuestion {
+function makeBankQuestion(more: Partial<BankQuestion> = {}): BankQuestion {
   return {
     slug: 'vd-chart-table',
     title: 'Feeding the chart table',

@@ -262,3 +262,10 @@ function asRead(server: KeepingServer) {
   });
   return makeSitting({ items });
 }
+
+it('opens again with the choices of an answer that has several', () => {
+  const receipt = { savedAt: '2026-12-01T10:03:10Z', receipt: 'F1-OLD', sequence: 3 };
+  const answers = { a: { ...blankAnswer, options: ['s2', 's1'], ...receipt } };
+  const desk = new AnswerDesk(makeSitting({ items: [makeItem(1, { answers })] }), vi.fn());
+  expect(desk.snapshot().answers['k1']?.['a']).toEqual({ ...blankAnswer, options: ['s2', 's1'] });
+});

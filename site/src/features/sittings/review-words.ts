@@ -1,4 +1,4 @@
-import { isAnswered, type Standing } from '../../ui/question/views.ts';
+import { isAnswered, isHalfMatched, type Standing } from '../../ui/question/views.ts';
 import { joinAnd, sayNumber, upperFirst } from '../../ui/words.ts';
 import { type DeskState } from './answer-desk.ts';
 import { type SittingItem } from './queries.ts';
@@ -19,13 +19,21 @@ export function sayStandings(standings: readonly Standing[]): string {
   return `${clauses.join(', ')} and ${last}. A blank loses its marks; a wrong answer loses no more than that.`;
 }
 
+const sayParts = (parts: readonly { id: string }[]) => joinAnd(parts.map(({ id }) => `(${id})`));
+
 /** "Part answered, (b) is blank" */
 export function sayStanding(item: SittingItem, standing: Standing, state: DeskState): string {
   if (standing === 'answered') return 'Answered';
   if (standing === 'not') return 'Not answered';
   const answers = state.answers[item.key] ?? {};
-  const blank = item.question.parts.filter((part) => !isAnswered(part, answers[part.id]));
-  return `Part answered, ${joinAnd(blank.map(({ id }) => `(${id})`))} ${are(blank.length)} blank`;
+  const missing = item.question.parts.filter((part) => !isAnswered(part, answers[part.id]));
+  const half = missing.filter((part) => isHalfMatched(part, answers[part.id]));
+  const blank = missing.filter((part) => !half.includes(part));
+  const clauses = [
+    ...(blank.length > 0 ? [`${sayParts(blank)} ${are(blank.length)} blank`] : []),
+    ...(half.length > 0 ? [`${sayParts(half)} ${are(half.length)} not all matched`] : []),
+  ];
+  return `Part answered, ${clauses.join(', ')}`;
 }
 
 /** "Two to come back to: 4 and 7." Empty when there is none. */

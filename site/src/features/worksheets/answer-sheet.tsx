@@ -5,7 +5,7 @@ import { ProblemCallout } from '../../ui/problem-callout.tsx';
 import { CurveReader } from '../../ui/question/curve-reader.tsx';
 import { QuestionCard } from '../../ui/question/question-card.tsx';
 import { readUnclear } from '../../ui/question/unclear.ts';
-import { isAnswered } from '../../ui/question/views.ts';
+import { isAnswered, isHalfMatched } from '../../ui/question/views.ts';
 import { type Kept } from './answer-keeper.ts';
 import { ItemHead } from './item-head.tsx';
 import { attemptQuery, handIn, type WorksheetView } from './queries.ts';
@@ -113,6 +113,9 @@ function HandInStrip({ attempt, kept, handingIn, isAskedBack }: HandInStripProps
     question.parts.map((part) => isAnswered(part, kept.answers[key]?.[part.id])),
   );
   const blank = parts.filter((answered) => !answered).length;
+  const hasHalf = attempt.items.some(({ key, question }) =>
+    question.parts.some((part) => isHalfMatched(part, kept.answers[key]?.[part.id])),
+  );
   const press = () => {
     if (blank > 0 && !isAsking) return setAsking(true);
     setAsking(false);
@@ -124,7 +127,7 @@ function HandInStrip({ attempt, kept, handingIn, isAskedBack }: HandInStripProps
         {isAskedBack && <b>Some answers cannot be read. Nothing has been marked. </b>}
         {isAsking && blank > 0 ? (
           <>
-            <b>{sayBlank(blank)}</b> A blank part gets no marks. Hand in all the same?
+            <b>{sayBlank(blank, hasHalf)}</b> What is missing gets no marks. Hand in all the same?
           </>
         ) : (
           <>
@@ -149,6 +152,7 @@ function HandInStrip({ attempt, kept, handingIn, isAskedBack }: HandInStripProps
   );
 }
 
-function sayBlank(blank: number): string {
-  return blank === 1 ? 'One part is blank.' : `${blank} parts are blank.`;
+function sayBlank(blank: number, hasHalf: boolean): string {
+  const what = hasHalf ? 'blank or not all matched' : 'blank';
+  return blank === 1 ? `One part is ${what}.` : `${blank} parts are ${what}.`;
 }

@@ -18,8 +18,7 @@ export function TableExtract({ table }: { table: TableView }) {
           <tr>
             {table.columns.map(({ label, unit }) => (
               <th key={label} scope="col" className="number">
-                {label}
-                {unit && <span>{unit}</span>}
+                {label} {unit && <span>{unit}</span>}
               </th>
             ))}
           </tr>

@@ -69,7 +69,7 @@ export function CurrentBalancePicture({ data, set, balance, layout }: BalancePic
       <text className="tx-b" x={(firstLoad + lastLoad) / 2} y="258" textAnchor="middle">
         {sayFigure(balance.loadsA, 2)}&thinsp;A
       </text>
-      <BatteryBranch balance={balance} layout={layout} />
+      <BatteryBranch balance={balance} layout={layout} letter={`E${data.loads.length + 1}`} />
       <Strip balance={balance} layout={layout} />
     </svg>
   );
@@ -115,8 +115,15 @@ function Arrow({ x, y, way }: { x: number; y: number; way: number }) {
   return <path className="fillcopper" d={`M${x} ${y + 8 * way}l-6 ${-13 * way}h12z`} />;
 }
 
+interface BatteryBranchProps {
+  balance: Balance;
+  layout: BalanceLayout;
+  /** Of the load on the post. */
+  letter: string;
+}
+
 /** Battery B1, shunt R1 from its post to the bar, and what hangs on the post itself. */
-function BatteryBranch({ balance, layout }: { balance: Balance; layout: BalanceLayout }) {
+function BatteryBranch({ balance, layout, letter }: BatteryBranchProps) {
   const { battery, bypass, barEnd } = layout;
   const { batteryA, bypassA, monitorA } = balance;
   const middle = (barEnd + battery) / 2;
@@ -147,7 +154,7 @@ function BatteryBranch({ balance, layout }: { balance: Balance; layout: BalanceL
       <rect className="fillsheet" x={bypass - 17} y="118" width="34" height="30" />
       <rect className="lnb" x={bypass - 17} y="118" width="34" height="30" />
       <text className="tx-b" x={bypass} y="138" textAnchor="middle">
-        E4
+        {letter}
       </text>
       {bypassA > 0 && <Arrow x={bypass} y={168} way={1} />}
       <circle className="fillink" cx={battery} cy={post} r="4" />

@@ -11,6 +11,10 @@ interface CurrentBalanceProps {
   data: Drawn<'current-balance'>;
 }
 
+/** "E4 Tracker": its letter follows those of the loads on the bar. */
+const bypassOf = ({ loads, bypass }: Drawn<'current-balance'>) =>
+  `E${loads.length + 1} ${bypass.name}`;
+
 const startOf = ({ chargerA, loads, bypass }: Drawn<'current-balance'>): BalanceSet => ({
   chargerA: chargerA.start,
   on: new Set([...loads, bypass].filter(({ isOn }) => isOn).map(({ name }) => name)),
@@ -27,7 +31,7 @@ export function CurrentBalance({ title, data }: CurrentBalanceProps) {
       wide={<CurrentBalancePicture {...drawn} layout={wideBalance} />}
       narrow={<CurrentBalancePicture {...drawn} layout={narrowBalance} />}
       controls={<BalanceControls data={data} set={set} onSet={setSet} />}
-      said={<BalanceSaid balance={balance} bypass={data.bypass.name} />}
+      said={<BalanceSaid balance={balance} bypass={bypassOf(data)} />}
       table={tableOf(data, set, balance)}
       source={data.source}
     />
@@ -98,7 +102,7 @@ function BalanceSaid({ balance, bypass }: { balance: Balance; bypass: string }) 
         {monitorA < 0 ? '+' : '−'} {sayFigure(Math.abs(monitorA), 2)} = <b>0</b>.{' '}
         {sayBattery(batteryA)}{' '}
         {bypassA > 0
-          ? `The monitor counts the ${sayFigure(bypassA, 2)}\u2009A of E4 as the battery’s: ${bypass} is behind the shunt.`
+          ? `The monitor counts the ${sayFigure(bypassA, 2)}\u2009A of ${bypass} as the battery’s: it is wired to the post, behind the shunt.`
           : 'The monitor says the same.'}
       </span>
     </>
@@ -123,23 +127,19 @@ function Meter({ name, amps, note }: { name: string; amps: number; note: string 
   );
 }
 
-function tableOf(
-  { loads, bypass }: Drawn<'current-balance'>,
-  { on }: BalanceSet,
-  balance: Balance,
-) {
+function tableOf(data: Drawn<'current-balance'>, { on }: BalanceSet, balance: Balance) {
   const row = (head: string, amps: number) => ({ head, cells: [sayFigure(amps, 2)] });
   return {
     label: 'The currents as a table',
     head: ['Branch', 'Amperes'],
     rows: [
       row('Charger U1', balance.chargerA),
-      ...loads.map(({ name, amps }, index) =>
+      ...data.loads.map(({ name, amps }, index) =>
         row(`E${index + 1} ${name}`, on.has(name) ? amps : 0),
       ),
       row('Loads on the bar', balance.loadsA),
       row('Monitor, through shunt R1', balance.monitorA),
-      row(`E4 ${bypass.name}`, balance.bypassA),
+      row(bypassOf(data), balance.bypassA),
       row('Battery B1 itself', balance.batteryA),
     ],
   };
