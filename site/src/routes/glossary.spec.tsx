@@ -1,5 +1,5 @@
 import { screen } from '@testing-library/react';
-import { expect, it } from 'vitest';
+import { expect, it, vi } from 'vitest';
 import { serve, signInAs } from '../testing/api-server.ts';
 import { renderRoute } from '../testing/render-route.tsx';
 
@@ -9,6 +9,7 @@ const term = (name: string, more: object = {}) => ({
 });
 
 it('stands by letters, with the sheet that explains each word, and marks the one asked for', async () => {
+  Element.prototype.scrollIntoView = vi.fn();
   signInAs();
   const sheets = [{ number: '3.1', title: 'Where volts go' }];
   const terms = [term('awg'), term('Ångström'), term('drop', { sheets, also: ['loss'] })];

@@ -18,7 +18,7 @@ export async function loader(args: LoaderArgs) {
 
 export function Component() {
   const { data: glossary } = useSuspenseQuery(glossaryQuery);
-  const named = decodeURIComponent(useLocation().hash.slice(1));
+  const { hash } = useLocation();
   const letters = byLetter(glossary.terms);
   return (
     <>
@@ -49,7 +49,7 @@ export function Component() {
         </nav>
         <div lang={glossary.language}>
           {letters.map((letter) => (
-            <LetterSection key={letter.letter} {...letter} named={named} />
+            <LetterSection key={letter.letter} {...letter} hash={hash} />
           ))}
         </div>
       </Sheet>

@@ -3,18 +3,18 @@ import { type Letter } from './by-letter.ts';
 import { type TermView } from './queries.ts';
 
 interface LetterSectionProps extends Letter {
-  /** The place the address names. */
-  named: string;
+  /** The place the address names, as it stands there. */
+  hash: string;
 }
 
 /** One letter of the glossary. */
-export function LetterSection({ letter, terms, named }: LetterSectionProps) {
+export function LetterSection({ letter, terms, hash }: LetterSectionProps) {
   return (
     <section className="letter" id={letterAnchor(letter)} aria-label={`Letter ${letter}`}>
       <h2>{letter}</h2>
       <dl>
         {terms.map((term) => (
-          <TermRow key={term.anchor} term={term} isNamed={term.anchor === named} />
+          <TermRow key={term.anchor} term={term} isNamed={hash === `#${encodeURIComponent(term.anchor)}`} />
         ))}
       </dl>
     </section>
