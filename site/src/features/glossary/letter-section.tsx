@@ -14,7 +14,11 @@ export function LetterSection({ letter, terms, hash }: LetterSectionProps) {
       <h2>{letter}</h2>
       <dl>
         {terms.map((term) => (
-          <TermRow key={term.anchor} term={term} isNamed={hash === `#${encodeURIComponent(term.anchor)}`} />
+          <TermRow
+            key={term.anchor}
+            term={term}
+            isNamed={hash === `#${encodeURIComponent(term.anchor)}`}
+          />
         ))}
       </dl>
     </section>
