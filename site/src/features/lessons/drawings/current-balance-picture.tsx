@@ -51,7 +51,7 @@ export function CurrentBalancePicture({ data, set, balance, layout }: BalancePic
   const { barEnd, battery, charger, firstLoad, between } = layout;
   const lastLoad = firstLoad + between * (data.loads.length - 1);
   return (
-    <svg viewBox={`0 0 ${layout.width} 344`}>
+    <svg viewBox={`0 30 ${layout.width} 304`}>
       <path className="lnb" d={`M${charger} ${plus}H${battery}`} />
       <path className="busbar" d={`M${charger - 16} ${minus}H${barEnd}`} />
       <Branch x={charger} letter="U1" amps={balance.chargerA} way={-1} />
@@ -59,7 +59,7 @@ export function CurrentBalancePicture({ data, set, balance, layout }: BalancePic
         <Branch
           key={name}
           x={firstLoad + index * between}
-          letter={`E${index + 1}`}
+          letter={letterIn(name, index)}
           amps={set.on.has(name) ? amps : 0}
           way={1}
           isSwitched
@@ -69,11 +69,18 @@ export function CurrentBalancePicture({ data, set, balance, layout }: BalancePic
       <text className="tx-b" x={(firstLoad + lastLoad) / 2} y="258" textAnchor="middle">
         {sayFigure(balance.loadsA, 2)}&thinsp;A
       </text>
-      <BatteryBranch balance={balance} layout={layout} letter={`E${data.loads.length + 1}`} />
+      <BatteryBranch
+        balance={balance}
+        layout={layout}
+        letter={letterIn(data.bypass.name, data.loads.length)}
+      />
       <Strip balance={balance} layout={layout} />
     </svg>
   );
 }
+
+/** "M1" of "Motor M1"; what has no reference letter is counted. */
+const letterIn = (name: string, index: number) => /\b[A-Z]\d+\b/.exec(name)?.[0] ?? `E${index + 1}`;
 
 interface BranchProps {
   x: number;
@@ -104,7 +111,7 @@ function Branch({ x, letter, amps, way, isSwitched = false }: BranchProps) {
         {letter}
       </text>
       {isLive && <Arrow x={x} y={172} way={way} />}
-      <text className="tx-s halo" x={x} y="160" textAnchor="middle">
+      <text className="tx-s" x={x + 8} y="160">
         {sayFigure(amps, 2)}
       </text>
     </>
@@ -132,7 +139,7 @@ function BatteryBranch({ balance, layout, letter }: BatteryBranchProps) {
     <>
       <path className={line(batteryA)} d={`M${battery} ${plus}V112M${battery} 134V${post}`} />
       <path className="lnb" d={`M${battery - 18} 112h36M${battery - 18} 127h36`} />
-      <path className="live" d={`M${battery - 9} 119.500h18M${battery - 9} 134.500h18`} />
+      <path className="fillink" d={`M${battery - 9} 118h18v3h-18zM${battery - 9} 133h18v3h-18z`} />
       <text className="tx-b halo" x={battery - 24} y="128" textAnchor="end">
         B1
       </text>
@@ -157,6 +164,9 @@ function BatteryBranch({ balance, layout, letter }: BatteryBranchProps) {
         {letter}
       </text>
       {bypassA > 0 && <Arrow x={bypass} y={168} way={1} />}
+      <text className="tx-s" x={bypass - 8} y="172" textAnchor="end">
+        {sayFigure(bypassA, 2)}
+      </text>
       <circle className="fillink" cx={battery} cy={post} r="4" />
     </>
   );

@@ -11,10 +11,6 @@ interface CurrentBalanceProps {
   data: Drawn<'current-balance'>;
 }
 
-/** "E4 Tracker": its letter follows those of the loads on the bar. */
-const bypassOf = ({ loads, bypass }: Drawn<'current-balance'>) =>
-  `E${loads.length + 1} ${bypass.name}`;
-
 const startOf = ({ chargerA, loads, bypass }: Drawn<'current-balance'>): BalanceSet => ({
   chargerA: chargerA.start,
   on: new Set([...loads, bypass].filter(({ isOn }) => isOn).map(({ name }) => name)),
@@ -31,7 +27,7 @@ export function CurrentBalance({ title, data }: CurrentBalanceProps) {
       wide={<CurrentBalancePicture {...drawn} layout={wideBalance} />}
       narrow={<CurrentBalancePicture {...drawn} layout={narrowBalance} />}
       controls={<BalanceControls data={data} set={set} onSet={setSet} />}
-      said={<BalanceSaid balance={balance} bypass={bypassOf(data)} />}
+      said={<BalanceSaid balance={balance} bypass={data.bypass.name} />}
       table={tableOf(data, set, balance)}
       source={data.source}
     />
@@ -51,10 +47,6 @@ function BalanceControls({ data, set, onSet }: BalanceControlsProps) {
     else on.delete(name);
     onSet({ ...set, on });
   };
-  const letters = [...data.loads, data.bypass].map((load, index) => ({
-    ...load,
-    letter: `E${index + 1}`,
-  }));
   return (
     <>
       <MoveRange
@@ -67,14 +59,14 @@ function BalanceControls({ data, set, onSet }: BalanceControlsProps) {
       />
       <fieldset className="loads-on">
         <legend>Switched on</legend>
-        {letters.map(({ name, amps, letter }) => (
+        {[...data.loads, data.bypass].map(({ name, amps }) => (
           <TickBox
             key={name}
             checked={set.on.has(name)}
             onChange={(isOn) => turn(name, isOn)}
             label={
               <>
-                {letter} {name}, <Quantity value={amps} unit="A" />
+                {name}, <Quantity value={amps} unit="A" />
               </>
             }
           />
@@ -102,7 +94,7 @@ function BalanceSaid({ balance, bypass }: { balance: Balance; bypass: string }) 
         {monitorA < 0 ? '+' : '−'} {sayFigure(Math.abs(monitorA), 2)} = <b>0</b>.{' '}
         {sayBattery(batteryA)}{' '}
         {bypassA > 0
-          ? `The monitor counts the ${sayFigure(bypassA, 2)}\u2009A of ${bypass} as the battery’s: it is wired to the post, behind the shunt.`
+          ? `The monitor counts the ${sayFigure(bypassA, 2)}\u2009A of ${bypass} as the battery’s.`
           : 'The monitor says the same.'}
       </span>
     </>
@@ -134,12 +126,10 @@ function tableOf(data: Drawn<'current-balance'>, { on }: BalanceSet, balance: Ba
     head: ['Branch', 'Amperes'],
     rows: [
       row('Charger U1', balance.chargerA),
-      ...data.loads.map(({ name, amps }, index) =>
-        row(`E${index + 1} ${name}`, on.has(name) ? amps : 0),
-      ),
+      ...data.loads.map(({ name, amps }) => row(name, on.has(name) ? amps : 0)),
       row('Loads on the bar', balance.loadsA),
       row('Monitor, through shunt R1', balance.monitorA),
-      row(bypassOf(data), balance.bypassA),
+      row(data.bypass.name, balance.bypassA),
       row('Battery B1 itself', balance.batteryA),
     ],
   };

@@ -117,7 +117,7 @@ it('says which input feeds at each minute, and goes from event to event', async 
   );
   expect(said()).toMatch(/Minute 0\. Engine off.*12\.0 V\. Fed by the panel, charger 6 A\./);
   await user.click(screen.getByRole('button', { name: 'Next event' }));
-  expect(said()).toMatch(/Minute 10: Vehicle on\. Engine on.*Fed by the panel.*It waits/);
+  expect(said()).toMatch(/Minute 10, event 1: Vehicle on\. Engine on.*Fed by the panel.*It waits/);
   slide('Time', 11);
   expect(said()).toMatch(/Minute 11\..*Seen, not engaged/);
   await user.click(screen.getByRole('button', { name: 'Next event' }));
@@ -135,18 +135,18 @@ it('balances charger, loads and monitor, and shows what the monitor does not see
         kind: 'current-balance',
         chargerA: { from: 0, to: 40, step: 0.5, start: 30 },
         loads: [
-          { name: 'Lights', amps: 3.5, isOn: true },
-          { name: 'Fridge', amps: 7.25, isOn: false },
+          { name: 'Lights E1', amps: 3.5, isOn: true },
+          { name: 'Motor M1', amps: 7.25, isOn: false },
         ],
-        bypass: { name: 'Tracker', amps: 2.5, isOn: false },
+        bypass: { name: 'E4 on the post', amps: 2.5, isOn: false },
         source: 'Given.',
       }}
     />,
   );
   expect(said()).toMatch(/Monitor 26\.50 A plus into.*30\.00 − 3\.50 − 26\.50 = 0.*gets 26\.50 A/);
-  await user.click(screen.getByRole('checkbox', { name: /E3 Tracker/ }));
-  expect(said()).toMatch(/Monitor 26\.50 A.*itself gets 24\.00 A.*2\.50 A of E3/);
-  await user.click(screen.getByRole('checkbox', { name: /E2 Fridge/ }));
+  await user.click(screen.getByRole('checkbox', { name: /E4 on the post/ }));
+  expect(said()).toMatch(/Monitor 26\.50 A.*itself gets 24\.00 A.*2\.50 A of E4 on the post/);
+  await user.click(screen.getByRole('checkbox', { name: /Motor M1/ }));
   slide('Charger U1', 5);
   expect(said()).toMatch(/Monitor −5\.75 A out of.*5\.00 − 10\.75 \+ 5\.75 = 0.*gives 8\.25 A/);
 });

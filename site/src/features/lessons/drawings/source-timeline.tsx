@@ -24,9 +24,14 @@ export function SourceTimeline({ title, data }: SourceTimelineProps) {
       wide={<SourceTimelinePicture data={data} instant={instant} width={720} />}
       narrow={<SourceTimelinePicture data={data} instant={instant} width={350} />}
       controls={<TimeControls data={data} instant={instant} onMove={setMinute} />}
-      said={<InstantSaid instant={instant} />}
+      said={
+        <InstantSaid
+          instant={instant}
+          number={data.events.findIndex((one) => one === instant.event) + 1}
+        />
+      }
       table={tableOf(data, instant)}
-      source={data.source}
+      source={`${sayEvents(data)} ${data.source}`}
     />
   );
 }
@@ -61,12 +66,27 @@ function TimeControls({ data, instant, onMove }: TimeControlsProps) {
   );
 }
 
-function InstantSaid({ instant: { minute, inputV, spell, event } }: { instant: Instant }) {
+/** The numbers over the drawing. */
+function sayEvents({ events }: Drawn<'source-timeline'>): string {
+  const said = events.map(
+    ({ minute, title }, index) => `${index + 1} ${title}, ${minute}\u2009min`,
+  );
+  return `${said.join('; ')}.`;
+}
+
+interface InstantSaidProps {
+  instant: Instant;
+  /** Of the event, over the drawing. */
+  number: number;
+}
+
+function InstantSaid({ instant, number }: InstantSaidProps) {
+  const { minute, inputV, spell, event } = instant;
   return (
     <>
       <b>
         Minute {minute}
-        {event && `: ${event.title}`}.
+        {event && `, event ${number}: ${event.title}`}.
       </b>{' '}
       Engine {spell.engine ? 'on' : 'off'}, vehicle input{' '}
       <Quantity value={sayFigure(inputV, 1)} unit="V" />. Fed by {inputWords[spell.source]}, charger{' '}

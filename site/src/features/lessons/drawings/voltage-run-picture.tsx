@@ -48,7 +48,7 @@ function placeVolts(supplyV: number, eachV: number) {
 export function VoltageRunPicture({ data, set, volts, layout }: RunPictureProps) {
   const scale = placeVolts(data.supplyV, volts.eachV);
   return (
-    <svg viewBox={`0 0 ${layout.width} 362`}>
+    <svg viewBox={`0 28 ${layout.width} 330`}>
       <Circuit set={set} layout={layout} />
       <Axis data={data} volts={volts} layout={layout} scale={scale} />
       {data.limits.map((limit) => (
