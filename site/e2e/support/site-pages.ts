@@ -36,6 +36,8 @@ const markUnanswered = async (page: Page) => {
   await page.locator('.marked').waitFor();
 };
 
+const showFound = (page: Page) => page.locator('.results-found').waitFor();
+
 const openItems = async (page: Page) => {
   await page.getByLabel('Reason, kept with the look').fill('An appeal.');
   await page.getByRole('button', { name: 'Open the items' }).click();
@@ -111,6 +113,18 @@ export const traineePages: SitePage[] = [
   { route: 'practice/:slug', at: 'practice/si-spanner', heading: /./, after: markUnanswered },
   { route: 'practice/:slug', at: 'practice/cc-stage-points', heading: /./ },
   { route: 'practice/:slug', at: 'practice/no-such-question', heading: /no such question/ },
+  { route: 'sheets/:number', at: 'sheets/5.3', heading: 'Bulk, absorption, float' },
+  {
+    route: 'sheets/:number',
+    at: 'sheets/6.4',
+    heading: /Two inputs/,
+    after: press('Next event'),
+  },
+  { route: 'tables', heading: 'Tables' },
+  { route: 'glossary', heading: 'Glossary' },
+  { route: 'search', heading: 'Search' },
+  { route: 'search', at: 'search?q=voltage+drop', heading: 'Search', after: showFound },
+  { route: 'search', at: 'search?q=zzzz', heading: 'Search' },
   { route: 'papers/:slug', at: 'papers/final-paper', heading: 'Final paper' },
   { route: 'record', heading: 'My record' },
   { route: 'account', heading: 'Ifeoma Castellan' },

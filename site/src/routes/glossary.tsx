@@ -31,8 +31,8 @@ export function Component() {
           titleBlock={
             <TitleBlock
               cells={[
-                { label: 'Words', value: String(glossary.terms.length), kind: 'strong' },
-                { label: 'Revision', value: glossary.revision ?? 'none yet' },
+                { label: 'Words', value: String(glossary.terms.length), kind: 'strong', span: 3 },
+                { label: 'Revision', value: glossary.revision ?? 'none yet', span: 3 },
               ]}
             />
           }

@@ -27,8 +27,8 @@ export function Component() {
           titleBlock={
             <TitleBlock
               cells={[
-                { label: 'Tables', value: String(data.tables.length), kind: 'strong' },
-                { label: 'Symbols', value: String(data.symbols.list.length) },
+                { label: 'Tables', value: String(data.tables.length), kind: 'strong', span: 3 },
+                { label: 'Symbols', value: String(data.symbols.list.length), span: 3 },
               ]}
             />
           }

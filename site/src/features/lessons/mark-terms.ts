@@ -24,11 +24,11 @@ export function markTerms(terms: readonly Term[]) {
 
 type Open = Map<string, RegExp>;
 
-/** The longer form first: "voltage drop" before "drop". */
+/** The longer form first: "voltage drop" before "drop". "Cross-section" is no section. */
 function matcherOf({ forms }: Term): RegExp {
   const longestFirst = [...forms].sort((a, b) => b.length - a.length);
   const either = longestFirst.map((form) => form.replace(/[.*+?^${}()|[\]\\]/g, '\\$&')).join('|');
-  return new RegExp(`(?<![\\p{L}\\p{N}])(?:${either})(?![\\p{L}\\p{N}])`, 'iu');
+  return new RegExp(`(?<![\\p{L}\\p{N}-])(?:${either})(?![\\p{L}\\p{N}-])`, 'iu');
 }
 
 function markIn(node: TextNode, open: Open): void {
