@@ -21,6 +21,11 @@ const folders = {
   withPaperPool: true,
 };
 
+/** The whole course is compiled: some seconds, and many more where a processor is short. */
+const WHOLE_COURSE_MS = 240_000;
+const SHEETS_OF_THE_COURSE = 36;
+const LEAST_FIGURES = 45;
+
 let test: TestApp;
 let lessons: CompiledLesson[];
 let course: CompiledCourse | undefined;
@@ -30,18 +35,24 @@ beforeAll(async () => {
   const content = test.app.get(PublishedContentService, { strict: false });
   lessons = (await content.all('lesson')).map((lesson) => lesson.content);
   course = (await content.all('course'))[0]?.content;
-});
+}, WHOLE_COURSE_MS);
 afterAll(() => test.close());
 
 describe('the lessons and questions that come with the product', () => {
-  it('are in order, and publishing them again changes nothing', async () => {
-    expect((await publish(test.database.ownerUrl, folders)).published).toEqual([]);
-  });
+  it(
+    'are in order, and publishing them again changes nothing',
+    async () => {
+      expect((await publish(test.database.ownerUrl, folders)).published).toEqual([]);
+    },
+    WHOLE_COURSE_MS,
+  );
 
-  it('list every sheet that is written under its unit, the first five among them', () => {
+  it('are the whole course: every sheet under its unit, drawn throughout', () => {
     const numbers = lessons.map(({ number }) => number).sort();
-    expect(numbers).toEqual(expect.arrayContaining(['1.4', '3.4', '4.1', '5.6', '6.7']));
+    expect(numbers).toHaveLength(SHEETS_OF_THE_COURSE);
     expect(course?.units.flatMap(({ sheets }) => sheets).sort()).toEqual(numbers);
+    const figures = lessons.flatMap((lesson) => Object.keys(lesson.figures));
+    expect(figures.length).toBeGreaterThanOrEqual(LEAST_FIGURES);
   });
 
   it('give each unit with sheets a worksheet of four to six questions, and no other', () => {
