@@ -11,6 +11,7 @@ import {
   holderPages,
   managerPages,
   openPages,
+  practicePages,
   type SitePage,
   traineePages,
   trainerPages,
@@ -67,6 +68,11 @@ test('pages for everybody can be used by everybody', async ({ browser }) => {
 test('pages of a trainee can be used by everybody', async ({ browser }) => {
   const watch = await tabOf(browser, 'ifeoma.castellan@people.example');
   expect(await examineAll(watch, traineePages)).toEqual([]);
+});
+
+test('practice can be used by everybody', async ({ browser }) => {
+  const watch = await tabOf(browser, 'ifeoma.castellan@people.example');
+  expect(await examineAll(watch, practicePages)).toEqual([]);
 });
 
 test('results and certificates can be read by everybody', async ({ browser }) => {
@@ -141,7 +147,7 @@ async function correctName(page: Page, certificate: string) {
 test('every page of the router is among them', async () => {
   const source = await readFile(new URL('../src/router.tsx', import.meta.url), 'utf8');
   const inRouter = [...source.matchAll(/\bpath: '([^']+)'/g)].map(([, path = '']) => path);
-  const lists = [visitorPages, traineePages, failedCandidatePages, holderPages];
+  const lists = [visitorPages, traineePages, practicePages, failedCandidatePages, holderPages];
   const desks = [trainerPages, managerPages, administratorPages, openPages('', '')];
   const examined = [...lists, ...desks].flat().map(({ route }) => route);
   const wanted = inRouter.filter(

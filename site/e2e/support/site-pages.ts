@@ -94,6 +94,24 @@ export const traineePages: SitePage[] = [
     at: ({ markedWorksheet }) => `worksheet-attempts/${markedWorksheet}`,
     heading: 'Runs and returns',
   },
+  { route: 'sheets/:number', at: 'sheets/5.3', heading: 'Bulk, absorption, float' },
+  {
+    route: 'sheets/:number',
+    at: 'sheets/6.4',
+    heading: /Two inputs/,
+    after: press('Next event'),
+  },
+  { route: 'tables', heading: 'Tables' },
+  { route: 'glossary', heading: 'Glossary' },
+  { route: 'search', heading: 'Search' },
+  { route: 'search', at: 'search?q=voltage+drop', heading: 'Search', after: showFound },
+  { route: 'search', at: 'search?q=zzzz', heading: 'Search' },
+  { route: 'papers/:slug', at: 'papers/final-paper', heading: 'Final paper' },
+  { route: 'record', heading: 'My record' },
+  { route: 'account', heading: 'Ifeoma Castellan' },
+];
+
+export const practicePages: SitePage[] = [
   { route: 'practice', heading: 'One question at a time' },
   { route: 'practice', at: 'practice?subject=VD&level=apply', heading: 'One question at a time' },
   { route: 'practice', at: 'practice?find=nothing-like-it', heading: 'One question at a time' },
@@ -113,21 +131,6 @@ export const traineePages: SitePage[] = [
   { route: 'practice/:slug', at: 'practice/si-spanner', heading: /./, after: markUnanswered },
   { route: 'practice/:slug', at: 'practice/cc-stage-points', heading: /./ },
   { route: 'practice/:slug', at: 'practice/no-such-question', heading: /no such question/ },
-  { route: 'sheets/:number', at: 'sheets/5.3', heading: 'Bulk, absorption, float' },
-  {
-    route: 'sheets/:number',
-    at: 'sheets/6.4',
-    heading: /Two inputs/,
-    after: press('Next event'),
-  },
-  { route: 'tables', heading: 'Tables' },
-  { route: 'glossary', heading: 'Glossary' },
-  { route: 'search', heading: 'Search' },
-  { route: 'search', at: 'search?q=voltage+drop', heading: 'Search', after: showFound },
-  { route: 'search', at: 'search?q=zzzz', heading: 'Search' },
-  { route: 'papers/:slug', at: 'papers/final-paper', heading: 'Final paper' },
-  { route: 'record', heading: 'My record' },
-  { route: 'account', heading: 'Ifeoma Castellan' },
 ];
 
 /** What only someone who has not passed sees. */
