@@ -52,8 +52,8 @@ export const chargingCases: Case[] = [
   },
   {
     slug: 'cc-li-cutoff',
-    source: 'arithmetic by bc: put 40*1.98',
-    given: { capacity: 100, charge: 20, limit: 40, absorb: 14.8, tail: 4, opened: 1.98 },
+    source: 'arithmetic by bc: put (40-4)*2.2',
+    given: { capacity: 100, charge: 20, limit: 40, absorb: 14.8, lamps: 4, tail: 4, opened: 2.2 },
     results: { put: 79.2 },
   },
   {
@@ -80,18 +80,16 @@ export const chargingCases: Case[] = [
   },
   {
     slug: 'cc-absorption-cut',
-    source: 'arithmetic by bc: lasts 2.42-1.42',
+    source: 'arithmetic by hand: times 6/2',
     given: {
       capacity: 110,
       charge: 40,
       limit: 30,
       tail: 2,
       cut: 1,
-      bulkEnds: 1.42,
-      floatStarts: 2.42,
       last: 6,
     },
-    results: { lasts: 1 },
+    results: { times: 3 },
   },
   {
     slug: 'cc-float-fridge',
@@ -103,8 +101,8 @@ export const chargingCases: Case[] = [
       tail: 3,
       load: 12,
       floatStarts: 3,
-      given1: 12.6,
-      into: 0.6,
+      before: 0.6,
+      after: 12.6,
     },
     results: { taken: 12 },
   },
