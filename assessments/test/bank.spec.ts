@@ -69,6 +69,7 @@ function marksAsWritten(question: Compiled, drawn: Drawn): void {
   const right = answerRight(question, drawn);
   const marked = markQuestion(question, drawn, right);
   expect(marked.marks).toBe(question.meta.marks);
+  expect(JSON.stringify(marked)).not.toContain('NaN');
   expect(marked.parts.map((part) => part.verdict)).toEqual(question.parts.map(() => 'right'));
   for (const part of question.parts) {
     const held = drawn.parts[part.id];
@@ -95,6 +96,7 @@ function wordsOn(
 ): string[] {
   const marked = markQuestion(question, drawn, answers).parts.find(({ id }) => id === part.id);
   expect(marked?.verdict).toBe('slip');
+  expect(JSON.stringify(marked)).not.toContain('NaN');
   return (marked?.remarks ?? []).map(({ text }) => text);
 }
 
