@@ -1,5 +1,6 @@
 import react from '@vitejs/plugin-react';
 import { defaultClientConditions, defineConfig } from 'vite';
+import { preloadFaces } from './preload-faces.ts';
 import { keepRadixParts } from './radix-parts.ts';
 
 const radixPartsInUse = [
@@ -10,8 +11,10 @@ const radixPartsInUse = [
   'TextFieldSlot',
 ];
 
+const facesOfFirstScreen = ['source-sans-3-latin-wght-normal', 'merriweather-latin-600-normal'];
+
 export default defineConfig({
-  plugins: [react()],
+  plugins: [react(), preloadFaces(facesOfFirstScreen)],
   resolve: { conditions: ['@ferrule/source', ...defaultClientConditions] },
   css: { postcss: { plugins: [keepRadixParts(radixPartsInUse)] } },
   server: {

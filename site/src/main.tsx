@@ -9,6 +9,8 @@ import { changeSession, sessionQuery } from './api/session.ts';
 import { createRouter } from './router.tsx';
 
 const queryClient = createQueryClient();
+// Asked for while the first page's code is still on its way.
+void queryClient.prefetchQuery(sessionQuery);
 const router = createRouter(queryClient);
 
 whenSignedOut(() => {

@@ -32,7 +32,7 @@ beforeEach(() => {
 it('quotes sheet and paragraph of each place and marks the words', async () => {
   serve('get', '/api/search', found);
   renderRoute('/search?q=drop');
-  expect(await screen.findByText('2 places for “drop”')).toBeVisible();
+  expect(await screen.findByRole('heading', { name: '2 places for “drop”' })).toBeVisible();
   const place = screen.getByText('Sheet 3.4, paragraph 2').closest('li');
   expect(within(place ?? document.body).getByRole('link')).toHaveAttribute(
     'href',

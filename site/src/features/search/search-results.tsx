@@ -13,9 +13,10 @@ export function SearchResults({ words }: { words: string }) {
   if (found.results.length === 0) return <NothingFound words={words} />;
   return (
     <section className="section" aria-labelledby="found-title">
-      <h2 id="found-title" role="status">
+      <h2 id="found-title">{sayFound(found)}</h2>
+      <p className="visually-hidden" role="status">
         {sayFound(found)}
-      </h2>
+      </p>
       <ol className="results-found">
         {found.results.map((result) => (
           <FoundRow key={`${result.link} ${result.title}`} result={result} />
