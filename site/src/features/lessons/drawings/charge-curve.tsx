@@ -53,7 +53,7 @@ function StageSaid({ stage, place }: { stage: Stage; place: string }) {
       <Moved from={from.volts} to={to.volts} places={2} unit="V" />, current{' '}
       <Moved from={from.amps} to={to.amps} places={1} unit="A" />, charge{' '}
       <Moved from={from.chargePercent} to={to.chargePercent} places={0} unit="%" />.{' '}
-      <Quantity value={sayFigure(stage.ah, 1)} unit="Ah" /> put back. {stage.says}
+      <Quantity value={sayFigure(stage.ah, 1)} unit="Ah" /> put in. {stage.says}
     </>
   );
 }
@@ -91,7 +91,7 @@ function tableOf({ stages }: Drawn<'charge-curve'>, at: Stage) {
     `${sayFigure(from, places)} to ${sayFigure(to, places)}`;
   return {
     label: 'The stages as a table',
-    head: ['Stage', 'Time, h', 'Volts', 'Amperes', 'Charge, %', 'Put back, Ah'],
+    head: ['Stage', 'Time, h', 'Volts', 'Amperes', 'Charge, %', 'Put in, Ah'],
     rows: stages.map((stage) => ({
       head: stage.name,
       isAt: stage === at,

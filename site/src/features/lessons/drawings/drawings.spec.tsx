@@ -77,7 +77,7 @@ it('goes through a charge stage by stage and round again', async () => {
   );
   expect(said()).toMatch(/Stage 1 of 2: bulk.*12\.50 V to 14\.40 V, current held at 30\.0 A/);
   await user.click(screen.getByRole('button', { name: 'Next stage' }));
-  expect(said()).toMatch(/Stage 2 of 2: absorption.*held at 14\.40 V.*14\.0 Ah put back.*falls/);
+  expect(said()).toMatch(/Stage 2 of 2: absorption.*held at 14\.40 V.*14\.0 Ah put in.*falls/);
   await user.click(screen.getByRole('button', { name: 'Next stage' }));
   expect(said()).toMatch(/Stage 1 of 2/);
 });
