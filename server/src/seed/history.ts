@@ -48,20 +48,21 @@ const paper = (at: string, name: string, wrongFromEnd: number): Happening => ({
   does: 'paper',
 });
 
-const unitWorksheets = ['W1', 'W3', 'W4', 'W5', 'W6'];
-const sheets = ['1.4', '3.4', '4.1', '5.6', '6.7'];
+/** How many sheets each unit of the course has, in order. */
+const sheetsOfUnits = [5, 5, 5, 4, 6, 7, 4];
 
-/** Someone who went through all sheets and worksheets, one a day from that day. */
-function wholeCourse(from: string, name: string): Happening[] {
-  const day = (index: number, hour: string) => {
-    const date = new Date(`${from}T00:00:00Z`);
-    date.setUTCDate(date.getUTCDate() + index);
-    return `${date.toISOString().slice(0, 10)}T${hour}:00Z`;
-  };
-  return sheets.flatMap((sheet, index) => [
-    finish(day(index, '18:10'), name, sheet),
-    worksheet(day(index, '18:40'), [name, unitWorksheets[index] ?? '']),
-  ]);
+/** Someone who goes through the units, a unit every second evening from that day. */
+function wholeCourse(from: string, name: string, units = sheetsOfUnits.length): Happening[] {
+  const evening = (unit: number, minute: number) =>
+    new Date(Date.parse(`${from}T18:00:00Z`) + (unit * 48 * 60 + minute) * 60_000).toISOString();
+  return sheetsOfUnits.slice(0, units).flatMap((count, at) => {
+    const unit = at + 1;
+    const sheets = Array.from({ length: count }, (_, sheet) => `${unit}.${sheet + 1}`);
+    return [
+      ...sheets.map((sheet, place) => finish(evening(at, 15 * (place + 1)), name, sheet)),
+      worksheet(evening(at, 15 * (count + 2)), [name, `W${unit}`]),
+    ];
+  });
 }
 
 const oneWay = [['a', 'd'], [], [], ['a'], ['a']];
@@ -95,8 +96,19 @@ const happenings: Happening[] = [
   ...wholeCourse('2026-09-22', 'priya.vandermeer'),
   ...wholeCourse('2026-10-01', 'iolo.farrant'),
   ...wholeCourse('2026-10-12', 'zoe.nguyen-lukasiewicz'),
-  ...wholeCourse('2026-10-18', 'hemi.tawhiri-boyd').slice(0, 8),
-  finish('2026-10-08T17:20:00Z', 'ifeoma.castellan', '1.4'),
+  ...wholeCourse('2026-10-18', 'hemi.tawhiri-boyd', 5),
+  ...[
+    ['2026-09-21', '1.1'],
+    ['2026-09-28', '1.2'],
+    ['2026-10-01', '1.3'],
+    ['2026-10-08', '1.4'],
+    ['2026-10-09', '1.5'],
+    ['2026-10-15', '2.1'],
+    ['2026-10-22', '2.2'],
+    ['2026-11-12', '3.1'],
+    ['2026-11-19', '3.2'],
+    ['2026-11-26', '3.3'],
+  ].map(([day = '', sheet = '']) => finish(`${day}T17:20:00Z`, 'ifeoma.castellan', sheet)),
   worksheet('2026-10-09T18:00:00Z', ['ifeoma.castellan', 'W1']),
   {
     at: '2026-11-30T19:12:00Z',
