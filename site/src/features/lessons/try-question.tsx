@@ -1,18 +1,14 @@
 import { Button } from '@radix-ui/themes';
 import { useMutation } from '@tanstack/react-query';
-import Markdown from 'react-markdown';
+import { lazy, Suspense } from 'react';
 import { ProblemCallout } from '../../ui/problem-callout.tsx';
-import { CurveReader } from '../../ui/question/curve-reader.tsx';
-import { MarkedQuestion } from '../../ui/question/marked-question.tsx';
-import { PartHint } from '../../ui/question/part-hint.tsx';
-import {
-  type PracticeView,
-  sayHints,
-  startPractice,
-  useFocusOnTurn,
-  usePracticeAnswers,
-} from '../../ui/question/practice.ts';
-import { QuestionCard, QuestionFacts } from '../../ui/question/question-card.tsx';
+import { startPractice } from '../../ui/question/practice.ts';
+import { RuledLines } from '../../ui/states.tsx';
+
+// Much code that a reader who only reads never needs.
+const TryAttempt = lazy(() =>
+  import('./try-attempt.tsx').then((part) => ({ default: part.TryAttempt })),
+);
 
 /** One practice question in the middle of the sheet, marked where it stands. */
 export function TryQuestion({ question }: { question: string }) {
@@ -20,12 +16,14 @@ export function TryQuestion({ question }: { question: string }) {
   return (
     <section className="try-question" aria-label="Try it">
       {start.data ? (
-        <Attempt
-          key={start.data.id}
-          practice={start.data}
-          isRenewing={start.isPending}
-          onAgain={() => start.mutate()}
-        />
+        <Suspense fallback={<RuledLines what="the question" />}>
+          <TryAttempt
+            key={start.data.id}
+            practice={start.data}
+            isRenewing={start.isPending}
+            onAgain={() => start.mutate()}
+          />
+        </Suspense>
       ) : (
         <div className="try-invitation">
           <div>
@@ -39,78 +37,5 @@ export function TryQuestion({ question }: { question: string }) {
       )}
       <ProblemCallout error={start.error} />
     </section>
-  );
-}
-
-interface AttemptProps {
-  practice: PracticeView;
-  isRenewing: boolean;
-  onAgain: () => void;
-}
-
-function Attempt({ practice, isRenewing, onAgain }: AttemptProps) {
-  const { question } = practice;
-  const { answers, change, mark, unclear } = usePracticeAnswers(practice.id);
-  const heading = useFocusOnTurn(mark.data !== undefined);
-  const curve = question.curve && <CurveReader curve={question.curve} />;
-  const again = (
-    <Button variant="outline" disabled={isRenewing} onClick={onAgain}>
-      Again with fresh figures
-    </Button>
-  );
-  return (
-    <>
-      <header className="try-head">
-        <p className="kicker">{mark.data ? 'Try it, marked' : 'Try it'}</p>
-        <h2 ref={heading} tabIndex={-1}>
-          {question.title}
-        </h2>
-        <Markdown>{mark.data ? mark.data.marked.summary : question.lead}</Markdown>
-      </header>
-      {mark.data ? (
-        <>
-          <MarkedQuestion marked={mark.data.marked} asked={question.parts} />
-          <div className="marked-facts">
-            <QuestionFacts question={question} />
-            {curve}
-          </div>
-          <div className="action-strip">
-            <p role="status">
-              <b>
-                {mark.data.marked.marks} of {mark.data.marked.outOf} marks
-                {sayHints(mark.data.hints)}.
-              </b>{' '}
-              Practice: it counts for nothing.
-            </p>
-            {again}
-          </div>
-        </>
-      ) : (
-        <>
-          <QuestionCard
-            question={question}
-            answers={answers}
-            unclear={unclear ?? {}}
-            curve={curve}
-            aside={({ id, kind }) =>
-              kind === 'quantity' && <PartHint practiceId={practice.id} part={id} />
-            }
-            onChange={change}
-          />
-          {!unclear && <ProblemCallout error={mark.error} />}
-          <div className="action-strip">
-            <p role="status">
-              {unclear ? 'Some answers cannot be read. Nothing has been marked.' : ''}
-            </p>
-            <span className="buttons">
-              {again}
-              <Button disabled={mark.isPending} onClick={() => mark.mutate()}>
-                {mark.isPending ? 'Marking' : 'Mark it'}
-              </Button>
-            </span>
-          </div>
-        </>
-      )}
-    </>
   );
 }

@@ -1,12 +1,17 @@
-import { use } from 'react';
+import { lazy, Suspense, use } from 'react';
 import Markdown from 'react-markdown';
 import { Line } from '../../ui/line.tsx';
-import { CurveReader } from '../../ui/question/curve-reader.tsx';
 import { GivenTable } from '../../ui/question/given-table.tsx';
 import { InlineMarkdown } from '../../ui/question/inline-markdown.tsx';
 import { Schematic } from '../../ui/question/schematic.tsx';
 import { TableExtract } from '../../ui/question/table-extract.tsx';
+import { RuledLines } from '../../ui/states.tsx';
 import { LessonContext } from './lesson-context.ts';
+
+// Few worked examples have a curve.
+const CurveReader = lazy(() =>
+  import('../../ui/question/curve-reader.tsx').then((part) => ({ default: part.CurveReader })),
+);
 
 interface WorkedExampleProps {
   question: string;
@@ -33,7 +38,11 @@ export function WorkedExample({ question, seed }: WorkedExampleProps) {
           ))}
         </div>
       )}
-      {worked.curve && <CurveReader curve={worked.curve} />}
+      {worked.curve && (
+        <Suspense fallback={<RuledLines what="the curve" />}>
+          <CurveReader curve={worked.curve} />
+        </Suspense>
+      )}
       <ol className="worked-steps">
         {worked.parts.map((part) => (
           <li key={part.id}>
