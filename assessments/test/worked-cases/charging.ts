@@ -116,7 +116,6 @@ export const chargingCases: Case[] = [
       tail: 2.5,
       hotLimit: 24,
       reading: 24,
-      heldAt: 13.9,
     },
     results: { short: 16 },
   },
