@@ -92,7 +92,8 @@ export class QuestionsService {
     return { revisionId, question, drawn, view: presentQuestion(question, drawn) };
   }
 
-  private seed(purpose: string, slug: string, revision: string): string {
+  /** A number from chance, as hex: the same for the same purpose, name and revision. */
+  seed(purpose: string, slug: string, revision: string): string {
     return createHmac('sha256', Buffer.from(this.config.DRAW_SECRET, 'hex'))
       .update([purpose, slug, revision].join('|'))
       .digest('hex');

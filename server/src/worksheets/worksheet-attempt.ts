@@ -14,6 +14,15 @@ export interface KeptItem {
   readonly view: QuestionView;
 }
 
+/** A recall question of a lesson as it stood when the attempt was started. */
+export interface KeptRecall {
+  readonly sheet: { readonly number: string; readonly title: string };
+  /** The lesson's. */
+  readonly revision: string;
+  readonly ask: string;
+  readonly answer: string;
+}
+
 export type AnswersByItem = Record<string, Answers>;
 export type MarkedByItem = Record<string, MarkedQuestion>;
 
@@ -33,6 +42,8 @@ export interface WorksheetAttempt extends AttemptSummary {
   readonly courseRevisionId: string;
   readonly variant: string;
   readonly items: readonly KeptItem[];
+  /** Said to oneself, never marked; empty in attempts started before there were any. */
+  readonly recall: readonly KeptRecall[];
   readonly answers: AnswersByItem;
   readonly savedAt: Date | null;
   readonly marked: MarkedByItem | null;
@@ -47,6 +58,7 @@ export type NewAttempt = Pick<
   | 'courseRevisionId'
   | 'variant'
   | 'items'
+  | 'recall'
   | 'outOf'
   | 'startedAt'
 >;

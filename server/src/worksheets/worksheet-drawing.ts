@@ -5,11 +5,13 @@ import { PracticeService } from '../practice/practice.service.ts';
 import type { Published } from '../publishing/content.ts';
 import { PublishedContentService } from '../publishing/published-content.service.ts';
 import { QuestionsService, type Draw } from '../questions/questions.service.ts';
+import { chooseRecall, recallPool } from './choose-recall.ts';
 import {
   figuresOf,
   hasFigures,
   variantOf,
   type KeptItem,
+  type KeptRecall,
   type NewAttempt,
 } from './worksheet-attempt.ts';
 import type { PlacedWorksheet } from './worksheet.presenter.ts';
@@ -54,9 +56,25 @@ export class WorksheetDrawing {
       courseRevisionId: course.id,
       variant: variantOf(id),
       items,
+      recall: await this.drawRecall(id, { accountId, course, placed }, lessons),
       outOf: items.reduce((sum, { view }) => sum + view.marks, 0),
       startedAt: this.clock.now(),
     };
+  }
+
+  /** Questions of earlier sheets, other ones than the person was asked before as far as there are. */
+  private async drawRecall(
+    id: string,
+    { accountId, course, placed }: Wanted,
+    lessons: readonly Published<'lesson'>[],
+  ): Promise<KeptRecall[]> {
+    const sheets = lessons.map(({ content }) => content);
+    const pool = recallPool(course.content.units, placed.unit.number, sheets);
+    return chooseRecall(pool, {
+      asked: await this.repository.recallAsked(accountId),
+      rank: ({ sheet, ask, revision }) =>
+        this.questions.seed(`worksheet-recall:${id}`, `${sheet.number} ${ask}`, revision),
+    });
   }
 
   /** What the person had before, on this worksheet and in try blocks. */

@@ -47,6 +47,7 @@ export function presentWorksheet(
     items: attempt.items.map((item) =>
       presentItem(item, attempt.answers[item.key] ?? {}, marked[item.key] ?? null),
     ),
+    recall: presentRecall(attempt),
     marks: attempt.marks,
     outOf: attempt.outOf,
     percent,
@@ -54,6 +55,13 @@ export function presentWorksheet(
     savedAt: attempt.savedAt?.toISOString() ?? null,
   };
 }
+
+const presentRecall = ({ recall, handedInAt }: WorksheetAttempt): WorksheetView['recall'] =>
+  recall.map(({ sheet: { number, title }, ask, answer }) => ({
+    sheet: { number, title },
+    ask,
+    answer: handedInAt ? answer : null,
+  }));
 
 function presentItem(
   item: KeptItem,

@@ -22,6 +22,8 @@ import type { Hint, PracticeView } from '../practice/practice.schemas.ts';
 import { QuestionsService } from '../questions/questions.service.ts';
 import type { WorksheetView } from './worksheets.schemas.ts';
 
+/** Of the recall questions of the lessons. */
+const RECALL_ANSWER = /"(First|Second|Third)\."/;
 const NOWHERE = '00000000-0000-4000-8000-000000000000';
 
 let test: TestApp;
@@ -261,6 +263,7 @@ describe('before marking', () => {
     keep(await trainee.call('GET', '/api/front'));
     const all = sent.join('\n');
     for (const canary of PRACTICE_CANARIES) expect(all).not.toContain(canary);
+    expect(all).not.toMatch(RECALL_ANSWER);
     const rows = await test.query<{ kept: string }>(
       `SELECT items::text AS kept FROM worksheet_attempts WHERE id = $1
         UNION ALL SELECT drawn::text FROM practice_attempts WHERE id = $2`,
@@ -276,6 +279,7 @@ describe('before marking', () => {
     const marked = JSON.stringify(await workWorksheet(trainee, 'slip'));
     expect(marked).toContain('canarylesson');
     expect(marked).toContain('canarykept');
+    expect(marked).toMatch(RECALL_ANSWER);
   });
 });
 

@@ -6,6 +6,7 @@ import { WorksheetAttemptModel } from './models/worksheet-attempt.model.ts';
 import type {
   AttemptSummary,
   KeptItem,
+  KeptRecall,
   MarkedByItem,
   NewAttempt,
   WorksheetAttempt,
@@ -28,10 +29,10 @@ function toSummary(row: WorksheetAttemptModel): AttemptSummary {
 }
 
 function toAttempt(row: WorksheetAttemptModel): WorksheetAttempt {
-  const { courseRevisionId, variant, items, answers, savedAt, marked } = row;
+  const { courseRevisionId, variant, items, recall, answers, savedAt, marked } = row;
   return Object.freeze({
     ...toSummary(row),
-    ...{ courseRevisionId, variant, items, answers, savedAt, marked },
+    ...{ courseRevisionId, variant, items, recall, answers, savedAt, marked },
   });
 }
 
@@ -46,14 +47,16 @@ export class WorksheetsRepository {
   async add(attempt: NewAttempt): Promise<boolean> {
     const rows = await this.sequelize.query(
       `INSERT INTO worksheet_attempts
-         (id, account_id, worksheet, course_revision_id, variant, items, out_of, started_at, attempt)
-       SELECT $1, $2, $3, $4, $5, $6::jsonb, $7, $8, coalesce(max(attempt), 0) + 1
+         (id, account_id, worksheet, course_revision_id, variant, items, out_of, started_at, recall,
+          attempt)
+       SELECT $1, $2, $3, $4, $5, $6::jsonb, $7, $8, $9::jsonb, coalesce(max(attempt), 0) + 1
          FROM worksheet_attempts WHERE account_id = $2 AND worksheet = $3
        ON CONFLICT DO NOTHING RETURNING id`,
       {
         bind: [
           ...[attempt.id, attempt.accountId, attempt.worksheet, attempt.courseRevisionId],
           ...[attempt.variant, JSON.stringify(attempt.items), attempt.outOf, attempt.startedAt],
+          JSON.stringify(attempt.recall),
         ],
         type: QueryTypes.SELECT,
       },
@@ -98,6 +101,12 @@ export class WorksheetsRepository {
       where: { accountId, worksheet },
     });
     return rows.flatMap(({ items }) => items);
+  }
+
+  /** Every recall question the person was ever asked, once for each time. */
+  async recallAsked(accountId: string): Promise<KeptRecall[]> {
+    const rows = await this.attempts.findAll({ attributes: ['recall'], where: { accountId } });
+    return rows.flatMap(({ recall }) => recall);
   }
 
   /** First attempts, handed in, with their marking. */

@@ -37,6 +37,14 @@ export const worksheetSchema = z.object({
       readAgain: z.object({ sheet: z.string(), title: z.string() }).nullable(),
     }),
   ),
+  /** Of earlier sheets, said to oneself and never marked; answers once it is handed in. */
+  recall: z.array(
+    z.object({
+      sheet: z.object({ number: z.string(), title: z.string() }),
+      ask: z.string(),
+      answer: z.string().nullable(),
+    }),
+  ),
   marks: z.number().nullable(),
   outOf: z.number(),
   percent: z.number().nullable(),

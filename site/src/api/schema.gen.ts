@@ -4452,6 +4452,14 @@ export interface operations {
                                 title: string;
                             } | null;
                         }[];
+                        recall: {
+                            sheet: {
+                                number: string;
+                                title: string;
+                            };
+                            ask: string;
+                            answer: string | null;
+                        }[];
                         marks: number | null;
                         outOf: number;
                         percent: number | null;
@@ -4509,6 +4517,14 @@ export interface operations {
                                 sheet: string;
                                 title: string;
                             } | null;
+                        }[];
+                        recall: {
+                            sheet: {
+                                number: string;
+                                title: string;
+                            };
+                            ask: string;
+                            answer: string | null;
                         }[];
                         marks: number | null;
                         outOf: number;
@@ -4606,6 +4622,14 @@ export interface operations {
                                 sheet: string;
                                 title: string;
                             } | null;
+                        }[];
+                        recall: {
+                            sheet: {
+                                number: string;
+                                title: string;
+                            };
+                            ask: string;
+                            answer: string | null;
                         }[];
                         marks: number | null;
                         outOf: number;

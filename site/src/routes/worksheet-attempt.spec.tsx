@@ -32,6 +32,9 @@ const open: WorksheetView = {
       ...{ answers: {}, marked: null, readAgain: null },
     },
   ],
+  recall: [
+    { sheet: { number: '2.1', title: 'The crimp' }, ask: 'What does a crimp need?', answer: null },
+  ],
   marks: null,
   outOf: 4,
   percent: null,
@@ -45,6 +48,7 @@ const marked: WorksheetView = {
   marks: 1,
   percent: 25,
   passed: false,
+  recall: open.recall.map((one) => ({ ...one, answer: 'Its own tool.' })),
   items: [
     {
       key: 'q1',
@@ -146,4 +150,36 @@ it('lets a trainer look at an open worksheet but not write in it', async () => {
   expect(await screen.findByText('Not handed in yet.')).toBeVisible();
   expect(await answerBox()).toHaveAttribute('readonly');
   expect(screen.queryByRole('button', { name: 'Hand in for marking' })).toBeNull();
+});
+
+const earlierSheets = () => screen.findByRole('region', { name: 'From earlier sheets' });
+
+it('asks about earlier sheets before handing in, without a box or an answer', async () => {
+  renderRoute(page);
+  const section = await earlierSheets();
+  expect(within(section).getByText('What does a crimp need?')).toBeVisible();
+  expect(within(section).getByText(/They carry no marks/)).toBeVisible();
+  expect(within(section).queryByRole('textbox')).toBeNull();
+  expect(within(section).queryByText('Answer')).toBeNull();
+  expect(screen.getByText('0 of 2 parts answered.')).toBeVisible();
+});
+
+it('opens the answer to a question of an earlier sheet once it is handed in', async () => {
+  serve('get', path, marked);
+  const { user } = renderRoute(page);
+  const section = await earlierSheets();
+  expect(within(section).getByText('Its own tool.')).not.toBeVisible();
+  await user.click(within(section).getByText('Answer'));
+  expect(within(section).getByText('Its own tool.')).toBeVisible();
+  expect(within(section).getByRole('link', { name: 'Read 2.1, The crimp' })).toHaveAttribute(
+    'href',
+    '/sheets/2.1',
+  );
+});
+
+it('has no section of earlier sheets where an attempt was kept without them', async () => {
+  serve('get', path, { ...marked, recall: [] });
+  renderRoute(page);
+  expect(await screen.findByText('Total')).toBeVisible();
+  expect(screen.queryByText('From earlier sheets')).toBeNull();
 });

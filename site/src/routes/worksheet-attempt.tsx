@@ -1,4 +1,5 @@
 import '../features/worksheets/worksheets.css';
+import '../features/worksheets/earlier-sheets.css';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useEffect, useState } from 'react';
 import { Link, useParams } from 'react-router-dom';

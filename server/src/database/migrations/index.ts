@@ -10,6 +10,7 @@ import { fadePractice } from './20261201T1700-fade-practice.ts';
 import { choosePracticeProfile } from './20261201T1710-choose-practice-profile.ts';
 import { publishGlossaries } from './20261201T1740-publish-glossaries.ts';
 import { searchContent } from './20261201T1750-search-content.ts';
+import { askRecall } from './20261201T1840-ask-recall.ts';
 
 /** One step of the schema's history. Never edited once it has landed. */
 export interface Migration {
@@ -30,4 +31,5 @@ export const migrations: readonly Migration[] = [
   choosePracticeProfile,
   publishGlossaries,
   searchContent,
+  askRecall,
 ];

@@ -1,5 +1,5 @@
 import { Column, DataType, Model, Table } from 'sequelize-typescript';
-import type { AnswersByItem, KeptItem, MarkedByItem } from '../worksheet-attempt.ts';
+import type { AnswersByItem, KeptItem, KeptRecall, MarkedByItem } from '../worksheet-attempt.ts';
 
 @Table({ tableName: 'worksheet_attempts' })
 export class WorksheetAttemptModel extends Model {
@@ -23,6 +23,9 @@ export class WorksheetAttemptModel extends Model {
 
   @Column({ type: DataType.JSONB })
   declare items: KeptItem[];
+
+  @Column({ type: DataType.JSONB })
+  declare recall: KeptRecall[];
 
   @Column({ type: DataType.JSONB })
   declare answers: AnswersByItem;

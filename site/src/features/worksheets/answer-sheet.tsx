@@ -7,6 +7,7 @@ import { QuestionCard } from '../../ui/question/question-card.tsx';
 import { readUnclear } from '../../ui/question/unclear.ts';
 import { isAnswered, isHalfMatched } from '../../ui/question/views.ts';
 import { type Kept } from './answer-keeper.ts';
+import { EarlierSheets } from './earlier-sheets.tsx';
 import { ItemHead } from './item-head.tsx';
 import { attemptQuery, handIn, type WorksheetView } from './queries.ts';
 import { SavedWords } from './saved-words.tsx';
@@ -47,6 +48,7 @@ export function AnswerSheet({ attempt }: { attempt: WorksheetView }) {
           />
         </section>
       ))}
+      <EarlierSheets attempt={attempt} />
       {!asked && <ProblemCallout error={handingIn.error} />}
       <ProblemCallout error={kept.error} />
       <HandInStrip attempt={attempt} kept={kept} handingIn={handingIn} isAskedBack={!!asked} />

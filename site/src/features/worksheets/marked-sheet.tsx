@@ -2,6 +2,7 @@ import { Link } from 'react-router-dom';
 import { CurveReader } from '../../ui/question/curve-reader.tsx';
 import { MarkedQuestion } from '../../ui/question/marked-question.tsx';
 import { QuestionFacts } from '../../ui/question/question-card.tsx';
+import { EarlierSheets } from './earlier-sheets.tsx';
 import { ItemHead } from './item-head.tsx';
 import { type WorksheetItem, type WorksheetView } from './queries.ts';
 
@@ -26,6 +27,7 @@ export function MarkedSheet({ attempt }: { attempt: WorksheetView }) {
           <i>/{attempt.outOf}</i>
         </p>
       </div>
+      <EarlierSheets attempt={attempt} />
     </>
   );
 }

@@ -1,6 +1,7 @@
 import { CurveReader } from '../../ui/question/curve-reader.tsx';
 import { QuestionCard } from '../../ui/question/question-card.tsx';
 import { Strip } from '../../ui/strip.tsx';
+import { EarlierSheets } from './earlier-sheets.tsx';
 import { ItemHead } from './item-head.tsx';
 import { type WorksheetView } from './queries.ts';
 
@@ -23,6 +24,7 @@ export function ReadOnlySheet({ attempt }: { attempt: WorksheetView }) {
           />
         </section>
       ))}
+      <EarlierSheets attempt={attempt} />
     </>
   );
 }
