@@ -5,6 +5,7 @@ import { cacheOf, type LoaderArgs, requireSession } from '../api/session.ts';
 import { byLetter } from '../features/glossary/by-letter.ts';
 import { LetterSection, letterAnchor } from '../features/glossary/letter-section.tsx';
 import { glossaryQuery } from '../features/glossary/queries.ts';
+import { useNamedPlace } from '../ui/named-place.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { EmptyState } from '../ui/states.tsx';
@@ -19,6 +20,7 @@ export async function loader(args: LoaderArgs) {
 export function Component() {
   const { data: glossary } = useSuspenseQuery(glossaryQuery);
   const { hash } = useLocation();
+  useNamedPlace();
   const letters = byLetter(glossary.terms);
   return (
     <>

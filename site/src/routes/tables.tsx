@@ -4,6 +4,7 @@ import { cacheOf, type LoaderArgs, requireSession } from '../api/session.ts';
 import { tablesQuery, type TablesView } from '../features/tables/queries.ts';
 import { ReferenceTable } from '../features/tables/reference-table.tsx';
 import { SymbolsTable } from '../features/tables/symbols-table.tsx';
+import { useNamedPlace } from '../ui/named-place.ts';
 import { PageTitle } from '../ui/page-title.tsx';
 import { Sheet, SheetHead } from '../ui/sheet.tsx';
 import { FootStrip } from '../ui/thumb-index.tsx';
@@ -16,6 +17,7 @@ export async function loader(args: LoaderArgs) {
 
 export function Component() {
   const { data } = useSuspenseQuery(tablesQuery);
+  useNamedPlace();
   return (
     <>
       <Sheet>
