@@ -1,4 +1,4 @@
-import { buildServer } from './steps/builds.mjs';
+import { buildServer, buildSite } from './steps/builds.mjs';
 import { installDependencies } from './steps/dependencies.mjs';
 import { createLifetime } from './steps/lifetime.mjs';
 import { checkNodeVersion } from './steps/node-version.mjs';
@@ -11,6 +11,7 @@ async function main(lifetime) {
   await progress.step('Node.js', async (report) => checkNodeVersion(report));
   await progress.step('Dependencies', (report) => installDependencies({ report, signal }));
   await progress.step('Server and libraries', () => buildServer(signal));
+  await progress.step('Site', () => buildSite(signal));
   signal.throwIfAborted();
   // What it measures is there only now.
   const { measureAll } = await import('./bench/measure-all.mjs');

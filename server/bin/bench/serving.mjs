@@ -9,6 +9,7 @@ import { createProgress } from '../steps/progress.mjs';
 import { startService } from '../steps/services.mjs';
 import { asking, sendOrFail } from './http-load.mjs';
 import { newAnswer, signInTrainees, startSitting } from './people.mjs';
+import { measurePhonePages } from './phone-pages.mjs';
 import { compare } from './rounds.mjs';
 import { whileRecording } from './statements.mjs';
 
@@ -168,6 +169,14 @@ const rowsOf = (what, recording, { time, processor }) => [
   { what: '  processor time of the Node.js process alone', ...processor },
 ];
 
+async function pagesOf({ server, trainees: [{ headers }] }, { progress, signal }) {
+  let pages;
+  await progress.step('Pages on a phone', async () => {
+    pages = await measurePhonePages({ siteUrl: server.url, headers, signal });
+  });
+  return pages;
+}
+
 /** Reading the course page and saving an answer against a bare handler running the same SQL. */
 export async function measureServing({ lifetime, progress }) {
   const { signal } = lifetime;
@@ -191,8 +200,10 @@ export async function measureServing({ lifetime, progress }) {
   const saved = savingSides(stack);
   const keeping = await measured('Saving an answer', saved, [13, 14]);
   await requireAllKept(stack, saved);
-  return [
+  const pages = await pagesOf(stack, { progress, signal });
+  const rows = [
     ...rowsOf('Reading the course page', course, reading),
     ...rowsOf('Saving an answer', saving, keeping),
   ];
+  return { rows, pages };
 }
