@@ -1,9 +1,10 @@
 import { Button } from '@radix-ui/themes';
 import { useMutation } from '@tanstack/react-query';
-import { lazy, Suspense } from 'react';
+import { lazy, Suspense, use } from 'react';
 import { ProblemCallout } from '../../ui/problem-callout.tsx';
 import { startPractice } from '../../ui/question/practice.ts';
 import { RuledLines } from '../../ui/states.tsx';
+import { LessonContext } from './lesson-context.ts';
 
 // Much code that a reader who only reads never needs.
 const TryAttempt = lazy(() =>
@@ -13,8 +14,11 @@ const TryAttempt = lazy(() =>
 /** One practice question in the middle of the sheet, marked where it stands. */
 export function TryQuestion({ question }: { question: string }) {
   const start = useMutation({ mutationFn: () => startPractice(question) });
+  const { tries } = use(LessonContext);
+  // Two on one sheet need two names.
+  const name = tries.length > 1 ? `Try it, ${tries.indexOf(question) + 1}` : 'Try it';
   return (
-    <section className="try-question" aria-label="Try it">
+    <section className="try-question" aria-label={name}>
       {start.data ? (
         <Suspense fallback={<RuledLines what="the question" />}>
           <TryAttempt

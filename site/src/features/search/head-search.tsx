@@ -21,7 +21,7 @@ export function HeadSearch() {
     return () => document.removeEventListener('keydown', go);
   }, [navigate]);
   return (
-    <div className="head-search" role="search" ref={fieldRef}>
+    <div className="head-search" role={isOnPage ? undefined : 'search'} ref={fieldRef}>
       {!isOnPage && <SearchField />}
       <Link className="head-search-word" to="/search">
         Search
