@@ -11,7 +11,7 @@ export function EarlierSheets({ attempt: { recall, handedInAt } }: { attempt: Wo
       <h2 id="earlier-title">From earlier sheets</h2>
       <p className="muted">
         {handedInAt
-          ? 'Said to yourself, not marked. Say each one again, then open its answer.'
+          ? 'They carry no marks. Say each answer again, then open it.'
           : 'Say the answer to yourself; there is nothing to write. They carry no marks, and the answers are here once you have handed in.'}
       </p>
       <ol>
