@@ -1,7 +1,7 @@
 import '../features/search/search.css';
 import { Button } from '@radix-ui/themes';
 import { useEffect, useRef } from 'react';
-import { Form, useSearchParams } from 'react-router-dom';
+import { Form, useLocation, useSearchParams } from 'react-router-dom';
 import { cacheOf, type LoaderArgs, requireSession } from '../api/session.ts';
 import { longestQuery, searchQuery } from '../features/search/queries.ts';
 import { SearchResults } from '../features/search/search-results.tsx';
@@ -49,10 +49,12 @@ export function Component() {
 
 function SearchForm({ words }: { words: string }) {
   const fieldRef = useRef<HTMLInputElement>(null);
+  const { key, state } = useLocation();
+  const { isTyping } = (state ?? {}) as { isTyping?: boolean };
   useEffect(() => {
-    // With nothing asked there is one thing to do here. Later than the heading takes the focus.
-    if (!words) setTimeout(() => fieldRef.current?.focus());
-  }, [words]);
+    // Whoever came by the key goes on typing. Later than the heading takes the focus.
+    if (isTyping) setTimeout(() => fieldRef.current?.focus());
+  }, [isTyping, key]);
   return (
     <Form className="search-form not-printed" action="/search" role="search">
       <label>

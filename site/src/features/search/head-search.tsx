@@ -15,7 +15,8 @@ export function HeadSearch() {
       const field = fieldRef.current?.querySelector('input');
       // On a narrow page the field is not drawn and cannot take the focus.
       field?.focus();
-      if (!field || document.activeElement !== field) void navigate('/search');
+      if (!field || document.activeElement !== field)
+        void navigate('/search', { state: { isTyping: true } });
     };
     document.addEventListener('keydown', go);
     return () => document.removeEventListener('keydown', go);
