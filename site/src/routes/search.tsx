@@ -49,12 +49,12 @@ export function Component() {
 
 function SearchForm({ words }: { words: string }) {
   const fieldRef = useRef<HTMLInputElement>(null);
-  const { key, state } = useLocation();
-  const { isTyping } = (state ?? {}) as { isTyping?: boolean };
+  const location = useLocation();
+  const isTyping = (location.state as { isTyping?: boolean } | null)?.isTyping ?? false;
   useEffect(() => {
     // Whoever came by the key goes on typing. Later than the heading takes the focus.
     if (isTyping) setTimeout(() => fieldRef.current?.focus());
-  }, [isTyping, key]);
+  }, [isTyping, location.key]);
   return (
     <Form className="search-form not-printed" action="/search" role="search">
       <label>
