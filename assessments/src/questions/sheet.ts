@@ -1,7 +1,14 @@
 import { openSheet } from '../sheets/sheet-file.ts';
-import { type Compiled, FORMAT_VERSION, type Given, type Part, type Step } from './compiled.ts';
+import {
+  type Compiled,
+  FORMAT_VERSION,
+  type Given,
+  type Part,
+  type Slip,
+  type Step,
+} from './compiled.ts';
 import { planCurve } from './curve-plan.ts';
-import { type Expr } from './expression.ts';
+import { type Expr, namesIn } from './expression.ts';
 import { misnamedIn } from './placeholders.ts';
 import { attempt, type Desk, stopIfWrong } from './sheet-desk.ts';
 import { readPart } from './sheet-parts.ts';
@@ -37,6 +44,7 @@ export function parseQuestion(source: string, path: string): CompiledQuestion {
     desk.sheet.curve ? planCurve(desk.sheet.curve, givens) : null,
   );
   checkWords(desk, givens);
+  checkSymbols(desk, givens, printedSums(steps, slips));
   stopIfWrong(desk);
   const question: Compiled = {
     formatVersion: FORMAT_VERSION,
@@ -91,6 +99,24 @@ function checkWords(desk: Desk, givens: readonly Given[]): void {
       const message = `{${name}} names no shown value; use one of ${[...names].join(', ')}.`;
       desk.issues.push({ line, message });
     }
+  }
+}
+
+/** The sums that a worked answer or a marked paper prints. */
+function printedSums(steps: readonly Step[], slips: readonly Slip[]): Expr[] {
+  return [
+    ...steps.flatMap(({ how }) => (how.kind === 'sum' ? [how.expr] : [])),
+    ...slips.flatMap(({ makes }) => makes.map(({ expr }) => expr)),
+  ];
+}
+
+/** A figure that is drawn anew each time can stand in a formula by its symbol only. */
+function checkSymbols(desk: Desk, givens: readonly Given[], printed: readonly Expr[]): void {
+  const named = new Set(printed.flatMap((expr) => [...namesIn(expr)]));
+  for (const { name, symbol, source } of givens) {
+    if (symbol !== null || source.kind === 'value' || !named.has(name)) continue;
+    const message = `given › ${name}: Drawn and used in a sum, it needs a symbol to be printed by.`;
+    desk.issues.push({ line: desk.file.lineOf(['given', name]), message });
   }
 }
 

@@ -1,3 +1,4 @@
+import '../../ui/practice-list.css';
 import { Link } from 'react-router-dom';
 import { sayDate } from '../../ui/dates.ts';
 import { upperFirst } from '../../ui/words.ts';
@@ -14,7 +15,7 @@ export function NextPractice({ next }: { next: SubjectRecords['next'] }) {
   }
   return (
     <>
-      <ol className="next-practice">
+      <ol className="practice-list">
         {next.map(({ slug, title, subject, says, lastDay }) => (
           <li key={slug}>
             <b>

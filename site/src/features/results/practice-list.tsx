@@ -1,3 +1,4 @@
+import '../../ui/practice-list.css';
 import { Link } from 'react-router-dom';
 import { upperFirst } from '../../ui/words.ts';
 import { type ResultView, type SubjectMarks } from './queries.ts';
