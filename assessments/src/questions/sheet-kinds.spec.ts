@@ -101,7 +101,12 @@ describe('a sheet of tables and lists', () => {
     ['pull.gauge', 'pull.gage', 22, 'no column gage; use one of gauge, force'],
     ['pull.gauge', 'gauge', 22, 'a column is written like pull.gauge'],
     ['column: pull.gauge', 'column: pull.gauge, value: 3', 22, 'Give one of'],
-    ['symbol: n, column', 'shown: false, column', 22, 'used in a sum, it needs a symbol to be printed by'],
+    [
+      'symbol: n, column',
+      'shown: false, column',
+      22,
+      'used in a sum, it needs a symbol to be printed by',
+    ],
     // Look-ups.
     ['table: pull,', 'table: push,', 25, 'No table push; use one of pull'],
     ['column: force,', 'column: farce,', 25, 'no column farce; use one of gauge, force'],

@@ -81,7 +81,9 @@ class ChargeLogger {
     const { world, moments } = this;
     const { hour } = this.now.moment;
     while ((moments[this.nextMoment] ?? Infinity) <= hour + SAME_H) this.nextMoment += 1;
-    const stepH = world.run.stepS / 3600;
+    // A lithium battery fills its last per cent within minutes: twice as many steps follow it.
+    const isSwift = world.run.battery.restVolts.length > 2;
+    const stepH = world.run.stepS / (isSwift ? 7200 : 3600);
     const { spanH, isAppointed } = this.nextSpan(stepH);
     const { isChanged, ...next } = stepFrom(world, this.now, spanH);
     this.now = next;
